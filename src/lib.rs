@@ -1,0 +1,4 @@
+//! Longember: a star's whole life and the fate of its planets, at any moment, with sources.
+
+pub mod physics;
+pub mod units;

@@ -1,0 +1,24 @@
+//! Planets: light received, temperature, climate, orbit, tides, escape, size.
+//!
+//! Everything here is a pure function or a walk along the star's own time nodes
+//! ([`StarPoint`]). Quantities with memory (orbit, water, ice) are computed once for a whole
+//! life and read back at any moment, so that a moment never depends on how it was reached.
+
+pub mod bulk;
+pub mod caution;
+pub mod deep_time;
+pub mod greenhouse;
+pub mod habitable_zone;
+pub mod irradiation;
+pub mod orbit;
+pub mod orbit_history;
+pub mod range;
+pub mod star_point;
+pub mod transit;
+
+pub use caution::Caution;
+pub use greenhouse::Greenhouse;
+pub use irradiation::Redistribution;
+pub use orbit_history::{OrbitEnd, OrbitHistory, OrbitInput};
+pub use range::OutOfRange;
+pub use star_point::StarPoint;

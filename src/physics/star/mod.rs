@@ -1,0 +1,1 @@
+//! The star's life.

@@ -1,0 +1,189 @@
+//! What people type into a field: a number, perhaps with a unit or a word.
+
+use super::constants::{
+    AU_M, EARTH_MASS_KG, EARTH_MASSES_PER_SOLAR_MASS, EARTH_RADIUS_M, JUPITER_MASS_KG, JUPITER_RADIUS_M, LIGHT_YEAR_M,
+    SOLAR_MASS_KG, SOLAR_RADIUS_M,
+};
+use super::number_text::parse_number;
+use super::time_words::parse_span;
+use thiserror::Error;
+
+/// What a field holds, which decides the units it understands and the unit it is kept in.
+#[derive(Clone, Copy, Debug, PartialEq, Eq, Hash)]
+pub enum EntryKind {
+    /// A stellar mass, kept in solar masses.
+    MassMsun,
+    /// A planet's mass, kept in Earth masses.
+    MassMearth,
+    /// A distance, kept in au.
+    DistanceAu,
+    /// A planet's radius, kept in Earth radii.
+    RadiusRearth,
+    /// A difference of temperature, kept in kelvin.
+    TemperatureDifferenceK,
+    /// A span of time, kept in years.
+    SpanYr,
+    /// A pressure, kept in bar.
+    PressureBar,
+    /// An angle, kept in degrees.
+    AngleDeg,
+    /// A logarithmic abundance, kept in dex.
+    AbundanceDex,
+    /// A plain number; a per cent sign is understood.
+    Plain,
+}
+
+impl EntryKind {
+    /// The symbol of the unit the value is kept in; empty for a plain number.
+    #[must_use]
+    pub fn symbol(self) -> &'static str {
+        match self {
+            Self::MassMsun => "M☉",
+            Self::MassMearth => "M⊕",
+            Self::DistanceAu => "au",
+            Self::RadiusRearth => "R⊕",
+            Self::TemperatureDifferenceK => "K",
+            Self::SpanYr => "yr",
+            Self::PressureBar => "bar",
+            Self::AngleDeg => "°",
+            Self::AbundanceDex => "dex",
+            Self::Plain => "",
+        }
+    }
+
+    /// Unit spellings and what one of them is in the kept unit.
+    fn units(self) -> &'static [(&'static str, f64)] {
+        const MASS_MSUN: &[(&str, f64)] = &[
+            ("Msun", 1.0),
+            ("M☉", 1.0),
+            ("M⊙", 1.0),
+            ("solar masses", 1.0),
+            ("kg", 1.0 / SOLAR_MASS_KG),
+            ("Mjup", JUPITER_MASS_KG / SOLAR_MASS_KG),
+        ];
+        const MASS_MEARTH: &[(&str, f64)] = &[
+            ("Mearth", 1.0),
+            ("M⊕", 1.0),
+            ("earth masses", 1.0),
+            ("kg", 1.0 / EARTH_MASS_KG),
+            ("Mjup", JUPITER_MASS_KG / EARTH_MASS_KG),
+            ("MJ", JUPITER_MASS_KG / EARTH_MASS_KG),
+            ("Msun", EARTH_MASSES_PER_SOLAR_MASS),
+        ];
+        const DISTANCE_AU: &[(&str, f64)] = &[
+            ("au", 1.0),
+            ("million km", 1e9 / AU_M),
+            ("km", 1e3 / AU_M),
+            ("Rsun", SOLAR_RADIUS_M / AU_M),
+            ("R☉", SOLAR_RADIUS_M / AU_M),
+            ("ly", LIGHT_YEAR_M / AU_M),
+            ("m", 1.0 / AU_M),
+        ];
+        const RADIUS_REARTH: &[(&str, f64)] = &[
+            ("Rearth", 1.0),
+            ("R⊕", 1.0),
+            ("earth radii", 1.0),
+            ("km", 1e3 / EARTH_RADIUS_M),
+            ("Rjup", JUPITER_RADIUS_M / EARTH_RADIUS_M),
+            ("RJ", JUPITER_RADIUS_M / EARTH_RADIUS_M),
+            ("m", 1.0 / EARTH_RADIUS_M),
+        ];
+        const PRESSURE_BAR: &[(&str, f64)] = &[("mbar", 1e-3), ("bar", 1.0), ("hPa", 1e-3), ("kPa", 1e-2), ("Pa", 1e-5), ("atm", 1.01325)];
+        match self {
+            Self::MassMsun => MASS_MSUN,
+            Self::MassMearth => MASS_MEARTH,
+            Self::DistanceAu => DISTANCE_AU,
+            Self::RadiusRearth => RADIUS_REARTH,
+            Self::TemperatureDifferenceK => &[("°C", 1.0), ("K", 1.0), ("C", 1.0)],
+            Self::SpanYr => &[],
+            Self::PressureBar => PRESSURE_BAR,
+            Self::AngleDeg => &[("degrees", 1.0), ("deg", 1.0), ("°", 1.0)],
+            Self::AbundanceDex => &[("dex", 1.0)],
+            Self::Plain => &[("%", 0.01)],
+        }
+    }
+}
+
+/// Why a typed text could not become a value.
+#[derive(Clone, Debug, Error, PartialEq, Eq)]
+pub enum EntryProblem {
+    /// Nothing was typed.
+    #[error("type a number")]
+    Empty,
+    /// No number with a unit known here.
+    #[error("\"{text}\" is not understood here; write a number{examples}")]
+    NotUnderstood {
+        /// The text as it was typed.
+        text: String,
+        /// The units that are understood, as a clause.
+        examples: String,
+    },
+}
+
+/// Reads a typed value in the unit its kind is kept in. A bare number is in that unit already.
+///
+/// # Errors
+/// [`EntryProblem`] with the units that would be understood.
+///
+/// # Example
+/// ```
+/// use longember::units::entry::{parse_entry, EntryKind};
+/// assert_eq!(parse_entry("0.12 Msun", EntryKind::MassMsun), Ok(0.12));
+/// assert!((parse_entry("2.4e29 kg", EntryKind::MassMsun).unwrap() - 0.1207).abs() < 1e-4);
+/// ```
+pub fn parse_entry(text: &str, kind: EntryKind) -> Result<f64, EntryProblem> {
+    let trimmed = text.trim();
+    if trimmed.is_empty() {
+        return Err(EntryProblem::Empty);
+    }
+    if kind == EntryKind::SpanYr {
+        return parse_span(trimmed).map_err(|_| not_understood(trimmed, kind));
+    }
+    if let Some(value) = parse_number(trimmed) {
+        return Ok(value);
+    }
+    for (unit, factor) in kind.units() {
+        let cut = trimmed.len().saturating_sub(unit.len());
+        if trimmed.is_char_boundary(cut) && trimmed[cut..].eq_ignore_ascii_case(unit) {
+            if let Some(value) = parse_number(&trimmed[..cut]).map(|value| value * factor).filter(|value| value.is_finite()) {
+                return Ok(value);
+            }
+        }
+    }
+    Err(not_understood(trimmed, kind))
+}
+
+fn not_understood(text: &str, kind: EntryKind) -> EntryProblem {
+    let known: Vec<&str> = match kind {
+        EntryKind::SpanYr => vec!["Gyr", "trillion years", "yr"],
+        other => other.units().iter().map(|(unit, _)| *unit).take(4).collect(),
+    };
+    let examples = if known.is_empty() { String::new() } else { format!(", optionally with {}", known.join(", ")) };
+    EntryProblem::NotUnderstood { text: text.chars().take(60).collect(), examples }
+}
+
+#[cfg(test)]
+mod tests {
+    use super::*;
+
+    #[test]
+    fn units_convert_to_the_kept_one() {
+        let close = |text: &str, kind, expected: f64| {
+            let value = parse_entry(text, kind).expect(text);
+            assert!((value / expected - 1.0).abs() < 1e-4, "{text}: {value}");
+        };
+        close("149597870.7 km", EntryKind::DistanceAu, 1.0);
+        close("1 Mjup", EntryKind::MassMearth, 317.83);
+        close("6378.1 km", EntryKind::RadiusRearth, 1.0);
+        close("30 %", EntryKind::Plain, 0.3);
+        close("400 mbar", EntryKind::PressureBar, 0.4);
+        close("7.6 Gyr", EntryKind::SpanYr, 7.6e9);
+    }
+
+    #[test]
+    fn a_foreign_unit_is_refused_and_the_known_ones_are_named() {
+        let problem = parse_entry("3 parsecs", EntryKind::MassMsun).expect_err("a distance");
+        assert!(problem.to_string().contains("Msun"), "{problem}");
+        assert_eq!(parse_entry("  ", EntryKind::Plain), Err(EntryProblem::Empty));
+    }
+}
