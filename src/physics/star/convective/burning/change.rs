@@ -65,7 +65,8 @@ mod tests {
         let start = Composition { hydrogen: 0.7, helium3: 0.0, metals: 0.0153 };
         let rates = [1e-18, 1e-10, 0.0, 0.0];
         let after = burn(&start, &rates, 1e17);
-        let balance = (after.hydrogen / HYDROGEN_MASS) * (rates[0] / rates[1]).sqrt() * HELIUM3_MASS;
+        // Made: y₁² r_pp / 2. Lost, two at a time: y₃² r₃₃.
+        let balance = (after.hydrogen / HYDROGEN_MASS) * (0.5_f64 * rates[0] / rates[1]).sqrt() * HELIUM3_MASS;
         assert!((after.helium3 / balance - 1.0).abs() < 1e-2, "{after:?} {balance}");
     }
 
