@@ -80,7 +80,7 @@ pub fn rocky_radius_rearth(mass_mearth: f64, core_mass_fraction: f64) -> Result<
         radius_rearth: (1.07 - 0.21 * cmf) * m.powf(1.0 / 3.7),
         scatter_fraction: 0.04,
         model: RadiusModel::Rocky,
-        extrapolated: m > 8.0 || m < 0.1 || cmf > 0.4,
+        extrapolated: !(0.1..=8.0).contains(&m) || cmf > 0.4,
     })
 }
 
@@ -171,7 +171,7 @@ pub fn density_kg_m3(mass_mearth: f64, radius_rearth: f64) -> Result<f64, OutOfR
     Ok(positive("mass_mearth", mass_mearth)? * EARTH_MASS_KG / (4.0 / 3.0 * PI * r_m * r_m * r_m))
 }
 
-/// How firmly gravity holds a gas against its heat, dimensionless: λ = G m μ m_H/(k T R).
+/// How firmly gravity holds a gas against its heat, dimensionless: `λ = G m μ m_H/(k T R)`.
 ///
 /// Below about 3 the gas flows off, above about 15 it stays (recalled).
 ///

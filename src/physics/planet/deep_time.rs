@@ -22,7 +22,7 @@ pub struct InnerHeat {
     /// Heat flow through the surface at an age of 4.57 Gyr, W m⁻². The Earth: 0.09.
     pub heat_flow_w_m2: f64,
     /// Time in which the heat flow falls by e, yr. Default 5 Gyr: our own choice, of the order of the
-    /// half-lives of uranium and thorium.
+    /// half-lives of uranium and thorium. At least 0.5 Gyr, so that the heat at birth stays finite.
     pub decay_time_yr: f64,
     /// Age of the universe when the star was born, yr. Sets the cosmic background.
     pub birth_cosmic_age_yr: f64,
@@ -41,7 +41,7 @@ impl InnerHeat {
     /// [`OutOfRange`] naming the first field that cannot be used.
     pub fn check(&self) -> Result<(), OutOfRange> {
         within("heat_flow_w_m2", self.heat_flow_w_m2, 0.0, 1e4, "0 to 10 000 W/m2")?;
-        within("decay_time_yr", self.decay_time_yr, 1e6, 1e15, "1e6 to 1e15 yr")?;
+        within("decay_time_yr", self.decay_time_yr, 5e8, 1e15, "5e8 to 1e15 yr")?;
         within("birth_cosmic_age_yr", self.birth_cosmic_age_yr, 1e8, 1e15, "1e8 to 1e15 yr")?;
         Ok(())
     }
@@ -53,7 +53,7 @@ impl InnerHeat {
     }
 
     /// The temperature of a surface warmed by the star, from inside and by the sky, K:
-    /// T⁴ = T_star⁴ + F/σ + T_CMB⁴.
+    /// `T⁴ = T_star⁴ + F/σ + T_CMB⁴`.
     ///
     /// # Source
     /// Energy balance; [`background_temperature_k`] for the sky.
@@ -77,8 +77,8 @@ impl InnerHeat {
 /// The temperature of the cosmic microwave background at an age of the universe, K.
 ///
 /// T = 2.7255 K / a(t) with the exact scale factor of a flat universe of matter and dark energy,
-/// a(t) = (Ω_m/Ω_Λ)^⅓ sinh^⅔(t/t_Λ), t_Λ = 2/(3 H₀ √Ω_Λ). In the far future it falls by e every
-/// 17.5 Gyr and ends at the temperature of the cosmic horizon, ħ H_Λ/(2π k) = 2.2 × 10⁻³⁰ K.
+/// `a(t) = (Ω_m/Ω_Λ)^⅓ sinh^⅔(t/t_Λ)`, `t_Λ = 2/(3 H₀ √Ω_Λ)`. In the far future it falls by e every
+/// 17.5 Gyr and ends at the temperature of the cosmic horizon, `ħ H_Λ/(2π k)` = 2.2 × 10⁻³⁰ K.
 ///
 /// # Source
 /// Planck Collaboration 2020, A&A 641, A6 (H₀, Ω); Fixsen 2009 (2.7255 K); Gibbons & Hawking 1977 (horizon).

@@ -13,7 +13,7 @@ pub enum Greenhouse {
         /// Surface minus equilibrium temperature, K. About 34 for the Earth, 510 for Venus, 5 for Mars.
         increment_k: f64,
     },
-    /// A grey atmosphere of fixed infrared optical depth: T⁴ = T_eq⁴ (1 + 3τ/4).
+    /// A grey atmosphere of fixed infrared optical depth: `T⁴ = T_eq⁴ (1 + 3τ/4)`.
     Grey {
         /// Infrared optical depth of the air column, dimensionless. About 0.87 for the Earth, 148 for Venus.
         optical_depth: f64,
@@ -76,7 +76,7 @@ impl Greenhouse {
     }
 }
 
-/// The optical depth that makes a grey atmosphere of two known temperatures: τ = 4/3 [(T_s/T_eq)⁴ − 1].
+/// The optical depth that makes a grey atmosphere of two known temperatures: `τ = 4/3 ((T_s/T_eq)⁴ − 1)`.
 ///
 /// # Source
 /// Inverse of the grey form of [`Greenhouse::surface_temperature_k`].
@@ -84,7 +84,8 @@ impl Greenhouse {
 /// [`OutOfRange`] when the surface is colder than the equilibrium temperature or that is zero.
 pub fn grey_optical_depth(surface_temperature_k: f64, equilibrium_temperature_k: f64) -> Result<f64, OutOfRange> {
     let t_eq = within("equilibrium_temperature_k", equilibrium_temperature_k, 1e-6, 1e6, "1e-6 to 1e6 K")?;
-    let t_s = within("surface_temperature_k", surface_temperature_k, t_eq, 1e7, "at least the equilibrium temperature")?;
+    let t_s =
+        within("surface_temperature_k", surface_temperature_k, t_eq, 1e7, "at least the equilibrium temperature")?;
     Ok(4.0 / 3.0 * ((t_s / t_eq).powi(4) - 1.0))
 }
 
@@ -103,7 +104,8 @@ mod tests {
 
     #[test]
     fn a_large_cooling_stops_at_absolute_zero() {
-        let surface_k = Greenhouse::FixedIncrement { increment_k: -50.0 }.surface_temperature_k(20.0).expect("in range");
+        let surface_k =
+            Greenhouse::FixedIncrement { increment_k: -50.0 }.surface_temperature_k(20.0).expect("in range");
         assert!(surface_k.abs() < 1e-12);
         assert!(Greenhouse::Grey { optical_depth: f64::NAN }.surface_temperature_k(254.0).is_err());
     }

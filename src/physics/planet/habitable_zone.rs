@@ -51,7 +51,7 @@ impl ZoneLimit {
     }
 }
 
-/// The five coefficients of S_eff = s + a t + b t² + c t³ + d t⁴, t = T_eff − 5780 K.
+/// The five coefficients of `S_eff = s + a t + b t² + c t³ + d t⁴`, `t = T_eff − 5780 K`.
 type Coefficients = [f64; 5];
 
 // Kopparapu et al. 2014, ApJL 787, L29, table 1 (the runaway rows are for 1, 5 and 0.1 Earth masses).
@@ -85,7 +85,7 @@ impl LimitFlux {
 
 /// The starlight at a limit of the habitable zone for a star's temperature and a planet's mass.
 ///
-/// S_eff = s + a t + b t² + c t³ + d t⁴, t = T_eff − 5780 K. The mass matters to the runaway limit only,
+/// `S_eff = s + a t + b t² + c t³ + d t⁴`, `t = T_eff − 5780 K`. The mass matters to the runaway limit only,
 /// which is interpolated linearly in log M between 0.1, 1 and 5 M⊕ and held outside (our own choice).
 ///
 /// # Source

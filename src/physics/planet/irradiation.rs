@@ -175,7 +175,7 @@ pub struct DayNight {
 
 /// Day and night temperatures for a given strength of heat transport, K.
 ///
-/// T_day⁴ = T₀⁴ (1 − A)(2/3 − 5E/12), T_night⁴ = T₀⁴ (1 − A) E/4, T₀⁴ = S/σ, E from 0 (none) to 1 (complete).
+/// `T_day⁴ = T₀⁴ (1 − A)(2/3 − 5E/12)`, `T_night⁴ = T₀⁴ (1 − A) E/4`, `T₀⁴ = S/σ`, E from 0 (none) to 1 (complete).
 ///
 /// # Source
 /// Cowan & Agol 2011, `ApJ` 729, 54, equations 4 and 5 (recalled).

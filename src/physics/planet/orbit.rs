@@ -1,6 +1,6 @@
 //! Two-body orbits: period, reach, spheres of influence, slow and sudden loss of the star's mass.
 
-use super::range::{OutOfRange, closed_eccentricity, non_negative, positive};
+use super::range::{LARGEST_ECCENTRICITY, OutOfRange, closed_eccentricity, non_negative, positive};
 use crate::units::constants::{AU_M, EARTH_MASSES_PER_SOLAR_MASS, SOLAR_GM_M3_S2, YEAR_S};
 use std::f64::consts::TAU;
 
@@ -43,11 +43,7 @@ pub fn period_yr(semi_major_axis_au: f64, star_mass_msun: f64, planet_mass_meart
 /// Mass loss slow against the period, see [`adiabaticity_index`].
 /// # Errors
 /// [`OutOfRange`] for values that are not positive.
-pub fn widened_au(
-    semi_major_axis_au: f64,
-    mass_before_msun: f64,
-    mass_after_msun: f64,
-) -> Result<f64, OutOfRange> {
+pub fn widened_au(semi_major_axis_au: f64, mass_before_msun: f64, mass_after_msun: f64) -> Result<f64, OutOfRange> {
     Ok(positive("semi_major_axis_au", semi_major_axis_au)? * positive("mass_before_msun", mass_before_msun)?
         / positive("mass_after_msun", mass_after_msun)?)
 }
@@ -83,7 +79,12 @@ pub fn adiabaticity_index(
 ) -> Result<f64, OutOfRange> {
     let rate = non_negative("mass_loss_msun_yr", mass_loss_msun_yr)?;
     let a = positive("semi_major_axis_au", semi_major_axis_au)?;
-    Ok(rate * (a / positive("star_mass_msun", star_mass_msun)?).powf(1.5) / TAU)
+    Ok(mass_loss_index(rate, a, positive("star_mass_msun", star_mass_msun)?))
+}
+
+/// [`adiabaticity_index`] for checked input.
+pub(crate) fn mass_loss_index(mass_loss_msun_yr: f64, semi_major_axis_au: f64, star_mass_msun: f64) -> f64 {
+    mass_loss_msun_yr * (semi_major_axis_au / star_mass_msun).powf(1.5) / TAU
 }
 
 /// The radius of the sphere in which a planet rules over its star, au: a (1 − e) (m/3M)^⅓.
@@ -143,6 +144,17 @@ pub enum Cohesion {
     Rigid,
 }
 
+impl Cohesion {
+    /// The factor k of the Roche limit, dimensionless.
+    #[must_use]
+    pub fn factor(self) -> f64 {
+        match self {
+            Self::Fluid => 2.44,
+            Self::Rigid => 1.26,
+        }
+    }
+}
+
 /// The distance inside which the star tears a planet apart, solar radii: d = k R (ρ★/ρ)^⅓, k = 2.44 or 1.26.
 ///
 /// Below one stellar radius the planet reaches the star whole.
@@ -157,12 +169,9 @@ pub fn roche_limit_rsun(
     planet_density_kg_m3: f64,
     cohesion: Cohesion,
 ) -> Result<f64, OutOfRange> {
-    let factor = match cohesion {
-        Cohesion::Fluid => 2.44,
-        Cohesion::Rigid => 1.26,
-    };
-    let ratio = positive("star_density_kg_m3", star_density_kg_m3)?
-        / positive("planet_density_kg_m3", planet_density_kg_m3)?;
+    let factor = cohesion.factor();
+    let ratio =
+        positive("star_density_kg_m3", star_density_kg_m3)? / positive("planet_density_kg_m3", planet_density_kg_m3)?;
     Ok(factor * positive("star_radius_rsun", star_radius_rsun)? * ratio.cbrt())
 }
 
@@ -182,7 +191,7 @@ pub enum AfterSuddenLoss {
 
 /// The orbit after the star lost mass within much less than a period (a supernova).
 ///
-/// With β = M_before/M_after: 1/a' = (2 − β)/a and 1 − e'² = β (2 − β)(1 − e²), taken at the distance r = a,
+/// With β = `M_before/M_after`: 1/a' = (2 − β)/a and 1 − e'² = β (2 − β)(1 − e²), taken at the distance r = a,
 /// where an orbit spends its mean time; a circular orbit has no other distance. Bound only while β < 2.
 ///
 /// # Source
@@ -201,16 +210,22 @@ pub fn after_sudden_loss(
     let e = closed_eccentricity(eccentricity)?;
     let before = positive("mass_before_msun", mass_before_msun)?;
     let after = non_negative("mass_after_msun", mass_after_msun)?;
+    Ok(sudden_loss(a, e, before, after))
+}
+
+/// [`after_sudden_loss`] for checked input.
+pub(crate) fn sudden_loss(a: f64, e: f64, before: f64, after: f64) -> AfterSuddenLoss {
     if after <= 0.5 * before {
-        return Ok(AfterSuddenLoss::Unbound);
+        return AfterSuddenLoss::Unbound;
     }
     let beta = (before / after).max(1.0);
     let new_a = a / (2.0 - beta);
     let new_e = (1.0 - beta * (2.0 - beta) * (1.0 - e * e)).max(0.0).sqrt();
-    if closed_eccentricity(new_e).is_err() || !new_a.is_finite() {
-        return Ok(AfterSuddenLoss::Unbound);
+    // So near to a parabola the orbit reaches far beyond any neighbour star: it counts as free.
+    if new_e > LARGEST_ECCENTRICITY || !new_a.is_finite() {
+        return AfterSuddenLoss::Unbound;
     }
-    Ok(AfterSuddenLoss::Bound { semi_major_axis_au: new_a, eccentricity: new_e })
+    AfterSuddenLoss::Bound { semi_major_axis_au: new_a, eccentricity: new_e }
 }
 
 #[cfg(test)]

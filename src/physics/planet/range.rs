@@ -4,10 +4,10 @@ use thiserror::Error;
 
 /// A value that a relation cannot be asked about: what, how much, what would be allowed.
 #[derive(Clone, Copy, Debug, Error, PartialEq)]
-#[error("{quantity} is {value}, allowed {allowed}")]
+#[error("{what} is {value}, allowed {allowed}")]
 pub struct OutOfRange {
     /// Name of the quantity with its unit suffix, such as `semi_major_axis_au`.
-    pub quantity: &'static str,
+    pub what: &'static str,
     /// The value that was given, in the unit the name ends in.
     pub value: f64,
     /// The allowed range in words.
@@ -20,19 +20,19 @@ const SMALLEST: f64 = 1e-30;
 const LARGEST: f64 = 1e30;
 
 /// Passes a positive finite value on.
-pub(crate) fn positive(quantity: &'static str, value: f64) -> Result<f64, OutOfRange> {
-    within(quantity, value, SMALLEST, LARGEST, "more than 0 (1e-30 to 1e30)")
+pub(crate) fn positive(what: &'static str, value: f64) -> Result<f64, OutOfRange> {
+    within(what, value, SMALLEST, LARGEST, "more than 0 (1e-30 to 1e30)")
 }
 
 /// Passes a finite value of zero or more on; what is below 1e-30 counts as zero.
-pub(crate) fn non_negative(quantity: &'static str, value: f64) -> Result<f64, OutOfRange> {
-    let kept = within(quantity, value, 0.0, LARGEST, "0 to 1e30")?;
+pub(crate) fn non_negative(what: &'static str, value: f64) -> Result<f64, OutOfRange> {
+    let kept = within(what, value, 0.0, LARGEST, "0 to 1e30")?;
     Ok(if kept < SMALLEST { 0.0 } else { kept })
 }
 
 /// Passes a share from 0 to 1 on.
-pub(crate) fn fraction(quantity: &'static str, value: f64) -> Result<f64, OutOfRange> {
-    within(quantity, value, 0.0, 1.0, "0 to 1")
+pub(crate) fn fraction(what: &'static str, value: f64) -> Result<f64, OutOfRange> {
+    within(what, value, 0.0, 1.0, "0 to 1")
 }
 
 /// Passes the eccentricity of a closed orbit on.
@@ -45,13 +45,13 @@ pub(crate) const LARGEST_ECCENTRICITY: f64 = 0.999;
 
 /// Passes a value on when it lies in the closed range; NaN never does.
 pub(crate) fn within(
-    quantity: &'static str,
+    what: &'static str,
     value: f64,
     lowest: f64,
     highest: f64,
     allowed: &'static str,
 ) -> Result<f64, OutOfRange> {
-    if value >= lowest && value <= highest { Ok(value) } else { Err(OutOfRange { quantity, value, allowed }) }
+    if value >= lowest && value <= highest { Ok(value) } else { Err(OutOfRange { what, value, allowed }) }
 }
 
 #[cfg(test)]

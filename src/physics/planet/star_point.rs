@@ -6,7 +6,6 @@ use super::range::{OutOfRange, non_negative, positive};
 ///
 /// Two nodes may share an age: the values before and after a sudden change.
 #[derive(Clone, Copy, Debug, PartialEq)]
-#[expect(clippy::struct_excessive_bools, reason = "three independent facts about one moment of a star")]
 pub struct StarPoint {
     /// Age since the zero-age main sequence, yr; negative while the star still contracts.
     pub age_yr: f64,
@@ -35,12 +34,12 @@ pub struct StarPoint {
 /// [`OutOfRange`] naming the first quantity that cannot be used.
 pub fn check_track(track: &[StarPoint]) -> Result<(), OutOfRange> {
     if track.is_empty() {
-        return Err(OutOfRange { quantity: "star_points", value: 0.0, allowed: "at least one" });
+        return Err(OutOfRange { what: "star_points", value: 0.0, allowed: "at least one" });
     }
     let mut previous_yr = f64::NEG_INFINITY;
     for point in track {
         if !point.age_yr.is_finite() || point.age_yr < previous_yr {
-            return Err(OutOfRange { quantity: "age_yr", value: point.age_yr, allowed: "finite and in rising order" });
+            return Err(OutOfRange { what: "age_yr", value: point.age_yr, allowed: "finite and in rising order" });
         }
         previous_yr = point.age_yr;
         non_negative("mass_msun", point.mass_msun)?;

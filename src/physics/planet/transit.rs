@@ -4,7 +4,7 @@ use super::range::{OutOfRange, positive};
 use crate::units::constants::{AU_M, EARTH_RADIUS_M, SOLAR_RADIUS_AU, SOLAR_RADIUS_M, YEAR_S};
 use std::f64::consts::PI;
 
-/// The share of starlight a planet blocks in transit, dimensionless: (R_p/R★)², at most 1.
+/// The share of starlight a planet blocks in transit, dimensionless: `(R_p/R★)²`, at most 1.
 ///
 /// # Source
 /// Geometry; limb darkening ignored.
@@ -33,11 +33,7 @@ pub fn transit_probability(star_radius_rsun: f64, semi_major_axis_au: f64) -> Re
 /// Geometry; circular orbit, planet small against the star, star small against the orbit.
 /// # Errors
 /// [`OutOfRange`] for values that are not positive or an orbit inside the star.
-pub fn transit_duration_s(
-    period_yr: f64,
-    star_radius_rsun: f64,
-    semi_major_axis_au: f64,
-) -> Result<f64, OutOfRange> {
+pub fn transit_duration_s(period_yr: f64, star_radius_rsun: f64, semi_major_axis_au: f64) -> Result<f64, OutOfRange> {
     let ratio = transit_probability(star_radius_rsun, semi_major_axis_au)?;
     Ok(positive("period_yr", period_yr)? * YEAR_S * ratio / PI)
 }
