@@ -1,0 +1,194 @@
+//! The whole past and future of a system, computed once, read at any moment.
+
+use super::events::{self, Event};
+use super::moment::{Moment, PlanetMoment, StarMoment};
+use super::notes::{self, Note};
+use super::planet_past::PlanetPast;
+use super::specification::{Body, System, SystemProblem};
+use crate::physics::light::colour_words::MINIMUM_GLOW_K;
+use crate::physics::planet::StarPoint;
+use crate::physics::star::{END_YR, PhaseSpan, StarError, StarInput, StarState, Track};
+use thiserror::Error;
+
+/// Why a system has no history.
+#[derive(Clone, Debug, Error, PartialEq)]
+pub enum HistoryError {
+    /// Inputs outside their permitted ranges.
+    #[error("{}", sentence(.0))]
+    Inputs(Vec<SystemProblem>),
+    /// The star is outside what can be computed.
+    #[error("{0}")]
+    Star(#[from] StarError),
+}
+
+fn sentence(problems: &[SystemProblem]) -> String {
+    let lines: Vec<String> = problems
+        .iter()
+        .map(|problem| match problem.body {
+            Body::Star => format!("star: {}", problem.fault),
+            Body::Planet(index) => format!("planet {}: {}", index + 1, problem.fault),
+        })
+        .collect();
+    lines.join("; ")
+}
+
+/// A system with everything that ever happens to it, from arrival on the main sequence to 10¹⁴ yr.
+#[derive(Debug)]
+pub struct History {
+    system: System,
+    track: Track,
+    planets: Vec<PlanetPast>,
+    events: Vec<Event>,
+    shown_until_yr: f64,
+}
+
+impl History {
+    /// Computes the life of the star and carries the planets along.
+    ///
+    /// # Errors
+    /// [`HistoryError`] when an input is outside its permitted range.
+    pub fn compute(system: System) -> Result<Self, HistoryError> {
+        let problems = system.problems();
+        if !problems.is_empty() {
+            // A star outside the computed masses gets the sentence that says why; ranges alone do not.
+            Track::check(star_input(&system))?;
+            return Err(HistoryError::Inputs(problems));
+        }
+        let track = Track::compute(star_input(&system))?;
+        let points = star_points(&track);
+        let planets: Vec<PlanetPast> =
+            system.planets.iter().map(|planet| PlanetPast::walk(planet.clone(), &points)).collect();
+        let shown_until_yr = shown_until_yr(&track);
+        let mut history = Self { system, track, planets, events: Vec::new(), shown_until_yr };
+        history.events = events::of(&history);
+        Ok(history)
+    }
+
+    /// The inputs this history was computed from.
+    #[must_use]
+    pub fn system(&self) -> &System {
+        &self.system
+    }
+
+    /// The star's life.
+    #[must_use]
+    pub fn track(&self) -> &Track {
+        &self.track
+    }
+
+    /// The planets, in the order of the system.
+    #[must_use]
+    pub fn planets(&self) -> &[PlanetPast] {
+        &self.planets
+    }
+
+    /// Dated events of star and planets, oldest first.
+    #[must_use]
+    pub fn events(&self) -> &[Event] {
+        &self.events
+    }
+
+    /// The phases of the star's life, in order.
+    #[must_use]
+    pub fn spans(&self) -> &[PhaseSpan] {
+        self.track.spans()
+    }
+
+    /// The age up to which a whole life is shown, yr: a little beyond the last visible glow of a white
+    /// dwarf, or three times the age at which a neutron star or black hole was left. Any age up to
+    /// [`END_YR`] can still be asked for.
+    #[must_use]
+    pub fn shown_until_yr(&self) -> f64 {
+        self.shown_until_yr
+    }
+
+    /// The star alone at an age, yr (held within 0 to [`END_YR`]).
+    #[must_use]
+    pub fn star_at(&self, age_yr: f64) -> StarState {
+        self.track.state_at(age_yr)
+    }
+
+    /// Everything at one moment, yr (held within 0 to [`END_YR`]).
+    #[must_use]
+    pub fn moment(&self, age_yr: f64) -> Moment {
+        let time_yr = held(age_yr);
+        let state = self.track.state_at(time_yr);
+        let mut notes: Vec<Note> = notes::of_star(&self.track, time_yr, &state);
+        let mut planets = Vec::with_capacity(self.planets.len());
+        for (index, past) in self.planets.iter().enumerate() {
+            let planet = past.moment(time_yr, &state);
+            notes.extend(notes::of_planet(index, past.specification(), &planet, &state));
+            planets.push(planet);
+        }
+        Moment { time_yr, star: StarMoment::new(&state), planets, notes }
+    }
+
+    /// One planet at one moment.
+    #[must_use]
+    pub fn planet_at(&self, index: usize, age_yr: f64) -> Option<PlanetMoment> {
+        let time_yr = held(age_yr);
+        self.planets.get(index).map(|past| past.moment(time_yr, &self.track.state_at(time_yr)))
+    }
+}
+
+/// Holds an age within what is computed; what is no number counts as birth.
+#[must_use]
+pub fn held(age_yr: f64) -> f64 {
+    if age_yr.is_nan() { 0.0 } else { age_yr.clamp(0.0, END_YR) }
+}
+
+fn star_input(system: &System) -> StarInput {
+    StarInput { mass_msun: system.star.mass_msun, metallicity_dex: system.star.metallicity_dex }
+}
+
+/// The star's nodes as planets feel them.
+fn star_points(track: &Track) -> Vec<StarPoint> {
+    let mut points: Vec<StarPoint> = Vec::with_capacity(track.node_ages_yr().len());
+    let mut was_remnant = false;
+    for &age_yr in track.node_ages_yr() {
+        let state = track.state_at(age_yr);
+        let is_remnant = state.phase.is_remnant();
+        let collapses = is_remnant && !was_remnant && !state.phase.is_white_dwarf();
+        if collapses {
+            // The last moment before the collapse, so that the mass is lost at once and not over the last step.
+            let before = track.state_at(age_yr.next_down());
+            points.push(star_point(&before, false));
+        }
+        points.push(star_point(&state, collapses));
+        was_remnant = is_remnant;
+    }
+    points.sort_by(|first, second| first.age_yr.total_cmp(&second.age_yr));
+    points
+}
+
+fn star_point(state: &StarState, lost_mass_suddenly: bool) -> StarPoint {
+    StarPoint {
+        age_yr: state.age_yr,
+        mass_msun: state.mass_msun,
+        luminosity_lsun: state.luminosity_lsun,
+        radius_rsun: state.radius_rsun,
+        effective_temperature_k: state.effective_temperature_k,
+        envelope_mass_msun: if state.phase.is_giant() { (state.mass_msun - state.core_mass_msun).max(0.0) } else { 0.0 },
+        is_giant: state.phase.is_giant(),
+        is_remnant: state.phase.is_remnant(),
+        lost_mass_suddenly,
+    }
+}
+
+fn shown_until_yr(track: &Track) -> f64 {
+    let Some(last) = track.spans().last() else { return END_YR };
+    if !last.phase.is_white_dwarf() {
+        return if last.phase.is_remnant() { (3.0 * last.from_yr).min(END_YR) } else { END_YR };
+    }
+    let glows = |age_yr: f64| track.state_at(age_yr).effective_temperature_k > MINIMUM_GLOW_K;
+    if glows(END_YR) {
+        return END_YR;
+    }
+    // A cooling white dwarf only dims, so halving the logarithm of its age finds the end of the glow.
+    let (mut early, mut late) = (last.from_yr.max(1.0).ln(), END_YR.ln());
+    for _ in 0..60 {
+        let middle = 0.5 * (early + late);
+        if glows(middle.exp()) { early = middle } else { late = middle }
+    }
+    (1.15 * late.exp()).min(END_YR)
+}

@@ -1,0 +1,248 @@
+//! Every figure of a moment as one row: key, name, unit, digits, method, and how to read it.
+//!
+//! Panels, tables, curves and files walk these rows, so that a figure has one name, one unit and
+//! one source everywhere.
+
+use super::moment::{PlanetMoment, StarMoment};
+
+/// One figure of the star.
+#[derive(Debug)]
+pub struct StarQuantity {
+    /// Key with unit suffix, for files.
+    pub key: &'static str,
+    /// Name for people.
+    pub name: &'static str,
+    /// Unit symbol; empty when dimensionless.
+    pub symbol: &'static str,
+    /// Significant digits for people.
+    pub digits: usize,
+    /// Key of the method in [`super::provenance::METHODS`].
+    pub method: &'static str,
+    /// Reads the value.
+    pub value: fn(&StarMoment) -> Option<f64>,
+    /// Typical spread of the method as a fraction of the value at this moment, where one is published.
+    pub spread: fn(&StarMoment) -> Option<f64>,
+}
+
+/// One figure of a planet.
+#[derive(Debug)]
+pub struct PlanetQuantity {
+    /// Key with unit suffix, for files.
+    pub key: &'static str,
+    /// Name for people.
+    pub name: &'static str,
+    /// Unit symbol; empty when dimensionless.
+    pub symbol: &'static str,
+    /// Significant digits for people.
+    pub digits: usize,
+    /// Key of the method in [`super::provenance::METHODS`].
+    pub method: &'static str,
+    /// Reads the value.
+    pub value: fn(&PlanetMoment) -> Option<f64>,
+}
+
+/// Published agreement of the fits with the models they were made from: 5 % in luminosity and radius
+/// (Hurley, Pols & Tout 2000, section 5). White dwarfs and dark remnants have no such figure.
+const FIT_SPREAD: f64 = 0.05;
+
+fn fit_spread(star: &StarMoment) -> Option<f64> {
+    (!star.phase.is_remnant()).then_some(FIT_SPREAD)
+}
+
+/// T goes as L^¼ R^−½, so two independent spreads of 5 % make 2.8 %.
+fn temperature_spread(star: &StarMoment) -> Option<f64> {
+    fit_spread(star).map(|spread| spread * (1.0_f64 / 16.0 + 1.0 / 4.0).sqrt())
+}
+
+fn no_spread(_: &StarMoment) -> Option<f64> {
+    None
+}
+
+/// The star's figures, in reading order.
+pub const STAR: &[StarQuantity] = &[
+    StarQuantity {
+        key: "luminosity_lsun",
+        name: "Luminosity",
+        symbol: "L☉",
+        digits: 4,
+        method: "star_life",
+        value: |star| star.luminosity_lsun,
+        spread: fit_spread,
+    },
+    StarQuantity {
+        key: "radius_rsun",
+        name: "Radius",
+        symbol: "R☉",
+        digits: 4,
+        method: "star_life",
+        value: |star| star.radius_rsun,
+        spread: fit_spread,
+    },
+    StarQuantity {
+        key: "effective_temperature_k",
+        name: "Temperature",
+        symbol: "K",
+        digits: 4,
+        method: "effective_temperature",
+        value: |star| star.effective_temperature_k,
+        spread: temperature_spread,
+    },
+    StarQuantity {
+        key: "mass_msun",
+        name: "Mass",
+        symbol: "M☉",
+        digits: 4,
+        method: "star_winds",
+        value: |star| Some(star.mass_msun),
+        spread: no_spread,
+    },
+    StarQuantity {
+        key: "core_mass_msun",
+        name: "Core mass",
+        symbol: "M☉",
+        digits: 4,
+        method: "star_life",
+        value: |star| star.core_mass_msun.filter(|mass_msun| *mass_msun > 0.0),
+        spread: no_spread,
+    },
+    StarQuantity {
+        key: "core_hydrogen_fraction",
+        name: "Core hydrogen",
+        symbol: "",
+        digits: 3,
+        method: "core_hydrogen",
+        value: |star| star.core_hydrogen_fraction,
+        spread: no_spread,
+    },
+    StarQuantity {
+        key: "mass_loss_msun_yr",
+        name: "Wind",
+        symbol: "M☉/yr",
+        digits: 2,
+        method: "star_winds",
+        value: |star| Some(star.mass_loss_msun_yr),
+        spread: no_spread,
+    },
+    StarQuantity {
+        key: "peak_wavelength_nm",
+        name: "Peak of light",
+        symbol: "nm",
+        digits: 3,
+        method: "blackbody",
+        value: |star| star.peak_wavelength_nm,
+        spread: no_spread,
+    },
+    StarQuantity {
+        key: "habitable_zone_inner_au",
+        name: "Habitable from",
+        symbol: "au",
+        digits: 3,
+        method: "habitable_zone",
+        value: |star| star.habitable_zone_au.map(|zone_au| zone_au[0]),
+        spread: no_spread,
+    },
+    StarQuantity {
+        key: "habitable_zone_outer_au",
+        name: "Habitable to",
+        symbol: "au",
+        digits: 3,
+        method: "habitable_zone",
+        value: |star| star.habitable_zone_au.map(|zone_au| zone_au[1]),
+        spread: no_spread,
+    },
+];
+
+/// A planet's figures, in reading order.
+pub const PLANET: &[PlanetQuantity] = &[
+    PlanetQuantity {
+        key: "surface_temperature_k",
+        name: "Surface",
+        symbol: "K",
+        digits: 4,
+        method: "surface_temperature",
+        value: |planet| planet.surface_temperature_k,
+    },
+    PlanetQuantity {
+        key: "equilibrium_temperature_k",
+        name: "Equilibrium",
+        symbol: "K",
+        digits: 4,
+        method: "equilibrium_temperature",
+        value: |planet| planet.equilibrium_temperature_k,
+    },
+    PlanetQuantity {
+        key: "insolation_earth",
+        name: "Insolation",
+        symbol: "S⊕",
+        digits: 4,
+        method: "insolation",
+        value: |planet| planet.insolation_earth,
+    },
+    PlanetQuantity {
+        key: "semi_major_axis_au",
+        name: "Semi-major axis",
+        symbol: "au",
+        digits: 4,
+        method: "orbit",
+        value: |planet| planet.semi_major_axis_au,
+    },
+    PlanetQuantity {
+        key: "eccentricity",
+        name: "Eccentricity",
+        symbol: "",
+        digits: 3,
+        method: "orbit",
+        value: |planet| planet.eccentricity,
+    },
+    PlanetQuantity {
+        key: "period_yr",
+        name: "Period",
+        symbol: "yr",
+        digits: 4,
+        method: "period",
+        value: |planet| planet.period_yr,
+    },
+    PlanetQuantity {
+        key: "star_angular_diameter_deg",
+        name: "Star in its sky",
+        symbol: "°",
+        digits: 3,
+        method: "angular_diameter",
+        value: |planet| planet.star_angular_diameter_deg,
+    },
+];
+
+/// A star's quantity by key.
+#[must_use]
+pub fn star_quantity(key: &str) -> Option<&'static StarQuantity> {
+    STAR.iter().find(|quantity| quantity.key == key)
+}
+
+/// A planet's quantity by key.
+#[must_use]
+pub fn planet_quantity(key: &str) -> Option<&'static PlanetQuantity> {
+    PLANET.iter().find(|quantity| quantity.key == key)
+}
+
+#[cfg(test)]
+mod tests {
+    use super::*;
+    use crate::system::provenance::method;
+
+    #[test]
+    fn every_figure_has_a_method_with_a_source() {
+        for key in STAR.iter().map(|quantity| quantity.method).chain(PLANET.iter().map(|quantity| quantity.method)) {
+            assert!(method(key).is_some_and(|method| !method.source.is_empty()), "{key}");
+        }
+    }
+
+    #[test]
+    fn keys_are_found_and_unique() {
+        for (index, quantity) in STAR.iter().enumerate() {
+            assert!(STAR[..index].iter().all(|other| other.key != quantity.key));
+            assert!(star_quantity(quantity.key).is_some());
+        }
+        assert!(planet_quantity("insolation_earth").is_some());
+        assert!(planet_quantity("luminosity_lsun").is_none());
+    }
+}
