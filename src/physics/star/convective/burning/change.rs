@@ -44,12 +44,7 @@ pub(in super::super) fn burn(composition: &Composition, rates: &Rates<f64>, step
 }
 
 /// ³He mass fraction that one backward-Euler step of `step_s` seconds leaves, begun with `start` (mass fraction).
-pub(in super::super) fn helium3_after(
-    composition: &Composition,
-    rates: &Rates<f64>,
-    start: f64,
-    step_s: f64,
-) -> f64 {
+pub(in super::super) fn helium3_after(composition: &Composition, rates: &Rates<f64>, start: f64, step_s: f64) -> f64 {
     let protons = composition.hydrogen / HYDROGEN_MASS;
     let alphas = composition.helium4() / HELIUM4_MASS;
     let source = start / HELIUM3_MASS + step_s * 0.5 * protons * protons * rates[0];

@@ -10,7 +10,7 @@ use super::change::{CN_SHARE, NITROGEN_MASS};
 use super::rates::{REACTIONS, Rates, rates};
 
 /// Below this ln temperature (1 million K) nothing burns.
-pub(in super::super) const BURNS_ABOVE_LN_K: f64 = 13.815_510_557_964_274;
+const BURNS_ABOVE_LN_K: f64 = 13.815_510_557_964_274;
 
 /// Which ³He abundance the heat is worked out with.
 #[derive(Clone, Copy, Debug, PartialEq)]

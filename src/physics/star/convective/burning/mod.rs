@@ -6,5 +6,5 @@ mod rates;
 mod screening;
 
 pub(super) use change::{burn, helium3_after};
-pub(super) use heat::{BURNS_ABOVE_LN_K, Burning, Helium3, burning};
+pub(super) use heat::{Burning, Helium3, burning};
 pub(super) use rates::{REACTIONS, Rates};

@@ -16,12 +16,7 @@ pub(in super::super) const REACTIONS: usize = 4;
 pub(in super::super) type Rates<N> = [N; REACTIONS];
 
 /// Rates at one place; `psi` is the electrons' degeneracy.
-pub(super) fn rates(
-    composition: &Composition,
-    density: Dual<2>,
-    temperature: Dual<2>,
-    psi: Dual<2>,
-) -> Rates<Dual<2>> {
+pub(super) fn rates(composition: &Composition, density: Dual<2>, temperature: Dual<2>, psi: Dual<2>) -> Rates<Dual<2>> {
     let t9 = temperature * 1e-9;
     let third = t9.cbrt();
     let inverse_third = third.recip();
@@ -30,15 +25,18 @@ pub(super) fn rates(
     let four_thirds = t9 * third;
     let five_thirds = t9 * two_thirds;
 
-    let proton_proton = (inverse_third * -3.380).exp() * 4.01e-15 * inverse_two_thirds
+    let proton_proton = (inverse_third * -3.380).exp()
+        * 4.01e-15
+        * inverse_two_thirds
         * (third * 0.123 + two_thirds * 1.09 + t9 * 0.938 + 1.0);
-    let helium_pair = (inverse_third * -12.276).exp() * 6.04e10 * inverse_two_thirds
+    let helium_pair = (inverse_third * -12.276).exp()
+        * 6.04e10
+        * inverse_two_thirds
         * (third * 0.034 - two_thirds * 0.522 - t9 * 0.124 + four_thirds * 0.353 + five_thirds * 0.213 + 1.0);
     let reduced = t9 / (t9 * 4.95e-2 + 1.0);
     let reduced_third = reduced.cbrt();
     let reduced_five_sixths = reduced_third.square() * reduced_third.sqrt();
-    let helium_alpha =
-        (reduced_third.recip() * -12.826).exp() * 5.61e6 * reduced_five_sixths / (t9 * t9.sqrt());
+    let helium_alpha = (reduced_third.recip() * -12.826).exp() * 5.61e6 * reduced_five_sixths / (t9 * t9.sqrt());
     let nitrogen = (inverse_third * -15.228 - (t9 * (1.0 / 3.294)).square()).exp()
         * (0.5 * 4.90e7)
         * inverse_two_thirds

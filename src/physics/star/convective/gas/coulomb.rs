@@ -27,8 +27,7 @@ const CHARGE_FACTOR: [f64; 3] = [1.0, 3.174_802_103_936_399, 32.0];
 fn excess<N: Number>(coupling: N) -> (N, N) {
     let gamma = coupling.value();
     let root = gamma.sqrt();
-    let free = A1
-        * ((gamma * (A2 + gamma)).sqrt() - A2 * ((gamma / A2).sqrt() + (1.0 + gamma / A2).sqrt()).ln())
+    let free = A1 * ((gamma * (A2 + gamma)).sqrt() - A2 * ((gamma / A2).sqrt() + (1.0 + gamma / A2).sqrt()).ln())
         + 2.0 * A3 * (root - root.atan());
     // u = Γ df/dΓ and its first two derivatives with respect to ln Γ.
     let (near, far) = (gamma / (A2 + gamma), gamma / (1.0 + gamma));
@@ -60,8 +59,7 @@ pub(super) fn pressure_and_entropy<N: Number>(
     if charges.value() <= 0.0 {
         return (N::constant(0.0), N::constant(0.0));
     }
-    let electron_coupling =
-        (charges * (4.0 * PI / 3.0)).cbrt() * (CHARGE_SQUARED / BOLTZMANN) / temperature_k;
+    let electron_coupling = (charges * (4.0 * PI / 3.0)).cbrt() * (CHARGE_SQUARED / BOLTZMANN) / temperature_k;
     let floor = charges.value() * 1e-14;
     let mut pressure = N::constant(0.0);
     let mut entropy = N::constant(0.0);

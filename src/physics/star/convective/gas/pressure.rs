@@ -40,8 +40,6 @@ pub(in super::super) struct Gas {
     pub(in super::super) psi: Dual<2>,
     /// Degeneracy variable, from which the next solution starts.
     pub(in super::super) ln_f: Dual<2>,
-    /// Specific entropy, erg g⁻¹ K⁻¹.
-    pub(in super::super) entropy: f64,
 }
 
 /// Entropy density over k of `count` free particles per cm³ of given mass (units) and statistical weight.
@@ -85,8 +83,7 @@ fn pressure_and_entropy<N: Number>(
         let moving = translation(molecules, 2.0 * HYDROGEN_MASS, molecular_partition(temperature), phase_space);
         particles_entropy = particles_entropy + moving + molecules * molecular_energy(temperature);
     }
-    let (coulomb_pressure, coulomb_entropy) =
-        coulomb::pressure_and_entropy(particles, density, temperature, ideal);
+    let (coulomb_pressure, coulomb_entropy) = coulomb::pressure_and_entropy(particles, density, temperature, ideal);
     let entropy = (electron_energy + electron_pressure) / temperature
         + particles_entropy * BOLTZMANN
         + cube * (4.0 / 3.0)
@@ -129,7 +126,6 @@ pub(in super::super) fn gas(
         electrons_per_cm3: electrons.density_per_cm3().first_order(),
         psi: electrons.psi().first_order(),
         ln_f: Dual { value: neutral.ln_f, slope: neutral.ln_f_slope },
-        entropy: entropy.value,
     };
     state.ln_pressure.value.is_finite().then_some(state)
 }
@@ -147,8 +143,7 @@ pub(in super::super) fn gas_pressure(
     let (density, temperature) = (constant(ln_density).exp(), constant(ln_temperature).exp());
     let electrons = ElectronGas::new(constant(neutral.ln_f), temperature);
     let particles = Site::new(nuclei, density, temperature).populations(electrons.psi());
-    let (pressure, _) =
-        pressure_and_entropy(&electrons, &particles, density, temperature, constant(ln_temperature));
+    let (pressure, _) = pressure_and_entropy(&electrons, &particles, density, temperature, constant(ln_temperature));
     Some(pressure.value.ln())
 }
 

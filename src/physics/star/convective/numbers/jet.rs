@@ -171,14 +171,7 @@ impl Mul<f64> for Jet {
     type Output = Self;
     #[inline]
     fn mul(self, k: f64) -> Self {
-        Self {
-            value: self.value * k,
-            x: self.x * k,
-            y: self.y * k,
-            xx: self.xx * k,
-            xy: self.xy * k,
-            yy: self.yy * k,
-        }
+        Self { value: self.value * k, x: self.x * k, y: self.y * k, xx: self.xx * k, xy: self.xy * k, yy: self.yy * k }
     }
 }
 

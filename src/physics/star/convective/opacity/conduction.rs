@@ -7,8 +7,7 @@
 //! A factor of about two. Halving it changes lifetimes by 0.2 % and the cooling of the white dwarf by 20 %.
 
 use super::super::cgs::{
-    ATOMIC_MASS, BOLTZMANN, CHARGE_SQUARED, ELECTRON_MASS, ELECTRON_REST_ENERGY, LIGHT_SPEED, PLANCK,
-    STEFAN_BOLTZMANN,
+    ATOMIC_MASS, BOLTZMANN, CHARGE_SQUARED, ELECTRON_MASS, ELECTRON_REST_ENERGY, LIGHT_SPEED, PLANCK, STEFAN_BOLTZMANN,
 };
 use super::super::composition::{Composition, METAL_CHARGE};
 use super::super::numbers::{Dual, Number};
@@ -36,9 +35,9 @@ pub(super) fn conductive_opacity(
     let charge_squares = (hydrogen + 4.0 * helium + METAL_CHARGE * METAL_CHARGE * metals) / ions;
     let charge = electrons_per_cm3 / (density_g_cm3 * (ions / ATOMIC_MASS));
     let charge_root = charge.cbrt();
-    let coupling = charge * charge_root.square() * (electrons_per_cm3 * (4.0 * PI / 3.0)).cbrt()
-        * (CHARGE_SQUARED / BOLTZMANN)
-        / temperature_k;
+    let coupling =
+        charge * charge_root.square() * (electrons_per_cm3 * (4.0 * PI / 3.0)).cbrt() * (CHARGE_SQUARED / BOLTZMANN)
+            / temperature_k;
 
     let screened = (charge_root * (2.0 * PI / 3.0).cbrt() * (coupling.recip() * 3.0 + 1.5).sqrt()).ln();
     let bare = screened - (fermi.square() / energy_squared) * 0.5;

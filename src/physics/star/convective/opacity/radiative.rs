@@ -42,7 +42,12 @@ pub(in super::super) struct RadiativeOpacity {
 /// Weights of a cubic through four nodes.
 fn lagrange(nodes: &[f64; 4], position: f64) -> [f64; 4] {
     std::array::from_fn(|i| {
-        nodes.iter().enumerate().filter(|(j, _)| *j != i).map(|(_, node)| (position - node) / (nodes[i] - node)).product()
+        nodes
+            .iter()
+            .enumerate()
+            .filter(|(j, _)| *j != i)
+            .map(|(_, node)| (position - node) / (nodes[i] - node))
+            .product()
     })
 }
 
@@ -197,10 +202,22 @@ mod tests {
     }
 
     #[test]
-    fn published_opal_value_is_met() {
-        // Iglesias & Rogers 1996, GN93 X=0.7 Z=0.02 at log T 7.0, log R −1.5... the fit's stated error is 0.05 dex.
-        let ours = RadiativeOpacity::new(0.02).expect("whole table").log_opacity(7.0, -1.5, 0.7);
-        assert!((ours.value - 0.2).abs() < 0.3, "{ours:?}");
+    fn published_opal_values_are_met() {
+        // Iglesias & Rogers 1996, GN93 table X = 0.70, Y = 0.28, Z = 0.02: log T, log R, log κ.
+        let checks = [
+            [4.5, 0.0, 4.519],
+            [5.0, 0.0, 4.291],
+            [6.0, 0.0, 2.441],
+            [6.5, 0.0, 1.701],
+            [7.0, 0.0, 1.020],
+            [7.0, -1.5, 0.270],
+            [6.5, 1.0, 2.208],
+        ];
+        let fit = RadiativeOpacity::new(0.02).expect("whole table");
+        for [t, r, published] in checks {
+            let ours = fit.log_opacity(t, r, 0.7).value;
+            assert!((ours - published).abs() < 0.05, "{t} {r}: {ours} {published}");
+        }
     }
 
     #[test]

@@ -62,12 +62,7 @@ impl Axis {
         let a = 1.0 - b;
         let sixth = width * width / 6.0;
         let mut value = [a, b, (a * a * a - a) * sixth, (b * b * b - b) * sixth];
-        let slope = [
-            -1.0 / width,
-            1.0 / width,
-            -(3.0 * a * a - 1.0) * width / 6.0,
-            (3.0 * b * b - 1.0) * width / 6.0,
-        ];
+        let slope = [-1.0 / width, 1.0 / width, -(3.0 * a * a - 1.0) * width / 6.0, (3.0 * b * b - 1.0) * width / 6.0];
         let beyond = position - inside;
         if beyond != 0.0 {
             for (v, s) in value.iter_mut().zip(slope) {

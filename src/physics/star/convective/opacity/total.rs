@@ -43,12 +43,8 @@ impl Opacity {
         if log_t <= CONDUCTION_FADE[0] {
             return radiative;
         }
-        let conductive = conductive_opacity(
-            composition,
-            Dual::variable(ln_density, 0).exp(),
-            ln_t.exp(),
-            electrons_per_cm3,
-        );
+        let conductive =
+            conductive_opacity(composition, Dual::variable(ln_density, 0).exp(), ln_t.exp(), electrons_per_cm3);
         let share = fade(ln_t, CONDUCTION_FADE);
         // 1/κ = 1/κ_r + s/κ_c
         radiative - (radiative.exp() * share / conductive + 1.0).ln()
@@ -94,7 +90,10 @@ mod tests {
             let by_density = (at(x + h, y).value - at(x - h, y).value) / (2.0 * h);
             let by_temperature = (at(x, y + h).value - at(x, y - h).value) / (2.0 * h);
             assert!((here.slope[0] - by_density).abs() < 1e-4, "{density} {temperature}: {here:?} {by_density}");
-            assert!((here.slope[1] - by_temperature).abs() < 1e-3, "{density} {temperature}: {here:?} {by_temperature}");
+            assert!(
+                (here.slope[1] - by_temperature).abs() < 1e-3,
+                "{density} {temperature}: {here:?} {by_temperature}"
+            );
         }
     }
 

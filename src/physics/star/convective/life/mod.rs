@@ -1,0 +1,14 @@
+//! A whole life, as the rest of the program sees it.
+
+mod compute;
+mod error;
+mod input;
+mod node;
+mod stage;
+mod track;
+
+pub use compute::{compute, compute_with};
+pub use error::ConvectiveError;
+pub use input::{ConvectiveInput, Options, SurfaceOpacity};
+pub use node::{Caution, Ending, Life, Node};
+pub use stage::Stage;
