@@ -12,8 +12,10 @@ pub mod habitable_zone;
 pub mod irradiation;
 pub mod orbit;
 pub mod orbit_history;
+mod orbit_walk;
 pub mod range;
 pub mod star_point;
+pub mod tides;
 pub mod transit;
 
 pub use caution::Caution;
@@ -22,3 +24,4 @@ pub use irradiation::Redistribution;
 pub use orbit_history::{OrbitEnd, OrbitHistory, OrbitInput};
 pub use range::OutOfRange;
 pub use star_point::StarPoint;
+pub use tides::Tides;

@@ -1,9 +1,9 @@
 //! A planet's orbit through the whole life of its star, computed once and read back at any age.
 
-use super::orbit::{self, AfterSuddenLoss, Cohesion};
 use super::range::{OutOfRange, closed_eccentricity, within};
 use super::star_point::{StarPoint, check_track};
-use crate::units::constants::{EARTH_MASSES_PER_SOLAR_MASS, EARTH_RADIUS_AU, SOLAR_RADIUS_AU};
+use super::tides::Tides;
+use super::{orbit, orbit_walk};
 
 /// A planet's orbit at the first node of the star's track, and the body that runs on it.
 #[derive(Clone, Copy, Debug, PartialEq)]
@@ -82,10 +82,10 @@ pub struct OrbitNode {
 /// [`orbit::after_sudden_loss`] says; the star ends it when it reaches the periastron.
 #[derive(Clone, Debug, PartialEq)]
 pub struct OrbitHistory {
-    nodes: Vec<OrbitNode>,
-    end: Option<(f64, OrbitEnd)>,
-    closest_ratio: f64,
-    largest_adiabaticity_index: f64,
+    pub(super) nodes: Vec<OrbitNode>,
+    pub(super) end: Option<(f64, OrbitEnd)>,
+    pub(super) closest_ratio: f64,
+    pub(super) largest_adiabaticity_index: f64,
 }
 
 impl OrbitHistory {
@@ -102,16 +102,26 @@ impl OrbitHistory {
     /// # Errors
     /// [`OutOfRange`] for an orbit or track that cannot be used.
     pub fn walk(input: &OrbitInput, track: &[StarPoint]) -> Result<Self, OutOfRange> {
+        Self::walk_with_tides(input, track, &Tides::off())
+    }
+
+    /// Walks the orbit along the star's nodes under mass loss and tides.
+    ///
+    /// The tide on a star that is no giant, the tide on the planet and the drag of a giant's envelope act as
+    /// `tides` says; remnants raise a tide on the planet only.
+    ///
+    /// # Source
+    /// As [`OrbitHistory::walk`], [`tides::equilibrium_tide`](super::tides::equilibrium_tide) and
+    /// [`tides::giant_drag`](super::tides::giant_drag).
+    /// # Accuracy
+    /// The integration follows the equations to better than 1 %; the equations are good to an order of magnitude.
+    /// # Errors
+    /// [`OutOfRange`] for an orbit, track or tide that cannot be used.
+    pub fn walk_with_tides(input: &OrbitInput, track: &[StarPoint], tides: &Tides) -> Result<Self, OutOfRange> {
         input.check()?;
         check_track(track)?;
-        let mut walk = Walk::start(input, &track[0], track.len());
-        for pair in track.windows(2) {
-            if walk.history.end.is_some() {
-                break;
-            }
-            walk.advance(&pair[0], &pair[1]);
-        }
-        Ok(walk.history)
+        tides.check()?;
+        Ok(orbit_walk::walk(input, track, tides))
     }
 
     /// The semi-major axis at an age, au; `None` outside the star's track and after the orbit's end.
@@ -173,106 +183,6 @@ impl OrbitHistory {
     #[must_use]
     pub fn is_adiabatic(&self) -> bool {
         self.largest_adiabaticity_index < orbit::ADIABATIC_INDEX_LIMIT
-    }
-}
-
-/// The distance inside which the star ends the planet, au, and how: the photosphere or the fluid Roche limit
-/// 2.44 R (M/m)^⅓, whichever is farther out.
-fn reach_au(input: &OrbitInput, star: &StarPoint) -> (f64, OrbitEnd) {
-    let photosphere_au = star.radius_rsun * SOLAR_RADIUS_AU;
-    let mass_ratio = star.mass_msun * EARTH_MASSES_PER_SOLAR_MASS / input.mass_mearth;
-    let roche_au = Cohesion::Fluid.factor() * input.radius_rearth * EARTH_RADIUS_AU * mass_ratio.cbrt();
-    if photosphere_au >= roche_au { (photosphere_au, OrbitEnd::Engulfed) } else { (roche_au, OrbitEnd::TornApart) }
-}
-
-/// The walk in progress: where the planet is now and what has been written down.
-struct Walk<'a> {
-    input: &'a OrbitInput,
-    history: OrbitHistory,
-    now: OrbitNode,
-    /// Periastron over the star's reach.
-    ratio: f64,
-}
-
-impl<'a> Walk<'a> {
-    fn start(input: &'a OrbitInput, star: &StarPoint, capacity: usize) -> Self {
-        let now = OrbitNode {
-            age_yr: star.age_yr,
-            semi_major_axis_au: input.semi_major_axis_au,
-            eccentricity: input.eccentricity,
-        };
-        let history = OrbitHistory {
-            nodes: Vec::with_capacity(capacity),
-            end: None,
-            closest_ratio: f64::INFINITY,
-            largest_adiabaticity_index: 0.0,
-        };
-        let mut walk = Self { input, history, now, ratio: f64::INFINITY };
-        walk.settle(now, star);
-        walk
-    }
-
-    /// Follows the orbit from one node of the star to the next.
-    fn advance(&mut self, before: &StarPoint, after: &StarPoint) {
-        let mut next = OrbitNode { age_yr: after.age_yr, ..self.now };
-        if after.mass_msun <= 0.0 {
-            self.finish(after.age_yr, OrbitEnd::Unbound);
-            return;
-        }
-        if after.lost_mass_suddenly && after.mass_msun < before.mass_msun {
-            match orbit::sudden_loss(
-                self.now.semi_major_axis_au,
-                self.now.eccentricity,
-                before.mass_msun,
-                after.mass_msun,
-            ) {
-                AfterSuddenLoss::Unbound => {
-                    self.finish(after.age_yr, OrbitEnd::Unbound);
-                    return;
-                }
-                AfterSuddenLoss::Bound { semi_major_axis_au, eccentricity } => {
-                    next = OrbitNode { age_yr: after.age_yr, semi_major_axis_au, eccentricity };
-                }
-            }
-        } else {
-            self.note_mass_loss_rate(before, after);
-            next.semi_major_axis_au *= before.mass_msun / after.mass_msun;
-        }
-        self.settle(next, after);
-    }
-
-    /// Takes the planet to a new place, or to its end if the star reached it on the way there.
-    fn settle(&mut self, next: OrbitNode, star: &StarPoint) {
-        let (reach_au, kind) = reach_au(self.input, star);
-        let ratio = next.semi_major_axis_au * (1.0 - next.eccentricity) / reach_au;
-        self.history.closest_ratio = self.history.closest_ratio.min(ratio);
-        if ratio <= 1.0 {
-            // The logarithm of the ratio is taken to run straight between the two places.
-            let share = if self.ratio.is_finite() { self.ratio.ln() / (self.ratio / ratio).ln() } else { 1.0 };
-            let contact_yr = self.now.age_yr + share.clamp(0.0, 1.0) * (next.age_yr - self.now.age_yr);
-            self.history.nodes.push(next);
-            self.history.end = Some((contact_yr, kind));
-            return;
-        }
-        self.history.nodes.push(next);
-        self.now = next;
-        self.ratio = ratio;
-    }
-
-    fn finish(&mut self, age_yr: f64, kind: OrbitEnd) {
-        self.history.nodes.push(OrbitNode { age_yr, ..self.now });
-        self.history.end = Some((age_yr, kind));
-    }
-
-    fn note_mass_loss_rate(&mut self, before: &StarPoint, after: &StarPoint) {
-        let span_yr = after.age_yr - before.age_yr;
-        let lost_msun = before.mass_msun - after.mass_msun;
-        // Two nodes at one age stand for a change too quick to be resolved on the track, such as the last
-        // envelope going; how quick it was is not known there.
-        if span_yr > 0.0 && lost_msun > 0.0 {
-            let index = orbit::mass_loss_index(lost_msun / span_yr, self.now.semi_major_axis_au, after.mass_msun);
-            self.history.largest_adiabaticity_index = self.history.largest_adiabaticity_index.max(index);
-        }
     }
 }
 
