@@ -36,20 +36,22 @@ pub(in super::super) struct Burning {
     pub(in super::super) heat: Dual<2>,
 }
 
-/// Burning at ln density (g cm⁻³) and ln temperature (K); `psi` is the electrons' degeneracy.
+/// Burning at ln density (g cm⁻³) and ln temperature (K); `psi` is the electrons' degeneracy, `cn_ceiling_k` the
+/// highest temperature that the CN cycle feels.
 pub(in super::super) fn burning(
     composition: &Composition,
     helium3: Helium3,
     ln_density: f64,
     ln_temperature: f64,
     psi: Dual<2>,
+    cn_ceiling_k: Option<f64>,
 ) -> Burning {
     if ln_temperature <= BURNS_ABOVE_LN_K {
         return Burning::default();
     }
     let density = Dual::variable(ln_density, 0).exp();
     let temperature = Dual::variable(ln_temperature, 1).exp();
-    let rates = rates(composition, density, temperature, psi);
+    let rates = rates(composition, density, temperature, psi, cn_ceiling_k);
     Burning { rates, heat: heat(composition, helium3, &rates) }
 }
 
@@ -86,7 +88,7 @@ mod tests {
             for helium3 in [Helium3::Given, step] {
                 let (x, y, h) = (f64::ln(density), f64::ln(temperature), 1e-5);
                 let psi = |x: f64, y: f64| Dual { value: x - 1.5 * y + 17.0, slope: [1.0, -1.5] };
-                let at = |x: f64, y: f64| burning(&composition, helium3, x, y, psi(x, y)).heat;
+                let at = |x: f64, y: f64| burning(&composition, helium3, x, y, psi(x, y), Some(2e7)).heat;
                 let here = at(x, y);
                 let by_density = (at(x + h, y).value - at(x - h, y).value) / (2.0 * h);
                 let by_temperature = (at(x, y + h).value - at(x, y - h).value) / (2.0 * h);
@@ -100,7 +102,7 @@ mod tests {
     fn the_centre_of_the_sun_sets_free_the_known_heat() {
         // Standard solar models: about 16–17 erg g⁻¹ s⁻¹ at 150 g cm⁻³, 15.7 million K, X = 0.34 (*common practice*).
         let composition = Composition { hydrogen: 0.34, helium3: 8e-6, metals: 0.02 };
-        let centre = burning(&composition, Helium3::Given, 150_f64.ln(), 15.7e6_f64.ln(), Dual::constant(-1.4));
+        let centre = burning(&composition, Helium3::Given, 150_f64.ln(), 15.7e6_f64.ln(), Dual::constant(-1.4), None);
         assert!((13.0..20.0).contains(&centre.heat.value), "{:?}", centre.heat);
     }
 }

@@ -2,7 +2,7 @@
 
 use super::super::cgs::SOLAR_MASS;
 use super::super::composition::Composition;
-use super::super::opacity::Opacity;
+use super::super::matter::Microphysics;
 use super::super::structure::{Isentrope, Mesh, Model, Past};
 
 /// Central density (g cm⁻³) and temperature (K) on the main sequence at 0.1 solar masses.
@@ -19,15 +19,15 @@ const FIRST_ITERATIONS: usize = 80;
 /// A star of this composition contracting from some nine times its later size, relaxed on the mesh.
 ///
 /// Nothing if no such star is found.
-pub(in super::super) fn contracting_star(opacity: &Opacity, mesh: &Mesh, composition: Composition) -> Option<Model> {
+pub(in super::super) fn contracting_star(laws: &Microphysics, mesh: &Mesh, composition: Composition) -> Option<Model> {
     let relative = mesh.star_g / SOLAR_MASS / 0.1;
     let density = MAIN_SEQUENCE[0] * relative.powf(MASS_POWERS[0]) * EXPANDED;
     let temperature = MAIN_SEQUENCE[1] * relative.powf(MASS_POWERS[1]) * EXPANDED.cbrt();
     let star = [1.0, 0.8, 1.25]
         .into_iter()
-        .find_map(|factor| Isentrope::of_mass(opacity, &composition, mesh.star_g, density, factor * temperature))?;
+        .find_map(|factor| Isentrope::of_mass(laws, &composition, mesh.star_g, density, factor * temperature))?;
     let mut model = Model::from_isentrope(mesh, &star, composition);
-    model.settle(opacity)?;
+    model.settle(laws)?;
     let ln_temperature: Vec<f64> = model.unknowns.iter().map(|point| point[1]).collect();
     let ln_pressure: Vec<f64> = model.settled.iter().map(|point| point.ln_pressure).collect();
     let past = Past {
@@ -35,6 +35,6 @@ pub(in super::super) fn contracting_star(opacity: &Opacity, mesh: &Mesh, composi
         ln_temperature: &ln_temperature,
         ln_pressure: &ln_pressure,
     };
-    model.relax(opacity, mesh, &past, FIRST_ITERATIONS)?;
+    model.relax(laws, mesh, &past, FIRST_ITERATIONS)?;
     Some(model)
 }

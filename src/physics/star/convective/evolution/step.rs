@@ -2,7 +2,7 @@
 
 use super::super::burning::{Helium3, Rates, helium3_after};
 use super::super::gas::gas_pressure;
-use super::super::opacity::Opacity;
+use super::super::matter::Microphysics;
 use super::super::structure::{Mesh, Model, Past};
 use super::mixing::burn_and_mix;
 
@@ -34,8 +34,8 @@ pub(in super::super) struct Step {
 
 /// Computes steps on one mesh.
 pub(in super::super) struct Stepper<'a> {
-    /// Opacity of the star's matter.
-    pub(in super::super) opacity: &'a Opacity,
+    /// What holds for the star's matter.
+    pub(in super::super) laws: Microphysics,
     /// Mass shells.
     pub(in super::super) mesh: &'a Mesh,
     /// Changes aimed at, over those of the standard resolution.
@@ -79,7 +79,7 @@ impl Stepper<'_> {
         burn_and_mix(model, self.mesh, rates, step_s);
         let ln_pressure = past_pressure(old, model)?;
         let past = Past { step_s, ln_temperature, ln_pressure: &ln_pressure };
-        Some(model.relax(self.opacity, self.mesh, &past, MOST_ITERATIONS)?.iterations)
+        Some(model.relax(&self.laws, self.mesh, &past, MOST_ITERATIONS)?.iterations)
     }
 
     /// Largest change over the change aimed at.

@@ -2,6 +2,7 @@
 
 use super::super::cgs::SOLAR_MASS;
 use super::super::evolution::{LateCooling, Step, Stepper, contracting_star};
+use super::super::matter::Microphysics;
 use super::super::opacity::{Opacity, RadiativeOpacity};
 use super::super::structure::{Mesh, Model};
 use super::error::ConvectiveError;
@@ -23,6 +24,11 @@ const MANY_ITERATIONS: usize = 12;
 const ATTEMPTS: usize = 40;
 /// First step, of the thermal time.
 const FIRST_STEP: f64 = 0.01;
+/// Burning over light beyond which late hydrogen flashes; on the main sequence it never exceeds 1.05.
+///
+/// A flash (decades long, a few in a life) is then levelled off: the CN cycle feels no higher temperature than that of
+/// the burning shell at this moment, so that the same hydrogen burns steadily.
+const FLASHING: f64 = 1.5;
 /// Radius at which a giant is handed over, solar radii.
 const GIANT_RSUN: f64 = 3.0;
 /// Below this temperature a white dwarf whose structure cannot be followed becomes a simple crystal, K.
@@ -72,14 +78,18 @@ pub fn compute_with(
     let composition = input.composition();
     let tables = RadiativeOpacity::new(composition.metals).ok_or(ConvectiveError::DamagedTable)?;
     let opacity = Opacity::new(tables, options.surface.molecules());
+    let laws = Microphysics { opacity, cn_ceiling_k: None };
     let mesh = Mesh::new(input.mass_msun * SOLAR_MASS, options.resolution.spacing());
     let mass_msun = input.mass_msun;
-    let model = contracting_star(&opacity, &mesh, composition).ok_or(ConvectiveError::NoStart { mass_msun })?;
-    let stepper = Stepper { opacity: &opacity, mesh: &mesh, stride: options.resolution.stride() };
-    let followed = follow(&stepper, model, mass_msun, progress)?;
+    let model = contracting_star(&laws, &mesh, composition).ok_or(ConvectiveError::NoStart { mass_msun })?;
+    let stepper = Stepper { laws, mesh: &mesh, stride: options.resolution.stride() };
+    let followed = follow(stepper, model, mass_msun, progress)?;
 
     let mut cautions = cautions(input, options);
     let mut nodes = followed.nodes;
+    if followed.levelled {
+        cautions.push(Caution::ShellFlashes);
+    }
     if followed.ending == Ending::BlackDwarf {
         if followed.stopped_early {
             cautions.push(Caution::EarlyCrystal);
@@ -97,10 +107,17 @@ struct Followed {
     model: Model,
     ending: Ending,
     stopped_early: bool,
+    levelled: bool,
+}
+
+impl Followed {
+    fn new(nodes: Vec<Node>, model: Model, ending: Ending, stopped_early: bool, stepper: &Stepper) -> Self {
+        Self { nodes, model, ending, stopped_early, levelled: stepper.laws.cn_ceiling_k.is_some() }
+    }
 }
 
 fn follow(
-    stepper: &Stepper,
+    mut stepper: Stepper,
     mut model: Model,
     mass_msun: f64,
     progress: &mut dyn FnMut(f64) -> ControlFlow<()>,
@@ -118,9 +135,9 @@ fn follow(
     };
     for _ in 0..MOST_STEPS {
         let last = nodes[nodes.len() - 1];
-        let Some((step, taken_s)) = attempt(stepper, &model, step_s) else {
+        let Some((step, taken_s)) = attempt(&stepper, &model, step_s) else {
             if arrived && last.effective_temperature_k < CRYSTAL_BELOW_K {
-                return Ok(Followed { nodes, model, ending: Ending::BlackDwarf, stopped_early: true });
+                return Ok(Followed::new(nodes, model, Ending::BlackDwarf, true, &stepper));
             }
             return Err(stuck(&last));
         };
@@ -131,6 +148,9 @@ fn follow(
         let now = node(&model, mesh, age_s);
         nodes.push(now);
         arrived |= shines_by_burning(&now);
+        if arrived && stepper.laws.cn_ceiling_k.is_none() && runs_away(&now) {
+            stepper.laws.cn_ceiling_k = Some(model.shell_temperature_k(mesh));
+        }
         if progress(done.after(&now)).is_break() {
             return Err(ConvectiveError::Cancelled);
         }
@@ -138,13 +158,18 @@ fn follow(
             if !arrived {
                 return Err(ConvectiveError::BrownDwarf { mass_msun });
             }
-            return Ok(Followed { nodes, model, ending: Ending::BlackDwarf, stopped_early: false });
+            return Ok(Followed::new(nodes, model, Ending::BlackDwarf, false, &stepper));
         }
         if arrived && now.radius_rsun > GIANT_RSUN {
-            return Ok(Followed { nodes, model, ending: Ending::GiantBranch, stopped_early: false });
+            return Ok(Followed::new(nodes, model, Ending::GiantBranch, false, &stepper));
         }
     }
     Err(stuck(&nodes[nodes.len() - 1]))
+}
+
+/// Whether hydrogen burns so much faster than the star shines that it will flash.
+fn runs_away(node: &Node) -> bool {
+    node.nuclear_luminosity_lsun > FLASHING * node.luminosity_lsun
 }
 
 /// The next step and its length, from the longest that succeeds.

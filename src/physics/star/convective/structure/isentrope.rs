@@ -6,8 +6,7 @@
 use super::super::burning::Helium3;
 use super::super::cgs::{GRAVITATION, STEFAN_BOLTZMANN};
 use super::super::composition::Composition;
-use super::super::matter::Matter;
-use super::super::opacity::Opacity;
+use super::super::matter::{Matter, Microphysics};
 use std::f64::consts::PI;
 
 /// Largest change of ln P and of ln r in one step.
@@ -78,10 +77,10 @@ fn above_photosphere(matter: &Matter, layer: &Layer) -> f64 {
 
 impl Isentrope {
     /// The star with this central density (g cm⁻³) and temperature (K). Nothing if it has no photosphere.
-    fn outward(opacity: &Opacity, composition: &Composition, density: f64, temperature: f64) -> Option<Self> {
+    fn outward(laws: &Microphysics, composition: &Composition, density: f64, temperature: f64) -> Option<Self> {
         let matter_at = |layer: &Layer, guess: f64| {
             let state = [layer.ln_density, layer.ln_temperature];
-            Matter::at(opacity, composition, Helium3::Given, state, guess)
+            Matter::at(laws, composition, Helium3::Given, state, guess)
         };
         let mut layer =
             Layer { ln_density: density.ln(), ln_temperature: temperature.ln(), radius_cm: 1.0, inside_g: 1.0 };
@@ -131,14 +130,14 @@ impl Isentrope {
     /// The star of this mass (g) and central density (g cm⁻³), found from a first guess of its central temperature
     /// (K) by the secant method. Nothing if none is found.
     pub(in super::super) fn of_mass(
-        opacity: &Opacity,
+        laws: &Microphysics,
         composition: &Composition,
         mass_g: f64,
         density: f64,
         temperature_guess: f64,
     ) -> Option<Self> {
         let at = |ln_temperature: f64| {
-            let star = Self::outward(opacity, composition, density, ln_temperature.exp())?;
+            let star = Self::outward(laws, composition, density, ln_temperature.exp())?;
             let miss = (star.surface().inside_g / mass_g).ln();
             Some((star, miss))
         };

@@ -92,6 +92,7 @@ mod tests {
     use super::super::super::burning::Helium3;
     use super::super::super::calibration::MODERN_SURFACE;
     use super::super::super::composition::Composition;
+    use super::super::super::matter::Microphysics;
     use super::super::super::opacity::{Opacity, RadiativeOpacity};
     use super::*;
 
@@ -119,8 +120,9 @@ mod tests {
     fn slopes_match_differences() {
         let composition = Composition { hydrogen: 0.711, helium3: 3e-5, metals: 0.0153 };
         let opacity = Opacity::new(RadiativeOpacity::new(0.0153).expect("whole table"), MODERN_SURFACE);
+        let laws = Microphysics { opacity, cn_ceiling_k: None };
         let at = |y: [f64; 4]| {
-            let matter = Matter::at(&opacity, &composition, Helium3::Given, [y[0], y[1]], 0.0).expect("a state");
+            let matter = Matter::at(&laws, &composition, Helium3::Given, [y[0], y[1]], 0.0).expect("a state");
             gradient(&matter, &y, 3.8e30, 2e32).actual
         };
         let r = 8.6e9_f64.ln();

@@ -109,6 +109,18 @@ impl Model {
         self.settled.iter().zip(&mesh.weight_g).map(|(point, weight)| point.heat * weight).sum()
     }
 
+    /// Temperature where most heat is set free per octave of the mass above, K.
+    pub(in super::super) fn shell_temperature_k(&self, mesh: &Mesh) -> f64 {
+        let strongest = self
+            .settled
+            .iter()
+            .zip(&mesh.above)
+            .map(|(point, above)| point.heat * above)
+            .enumerate()
+            .max_by(|a, b| a.1.total_cmp(&b.1));
+        strongest.map_or(0.0, |(place, _)| self.unknowns[place][1].exp())
+    }
+
     /// Mean hydrogen mass fraction of the star.
     pub(in super::super) fn mean_hydrogen(&self, mesh: &Mesh) -> f64 {
         let total: f64 = self.composition.iter().zip(&mesh.weight_g).map(|(c, weight)| c.hydrogen * weight).sum();

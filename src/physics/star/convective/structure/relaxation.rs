@@ -1,7 +1,6 @@
 //! Newton's method for the structure one time step later.
 
-use super::super::matter::Matter;
-use super::super::opacity::Opacity;
+use super::super::matter::{Matter, Microphysics};
 use super::banded::Banded;
 use super::equations::{Point, write};
 use super::mesh::Mesh;
@@ -38,7 +37,7 @@ impl Model {
     /// Finds the structure at the end of a step. Nothing if Newton's method does not settle; the model is then spoilt.
     pub(in super::super) fn relax(
         &mut self,
-        opacity: &Opacity,
+        laws: &Microphysics,
         mesh: &Mesh,
         past: &Past,
         most_iterations: usize,
@@ -53,7 +52,7 @@ impl Model {
                 let unknowns = self.unknowns[k];
                 let state = [unknowns[0], unknowns[1]];
                 let guess = self.settled[k].ln_f;
-                let matter = Matter::at(opacity, &self.composition[k], self.helium3[k], state, guess)?;
+                let matter = Matter::at(laws, &self.composition[k], self.helium3[k], state, guess)?;
                 points.push(Point::new(mesh, k, unknowns, unit, matter, past));
             }
             system.clear();
@@ -89,10 +88,10 @@ impl Model {
     }
 
     /// Works out pressure and rates of a model that was never solved. Nothing where the gas has no neutral state.
-    pub(in super::super) fn settle(&mut self, opacity: &Opacity) -> Option<()> {
+    pub(in super::super) fn settle(&mut self, laws: &Microphysics) -> Option<()> {
         for k in 0..self.unknowns.len() {
             let state = [self.unknowns[k][0], self.unknowns[k][1]];
-            let matter = Matter::at(opacity, &self.composition[k], self.helium3[k], state, self.settled[k].ln_f)?;
+            let matter = Matter::at(laws, &self.composition[k], self.helium3[k], state, self.settled[k].ln_f)?;
             self.settled[k] = Settled::near(&matter, [0.0; 2]);
         }
         Some(())
