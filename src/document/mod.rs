@@ -1,0 +1,18 @@
+//! Documents: scenarios, their file form, undo, sessions, safe files, recovery after a crash, settings.
+
+pub mod built_in;
+mod files;
+mod likeness;
+mod problem;
+mod record_reading;
+pub mod ron_text;
+mod scenario;
+mod scenario_form;
+
+pub use files::{
+    LARGEST_FILE_BYTES, LoadError, WriteError, create_atomically, read_bytes, read_scenario, read_scenario_text,
+    scenario_from_bytes, sound_text, write_atomically, write_scenario,
+};
+pub use problem::{Fault, Place, Problem, Subject};
+pub use scenario::{LONGEST_ABOUT, LONGEST_TITLE, Scenario};
+pub use scenario_form::{CURRENT_VERSION, ScenarioText, parse_scenario, parse_scenario_text, scenario_text};

@@ -1,0 +1,108 @@
+//! A scenario: what is saved, undone and handed on.
+
+use super::problem::{Fault, Problem, Subject};
+use crate::system::specification::{Body, PlanetSpecification, StarSpecification, System};
+
+/// Longest title, in characters.
+pub const LONGEST_TITLE: usize = 120;
+/// Longest description, in characters.
+pub const LONGEST_ABOUT: usize = 4000;
+
+/// A system with the words that go with it.
+#[derive(Clone, Debug, PartialEq)]
+pub struct Scenario {
+    /// One line that says the subject.
+    pub title: String,
+    /// What to look for; may be empty, may hold several paragraphs.
+    pub about: String,
+    /// The star and its planets.
+    pub system: System,
+}
+
+impl Scenario {
+    /// A star like the Sun with one planet like the Earth, to start from.
+    #[must_use]
+    pub fn new_untitled() -> Self {
+        Self {
+            title: "Untitled".to_owned(),
+            about: String::new(),
+            system: System { star: StarSpecification::default(), planets: vec![PlanetSpecification::default()] },
+        }
+    }
+
+    /// Everything that is wrong, without places; empty for a scenario that can be computed and saved.
+    #[must_use]
+    pub fn problems(&self) -> Vec<Problem> {
+        let texts = [("title", title_fault(&self.title)), ("about", about_fault(&self.about))];
+        let texts = texts.into_iter().filter_map(|(key, fault)| {
+            fault.map(|fault| Problem { subject: Subject::Whole, key: Some(key), fault, place: None })
+        });
+        let inputs = self.system.problems().into_iter().map(|problem| {
+            // The list of planets belongs to no body.
+            let subject = if problem.key == "planets" { Subject::Whole } else { self.subject(problem.body) };
+            Problem { subject, key: Some(problem.key), fault: problem.fault.into(), place: None }
+        });
+        texts.chain(inputs).collect()
+    }
+
+    /// A body as problems name it.
+    #[must_use]
+    pub fn subject(&self, body: Body) -> Subject {
+        match body {
+            Body::Star => Subject::Star { name: self.system.star.name.clone() },
+            Body::Planet(index) => {
+                let name = self.system.planets.get(index).map_or_else(String::new, |planet| planet.name.clone());
+                Subject::Planet { index, name }
+            }
+        }
+    }
+}
+
+impl Default for Scenario {
+    fn default() -> Self {
+        Self::new_untitled()
+    }
+}
+
+fn title_fault(title: &str) -> Option<Fault> {
+    let length = title.chars().count();
+    if title.trim().is_empty() {
+        return Some(Fault::EmptyText { key: "title", most: LONGEST_TITLE });
+    }
+    let bad = length > LONGEST_TITLE || title.chars().any(char::is_control);
+    bad.then_some(Fault::BadText { key: "title", length, most: LONGEST_TITLE })
+}
+
+fn about_fault(about: &str) -> Option<Fault> {
+    let length = about.chars().count();
+    let bad = length > LONGEST_ABOUT || about.chars().any(|character| character.is_control() && character != '\n');
+    bad.then_some(Fault::BadText { key: "about", length, most: LONGEST_ABOUT })
+}
+
+#[cfg(test)]
+mod tests {
+    use super::*;
+
+    #[test]
+    fn a_new_scenario_is_sound() {
+        assert_eq!(Scenario::new_untitled().problems(), []);
+    }
+
+    #[test]
+    fn problems_name_the_body() {
+        let mut scenario = Scenario::new_untitled();
+        scenario.title = " ".to_owned();
+        scenario.about = "one\ntwo\u{7}".to_owned();
+        scenario.system.planets[0].name = "Ember".to_owned();
+        scenario.system.planets[0].bond_albedo = 1.4;
+        let lines: Vec<_> = scenario.problems().iter().map(ToString::to_string).collect();
+        assert_eq!(
+            lines,
+            [
+                "title is empty, allowed 1 to 120 characters",
+                "about is 8 characters long or holds control characters, allowed up to 4000 printable characters",
+                "planet 1 \"Ember\": bond_albedo is 1.4, allowed 0 to 1",
+            ]
+        );
+    }
+}

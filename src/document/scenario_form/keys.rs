@@ -1,0 +1,28 @@
+//! The words of the file form.
+
+/// The version of the form that is written, and the newest that is read.
+///
+/// A change that old files can't be read under gets the next number, and a step in the reader that
+/// turns the tree of the version before into its own.
+pub const CURRENT_VERSION: u32 = 1;
+
+/// The name of the outermost struct.
+pub(super) const SCENARIO: &str = "Longember";
+pub(super) const SCENARIO_KEYS: &[&str] = &["version", "title", "about", "star", "planets"];
+pub(super) const STAR_KEYS: &[&str] = &["name", "mass_msun", "metallicity_dex", "present_age_yr"];
+pub(super) const PLANET_KEYS: &[&str] = &[
+    "name",
+    "semi_major_axis_au",
+    "eccentricity",
+    "mass_mearth",
+    "radius_rearth",
+    "bond_albedo",
+    "redistribution",
+    "emissivity",
+    "greenhouse",
+];
+pub(super) const GREENHOUSES: &[&str] = &["None", "FixedIncrement", "Grey"];
+pub(super) const FIXED_INCREMENT_KEYS: &[&str] = &["increment_k"];
+pub(super) const GREY_KEYS: &[&str] = &["optical_depth"];
+/// In the order of `Redistribution::ALL`.
+pub(super) const REDISTRIBUTIONS: &[&str] = &["WholePlanet", "DaySide", "DaySideFullPhase", "SubStellar"];
