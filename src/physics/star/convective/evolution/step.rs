@@ -15,7 +15,7 @@ const INTERIOR_ABOVE: f64 = 1e-3;
 /// Hydrogen mass fraction at a point within and outside four fifths of the mass.
 const AIM_HYDROGEN: [f64; 2] = [0.04, 0.08];
 /// ln of the star's mean hydrogen, and how much farther it may fall once little is left.
-const AIM_LN_MEAN_HYDROGEN: f64 = 0.03;
+const AIM_LN_MEAN_HYDROGEN: f64 = 0.010;
 const LITTLE_HYDROGEN: f64 = 0.03;
 const LITTLE_HYDROGEN_EASE: f64 = 0.3;
 /// ln of the surface's luminosity and temperature.
