@@ -1,5 +1,6 @@
 //! The colour of a glowing body at a temperature.
 
+use super::caution::Caution;
 use super::chromaticity::Tristimulus;
 use super::observer::blackbody_unchecked;
 use super::screen::{ScreenColour, hex, screen_colour};
@@ -16,6 +17,12 @@ pub const DRAPER_POINT_K: f64 = 798.0;
 /// # Source
 /// CIE 191:2010, upper end of the mesopic range.
 pub const FULL_COLOUR_FROM_CD_M2: f64 = 5.0;
+
+/// Temperature below which sodium, potassium and molecules take the colour away from a blackbody's, K.
+///
+/// # Source
+/// Burrows, Hubbard, Lunine & Liebert (2001), Reviews of Modern Physics 73, 719.
+const MOLECULES_BELOW_K: f64 = 2200.0;
 
 /// Hottest temperature a swatch is computed for, K; hotter bodies share its colour to 10⁻⁵.
 const HOTTEST_K: f64 = 1e9;
@@ -66,6 +73,19 @@ impl Swatch {
     pub fn hex(&self) -> String {
         hex(self.srgb)
     }
+
+    /// What to bear in mind beside this colour.
+    #[must_use]
+    pub fn cautions(&self) -> Vec<Caution> {
+        let mut cautions = vec![Caution::BlackbodyStandsIn];
+        if self.effective_temperature_k < MOLECULES_BELOW_K {
+            cautions.push(Caution::MolecularAbsorption);
+        }
+        if !self.in_srgb_gamut {
+            cautions.push(Caution::OutsideSrgb);
+        }
+        cautions
+    }
 }
 
 /// The colour of an ideal blackbody, for a screen with D65 white and an eye not adapted to the star.
@@ -77,7 +97,7 @@ impl Swatch {
 /// # Valid for
 /// Any number. Below 798 K, and for what is no temperature (zero, negative, NaN), nothing glows; NaN is kept
 /// as 0 K. Above 10⁹ K the colour no longer changes and the temperature is kept as 10⁹ K. A real star's colour
-/// differs from a blackbody's.
+/// differs from a blackbody's: see [`measured_dwarf_colour`](super::measured_dwarf_colour).
 ///
 /// # Example
 /// ```
