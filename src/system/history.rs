@@ -5,7 +5,7 @@ use super::moment::{Moment, PlanetMoment, StarMoment};
 use super::notes::{self, Note};
 use super::planet_past::PlanetPast;
 use super::specification::{Body, System, SystemProblem};
-use crate::physics::light::colour_words::MINIMUM_GLOW_K;
+use crate::physics::light::DRAPER_POINT_K;
 use crate::physics::planet::StarPoint;
 use crate::physics::star::{END_YR, PhaseSpan, StarError, StarInput, StarState, Track};
 use thiserror::Error;
@@ -123,6 +123,14 @@ impl History {
         Moment { time_yr, star: StarMoment::new(&state), planets, notes }
     }
 
+    /// The figures of star and planets at an age without the notes: what plots and tables read in bulk.
+    #[must_use]
+    pub fn figures_at(&self, age_yr: f64) -> (StarMoment, Vec<PlanetMoment>) {
+        let time_yr = held(age_yr);
+        let state = self.track.state_at(time_yr);
+        (StarMoment::new(&state), self.planets.iter().map(|past| past.moment(time_yr, &state)).collect())
+    }
+
     /// One planet at one moment.
     #[must_use]
     pub fn planet_at(&self, index: usize, age_yr: f64) -> Option<PlanetMoment> {
@@ -180,7 +188,7 @@ fn shown_until_yr(track: &Track) -> f64 {
     if !last.phase.is_white_dwarf() {
         return if last.phase.is_remnant() { (3.0 * last.from_yr).min(END_YR) } else { END_YR };
     }
-    let glows = |age_yr: f64| track.state_at(age_yr).effective_temperature_k > MINIMUM_GLOW_K;
+    let glows = |age_yr: f64| track.state_at(age_yr).effective_temperature_k > DRAPER_POINT_K;
     if glows(END_YR) {
         return END_YR;
     }

@@ -1,7 +1,7 @@
 //! Everything at one instant.
 
 use super::notes::Note;
-use crate::physics::light::{Swatch, blackbody_swatch, colour_words::colour_words};
+use crate::physics::light::{Swatch, blackbody_swatch, colour_words};
 use crate::physics::planet::habitable_zone::{ZoneLimit, ZonePlace, limit_flux};
 use crate::physics::star::{Phase, StarState};
 use crate::units::constants::WIEN_M_K;

@@ -1,0 +1,224 @@
+//! The words of the command line.
+
+use super::destination::Destination;
+use super::scenario_source::ScenarioSource;
+use crate::system::TimeScale;
+use clap::builder::{OsStringValueParser, PossibleValue, TypedValueParser};
+use clap::{Args, Parser, Subcommand, ValueEnum};
+use std::sync::LazyLock;
+
+/// Name and, where the build knows it, commit.
+static VERSION: LazyLock<String> = LazyLock::new(|| match option_env!("LONGEMBER_COMMIT") {
+    Some(commit) => format!("{} ({commit})", env!("CARGO_PKG_VERSION")),
+    None => env!("CARGO_PKG_VERSION").to_owned(),
+});
+
+const AFTER_HELP: &str = "\
+SCENARIO is a file, demo:NAME for a built-in one, or - for standard input.
+TIME counts from the star's arrival on the main sequence: 4.57Gyr, 2.1e12yr,
+\"3 trillion years\", now (the scenario's present age), or an event of this
+history by its name: event:\"largest radius\"
+
+Exit codes: 0 done, 2 wrong usage, 3 bad scenario or value, 4 file trouble.";
+
+/// A star's whole life and the fate of its planets, at any moment, with sources
+///
+/// Without a sub-command the window opens.
+#[derive(Debug, Parser)]
+#[command(
+    name = "longember",
+    version = VERSION.as_str(),
+    args_conflicts_with_subcommands = true,
+    max_term_width = 80,
+    after_help = AFTER_HELP
+)]
+pub(super) struct Arguments {
+    /// Scenario to open in the window: a file or demo:NAME; the demo if none is named
+    #[arg(value_name = "SCENARIO", value_parser = source_parser())]
+    pub(super) scenario: Option<ScenarioSource>,
+    /// What to do without a window.
+    #[command(subcommand)]
+    pub(super) command: Option<Command>,
+}
+
+/// A sub-command.
+#[derive(Debug, Subcommand)]
+pub(super) enum Command {
+    /// Everything about a scenario at one moment
+    #[command(after_help = "Example:\n  longember state demo:sunlike_five_worlds --at 4.57Gyr")]
+    State(StateArguments),
+    /// Everything about a star without planets at one moment, no file needed
+    #[command(after_help = "Example:\n  longember star --mass 2.5 --at 400Myr --format json")]
+    Star(StarArguments),
+    /// The whole history of a scenario as a table
+    #[command(after_help = "Example:\n  longember table demo:sunlike_five_worlds --points 200 --spacing paced")]
+    Table(TableArguments),
+    /// The dated events of star and planets
+    #[command(after_help = "Example:\n  longember events demo:sunlike_five_worlds")]
+    Events(EventsArguments),
+    /// List the built-in scenarios, or write one as a file to start from
+    #[command(after_help = "Example:\n  longember demo sunlike_five_worlds")]
+    Demo(DemoArguments),
+    /// Every method in use, with its paper, range and accuracy
+    #[command(after_help = "Example:\n  longember sources --format json")]
+    Sources(SourcesArguments),
+}
+
+/// `state`.
+#[derive(Args, Debug)]
+pub(super) struct StateArguments {
+    /// A file, demo:NAME, or - for standard input
+    #[arg(value_name = "SCENARIO", value_parser = source_parser())]
+    pub(super) scenario: ScenarioSource,
+    /// The moment: 4.57Gyr, "3 trillion years", now, event:"largest radius"
+    #[arg(long, value_name = "TIME", allow_hyphen_values = true)]
+    pub(super) at: String,
+    /// Form of the result
+    #[arg(long, value_enum, default_value_t)]
+    pub(super) format: PageFormat,
+}
+
+/// `star`.
+#[derive(Args, Debug)]
+pub(super) struct StarArguments {
+    /// Mass when the star reaches the main sequence, solar masses
+    #[arg(long, value_name = "MSUN", allow_negative_numbers = true)]
+    pub(super) mass: f64,
+    /// The moment: 4.57Gyr, "3 trillion years", event:"largest radius"
+    #[arg(long, value_name = "TIME", allow_hyphen_values = true)]
+    pub(super) at: String,
+    /// Metallicity [Fe/H], dex; 0 is the Sun's
+    #[arg(long, value_name = "DEX", default_value_t = 0.0, allow_negative_numbers = true)]
+    pub(super) metallicity: f64,
+    /// Form of the result
+    #[arg(long, value_enum, default_value_t)]
+    pub(super) format: PageFormat,
+}
+
+/// `table`.
+#[derive(Args, Debug)]
+pub(super) struct TableArguments {
+    /// A file, demo:NAME, or - for standard input
+    #[arg(value_name = "SCENARIO", value_parser = source_parser())]
+    pub(super) scenario: ScenarioSource,
+    /// First moment; birth if left out (five decades before the end with log spacing)
+    #[arg(long, value_name = "TIME", allow_hyphen_values = true)]
+    pub(super) from: Option<String>,
+    /// Last moment; the end of what the window shows if left out
+    #[arg(long, value_name = "TIME", allow_hyphen_values = true)]
+    pub(super) to: Option<String>,
+    /// Number of rows, 2 to 100000
+    #[arg(long, value_name = "N", default_value_t = 400)]
+    pub(super) points: usize,
+    /// How the rows are spread over time; paced gives every visible change a similar share
+    #[arg(long, value_enum, default_value_t = SpacingArgument(TimeScale::Paced))]
+    pub(super) spacing: SpacingArgument,
+    /// Form of the result; if left out, the extension of --out decides, else csv
+    #[arg(long, value_enum)]
+    pub(super) format: Option<TableFormat>,
+    /// Where the result goes.
+    #[command(flatten)]
+    pub(super) destination: Destination,
+}
+
+/// `events`.
+#[derive(Args, Debug)]
+pub(super) struct EventsArguments {
+    /// A file, demo:NAME, or - for standard input
+    #[arg(value_name = "SCENARIO", value_parser = source_parser())]
+    pub(super) scenario: ScenarioSource,
+    /// Form of the result; if left out, the extension of --out decides, else text
+    #[arg(long, value_enum)]
+    pub(super) format: Option<EventsFormat>,
+    /// Where the result goes.
+    #[command(flatten)]
+    pub(super) destination: Destination,
+}
+
+/// `demo`.
+#[derive(Args, Debug)]
+pub(super) struct DemoArguments {
+    /// The scenario to write; all are listed if none is named
+    #[arg(value_name = "NAME")]
+    pub(super) name: Option<String>,
+    /// Where the result goes.
+    #[command(flatten)]
+    pub(super) destination: Destination,
+}
+
+/// `sources`.
+#[derive(Args, Debug)]
+pub(super) struct SourcesArguments {
+    /// Form of the result
+    #[arg(long, value_enum, default_value_t)]
+    pub(super) format: PageFormat,
+}
+
+/// Form of a page.
+#[derive(Clone, Copy, Debug, Default, PartialEq, Eq, ValueEnum)]
+pub(super) enum PageFormat {
+    /// For people.
+    #[default]
+    Text,
+    /// For programs.
+    Json,
+}
+
+/// Form of a table.
+#[derive(Clone, Copy, Debug, PartialEq, Eq, ValueEnum)]
+pub(super) enum TableFormat {
+    /// Comma-separated values.
+    Csv,
+    /// Comma-separated values under a header with units.
+    Ecsv,
+    /// One object per row.
+    Json,
+}
+
+/// Form of a list of events.
+#[derive(Clone, Copy, Debug, PartialEq, Eq, ValueEnum)]
+pub(super) enum EventsFormat {
+    /// For people.
+    Text,
+    /// Comma-separated values.
+    Csv,
+    /// For programs.
+    Json,
+}
+
+/// A time scale as an argument.
+#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+pub(super) struct SpacingArgument(pub(super) TimeScale);
+
+impl ValueEnum for SpacingArgument {
+    fn value_variants<'a>() -> &'a [Self] {
+        &[Self(TimeScale::Linear), Self(TimeScale::Log), Self(TimeScale::Paced)]
+    }
+
+    fn to_possible_value(&self) -> Option<PossibleValue> {
+        Some(PossibleValue::new(self.0.key()))
+    }
+}
+
+fn source_parser() -> impl TypedValueParser<Value = ScenarioSource> {
+    OsStringValueParser::new().map(ScenarioSource::parse)
+}
+
+#[cfg(test)]
+mod tests {
+    use super::*;
+    use clap::CommandFactory;
+
+    #[test]
+    fn the_definition_is_sound() {
+        Arguments::command().debug_assert();
+    }
+
+    #[test]
+    fn every_sub_command_shows_an_example_of_itself() {
+        for command in Arguments::command().get_subcommands().filter(|command| command.get_name() != "help") {
+            let after = command.get_after_help().map(ToString::to_string).unwrap_or_default();
+            assert!(after.contains(&format!("longember {}", command.get_name())), "{}", command.get_name());
+        }
+    }
+}

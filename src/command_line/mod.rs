@@ -1,0 +1,18 @@
+//! The command line: arguments to a typed command, the command to text, the outcome to an exit code.
+//!
+//! Standard output carries only the result; every message goes to standard error. Exit codes: 0 done, 2 wrong
+//! usage, 3 a bad scenario or value, 4 trouble with a file or the system. (1 is kept for "the answer is no".)
+
+mod arguments;
+mod destination;
+mod moment_request;
+mod outcome;
+mod run;
+mod scenario_source;
+mod streams;
+mod trouble;
+
+pub use outcome::Outcome;
+pub use run::{run, run_with};
+pub use scenario_source::ScenarioSource;
+pub use streams::Streams;

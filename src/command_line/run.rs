@@ -1,0 +1,202 @@
+//! A command from its words to its exit code.
+
+use super::arguments::{
+    Arguments, Command, DemoArguments, EventsArguments, EventsFormat, PageFormat, SourcesArguments, StarArguments,
+    StateArguments, TableArguments, TableFormat,
+};
+use super::moment_request::{MomentProblem, MomentRequest};
+use super::outcome::{DONE, Outcome, SYSTEM_TROUBLE, WRONG_USAGE};
+use super::scenario_source::{ScenarioSource, find_demo};
+use super::streams::Streams;
+use super::trouble::Trouble;
+use crate::document::{Scenario, built_in};
+use crate::handover;
+use crate::system::{History, StarSpecification, System};
+use crate::units::number_text::machine;
+use clap::Parser;
+use std::ffi::OsString;
+use std::io;
+
+/// Runs a command line, the program's own name first, on the standard streams of the process.
+///
+/// Without a sub-command nothing is computed and [`Outcome::OpenWindow`] says what to open.
+pub fn run(arguments: impl IntoIterator<Item = OsString>) -> Outcome {
+    let streams = &mut Streams { input: &mut io::stdin(), results: &mut io::stdout(), messages: &mut io::stderr() };
+    run_with(arguments, streams)
+}
+
+/// Runs a command line on the given streams.
+pub fn run_with(arguments: impl IntoIterator<Item = OsString>, streams: &mut Streams<'_>) -> Outcome {
+    match Arguments::try_parse_from(arguments) {
+        Err(error) => Outcome::Done(tell_about_words(&error, streams)),
+        Ok(Arguments { command: None, scenario }) => match openable(scenario) {
+            Ok(scenario) => Outcome::OpenWindow { scenario },
+            Err(trouble) => Outcome::Done(tell(&trouble, streams)),
+        },
+        Ok(Arguments { command: Some(command), .. }) => Outcome::Done(match carry_out(command, streams) {
+            Ok(()) => DONE,
+            Err(trouble) => tell(&trouble, streams),
+        }),
+    }
+}
+
+/// Help and version are results; everything else the parser says is a message.
+fn tell_about_words(error: &clap::Error, streams: &mut Streams<'_>) -> u8 {
+    let text = error.render().to_string();
+    if error.use_stderr() {
+        streams.message(&text);
+        return WRONG_USAGE;
+    }
+    match streams.result(&text) {
+        Ok(()) => DONE,
+        Err(_) => SYSTEM_TROUBLE,
+    }
+}
+
+fn tell(trouble: &Trouble, streams: &mut Streams<'_>) -> u8 {
+    // A scenario with several problems gets one line for each.
+    for line in trouble.to_string().lines() {
+        streams.message(&format!("longember: {line}"));
+    }
+    trouble.exit_code()
+}
+
+/// Refuses what the window could not open anyway, while there is still a terminal to say so.
+fn openable(scenario: Option<ScenarioSource>) -> Result<Option<ScenarioSource>, Trouble> {
+    match &scenario {
+        Some(ScenarioSource::StandardInput) => return Err(Trouble::WindowFromStandardInput),
+        Some(ScenarioSource::Demo(name)) => {
+            find_demo(name)?;
+        }
+        Some(ScenarioSource::File(path)) if !path.exists() => {
+            return Err(Trouble::NothingToOpen { path: path.clone() });
+        }
+        Some(ScenarioSource::File(_)) | None => {}
+    }
+    Ok(scenario)
+}
+
+fn carry_out(command: Command, streams: &mut Streams<'_>) -> Result<(), Trouble> {
+    match command {
+        Command::State(arguments) => state(&arguments, streams),
+        Command::Star(arguments) => star(&arguments, streams),
+        Command::Table(arguments) => table(&arguments, streams),
+        Command::Events(arguments) => events(&arguments, streams),
+        Command::Demo(arguments) => demo(&arguments, streams),
+        Command::Sources(arguments) => sources(&arguments, streams),
+    }
+}
+
+fn state(arguments: &StateArguments, streams: &mut Streams<'_>) -> Result<(), Trouble> {
+    let request = MomentRequest::parse(&arguments.at)?;
+    let scenario = arguments.scenario.load(streams)?;
+    let present_age_yr = scenario.system.star.present_age_yr;
+    let (title, history) = computed(scenario)?;
+    let time_yr = request.time_yr(&history, Some(present_age_yr))?;
+    show_moment(&history, &title, time_yr, arguments.format, streams)
+}
+
+fn star(arguments: &StarArguments, streams: &mut Streams<'_>) -> Result<(), Trouble> {
+    let request = MomentRequest::parse(&arguments.at)?;
+    let star = StarSpecification {
+        mass_msun: arguments.mass,
+        metallicity_dex: arguments.metallicity,
+        ..StarSpecification::default()
+    };
+    let history = History::compute(System { star, planets: Vec::new() })?;
+    let time_yr = request.time_yr(&history, None)?;
+    let mass = machine(arguments.mass).unwrap_or_default();
+    let metallicity = machine(arguments.metallicity).unwrap_or_default();
+    let title = format!("A star of {mass} M☉ at birth, [Fe/H] {metallicity} dex");
+    show_moment(&history, &title, time_yr, arguments.format, streams)
+}
+
+fn show_moment(
+    history: &History,
+    title: &str,
+    time_yr: f64,
+    format: PageFormat,
+    streams: &mut Streams<'_>,
+) -> Result<(), Trouble> {
+    let moment = history.moment(time_yr);
+    let text = match format {
+        PageFormat::Text => handover::instant_text(history, title, &moment),
+        PageFormat::Json => handover::instant_json(history, &moment),
+    };
+    streams.result(&text).map_err(Trouble::StandardOutput)
+}
+
+fn table(arguments: &TableArguments, streams: &mut Streams<'_>) -> Result<(), Trouble> {
+    arguments.destination.check()?;
+    let end = |end, problem| Trouble::TableEnd { end, problem };
+    let requested = |name, text: &Option<String>| {
+        text.as_deref().map(MomentRequest::parse).transpose().map_err(|problem| end(name, problem))
+    };
+    let (from, to) = (requested("from", &arguments.from)?, requested("to", &arguments.to)?);
+    let scenario = arguments.scenario.load(streams)?;
+    let present_age_yr = scenario.system.star.present_age_yr;
+    let (title, history) = computed(scenario)?;
+    let resolved = |name, request: Option<MomentRequest>| {
+        let time_yr =
+            |request: MomentRequest| -> Result<f64, MomentProblem> { request.time_yr(&history, Some(present_age_yr)) };
+        request.map(time_yr).transpose().map_err(|problem| end(name, problem))
+    };
+    let (from_yr, to_yr) = (resolved("from", from)?, resolved("to", to)?);
+    let ages_yr = handover::table_ages(&history, from_yr, to_yr, arguments.points, arguments.spacing.0)?;
+    let by_extension = || match arguments.destination.extension().as_deref() {
+        Some("json") => TableFormat::Json,
+        Some("ecsv") => TableFormat::Ecsv,
+        _ => TableFormat::Csv,
+    };
+    let text = match arguments.format.unwrap_or_else(by_extension) {
+        TableFormat::Csv => handover::table_csv(&history, &ages_yr),
+        TableFormat::Ecsv => handover::table_ecsv(&history, &title, &ages_yr),
+        TableFormat::Json => handover::table_json(&history, &title, &ages_yr),
+    };
+    arguments.destination.deliver(&text, streams)
+}
+
+fn events(arguments: &EventsArguments, streams: &mut Streams<'_>) -> Result<(), Trouble> {
+    arguments.destination.check()?;
+    let (title, history) = computed(arguments.scenario.load(streams)?)?;
+    let by_extension = || match arguments.destination.extension().as_deref() {
+        Some("json") => EventsFormat::Json,
+        Some("csv") => EventsFormat::Csv,
+        _ => EventsFormat::Text,
+    };
+    let text = match arguments.format.unwrap_or_else(by_extension) {
+        EventsFormat::Text => handover::events_text(&history, &title),
+        EventsFormat::Csv => handover::events_csv(&history),
+        EventsFormat::Json => handover::events_json(&history),
+    };
+    arguments.destination.deliver(&text, streams)
+}
+
+fn demo(arguments: &DemoArguments, streams: &mut Streams<'_>) -> Result<(), Trouble> {
+    if let Some(name) = &arguments.name {
+        arguments.destination.check()?;
+        return arguments.destination.deliver(find_demo(name)?.text, streams);
+    }
+    if arguments.destination.out.is_some() {
+        return Err(Trouble::OptionNeeds { option: "--out", needs: "NAME" });
+    }
+    arguments.destination.check()?;
+    let titles = built_in::all().iter().map(|built_in| {
+        let scenario = built_in.scenario().map_err(|problems| Trouble::BuiltIn { problems })?;
+        Ok((built_in.name, scenario.title))
+    });
+    let titles: Vec<(&str, String)> = titles.collect::<Result<_, Trouble>>()?;
+    streams.result(&handover::named_list(&titles)).map_err(Trouble::StandardOutput)
+}
+
+fn sources(arguments: &SourcesArguments, streams: &mut Streams<'_>) -> Result<(), Trouble> {
+    let text = match arguments.format {
+        PageFormat::Text => handover::sources_text(),
+        PageFormat::Json => handover::sources_json(),
+    };
+    streams.result(&text).map_err(Trouble::StandardOutput)
+}
+
+fn computed(scenario: Scenario) -> Result<(String, History), Trouble> {
+    Ok((scenario.title, History::compute(scenario.system)?))
+}

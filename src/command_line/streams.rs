@@ -1,0 +1,31 @@
+//! Where a command reads and writes.
+
+use std::io::{self, Read, Write};
+
+/// Standard input, output and error of a command, or what stands for them in a test.
+pub struct Streams<'a> {
+    /// Where a scenario named `-` is read.
+    pub input: &'a mut dyn Read,
+    /// Where results go.
+    pub results: &'a mut dyn Write,
+    /// Where messages go.
+    pub messages: &'a mut dyn Write,
+}
+
+impl Streams<'_> {
+    /// Writes a result.
+    ///
+    /// A reader that stops listening, as `head` does, has what it wants: that is no error.
+    pub(super) fn result(&mut self, text: &str) -> io::Result<()> {
+        match self.results.write_all(text.as_bytes()).and_then(|()| self.results.flush()) {
+            Err(error) if error.kind() == io::ErrorKind::BrokenPipe => Ok(()),
+            written => written,
+        }
+    }
+
+    /// Writes a message. There is nowhere left to report that this failed, so a failure is let go.
+    pub(super) fn message(&mut self, text: &str) {
+        let _ = writeln!(self.messages, "{}", text.trim_end());
+        let _ = self.messages.flush();
+    }
+}

@@ -1,0 +1,119 @@
+//! Everything that can end a command early, with its sentence and its exit code.
+
+use super::moment_request::MomentProblem;
+use super::outcome::{BAD_VALUE, SYSTEM_TROUBLE, WRONG_USAGE};
+use crate::document::{LoadError, Problem, WriteError, built_in};
+use crate::handover::TableAgesProblem;
+use crate::system::HistoryError;
+use std::io;
+use std::path::PathBuf;
+use thiserror::Error;
+
+/// Why a command could not be carried out.
+#[derive(Debug, Error)]
+pub(super) enum Trouble {
+    /// The scenario can't be read.
+    #[error(transparent)]
+    Load(#[from] LoadError),
+    /// A built-in scenario is not sound.
+    #[error("a built-in scenario is faulty; please report it: {}", lines(problems))]
+    BuiltIn {
+        /// Everything that is wrong with it.
+        problems: Vec<Problem>,
+    },
+    /// There is no built-in scenario of that name.
+    #[error("the demo \"{name}\" does not exist, allowed {}; name one of these", demo_names())]
+    NoSuchDemo {
+        /// The name asked for.
+        name: String,
+    },
+    /// Standard input can't be read.
+    #[error("standard input can't be read: {0}; name a file instead")]
+    StandardInput(io::Error),
+    /// The window opens files, not streams.
+    #[error("the window can't open standard input, allowed a file or demo:NAME; save the scenario to a file first")]
+    WindowFromStandardInput,
+    /// The file named for the window does not exist.
+    #[error("{} does not exist, allowed a scenario file, demo:NAME or a sub-command; see longember --help", path.display())]
+    NothingToOpen {
+        /// The path.
+        path: PathBuf,
+    },
+    /// The system has no history.
+    #[error(transparent)]
+    History(#[from] HistoryError),
+    /// The time asked for is no moment of this history.
+    #[error(transparent)]
+    Moment(#[from] MomentProblem),
+    /// One end of a table's span is no moment.
+    #[error("--{end}: {problem}")]
+    TableEnd {
+        /// Which end: `from` or `to`.
+        end: &'static str,
+        /// What is wrong with it.
+        problem: MomentProblem,
+    },
+    /// No such table.
+    #[error(transparent)]
+    TableAges(#[from] TableAgesProblem),
+    /// A file is in the way.
+    #[error("{} exists already; add --force to replace it, or choose another name", path.display())]
+    FileExists {
+        /// The file.
+        path: PathBuf,
+    },
+    /// A result file can't be written.
+    #[error(transparent)]
+    Write(WriteError),
+    /// Standard output can't be written.
+    #[error("standard output can't be written: {0}; write to a file with --out instead")]
+    StandardOutput(io::Error),
+    /// An option that needs another one.
+    #[error("{option} is given without {needs}, allowed together with it only; add {needs} or leave {option} out")]
+    OptionNeeds {
+        /// The option given.
+        option: &'static str,
+        /// What it needs.
+        needs: &'static str,
+    },
+}
+
+impl From<WriteError> for Trouble {
+    fn from(error: WriteError) -> Self {
+        match error {
+            WriteError::Exists { path } => Self::FileExists { path },
+            other => Self::Write(other),
+        }
+    }
+}
+
+impl Trouble {
+    /// The exit code it ends the process with.
+    pub(super) fn exit_code(&self) -> u8 {
+        match self {
+            Self::OptionNeeds { .. } | Self::WindowFromStandardInput => WRONG_USAGE,
+            Self::Load(LoadError::Unsound { .. })
+            | Self::BuiltIn { .. }
+            | Self::NoSuchDemo { .. }
+            | Self::History(_)
+            | Self::Moment(_)
+            | Self::TableEnd { .. }
+            | Self::TableAges(_)
+            | Self::Write(WriteError::Unsound { .. }) => BAD_VALUE,
+            Self::Load(LoadError::Unreadable { .. })
+            | Self::StandardInput(_)
+            | Self::NothingToOpen { .. }
+            | Self::FileExists { .. }
+            | Self::Write(_)
+            | Self::StandardOutput(_) => SYSTEM_TROUBLE,
+        }
+    }
+}
+
+fn demo_names() -> String {
+    built_in::all().iter().map(|built_in| built_in.name).collect::<Vec<_>>().join(", ")
+}
+
+fn lines(problems: &[Problem]) -> String {
+    problems.iter().map(ToString::to_string).collect::<Vec<_>>().join("; ")
+}
