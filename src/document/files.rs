@@ -81,8 +81,12 @@ pub fn read_scenario(path: &Path) -> Result<Scenario, LoadError> {
 /// # Errors
 /// [`LoadError`] with every problem of the file.
 pub fn read_scenario_text(path: &Path) -> Result<ScenarioText, LoadError> {
-    let name = path.file_name().map_or_else(|| path.display().to_string(), |name| name.to_string_lossy().into_owned());
-    scenario_from_bytes(&read_bytes(path)?, &name)
+    scenario_from_bytes(&read_bytes(path)?, &shown_name(path))
+}
+
+/// The name of a file as problems show it: without its folder.
+pub(super) fn shown_name(path: &Path) -> String {
+    path.file_name().unwrap_or(path.as_os_str()).to_string_lossy().into_owned()
 }
 
 /// Reads a scenario from bytes, such as standard input; `name` is what problems call it.
@@ -123,7 +127,7 @@ pub fn read_bytes(path: &Path) -> Result<Vec<u8>, LoadError> {
     // A pipe has no length to ask for.
     file.take(LARGEST_FILE_BYTES + 1).read_to_end(&mut bytes).map_err(unreadable)?;
     if bytes.len() as u64 > LARGEST_FILE_BYTES {
-        let name = path.file_name().map_or_else(String::new, |name| name.to_string_lossy().into_owned());
+        let name = shown_name(path);
         let fault = SyntaxFault::TooLarge { bytes: metadata.len().max(bytes.len() as u64), most: LARGEST_FILE_BYTES };
         return Err(LoadError::Unsound { problems: vec![problem_at(&name, (1, 1), fault)] });
     }
