@@ -1,7 +1,9 @@
 //! The star while it burns: luminosity, radius and core on the track it follows at its present mass.
 
 use super::analytic::helium_star::HeliumGiant;
-use super::analytic::{Anchors, CARBON_IGNITION_CORE_MSUN, CoreGrowth, Fit, MainSequence, helium_star};
+use super::analytic::{
+    Anchors, CARBON_IGNITION_CORE_MSUN, CoreGrowth, Fit, MainSequence, explosive_core_msun, helium_star,
+};
 use super::mass_loss::WindSource;
 use super::phase::Phase;
 use super::small_envelope::{Surface, envelope_measure, helium_envelope_measure, shown_through};
@@ -16,12 +18,19 @@ pub(super) struct Look {
     pub(super) radius_rsun: f64,
     /// Hydrogen-exhausted core, solar masses.
     pub(super) core_msun: f64,
-    /// Core whose growth decides the end: carbon–oxygen on the late branches, else the hydrogen-exhausted one.
+    /// Carbon–oxygen core of the late branches; before them the hydrogen-exhausted core again, solar masses.
     pub(super) inner_core_msun: f64,
     /// Mass still to be lost or burnt before the phase ends bare, solar masses; infinite where it cannot.
     pub(super) envelope_msun: f64,
     /// The small-envelope measure; below one the core shows through.
     pub(super) envelope_measure: f64,
+}
+
+impl Look {
+    /// The core that eats into the envelope, solar masses.
+    pub(super) fn eating_core_msun(&self, phase: Phase) -> f64 {
+        if phase == Phase::HeliumGiant { self.inner_core_msun } else { self.core_msun }
+    }
 }
 
 /// A burning star: the track it is on and how far it has come.
@@ -52,6 +61,8 @@ pub(super) struct HeliumStar {
     pub(super) giant: HeliumGiant,
     /// Growth of its core as a giant.
     pub(super) growth: CoreGrowth,
+    /// Core at which it explodes, solar masses.
+    pub(super) explosive_core_msun: f64,
 }
 
 impl HeliumStar {
@@ -63,6 +74,7 @@ impl HeliumStar {
             burning_myr: helium_star::core_burning_myr(mass_msun),
             giant,
             growth: giant.growth(giant.start_luminosity_lsun),
+            explosive_core_msun: explosive_core_msun(mass_msun),
         }
     }
 
@@ -101,10 +113,13 @@ impl<'a> Burning<'a> {
         self.look_at(self.clock_myr, self.mass_msun)
     }
 
-    /// The star at another time on its clock and another mass, on the same track.
+    /// The star at another time on its clock and another mass.
+    ///
+    /// While its core burns in the open (both main sequences) it changes to the track of that mass at the same fraction
+    /// of its burning time; later the track is fixed.
     pub(super) fn look_at(&self, clock_myr: f64, mass_msun: f64) -> Look {
         match self.phase {
-            Phase::MainSequence => bare(self.main_sequence.at(clock_myr), 0.0, f64::INFINITY),
+            Phase::MainSequence => bare(self.main_sequence_at(clock_myr, mass_msun), 0.0, f64::INFINITY),
             Phase::HertzsprungGap => self.hertzsprung_gap(clock_myr, mass_msun),
             Phase::FirstGiantBranch => self.first_giant_branch(clock_myr, mass_msun),
             Phase::CoreHeliumBurning => self.core_helium_burning(clock_myr, mass_msun),
@@ -112,10 +127,19 @@ impl<'a> Burning<'a> {
             Phase::PulsingAsymptoticGiant => self.pulsing_asymptotic_giant(clock_myr, mass_msun),
             Phase::HeliumMainSequence => {
                 let fraction = (clock_myr / self.helium.burning_myr).min(1.0);
-                bare(helium_star::burning(self.helium.mass_msun, fraction), mass_msun, f64::INFINITY)
+                bare(helium_star::burning(mass_msun, fraction), mass_msun, f64::INFINITY)
             }
             _ => self.helium_giant(clock_myr, mass_msun),
         }
+    }
+
+    fn main_sequence_at(&self, clock_myr: f64, mass_msun: f64) -> Surface {
+        let here = &self.main_sequence;
+        if mass_msun == here.mass_msun {
+            return here.at(clock_myr);
+        }
+        let there = self.fit.main_sequence(mass_msun);
+        there.at(clock_myr * (there.end_myr / here.end_myr))
     }
 
     /// Rate of mass loss of the star as it looks, solar masses per year.

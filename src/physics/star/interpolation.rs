@@ -16,23 +16,15 @@ pub(super) struct Curve {
 }
 
 impl Curve {
-    /// The curve through nodes of strictly rising age; nodes that do not rise are left out.
+    /// The curve through nodes in order of age. Two nodes of one age mark a bend: the slope may change there.
     pub(super) fn new(nodes: impl IntoIterator<Item = (f64, [f64; QUANTITIES])>) -> Self {
-        let (mut ages, mut values): (Vec<f64>, Vec<[f64; QUANTITIES]>) = (Vec::new(), Vec::new());
-        for (age, value) in nodes {
-            if ages.last().is_none_or(|&last| age > last) {
-                ages.push(age);
-                values.push(value);
-            } else if let Some(last) = values.last_mut() {
-                *last = value;
-            }
-        }
-        let mut slopes = vec![[0.0; QUANTITIES]; ages.len()];
-        for quantity in 0..QUANTITIES {
-            let column = |index: usize| values[index][quantity];
-            for (index, slope) in node_slopes(&ages, column).into_iter().enumerate() {
-                slopes[index][quantity] = slope;
-            }
+        let (ages, values): (Vec<f64>, Vec<[f64; QUANTITIES]>) = nodes.into_iter().unzip();
+        let mut slopes = Vec::with_capacity(ages.len());
+        let mut start = 0;
+        while start < ages.len() {
+            let end = (start + 1..ages.len()).find(|&index| ages[index] <= ages[index - 1]).unwrap_or(ages.len());
+            slopes.extend(stretch_slopes(&ages[start..end], &values[start..end]));
+            start = end;
         }
         Self { ages, values, slopes }
     }
@@ -67,6 +59,17 @@ impl Curve {
             ((&self.values[before], &self.values[after]), (&self.slopes[before], &self.slopes[after]));
         std::array::from_fn(|q| v0[q] * start + v1[q] * end + d0[q] * rise_start + d1[q] * rise_end)
     }
+}
+
+/// Slopes at the nodes of one smooth stretch.
+fn stretch_slopes(ages: &[f64], values: &[[f64; QUANTITIES]]) -> Vec<[f64; QUANTITIES]> {
+    let mut slopes = vec![[0.0; QUANTITIES]; ages.len()];
+    for quantity in 0..QUANTITIES {
+        for (slope, found) in slopes.iter_mut().zip(node_slopes(ages, |index| values[index][quantity])) {
+            slope[quantity] = found;
+        }
+    }
+    slopes
 }
 
 fn node_slopes(ages: &[f64], value: impl Fn(usize) -> f64) -> Vec<f64> {
@@ -135,6 +138,15 @@ mod tests {
                 assert!((value - before) * (pair[1].1 - pair[0].1) >= -1e-12, "turned back at {age}");
                 before = value;
             }
+        }
+    }
+
+    #[test]
+    fn it_bends_where_a_node_stands_twice() {
+        let nodes = [(0.0, 0.0), (1.0, 1.0), (2.0, 2.0), (2.0, 2.0), (3.0, 5.0), (4.0, 8.0)];
+        let curve = Curve::new(nodes.map(|(age, value)| (age, all(value))));
+        for (age, value) in [(1.5, 1.5), (1.9, 1.9), (2.0, 2.0), (2.1, 2.3), (3.7, 7.1)] {
+            assert!((curve.at(age)[0] - value).abs() < 1e-12);
         }
     }
 

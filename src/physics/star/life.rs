@@ -1,19 +1,22 @@
 //! A whole life: phase after phase, step by step, with the wind.
 
-use super::analytic::{
-    CARBON_IGNITION_CORE_MSUN, CORE_COLLAPSE_CORE_MSUN, CoreGrowth, Fit, explosive_core_msun, helium_star,
-};
+use super::analytic::{CARBON_IGNITION_CORE_MSUN, CORE_COLLAPSE_CORE_MSUN, CoreGrowth, Fit, helium_star};
 use super::burning::{Burning, HeliumStar, Look, helium_giant_end_msun};
 use super::event::{StarEvent, StarEventKind};
 use super::phase::Phase;
 use super::remnant::Collapse;
+use super::small_envelope::thin_envelope_measure;
 
 const YR_PER_MYR: f64 = 1e6;
 
 /// The envelope counts as gone when the star is heavier than its core by less than this fraction.
 const GONE: f64 = 1e-4;
+/// A burnt-out helium core counts as bare below this fraction of the measure at which it outshines its envelope.
+const TRACE: f64 = 0.2;
 /// Largest error of log luminosity and log radius halfway between two nodes if joined by a straight line.
 const NODE_TOLERANCE: f64 = 2e-3;
+/// Largest error of the mass lost in one step, as a fraction of the envelope.
+const LOSS_TOLERANCE: f64 = 5e-4;
 /// Longest step in units of the time of a phase, with wind.
 const SPAN_STEP: f64 = 5e-3;
 /// Longest step in units of the time of a phase, without noticeable wind.
@@ -64,12 +67,10 @@ pub(super) struct Life {
 /// Why a phase ends.
 #[derive(Clone, Copy, Debug, PartialEq, Eq)]
 enum PhaseEnd {
-    /// Its time is over.
+    /// Its time is over: what burnt is spent, or the core explodes.
     Time,
     /// The envelope is gone.
     Bare,
-    /// The core has reached the mass at which it explodes.
-    Explosion,
 }
 
 /// What comes after a phase.
@@ -113,7 +114,11 @@ impl Walk<'_> {
         self.events.push(StarEvent { age_yr: self.age_yr(), kind });
     }
 
-    /// Time on the clock at which the phase is over, Myr; infinite if only its core or envelope ends it.
+    fn node(&self, look: Look, mass_loss_msun_yr: f64) -> Node {
+        Node { age_yr: self.age_yr(), look, mass_msun: self.star.mass_msun, mass_loss_msun_yr }
+    }
+
+    /// Time on the clock at which the phase is over, Myr: burning ends, or the core is massive enough to explode.
     fn phase_end_myr(&self) -> f64 {
         let (star, a) = (&self.star, &self.star.anchors);
         match star.phase {
@@ -122,8 +127,12 @@ impl Walk<'_> {
             Phase::FirstGiantBranch => a.ignition_myr,
             Phase::CoreHeliumBurning => a.asymptotic_base_myr(),
             Phase::EarlyAsymptoticGiant => a.early_end_myr(),
+            Phase::PulsingAsymptoticGiant => a.pulses_explosion_myr(),
             Phase::HeliumMainSequence => star.helium.burning_myr,
-            _ => f64::INFINITY,
+            _ => {
+                let growth = &star.helium.growth;
+                growth.time_at_myr(growth.relation().luminosity_lsun(star.helium.explosive_core_msun))
+            }
         }
     }
 
@@ -164,30 +173,23 @@ impl Walk<'_> {
         }
     }
 
-    /// Whether the phase is over for the star as it looks.
-    fn over(&self, look: &Look) -> Option<PhaseEnd> {
+    /// Whether the star has nothing left around its core, so that the phase cannot go on.
+    fn is_bare(&self, look: &Look) -> bool {
         let (star, a) = (&self.star, &self.star.anchors);
         match star.phase {
-            Phase::MainSequence | Phase::HeliumMainSequence => None,
-            Phase::HeliumGiant => {
-                let explosive = explosive_core_msun(star.helium.mass_msun);
-                if look.inner_core_msun >= explosive {
-                    Some(PhaseEnd::Explosion)
-                } else if look.envelope_msun <= 0.0 {
-                    Some(PhaseEnd::Bare)
-                } else {
-                    None
-                }
+            Phase::MainSequence | Phase::HeliumMainSequence => false,
+            // A core that explodes does so with or without its envelope.
+            Phase::HeliumGiant => look.envelope_msun <= 0.0 && look.inner_core_msun < star.helium.explosive_core_msun,
+            Phase::PulsingAsymptoticGiant if look.core_msun >= a.explosive_core_msun => false,
+            // Under the last trace of envelope the helium star inside has burnt out: it cools from now on.
+            Phase::EarlyAsymptoticGiant
+                if look.envelope_measure < TRACE * thin_envelope_measure(star.mass_msun)
+                    && look.inner_core_msun >= helium_star::largest_core_msun(look.core_msun)
+                    && look.inner_core_msun < a.explosive_core_msun =>
+            {
+                true
             }
-            phase => {
-                if phase == Phase::PulsingAsymptoticGiant && look.core_msun >= a.explosive_core_msun {
-                    Some(PhaseEnd::Explosion)
-                } else if look.envelope_msun <= GONE * look.core_msun {
-                    Some(PhaseEnd::Bare)
-                } else {
-                    None
-                }
-            }
+            _ => look.envelope_msun <= GONE * look.core_msun,
         }
     }
 
@@ -200,14 +202,9 @@ impl Walk<'_> {
         let mut rate_yr = self.star.wind_msun_yr(&look, self.star.mass_msun);
         let mut trusted_step_myr = f64::INFINITY;
         let reason = loop {
-            nodes.push(Node {
-                age_yr: self.age_yr(),
-                look,
-                mass_msun: self.star.mass_msun,
-                mass_loss_msun_yr: rate_yr,
-            });
-            if let Some(reason) = self.over(&look) {
-                break reason;
+            nodes.push(self.node(look, rate_yr));
+            if self.is_bare(&look) {
+                break PhaseEnd::Bare;
             }
             // With wind the main sequence changes and its end with it.
             let end_myr = if phase == Phase::MainSequence || phase == Phase::HeliumMainSequence {
@@ -222,8 +219,15 @@ impl Walk<'_> {
             let step = self.step(&look, rate_yr * YR_PER_MYR, left_myr, trusted_step_myr);
             trusted_step_myr = step.next_myr;
             self.take(&step, left_myr);
-            look = if step.track_changed { self.star.look() } else { step.look };
-            rate_yr = self.star.wind_msun_yr(&look, self.star.mass_msun);
+            (look, rate_yr) = (step.look, step.rate_msun_yr);
+            if step.track_changed {
+                look = self.star.look();
+                rate_yr = self.star.wind_msun_yr(&look, self.star.mass_msun);
+            }
+            if step.at_bend {
+                // A node twice tells the interpolation that the course bends here.
+                nodes.push(self.node(look, rate_yr));
+            }
         };
         let lasted = nodes.last().zip(nodes.first()).is_some_and(|(last, first)| last.age_yr > first.age_yr);
         if lasted {
@@ -240,11 +244,13 @@ impl Walk<'_> {
         if rate > 0.0 {
             length = length.min(ENVELOPE_STEP * envelope / rate).min(MASS_STEP * star.mass_msun / rate);
         }
+        let mut bend_myr = f64::INFINITY;
         for bend in self.bends_myr() {
             if bend > star.clock_myr * (1.0 + 1e-14) {
-                length = length.min(bend - star.clock_myr);
+                bend_myr = bend_myr.min(bend - star.clock_myr);
             }
         }
+        length = length.min(bend_myr);
         length = length.min(left_myr);
         // Below this the age would not advance.
         let least = 8.0 * f64::EPSILON * self.age_myr.max(star.clock_myr);
@@ -265,22 +271,30 @@ impl Walk<'_> {
                 mass = end.core_msun.max(mass);
                 end = star.look_at(star.clock_myr + length, mass);
             }
+            let end_rate_yr = star.wind_msun_yr(&end, mass);
             let bow = |middle: f64, start: f64, end: f64| (middle * middle / (start * end)).ln().abs() * 0.5;
-            let error = bow(middle.luminosity_lsun, look.luminosity_lsun, end.luminosity_lsun).max(bow(
+            let surface = bow(middle.luminosity_lsun, look.luminosity_lsun, end.luminosity_lsun).max(bow(
                 middle.radius_rsun,
                 look.radius_rsun,
                 end.radius_rsun,
             ));
-            let growth = end.inner_core_msun - look.inner_core_msun;
-            let growth_ratio = growth / (CORE_STEP * envelope.max(GONE * star.mass_msun));
-            if (error > NODE_TOLERANCE || growth_ratio > 1.0) && length > 4.0 * least {
-                let by_error = 0.9 * (NODE_TOLERANCE / error).sqrt();
-                length *= by_error.min(0.9 / growth_ratio.max(1e-9)).clamp(0.1, 0.7);
+            let room = envelope.clamp(GONE * star.mass_msun, star.mass_msun);
+            let loss = (middle_rate - 0.5 * (rate + end_rate_yr * YR_PER_MYR)).abs() * length / room;
+            let error = (surface / NODE_TOLERANCE).max(loss / LOSS_TOLERANCE);
+            let growth = (end.eating_core_msun(star.phase) - look.eating_core_msun(star.phase)) / (CORE_STEP * room);
+            if (error > 1.0 || growth > 1.0) && length > 4.0 * least {
+                length *= (0.9 / error.sqrt()).min(0.9 / growth.max(1e-9)).clamp(0.1, 0.7);
                 continue;
             }
-            let by_error = (0.8 * (NODE_TOLERANCE / error.max(1e-12)).sqrt()).clamp(0.5, 2.0);
-            let track_changed = lost > 0.0 && matches!(star.phase, Phase::MainSequence | Phase::HeliumMainSequence);
-            return Step { length_myr: length, next_myr: length * by_error, mass_msun: mass, look: end, track_changed };
+            return Step {
+                length_myr: length,
+                next_myr: length * (0.8 / error.max(1e-9).sqrt()).clamp(0.5, 2.0),
+                mass_msun: mass,
+                look: end,
+                rate_msun_yr: end_rate_yr,
+                track_changed: lost > 0.0 && matches!(star.phase, Phase::MainSequence | Phase::HeliumMainSequence),
+                at_bend: length >= bend_myr,
+            };
         }
     }
 
@@ -290,17 +304,23 @@ impl Walk<'_> {
         self.age_myr += step.length_myr;
         let star = &mut self.star;
         star.mass_msun = step.mass_msun;
-        let clock = star.clock_myr + step.length_myr;
         if !step.track_changed {
-            star.clock_myr = if end_of_phase { star.clock_myr + left_myr } else { clock };
-        } else if star.phase == Phase::MainSequence {
-            let fraction = if end_of_phase { 1.0 } else { clock / star.main_sequence.end_myr };
-            star.main_sequence = star.fit.main_sequence(star.mass_msun);
-            star.clock_myr = fraction * star.main_sequence.end_myr;
+            star.clock_myr += if end_of_phase { left_myr } else { step.length_myr };
+            return;
+        }
+        // The pace is the mean of that on the old and on the new track.
+        let advance = |old: f64, new: f64| {
+            let fraction = star.clock_myr / old + 0.5 * step.length_myr * (1.0 / old + 1.0 / new);
+            if end_of_phase { new } else { fraction.min(1.0) * new }
+        };
+        if star.phase == Phase::MainSequence {
+            let new = star.fit.main_sequence(star.mass_msun);
+            star.clock_myr = advance(star.main_sequence.end_myr, new.end_myr);
+            star.main_sequence = new;
         } else {
-            let fraction = if end_of_phase { 1.0 } else { clock / star.helium.burning_myr };
-            star.helium = HeliumStar::new(star.mass_msun);
-            star.clock_myr = fraction * star.helium.burning_myr;
+            let new = HeliumStar::new(star.mass_msun);
+            star.clock_myr = advance(star.helium.burning_myr, new.burning_myr);
+            star.helium = new;
         }
     }
 
@@ -370,7 +390,7 @@ impl Walk<'_> {
                 self.star.clock_myr = 0.0;
                 Next::Burning
             }
-            (Phase::PulsingAsymptoticGiant, PhaseEnd::Explosion) => {
+            (Phase::PulsingAsymptoticGiant, PhaseEnd::Time) => {
                 let a = self.star.anchors;
                 self.collapse(self.star.look().inner_core_msun, a.explosive_core_msun, a.asymptotic_base_core_msun)
             }
@@ -387,12 +407,12 @@ impl Walk<'_> {
                 self.star.clock_myr = 0.0;
                 Next::Burning
             }
-            (_, PhaseEnd::Explosion) => {
+            (_, PhaseEnd::Time) => {
                 let helium = self.star.helium.mass_msun;
                 // A helium giant above the carbon-ignition mass collapses; below it its carbon burns explosively.
                 let class = if helium < CARBON_IGNITION_CORE_MSUN { helium } else { CORE_COLLAPSE_CORE_MSUN };
                 let inner = self.star.look().inner_core_msun;
-                self.collapse(inner, explosive_core_msun(helium), class)
+                self.collapse(inner, self.star.helium.explosive_core_msun, class)
             }
             (_, _) => {
                 let inner = self.star.look().inner_core_msun;
@@ -466,10 +486,15 @@ fn core_exhausted_fraction(hook_fraction: f64) -> f64 {
     hook_fraction.clamp(0.847, 1.0)
 }
 
+/// One step of the walk.
 struct Step {
     length_myr: f64,
     next_myr: f64,
     mass_msun: f64,
     look: Look,
+    rate_msun_yr: f64,
+    /// The star has come to the track of another mass.
     track_changed: bool,
+    /// The course bends sharply where the step ends.
+    at_bend: bool,
 }

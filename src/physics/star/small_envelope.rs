@@ -16,6 +16,12 @@ pub(super) fn helium_envelope_measure(largest_core_msun: f64, core_msun: f64) ->
     5.0 * (largest_core_msun - core_msun) / largest_core_msun
 }
 
+/// Measure at which luminosity is halfway (in logarithm) to the bare core's, and below which the core outshines the
+/// envelope (b of eq. 101).
+pub(super) fn thin_envelope_measure(mass_msun: f64) -> f64 {
+    0.002 * (2.5 / mass_msun).max(1.0)
+}
+
 /// Luminosity and radius of a star whose thin envelope lets its core show.
 ///
 /// # Source
@@ -26,8 +32,8 @@ pub(super) fn shown_through(star: Surface, core: Surface, measure: f64, mass_msu
         return star;
     }
     let mu = measure.max(0.0);
-    let scale = (2.5 / mass_msun).max(1.0);
-    let (b, c) = (0.002 * scale, 0.006 * scale);
+    let b = thin_envelope_measure(mass_msun);
+    let c = 3.0 * b;
     let blend = |half: f64| (1.0 + half.powi(3)) * (mu / half).powi(3) / (1.0 + (mu / half).powi(3));
     let s = blend(b);
     let q = (r / r_core).ln();

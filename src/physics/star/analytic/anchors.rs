@@ -77,10 +77,22 @@ impl Anchors {
         })
     }
 
-    /// Helium core on the thermally pulsing branch, from the core a star without dredge-up would have (eq. 73).
+    /// Fraction of the core's growth that the third dredge-up leaves (eq. 73).
+    fn kept_growth(&self) -> f64 {
+        1.0 - (0.3 + 0.001 * self.mass_msun.powi(5)).min(0.9)
+    }
+
+    /// Helium core on the thermally pulsing branch, from the core a star without dredge-up would have.
     pub(in crate::physics::star) fn pulsing_core_msun(&self, undredged_msun: f64) -> f64 {
-        let dredged = (0.3 + 0.001 * self.mass_msun.powi(5)).min(0.9);
-        self.dredged_core_msun + (1.0 - dredged) * (undredged_msun - self.dredged_core_msun)
+        self.dredged_core_msun + self.kept_growth() * (undredged_msun - self.dredged_core_msun)
+    }
+
+    /// Time at which the core would explode during the thermal pulses, Myr.
+    pub(in crate::physics::star) fn pulses_explosion_myr(&self) -> f64 {
+        self.pulse_growth.map_or(f64::INFINITY, |growth| {
+            let grown = (self.explosive_core_msun - self.dredged_core_msun) / self.kept_growth();
+            growth.time_at_myr(growth.relation().luminosity_lsun(self.dredged_core_msun + grown))
+        })
     }
 }
 
