@@ -20,8 +20,11 @@ const SHORTENED: f64 = 0.35;
 const LENGTHENED: [f64; 2] = [0.5, 1.4];
 /// Steps that took more iterations than this are followed by shorter ones.
 const MANY_ITERATIONS: usize = 12;
-/// Attempts at one step; small steps are not safer, since a tolerance of temperature is a luminosity over a time.
-const ATTEMPTS: usize = 40;
+/// Shortenings of one step before it is begun afresh.
+const SHORTENINGS: usize = 9;
+/// Lengths of these fresh starts. Very small steps are not safer, since a tolerance of temperature is a luminosity over
+/// a time; but where Newton's method cycles about a kink another length often does not.
+const FRESH_STARTS: [f64; 5] = [1.0, 1.6, 0.8, 2.7, 4.0];
 /// First step, of the thermal time.
 const FIRST_STEP: f64 = 0.01;
 /// Burning over light beyond which late hydrogen flashes; on the main sequence it never exceeds 1.05.
@@ -174,12 +177,14 @@ fn runs_away(node: &Node) -> bool {
 
 /// The next step and its length, from the longest that succeeds.
 fn attempt(stepper: &Stepper, model: &Model, first_s: f64) -> Option<(Step, f64)> {
-    let mut step_s = first_s;
-    for _ in 0..ATTEMPTS {
-        match stepper.advance(model, step_s) {
-            Some(step) if step.change <= REJECTED_ABOVE => return Some((step, step_s)),
-            Some(_) => step_s *= 0.5,
-            None => step_s *= SHORTENED,
+    for stretch in FRESH_STARTS {
+        let mut step_s = stretch * first_s;
+        for _ in 0..SHORTENINGS {
+            match stepper.advance(model, step_s) {
+                Some(step) if step.change <= REJECTED_ABOVE => return Some((step, step_s)),
+                Some(_) => step_s *= 0.5,
+                None => step_s *= SHORTENED,
+            }
         }
     }
     None

@@ -77,6 +77,7 @@ pub struct Life {
 
 impl Caution {
     /// One sentence for users.
+    #[must_use]
     pub fn text(self) -> &'static str {
         match self {
             Self::OutsideCalibratedMasses => "The red-dwarf model was fitted to stars of 0.08 to 0.30 solar masses.",
@@ -85,6 +86,23 @@ impl Caution {
             Self::ShellFlashes => "Late hydrogen flashes of the contracting star are not followed in detail.",
             Self::EarlyCrystal => "The last cooling is that of a simple crystal from an earlier moment than usual.",
         }
+    }
+}
+
+impl Life {
+    /// The star at an age (yr since arrival on the main sequence), interpolated between the two nodes around it.
+    ///
+    /// Nothing before birth and after the end.
+    #[must_use]
+    pub fn at_age(&self, age_yr: f64) -> Option<Node> {
+        let next = self.nodes.partition_point(|node| node.age_yr < age_yr);
+        let later = self.nodes.get(next)?;
+        if later.age_yr <= age_yr {
+            return Some(*later);
+        }
+        let earlier = self.nodes.get(next.checked_sub(1)?)?;
+        let share = (age_yr - earlier.age_yr) / (later.age_yr - earlier.age_yr);
+        Some(earlier.towards(later, share))
     }
 }
 

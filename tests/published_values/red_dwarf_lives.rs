@@ -1,0 +1,42 @@
+//! Lives that several tests look at, each computed once.
+
+use longember::physics::star::convective::{ConvectiveInput, Life, Node, Options, SurfaceOpacity, compute_with};
+use std::ops::ControlFlow;
+use std::sync::LazyLock;
+
+fn life(mass_msun: f64, metallicity_dex: f64, surface: SurfaceOpacity) -> Life {
+    let options = Options { surface, ..Options::default() };
+    let input = ConvectiveInput { mass_msun, metallicity_dex };
+    compute_with(input, options, &mut |_| ControlFlow::Continue(())).expect("a mass and metallicity in range")
+}
+
+macro_rules! lives {
+    ($($name:ident: $mass:expr, $metallicity:expr, $surface:ident;)*) => {
+        $(pub static $name: LazyLock<Life> = LazyLock::new(|| life($mass, $metallicity, SurfaceOpacity::$surface));)*
+    };
+}
+
+lives! {
+    M008: 0.08, 0.0, Modern;
+    M010: 0.10, 0.0, Modern;
+    M015: 0.15, 0.0, Modern;
+    M020: 0.20, 0.0, Modern;
+    M030: 0.30, 0.0, Modern;
+    M010_OF_1997: 0.10, 0.0, Of1997;
+}
+
+/// The star this many years after its birth.
+pub fn since_birth(life: &Life, years: f64) -> Node {
+    life.at_age(years - life.contraction_yr).expect("an age within the life")
+}
+
+/// The brightest moment after arrival on the main sequence.
+pub fn brightest(life: &Life) -> &Node {
+    let grown = life.nodes.iter().filter(|node| node.age_yr >= 0.0);
+    grown.max_by(|a, b| a.luminosity_lsun.total_cmp(&b.luminosity_lsun)).expect("nodes")
+}
+
+/// The hottest surface after arrival on the main sequence, K.
+pub fn hottest_k(life: &Life) -> f64 {
+    life.nodes.iter().filter(|node| node.age_yr >= 0.0).map(|node| node.effective_temperature_k).fold(0.0, f64::max)
+}
