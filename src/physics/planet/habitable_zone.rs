@@ -139,6 +139,16 @@ pub(crate) fn runaway_insolation_earth(teff_k: f64, mass_mearth: f64) -> f64 {
     }
 }
 
+/// The maximum-greenhouse limit for a checked temperature, units of 1361.17 W m⁻².
+pub(crate) fn maximum_greenhouse_insolation_earth(teff_k: f64) -> f64 {
+    polynomial(&MAXIMUM_GREENHOUSE, teff_k)
+}
+
+/// The moist limit of 2013 for a checked temperature, units of 1361.17 W m⁻².
+pub(crate) fn moist_insolation_earth(teff_k: f64) -> f64 {
+    polynomial(&MOIST_2013, teff_k)
+}
+
 fn polynomial(coefficients: &Coefficients, teff_k: f64) -> f64 {
     let t = teff_k.clamp(COOLEST_STAR_K, HOTTEST_STAR_K) - 5780.0;
     let [s, a, b, c, d] = *coefficients;

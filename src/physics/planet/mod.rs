@@ -6,9 +6,13 @@
 
 pub mod bulk;
 pub mod caution;
+pub mod climate;
 pub mod deep_time;
+pub mod escape;
 pub mod greenhouse;
 pub mod habitable_zone;
+pub mod high_energy;
+pub mod history;
 pub mod irradiation;
 pub mod orbit;
 pub mod orbit_history;
@@ -19,7 +23,9 @@ pub mod tides;
 pub mod transit;
 
 pub use caution::Caution;
+pub use climate::{ClimateState, WaterWorldAir};
 pub use greenhouse::Greenhouse;
+pub use history::{PlanetEvent, PlanetEventKind, PlanetHistory, PlanetInput, PlanetMoment, WaterWorld};
 pub use irradiation::Redistribution;
 pub use orbit_history::{OrbitEnd, OrbitHistory, OrbitInput};
 pub use range::OutOfRange;

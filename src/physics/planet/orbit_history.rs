@@ -83,6 +83,8 @@ pub struct OrbitNode {
 #[derive(Clone, Debug, PartialEq)]
 pub struct OrbitHistory {
     pub(super) nodes: Vec<OrbitNode>,
+    /// The orbit at each node of the track, up to the end of the orbit.
+    pub(super) track_nodes: Vec<OrbitNode>,
     pub(super) end: Option<(f64, OrbitEnd)>,
     pub(super) closest_ratio: f64,
     pub(super) largest_adiabaticity_index: f64,
@@ -168,6 +170,11 @@ impl OrbitHistory {
     #[must_use]
     pub fn nodes(&self) -> &[OrbitNode] {
         &self.nodes
+    }
+
+    /// The orbit at each node of the star's track, as far as it lasts: one entry for each of the first nodes.
+    pub(crate) fn track_nodes(&self) -> &[OrbitNode] {
+        &self.track_nodes
     }
 
     /// The smallest ratio of periastron to the star's reach along the track, dimensionless. The star reaches to its

@@ -17,11 +17,13 @@ const NEGLIGIBLE: f64 = 1e-10;
 /// Walks checked input to the end of the track or of the orbit.
 pub(super) fn walk(input: &OrbitInput, track: &[StarPoint], tides: &Tides) -> OrbitHistory {
     let mut walk = Walk::start(input, tides, &track[0], track.len());
+    walk.note_track_node();
     for pair in track.windows(2) {
         if walk.history.end.is_some() {
             break;
         }
         walk.advance(&pair[0], &pair[1]);
+        walk.note_track_node();
     }
     walk.history
 }
@@ -54,6 +56,7 @@ impl<'a> Walk<'a> {
         };
         let history = OrbitHistory {
             nodes: Vec::with_capacity(capacity),
+            track_nodes: Vec::with_capacity(capacity),
             end: None,
             closest_ratio: f64::INFINITY,
             largest_adiabaticity_index: 0.0,
@@ -61,6 +64,12 @@ impl<'a> Walk<'a> {
         let mut walk = Self { input, tides, history, now, ratio: f64::INFINITY };
         walk.settle(now, star);
         walk
+    }
+
+    fn note_track_node(&mut self) {
+        if self.history.end.is_none() {
+            self.history.track_nodes.push(self.now);
+        }
     }
 
     /// Follows the orbit from one node of the star to the next.
@@ -117,8 +126,8 @@ impl<'a> Walk<'a> {
             // Ten thousand steps an interval are plenty: every step moves the orbit by its share or ends the interval.
             step_yr = step_yr.max(span_yr * 1e-4).min(span_yr - elapsed_yr);
             let is_last = span_yr - elapsed_yr - step_yr <= span_yr * 1e-12;
-            let middle_star = between(before, after, (elapsed_yr + 0.5 * step_yr) / span_yr);
-            let end_star = if is_last { *after } else { between(before, after, (elapsed_yr + step_yr) / span_yr) };
+            let middle_star = before.towards(after, (elapsed_yr + 0.5 * step_yr) / span_yr);
+            let end_star = if is_last { *after } else { before.towards(after, (elapsed_yr + step_yr) / span_yr) };
             let middle = self.moved(rates, 0.5 * step_yr, star.mass_msun / middle_star.mass_msun);
             let rates = self.rates(&middle, &middle_star, after);
             let mut next = self.moved(rates, step_yr, star.mass_msun / end_star.mass_msun);
@@ -192,19 +201,5 @@ impl<'a> Walk<'a> {
             let index = orbit::mass_loss_index(lost_msun / span_yr, self.now.semi_major_axis_au, after.mass_msun);
             self.history.largest_adiabaticity_index = self.history.largest_adiabaticity_index.max(index);
         }
-    }
-}
-
-/// The star part of the way from one node to the next.
-fn between(before: &StarPoint, after: &StarPoint, share: f64) -> StarPoint {
-    let mix = |from: f64, to: f64| from + share * (to - from);
-    StarPoint {
-        age_yr: mix(before.age_yr, after.age_yr),
-        mass_msun: mix(before.mass_msun, after.mass_msun),
-        luminosity_lsun: mix(before.luminosity_lsun, after.luminosity_lsun),
-        radius_rsun: mix(before.radius_rsun, after.radius_rsun),
-        effective_temperature_k: mix(before.effective_temperature_k, after.effective_temperature_k),
-        envelope_mass_msun: mix(before.envelope_mass_msun, after.envelope_mass_msun),
-        ..*after
     }
 }

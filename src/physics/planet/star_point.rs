@@ -28,6 +28,22 @@ pub struct StarPoint {
     pub lost_mass_suddenly: bool,
 }
 
+impl StarPoint {
+    /// The star part of the way to the next node: every value runs straight, the phase is that of the next node.
+    pub(crate) fn towards(&self, next: &Self, share: f64) -> Self {
+        let mix = |from: f64, to: f64| from + share * (to - from);
+        Self {
+            age_yr: mix(self.age_yr, next.age_yr),
+            mass_msun: mix(self.mass_msun, next.mass_msun),
+            luminosity_lsun: mix(self.luminosity_lsun, next.luminosity_lsun),
+            radius_rsun: mix(self.radius_rsun, next.radius_rsun),
+            effective_temperature_k: mix(self.effective_temperature_k, next.effective_temperature_k),
+            envelope_mass_msun: mix(self.envelope_mass_msun, next.envelope_mass_msun),
+            ..*next
+        }
+    }
+}
+
 /// Checks that a track can be walked: nodes in order, every value finite and not negative.
 ///
 /// # Errors

@@ -1,0 +1,216 @@
+//! The climates of one planet under every colour of starlight, worked out where they are needed.
+
+use super::super::habitable_zone::runaway_insolation_earth;
+use super::super::range::{OutOfRange, non_negative, positive};
+use super::climate_curve::ClimateCurve;
+use super::ice_line_model::{Climate, Latitudes, WaterWorldAir};
+use super::infrared::OutgoingInfrared;
+use super::reflection::Reflection;
+use crate::units::constants::SOLAR_CONSTANT_W_M2;
+use std::borrow::Cow;
+
+/// Effective temperatures for which the curve is followed, K; between them it is interpolated.
+const TEFF_NODES_K: [f64; 9] = [2600.0, 3000.0, 3400.0, 3900.0, 4500.0, 5150.0, 5800.0, 6500.0, 7200.0];
+/// How far beyond the heaviest planet's runaway limit a curve is followed, dimensionless.
+const BEYOND_RUNAWAY: f64 = 1.02;
+
+/// Insolations below and above which a planet is surely frozen and surely not, units of 1361.17 W m⁻².
+///
+/// The freeze of no planet in range lies lower, the thaw of none higher; inside, the curves decide.
+pub(crate) const SURELY_FROZEN: f64 = 0.15;
+pub(crate) const SURELY_THAWED: f64 = 3.0;
+
+/// Where one planet's climate turns, under one colour of starlight, units of 1361.17 W m⁻².
+#[derive(Clone, Copy, Debug, PartialEq)]
+pub struct ClimateLimits {
+    /// Open water freezes over below this.
+    pub freeze_insolation_earth: f64,
+    /// A frozen planet thaws above this.
+    pub thaw_insolation_earth: f64,
+    /// The mean temperature reaches 340 K at this, where it does before the runaway limit.
+    pub hot_insolation_earth: Option<f64>,
+}
+
+/// Curves of one planet's climates, kept by the star's temperature.
+#[derive(Clone, Debug)]
+pub struct ClimateTable {
+    latitudes: Latitudes,
+    infrared: OutgoingInfrared,
+    curves: [Option<ClimateCurve>; TEFF_NODES_K.len()],
+}
+
+impl ClimateTable {
+    /// Prepares the table for a planet's air; curves follow when they are asked for.
+    ///
+    /// # Errors
+    /// [`OutOfRange`] for a field of `air` out of its range.
+    pub fn new(air: &WaterWorldAir) -> Result<Self, OutOfRange> {
+        Ok(Self {
+            latitudes: Latitudes::new(air)?,
+            infrared: OutgoingInfrared::new(air.carbon_dioxide_bar)?,
+            curves: [const { None }; TEFF_NODES_K.len()],
+        })
+    }
+
+    /// Works out and keeps the curves around a temperature.
+    pub(crate) fn prepare(&mut self, teff_k: f64) {
+        let (low, share) = bracket(teff_k);
+        for index in [low, low + 1] {
+            if self.curves[index].is_none() && (index == low || share > 0.0) {
+                self.curves[index] = Some(self.follow(index));
+            }
+        }
+    }
+
+    fn follow(&self, index: usize) -> ClimateCurve {
+        let teff_k = TEFF_NODES_K[index];
+        let up_to = BEYOND_RUNAWAY * runaway_insolation_earth(teff_k, 5.0);
+        ClimateCurve::follow(&self.latitudes.under(teff_k), up_to)
+    }
+
+    /// A curve that was kept, or the same one worked out anew: what is read never depends on what was asked before.
+    fn curve(&self, index: usize) -> Cow<'_, ClimateCurve> {
+        self.curves[index].as_ref().map_or_else(|| Cow::Owned(self.follow(index)), Cow::Borrowed)
+    }
+
+    /// The curves on both sides of a temperature, each with its runaway limit, and the share of the upper one.
+    fn around(&self, teff_k: f64) -> (Cow<'_, ClimateCurve>, Option<Cow<'_, ClimateCurve>>, f64, usize) {
+        let (low, share) = bracket(teff_k);
+        (self.curve(low), (share > 0.0).then(|| self.curve(low + 1)), share, low)
+    }
+
+    /// Where the climate turns under a star's light.
+    ///
+    /// # Accuracy
+    /// Interpolated between curves in units of the runaway limit: within 0.003 of the model itself.
+    /// # Errors
+    /// [`OutOfRange`] for a temperature that is not positive.
+    pub fn limits(&self, effective_temperature_k: f64) -> Result<ClimateLimits, OutOfRange> {
+        let teff_k = positive("effective_temperature_k", effective_temperature_k)?;
+        let (low, high, share, index) = self.around(teff_k);
+        let here = runaway_insolation_earth(teff_k, 1.0);
+        let relative = |curve: &ClimateCurve, at: usize| {
+            let runaway = runaway_insolation_earth(TEFF_NODES_K[at], 1.0);
+            (
+                curve.freeze_insolation_earth / runaway,
+                curve.thaw_insolation_earth / runaway,
+                curve.hot_insolation_earth.map(|hot| hot / runaway),
+            )
+        };
+        let (freeze, thaw, hot) = relative(&low, index);
+        let (freeze, thaw, hot) = high.map_or((freeze, thaw, hot), |high| {
+            let (next_freeze, next_thaw, next_hot) = relative(&high, index + 1);
+            let mix = |from: f64, to: f64| from + share * (to - from);
+            // Where only one side gets hot before it runs away, the nearer side decides.
+            let nearer = if share < 0.5 { hot } else { next_hot };
+            let hot = hot.zip(next_hot).map_or(nearer, |(from, to)| Some(mix(from, to)));
+            (mix(freeze, next_freeze), mix(thaw, next_thaw), hot)
+        });
+        Ok(ClimateLimits {
+            freeze_insolation_earth: freeze * here,
+            thaw_insolation_earth: thaw * here,
+            hot_insolation_earth: hot.map(|hot| hot * here),
+        })
+    }
+
+    /// The climate with open water at an insolation under a star's light.
+    ///
+    /// Held at the climate of the freeze below it, and at the end of the curve (345 K, or past the runaway limit) above.
+    ///
+    /// # Accuracy
+    /// 0.5 K against the model itself.
+    /// # Errors
+    /// [`OutOfRange`] for a negative insolation or a temperature that is not positive.
+    pub fn open_climate(&self, insolation_earth: f64, effective_temperature_k: f64) -> Result<Climate, OutOfRange> {
+        let s = non_negative("insolation_earth", insolation_earth)?;
+        let limits = self.limits(effective_temperature_k)?;
+        let (low, high, share, _) = self.around(effective_temperature_k);
+        // Climates correspond at the same multiple of the starlight that just keeps water open.
+        let multiple = s / limits.freeze_insolation_earth;
+        let missing = OutOfRange { what: "insolation_earth", value: s, allowed: "light that keeps water open" };
+        let of = |curve: &ClimateCurve| curve.open_climate(multiple * curve.freeze_insolation_earth).ok_or(missing);
+        let first = of(&low)?;
+        let climate = match high {
+            Some(high) => first.mixed(&of(&high)?, share),
+            None => first,
+        };
+        Ok(Climate { insolation_earth: s, ..climate })
+    }
+
+    /// The mean temperature of a planet that is ice all over, K: its infrared balances the absorbed starlight and
+    /// `other_heat_w_m2` from inside and from the sky.
+    ///
+    /// # Errors
+    /// [`OutOfRange`] for a negative flux or a temperature that is not positive.
+    pub fn frozen_mean_k(
+        &self,
+        insolation_earth: f64,
+        effective_temperature_k: f64,
+        other_heat_w_m2: f64,
+    ) -> Result<f64, OutOfRange> {
+        let s = non_negative("insolation_earth", insolation_earth)?;
+        let heat = non_negative("other_heat_w_m2", other_heat_w_m2)?;
+        let ice = Reflection::new(positive("effective_temperature_k", effective_temperature_k)?).ice;
+        self.infrared.temperature_k((0.25 * s * SOLAR_CONSTANT_W_M2 * (1.0 - ice) + heat).min(1e4))
+    }
+}
+
+/// The node at or below a temperature and the share of the next one.
+fn bracket(teff_k: f64) -> (usize, f64) {
+    let last = TEFF_NODES_K.len() - 1;
+    let clamped_k = teff_k.clamp(TEFF_NODES_K[0], TEFF_NODES_K[last]);
+    let low = TEFF_NODES_K.partition_point(|&node_k| node_k <= clamped_k).clamp(1, last) - 1;
+    (low, (clamped_k - TEFF_NODES_K[low]) / (TEFF_NODES_K[low + 1] - TEFF_NODES_K[low]))
+}
+
+#[cfg(test)]
+mod tests {
+    use super::super::ice_line_model::IceLineModel;
+    use super::*;
+
+    #[test]
+    fn between_the_nodes_the_table_follows_the_model() {
+        let air = WaterWorldAir::default();
+        let table = ClimateTable::new(&air).expect("in range");
+        for teff_k in [2800.0, 3650.0, 4200.0, 4850.0, 5480.0, 6150.0, 6850.0] {
+            let model = IceLineModel::new(&air, teff_k).expect("in range");
+            let exact = ClimateCurve::follow(&model, 1.4);
+            let read = table.limits(teff_k).expect("in range");
+            assert!((read.freeze_insolation_earth - exact.freeze_insolation_earth).abs() < 0.004, "{teff_k}");
+            assert!((read.thaw_insolation_earth - exact.thaw_insolation_earth).abs() < 0.006, "{teff_k}");
+            let s = 1.05 * exact.freeze_insolation_earth;
+            let relaxed = model.from_warm(s).expect("in range");
+            let climate = table.open_climate(s, teff_k).expect("in range");
+            assert!((climate.mean_k - relaxed.mean_k).abs() < 1.5, "{teff_k}: {climate:?} {relaxed:?}");
+        }
+    }
+
+    #[test]
+    fn what_is_kept_and_what_is_worked_out_anew_agree() {
+        let fresh = ClimateTable::new(&WaterWorldAir::default()).expect("in range");
+        let mut kept = fresh.clone();
+        kept.prepare(5772.0);
+        assert_eq!(fresh.limits(5772.0), kept.limits(5772.0));
+    }
+
+    #[test]
+    fn no_planet_in_range_turns_outside_the_sure_limits() {
+        for carbon_dioxide_bar in [1e-4, 3.0] {
+            for obliquity_deg in [0.0, 90.0] {
+                for heat_transport_w_m2_k in [0.1, 5.0] {
+                    let air = WaterWorldAir { carbon_dioxide_bar, obliquity_deg, heat_transport_w_m2_k };
+                    let table = ClimateTable::new(&air).expect("in range");
+                    for teff_k in [2600.0, 7200.0] {
+                        let limits = table.limits(teff_k).expect("in range");
+                        assert!(limits.freeze_insolation_earth > SURELY_FROZEN, "{air:?} {limits:?}");
+                        assert!(limits.thaw_insolation_earth < SURELY_THAWED, "{air:?} {limits:?}");
+                        assert!(
+                            limits.thaw_insolation_earth >= limits.freeze_insolation_earth - 1e-3,
+                            "{air:?} {limits:?}"
+                        );
+                    }
+                }
+            }
+        }
+    }
+}

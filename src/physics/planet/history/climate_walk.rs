@@ -1,0 +1,251 @@
+//! The climate's states and the planet's water along the walk.
+
+use super::super::caution::Caution;
+use super::super::climate::state::{Standing, next_change};
+use super::super::climate::table::{SURELY_FROZEN, SURELY_THAWED};
+use super::super::climate::{ClimateState, ClimateTable};
+use super::super::escape;
+use super::super::habitable_zone::moist_insolation_earth;
+use super::super::range::OutOfRange;
+use super::event::{PlanetEvent, PlanetEventKind};
+use super::input::{PlanetInput, WaterWorld};
+use super::passage::w_m2;
+use super::surroundings::Surroundings;
+use crate::units::constants::YEAR_S;
+
+/// Changes of state between two nodes after which something would be wrong with the thresholds.
+const MOST_CHANGES: usize = 16;
+
+/// The states of a climate and its water through a life.
+#[derive(Clone, Debug)]
+pub(super) struct ClimateHistory {
+    pub(super) table: ClimateTable,
+    /// Each state with the age it begins, yr.
+    pub(super) states: Vec<(f64, ClimateState)>,
+    /// Ages, yr, and water, oceans of the Earth; straight in between.
+    pub(super) water: Vec<(f64, f64)>,
+}
+
+impl ClimateHistory {
+    pub(super) fn state_at(&self, age_yr: f64) -> Option<ClimateState> {
+        let after = self.states.partition_point(|(begins_yr, _)| *begins_yr <= age_yr);
+        self.states.get(after.checked_sub(1)?).map(|(_, state)| *state)
+    }
+
+    pub(super) fn water_oceans_at(&self, age_yr: f64) -> Option<f64> {
+        let after = self.water.partition_point(|(at_yr, _)| *at_yr <= age_yr);
+        let (from_yr, from) = *self.water.get(after.checked_sub(1)?)?;
+        let Some((to_yr, to)) = self.water.get(after) else { return Some(from) };
+        Some(from + (age_yr - from_yr) / (to_yr - from_yr) * (to - from))
+    }
+}
+
+/// The walk in progress.
+pub(super) struct ClimateWalk<'a> {
+    input: &'a PlanetInput,
+    pub(super) history: ClimateHistory,
+    state: ClimateState,
+    water_oceans: f64,
+}
+
+/// Fastest water losses at one node, oceans of the Earth per year.
+#[derive(Clone, Copy, Debug, Default)]
+struct Losses {
+    moist: f64,
+    runaway: f64,
+}
+
+impl Losses {
+    fn of(&self, state: ClimateState) -> f64 {
+        match state {
+            ClimateState::Moist => self.moist,
+            ClimateState::Runaway => self.runaway,
+            ClimateState::Frozen | ClimateState::Temperate | ClimateState::Dry => 0.0,
+        }
+    }
+}
+
+impl<'a> ClimateWalk<'a> {
+    pub(super) fn start(
+        input: &'a PlanetInput,
+        water: &WaterWorld,
+        first: &Standing,
+        age_yr: f64,
+        table: ClimateTable,
+    ) -> Self {
+        let water_oceans = water.water_oceans;
+        let mut state = if water_oceans <= 0.0 {
+            ClimateState::Dry
+        } else if first.over_runaway > 0.0 {
+            ClimateState::Runaway
+        } else if first.over_freeze < 0.0 || water.starts_frozen {
+            ClimateState::Frozen
+        } else {
+            ClimateState::Temperate
+        };
+        for _ in 0..MOST_CHANGES {
+            let Some(next) = first.leads_from(state) else { break };
+            state = next;
+        }
+        let history = ClimateHistory { table, states: vec![(age_yr, state)], water: vec![(age_yr, water_oceans)] };
+        Self { input, history, state, water_oceans }
+    }
+
+    /// Runs from one node to the next.
+    pub(super) fn advance(
+        &mut self,
+        before: (&Surroundings, &Standing),
+        after: (&Surroundings, &Standing),
+        events: &mut Vec<PlanetEvent>,
+    ) {
+        let (start_yr, span_yr) = (before.0.age_yr, after.0.age_yr - before.0.age_yr);
+        let mut share = 0.0;
+        let losses = match self.state {
+            ClimateState::Dry => return,
+            _ => self.losses(before.0, after.0),
+        };
+        let mut from = self.state;
+        for _ in 0..MOST_CHANGES {
+            let change = next_change(self.state, share, before.1, after.1);
+            let until = change.map_or(1.0, |(at, _)| at);
+            let lost_oceans = losses.of(self.state) * (until - share) * span_yr;
+            if lost_oceans > 0.0 && lost_oceans >= self.water_oceans {
+                let dry_share = share + (until - share) * self.water_oceans / lost_oceans;
+                self.report(from, self.state, start_yr + share * span_yr, before.1, after.1, events);
+                self.run_dry(start_yr + dry_share * span_yr, events);
+                return;
+            }
+            if until > share {
+                self.report(from, self.state, start_yr + share * span_yr, before.1, after.1, events);
+                from = self.state;
+            }
+            if lost_oceans > 0.0 {
+                self.water_oceans -= lost_oceans;
+                self.note_water(start_yr + until * span_yr);
+            }
+            let Some((at, next)) = change else {
+                share = until;
+                break;
+            };
+            (share, self.state) = (at, next);
+        }
+        self.report(from, self.state, start_yr + share * span_yr, before.1, after.1, events);
+    }
+
+    /// Writes down a change of state, however many states were passed in the same instant.
+    fn report(
+        &mut self,
+        from: ClimateState,
+        to: ClimateState,
+        age_yr: f64,
+        before: &Standing,
+        after: &Standing,
+        events: &mut Vec<PlanetEvent>,
+    ) {
+        use ClimateState::{Dry, Frozen, Moist, Runaway, Temperate};
+        use PlanetEventKind as Kind;
+        if from == to {
+            return;
+        }
+        let kinds: &[Kind] = match (from, to) {
+            (Frozen, Temperate) => &[Kind::Thaws],
+            (Frozen, Moist) => &[Kind::Thaws, Kind::MoistGreenhouse],
+            (Frozen, Runaway) => &[Kind::ThawsToSteam],
+            (Temperate, Moist) => &[Kind::MoistGreenhouse],
+            (Temperate | Moist, Runaway) => &[Kind::RunawayGreenhouse],
+            (Temperate, Frozen) => &[Kind::Freezes],
+            (Moist, Temperate) => &[Kind::MoistEnds],
+            (Moist, Frozen) => &[Kind::MoistEnds, Kind::Freezes],
+            (Runaway, Moist | Temperate) => &[Kind::Condenses],
+            (Runaway, Frozen) => &[Kind::Condenses, Kind::Freezes],
+            (_, Dry) | (Dry, _) | (Frozen, Frozen) | (Temperate, Temperate) | (Moist, Moist) | (Runaway, Runaway) => {
+                &[]
+            }
+        };
+        for kind in kinds {
+            let caution = match kind {
+                // The moist limit of one-dimensional models is disputed; the ice albedo moves the thaw by 20 %.
+                Kind::MoistGreenhouse | Kind::MoistEnds | Kind::Thaws | Kind::ThawsToSteam => Some(Caution::Undecided),
+                _ if before.extrapolated || after.extrapolated => Some(Caution::Extrapolated),
+                _ => None,
+            };
+            events.push(PlanetEvent { age_yr, kind: *kind, caution });
+        }
+        self.begin(age_yr, to);
+    }
+
+    fn begin(&mut self, age_yr: f64, state: ClimateState) {
+        self.history.states.push((age_yr, state));
+    }
+
+    fn run_dry(&mut self, age_yr: f64, events: &mut Vec<PlanetEvent>) {
+        self.water_oceans = 0.0;
+        self.state = ClimateState::Dry;
+        self.note_water(age_yr);
+        self.begin(age_yr, ClimateState::Dry);
+        let caution = Some(Caution::OrderOfMagnitude);
+        events.push(PlanetEvent { age_yr, kind: PlanetEventKind::WaterGone, caution });
+    }
+
+    fn note_water(&mut self, age_yr: f64) {
+        self.history.water.push((age_yr, self.water_oceans));
+    }
+
+    /// How fast water goes between two nodes, at the mean of the high-energy light at both.
+    fn losses(&mut self, before: &Surroundings, after: &Surroundings) -> Losses {
+        let flux_w_m2 = w_m2(0.5 * (before.high_energy_earth + after.high_energy_earth));
+        if flux_w_m2 <= 0.0 {
+            return Losses::default();
+        }
+        let orbit = &self.input.orbit;
+        let (m, r) = (orbit.mass_mearth, orbit.radius_rearth);
+        // A planet that fills its Roche lobe is torn apart before it gets here; the factor is kept from vanishing.
+        let lobe =
+            escape::roche_lobe_factor(m, r, before.semi_major_axis_au, before.star_mass_msun).unwrap_or(0.01).max(0.01);
+        let hydrogen = |rate: Result<f64, OutOfRange>| {
+            rate.unwrap_or(0.0) * escape::WATER_PER_HYDROGEN * YEAR_S / escape::EARTH_OCEAN_KG
+        };
+        let by_energy = hydrogen(escape::energy_limited_kg_s(flux_w_m2, self.input.escape_efficiency, m, r, lobe));
+        Losses {
+            moist: by_energy.min(hydrogen(escape::moist_hydrogen_leak_kg_s(r))),
+            runaway: by_energy.min(hydrogen(escape::hydrogen_through_oxygen_kg_s(m, r))),
+        }
+    }
+}
+
+/// Where the starlight stands to the climate's thresholds at every node.
+///
+/// Curves are only worked out where the starlight is near enough to matter: at such nodes and their neighbours.
+pub(super) fn standings(
+    met: &[Surroundings],
+    table: &mut ClimateTable,
+    locked_yr: Option<f64>,
+) -> Result<Vec<Standing>, OutOfRange> {
+    let near =
+        |at: usize| met.get(at).is_some_and(|node| (SURELY_FROZEN..=SURELY_THAWED).contains(&node.insolation_earth));
+    let mut standings = Vec::with_capacity(met.len());
+    for (at, node) in met.iter().enumerate() {
+        let log_light = node.insolation_earth.ln();
+        let (mut freeze, mut thaw) =
+            if node.insolation_earth < 1.0 { (SURELY_FROZEN, SURELY_FROZEN) } else { (SURELY_THAWED, SURELY_THAWED) };
+        let mut moist = moist_insolation_earth(node.effective_temperature_k);
+        if near(at) || near(at + 1) || at.checked_sub(1).is_some_and(near) {
+            table.prepare(node.effective_temperature_k);
+            let limits = table.limits(node.effective_temperature_k)?;
+            (freeze, thaw) = (limits.freeze_insolation_earth, limits.thaw_insolation_earth);
+            moist = limits.hot_insolation_earth.map_or(moist, |hot| hot.min(moist));
+            // A planet that always shows one face has a single climate at each starlight.
+            if locked_yr.is_some_and(|age_yr| age_yr <= node.age_yr) {
+                thaw = freeze;
+            }
+        }
+        standings.push(Standing {
+            over_freeze: log_light - freeze.ln(),
+            over_thaw: log_light - thaw.max(freeze).ln(),
+            over_moist: log_light - moist.ln(),
+            over_runaway: node.over_inner,
+            extrapolated: node.zone_extrapolated,
+        });
+    }
+    Ok(standings)
+}
