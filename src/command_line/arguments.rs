@@ -82,13 +82,13 @@ pub(super) struct StateArguments {
 #[derive(Args, Debug)]
 pub(super) struct StarArguments {
     /// Mass when the star reaches the main sequence, solar masses
-    #[arg(long, value_name = "MSUN", allow_negative_numbers = true)]
+    #[arg(long, value_name = "MSUN", allow_hyphen_values = true)]
     pub(super) mass: f64,
     /// The moment: 4.57Gyr, "3 trillion years", event:"largest radius"
     #[arg(long, value_name = "TIME", allow_hyphen_values = true)]
     pub(super) at: String,
     /// Metallicity [Fe/H], dex; 0 is the Sun's
-    #[arg(long, value_name = "DEX", default_value_t = 0.0, allow_negative_numbers = true)]
+    #[arg(long, value_name = "DEX", default_value_t = 0.0, allow_hyphen_values = true)]
     pub(super) metallicity: f64,
     /// Form of the result
     #[arg(long, value_enum, default_value_t)]

@@ -5,7 +5,7 @@ use super::arguments::{
     StateArguments, TableArguments, TableFormat,
 };
 use super::moment_request::{MomentProblem, MomentRequest};
-use super::outcome::{DONE, Outcome, SYSTEM_TROUBLE, WRONG_USAGE};
+use super::outcome::{DONE, Outcome, WRONG_USAGE};
 use super::scenario_source::{ScenarioSource, find_demo};
 use super::streams::Streams;
 use super::trouble::Trouble;
@@ -49,7 +49,7 @@ fn tell_about_words(error: &clap::Error, streams: &mut Streams<'_>) -> u8 {
     }
     match streams.result(&text) {
         Ok(()) => DONE,
-        Err(_) => SYSTEM_TROUBLE,
+        Err(error) => tell(&Trouble::StandardOutput(error), streams),
     }
 }
 

@@ -3,6 +3,7 @@
 use super::bodies::body_name;
 use super::lines::{WIDTH, padded, push_columns, push_wrapped, width};
 use super::remarks::{ABSENT, Remark, SPREAD, percent, remarks};
+use crate::physics::planet::habitable_zone::ZonePlace;
 use crate::system::quantities::{PLANET, STAR, planet_quantity, star_quantity};
 use crate::system::specification::Body;
 use crate::system::{History, Moment, PlanetMoment, StarMoment};
@@ -13,6 +14,8 @@ use crate::units::time_words::{SpanStyle, span};
 const NONE: &str = "–";
 /// Least width of the labels, so that star and planets line up.
 const LABEL_WIDTH: usize = 19;
+/// Longest phrase that stands in one line of a planet's column.
+const PHRASE_WIDTH: usize = 16;
 
 /// A moment as text of at most 80 columns: the star, the planets side by side, then the notes.
 #[must_use]
@@ -60,7 +63,7 @@ fn push_planets(page: &mut String, planets: &[PlanetMoment]) {
     let labels: Vec<String> = std::iter::once("Planet".to_owned())
         .chain(["  State".to_owned()])
         .chain(PLANET.iter().map(|quantity| label(quantity.name, quantity.symbol)))
-        .chain(["  Zone".to_owned()])
+        .chain(["  Zone".to_owned(), String::new()])
         .map(|label| padded(&label, LABEL_WIDTH + 2))
         .collect();
     let columns: Vec<Vec<String>> = planets.iter().map(planet_column).collect();
@@ -74,6 +77,7 @@ fn push_planets(page: &mut String, planets: &[PlanetMoment]) {
             .map(|(row, label)| {
                 std::iter::once(label.clone()).chain(block.iter().map(|column| column[row].clone())).collect()
             })
+            .filter(|row: &Vec<String>| row.iter().any(|cell| !cell.trim().is_empty()))
             .collect();
         page.push('\n');
         push_columns(page, 0, &rows);
@@ -101,8 +105,18 @@ fn planet_column(planet: &PlanetMoment) -> Vec<String> {
     std::iter::once(planet.name.clone())
         .chain([planet.state.name().to_owned()])
         .chain(figures)
-        .chain([planet.zone.map_or(NONE, |zone| zone.name()).to_owned()])
+        .chain(in_two_lines(planet.zone.map_or(NONE, ZonePlace::name)))
         .collect()
+}
+
+/// Words broken once, so that one long phrase does not widen a whole column of figures.
+fn in_two_lines(words: &str) -> [String; 2] {
+    let middle = width(words) / 2;
+    let cut = words.match_indices(' ').map(|(at, _)| at).min_by_key(|at| at.abs_diff(middle));
+    match cut {
+        Some(cut) if width(words) > PHRASE_WIDTH => [words[..cut].to_owned(), words[cut + 1..].to_owned()],
+        _ => [words.to_owned(), String::new()],
+    }
 }
 
 fn label(name: &str, symbol: &str) -> String {
@@ -116,38 +130,40 @@ fn with_unit(value: Option<f64>, digits: usize, symbol: &str) -> String {
     }
 }
 
-/// The notes, with the reasons for missing values gathered so that each reason stands once.
+/// The notes: each sentence stands once, after everything it is about.
 fn push_notes(page: &mut String, history: &History, moment: &Moment) {
-    let remarks = remarks(moment);
-    let mut lines: Vec<String> = Vec::new();
-    for remark in remarks.iter().filter(|remark| remark.kind != SPREAD && remark.kind != ABSENT) {
-        let line = match remark.body {
-            Body::Star => format!("{}: {}", named(remark), remark.text),
-            // A planet's notes begin with its name.
-            Body::Planet(_) => remark.text.clone(),
-        };
-        if !lines.contains(&line) {
-            lines.push(line);
+    let mut gathered: Vec<(String, Vec<String>)> = Vec::new();
+    for remark in remarks(moment).iter().filter(|remark| remark.kind != SPREAD) {
+        let (about, sentence) = about_and_sentence(history, remark);
+        match gathered.iter_mut().find(|(known, _)| *known == sentence) {
+            Some((_, abouts)) if abouts.contains(&about) => {}
+            Some((_, abouts)) => abouts.push(about),
+            None => gathered.push((sentence, vec![about])),
         }
     }
-    let absent: Vec<&Remark> = remarks.iter().filter(|remark| remark.kind == ABSENT).collect();
-    let mut gathered: Vec<(Body, &str, Vec<String>)> = Vec::new();
-    for remark in absent {
-        match gathered.iter_mut().find(|(body, text, _)| *body == remark.body && *text == remark.text) {
-            Some((_, _, names)) => names.push(named(remark)),
-            None => gathered.push((remark.body, &remark.text, vec![named(remark)])),
-        }
-    }
-    for (body, text, names) in gathered {
-        let of = if body == Body::Star { String::new() } else { format!("{}: ", body_name(history, body)) };
-        lines.push(format!("{of}{}: {text}", names.join(", ")));
-    }
-    if lines.is_empty() {
+    if gathered.is_empty() {
         return;
     }
     page.push_str("\nNotes\n");
-    for line in lines {
-        push_wrapped(page, "  - ", &line);
+    for (sentence, abouts) in gathered {
+        push_wrapped(page, "  - ", &format!("{}: {sentence}", abouts.join(", ")));
+    }
+}
+
+fn about_and_sentence(history: &History, remark: &Remark) -> (String, String) {
+    let sentence = remark.text.trim_end_matches('.');
+    if remark.body == Body::Star {
+        return (named(remark), sentence.to_owned());
+    }
+    let name = body_name(history, remark.body);
+    // Why a planet has no values is one reason for all of them, so the planet alone is named.
+    if remark.kind == ABSENT {
+        return (name.to_owned(), sentence.to_owned());
+    }
+    // A note on a planet that begins with its name says which figure it is about in its own words.
+    match sentence.strip_prefix(name).and_then(|rest| rest.strip_prefix(": ")) {
+        Some(rest) => (name.to_owned(), rest.to_owned()),
+        None => (format!("{name}, {}", named(remark).to_lowercase()), sentence.to_owned()),
     }
 }
 
@@ -160,6 +176,7 @@ fn named(remark: &Remark) -> String {
     match name {
         Some(name) => name.to_owned(),
         None if remark.about == "time_yr" => "Time".to_owned(),
+        None if remark.about.starts_with("colour") => "Colour".to_owned(),
         None => remark.about.replace('_', " "),
     }
 }

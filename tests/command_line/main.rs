@@ -1,0 +1,11 @@
+//! The program as a shell sees it: results, messages, files and exit codes of the real binary.
+
+mod bad_input;
+mod demos;
+mod events;
+mod files;
+mod help;
+mod moments;
+mod program;
+mod states;
+mod tables;
