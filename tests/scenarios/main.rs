@@ -6,10 +6,9 @@ use std::fs;
 use std::path::{Path, PathBuf};
 
 fn scenario_files() -> Vec<PathBuf> {
-    let folder = built_in_folder();
-    let mut files: Vec<_> = fs::read_dir(folder)
-        .expect("the scenarios folder")
-        .map(|entry| entry.expect("an entry").path())
+    let entries = fs::read_dir(built_in_folder()).into_iter().flatten().filter_map(Result::ok);
+    let mut files: Vec<_> = entries
+        .map(|entry| entry.path())
         .filter(|path| path.extension().is_some_and(|extension| extension == "ron"))
         .collect();
     files.sort();
