@@ -1,4 +1,4 @@
-//! The far future of red dwarfs against Laughlin, Bodenheimer & Adams 1997, ApJ 482, 420 ("LBA97"), and Adams,
+//! The far future of red dwarfs against Laughlin, Bodenheimer & Adams 1997, Astrophys. J. 482, 420 ("LBA97"), and Adams,
 //! Bodenheimer & Laughlin 2005, AN 326, 913.
 //!
 //! LBA97's numbers were taken from transcriptions, not from the paper itself; the tolerances allow for that. Their
@@ -47,7 +47,7 @@ fn the_white_dwarf_of_a_tenth_of_a_solar_mass() {
     let life = &*M010;
     let cold = life.nodes.iter().rev().find(|node| node.effective_temperature_k > 1651.0).expect("a cooling star");
     within("L at 1651 K", cold.luminosity_lsun, 10_f64.powf(-5.287), 0.10);
-    // Mass–radius relation of helium at zero temperature (Eggleton's fit in Verbunt & Rappaport 1988, ApJ 332, 193;
+    // Mass–radius relation of helium at zero temperature (Eggleton's fit in Verbunt & Rappaport 1988, Astrophys. J. 332, 193;
     // from memory): 0.0253 and 0.0202; a warm star is somewhat larger.
     for (life, radius) in [(&*M010, 0.0253), (&*M020, 0.0202)] {
         let last = life.nodes[life.nodes.len() - 1];

@@ -37,5 +37,5 @@ pub(super) const ELECTRON_STATES: f64 = {
 };
 /// Julian year, s.
 pub(super) const YEAR: f64 = si::YEAR_S;
-/// Energy of one MeV per reaction, for a rate in moles of reactions: erg mol⁻¹.
+/// Energy of a million electronvolts per reaction, for a rate in moles of reactions: erg mol⁻¹.
 pub(super) const MEV_PER_MOLE: f64 = si::ELEMENTARY_CHARGE_C * 1e13 * si::AVOGADRO_PER_MOL;

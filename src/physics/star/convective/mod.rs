@@ -14,7 +14,7 @@
 //!
 //! # Accuracy
 //! Today's stars: luminosity 6 %, radius 2 %, temperature 2 % of Baraffe et al. 2015 (A&A 577, A42). Lifetimes: 2 % from
-//! numbers, some 10 % from physics; the famous lifetimes of Laughlin, Bodenheimer & Adams 1997 (ApJ 482, 420) are 1.6
+//! numbers, some 10 % from physics; the famous lifetimes of Laughlin, Bodenheimer & Adams 1997 (Astrophys. J. 482, 420) are 1.6
 //! times longer because their surfaces were more opaque (see [`SurfaceOpacity::Of1997`]).
 
 mod burning;

@@ -1,6 +1,6 @@
 //! Heat set free by burning.
 //!
-//! Energies per reaction without neutrinos: p+p with the following d+p 6.67 MeV, ³He+³He 12.86, ³He+⁴He to the end of
+//! Energies per reaction without neutrinos: p+p with the following d+p 6.67 `MeV`, ³He+³He 12.86, ³He+⁴He to the end of
 //! the second chain 18.98, one turn of the CN cycle 24.97. *Common practice.*
 
 use super::super::cgs::MEV_PER_MOLE;

@@ -12,7 +12,7 @@ use super::screening::Screening;
 /// Number of reactions followed.
 pub(in super::super) const REACTIONS: usize = 4;
 
-/// ρ N_A⟨σv⟩ (s⁻¹ mol⁻¹ g) of p+p, ³He+³He, ³He+⁴He and ¹⁴N+p.
+/// `ρ N_A⟨σv⟩` (s⁻¹ mol⁻¹ g) of p+p, ³He+³He, ³He+⁴He and ¹⁴N+p.
 pub(in super::super) type Rates<N> = [N; REACTIONS];
 
 /// Sharpness with which the CN cycle's temperature levels off at a ceiling.
@@ -68,7 +68,7 @@ pub(super) fn rates(
     ]
 }
 
-/// N_A⟨σv⟩ of ¹⁴N+p without screening, at a temperature in 10⁹ K.
+/// `N_A⟨σv⟩` of ¹⁴N+p without screening, at a temperature in 10⁹ K.
 fn nitrogen(t9: Dual<2>) -> Dual<2> {
     let third = t9.cbrt();
     let inverse_third = third.recip();

@@ -1,12 +1,12 @@
 //! The last cooling of a helium white dwarf, as one isothermal crystal.
 //!
-//! C dT_c/dt = −L with L = L₀ (T_c/T₀)^b at unchanging radius. Heat capacity: three k per ion times the Debye
-//! function D(θ/T_c), plus the degenerate electrons' (π²/2) Z k kT/E_F per ion. L₀, b and the rate of cooling are
-//! those with which the computed structure ends, so that nothing jumps.
+//! `C dT/dt = −L` with `L = L₀ (T/T₀)^b` for the core's temperature T, at unchanging radius. Heat capacity: three k per
+//! ion times the Debye function `D(θ/T)`, plus the degenerate electrons' `(π²/2) Z k kT/E_F` per ion. L₀, b and the
+//! rate of cooling are those with which the computed structure ends, so that nothing jumps.
 //!
 //! # Source
-//! Mestel 1952, MNRAS 112, 583 (cooling of an isothermal core); Debye 1912, Ann. Phys. 344, 789 (lattice); θ = 0.45
-//! ħω_p/k: *common practice*.
+//! Mestel 1952, MNRAS 112, 583 (cooling of an isothermal core); Debye 1912, Ann. Phys. 344, 789 (lattice); θ is
+//! 0.45 of the ions' plasma temperature: *common practice*.
 //! # Accuracy
 //! Ages after the surface is colder than 1000 K: 30 %.
 
@@ -14,9 +14,9 @@ use super::super::cgs::{ATOMIC_MASS, BOLTZMANN, CHARGE_SQUARED, ELECTRON_REST_EN
 use super::super::composition::HELIUM4_MASS;
 use std::f64::consts::PI;
 
-/// Debye temperature over ħω_p/k.
+/// Debye temperature over the ions' plasma temperature.
 const DEBYE: f64 = 0.45;
-/// Change of ln T_c in one step.
+/// Change of the core's ln temperature in one step.
 const STEP: f64 = 0.03;
 /// Intervals of the Debye integral.
 const INTERVALS: u32 = 200;

@@ -59,6 +59,8 @@ fn burn_zone(
     }
     mean.hydrogen /= mass;
     mean.helium3 /= mass;
-    mean_rates.iter_mut().for_each(|rate| *rate /= mass);
+    for rate in &mut mean_rates {
+        *rate /= mass;
+    }
     burn(&mean, &mean_rates, step_s)
 }

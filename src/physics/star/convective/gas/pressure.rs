@@ -1,8 +1,8 @@
 //! Pressure, heat capacity and adiabatic gradient of the gas, with their slopes.
 //!
 //! Pressure and entropy are summed over electrons, ions, atoms, molecules, radiation and Coulomb forces; everything
-//! else follows from their derivatives: χ_ρ = ∂lnP/∂lnρ, χ_T = ∂lnP/∂lnT, δ = χ_T/χ_ρ, c_P = S_T − S_ρ δ,
-//! ∇_ad = −S_ρ/(χ_ρ c_P) with S_x = ∂S/∂ln x.
+//! else follows from their derivatives: `χ_ρ = ∂lnP/∂lnρ`, `χ_T = ∂lnP/∂lnT`, `δ = χ_T/χ_ρ`, `c_P = S_T − S_ρ δ`,
+//! `∇_ad = −S_ρ/(χ_ρ c_P)` with `S_x = ∂S/∂ln x`.
 
 use super::super::cgs::{ATOMIC_MASS, BOLTZMANN, PLANCK, RADIATION_DENSITY};
 use super::super::composition::{Composition, HELIUM4_MASS, HYDROGEN_MASS, METAL_MASS};

@@ -46,7 +46,7 @@ const MOST_STEPS: usize = 6000;
 /// `progress` is told the share that is done (0 to 1, never falling) after each step, and may stop the computation.
 ///
 /// # Source
-/// Structure equations and relaxation: Henyey, Forbes & Gould 1964, ApJ 139, 306; Kippenhahn, Weigert & Weiss 2012,
+/// Structure equations and relaxation: Henyey, Forbes & Gould 1964, Astrophys. J. 139, 306; Kippenhahn, Weigert & Weiss 2012,
 /// *Stellar Structure and Evolution*. Calibrated to Baraffe et al. 2015, A&A 577, A42.
 /// # Valid for
 /// [`ConvectiveInput::MASS_RANGE_MSUN`], [`ConvectiveInput::METALLICITY_RANGE_DEX`].

@@ -54,6 +54,8 @@ pub(super) fn count_from_arrival(nodes: &mut Vec<Node>) -> Option<f64> {
             nodes.insert(place, arrival);
         }
     }
-    nodes.iter_mut().for_each(|node| node.age_yr -= zero_yr);
+    for node in nodes.iter_mut() {
+        node.age_yr -= zero_yr;
+    }
     Some(zero_yr)
 }

@@ -139,7 +139,7 @@ impl Div for Jet {
     type Output = Self;
     #[inline]
     fn div(self, o: Self) -> Self {
-        self * o.recip()
+        o.recip().mul(self)
     }
 }
 

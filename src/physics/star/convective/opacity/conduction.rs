@@ -1,6 +1,6 @@
 //! Heat carried by electrons, written as an opacity.
 //!
-//! κ_c = 16σT³/(3ρλ) with the conductivity λ = π²k²T nₑ/(3m*ν), electrons scattered by ions at the rate ν.
+//! `κ = 16σT³/(3ρλ)` with the conductivity λ = π²k²T nₑ/(3m*ν), electrons scattered by ions at the rate ν.
 //! # Source
 //! Yakovlev & Urpin 1980 (Soviet Astron. 24, 303) form, with a simple correction for electrons scattering each other.
 //! # Accuracy

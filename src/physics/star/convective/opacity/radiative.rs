@@ -1,8 +1,8 @@
 //! Rosseland-mean radiative opacity of any mixture of hydrogen, helium and metals.
 //!
 //! # Source
-//! Our own spline fit of OPAL (Iglesias & Rogers 1996, ApJ 464, 943; GN93 metals) above log T 3.9–4.0 and of
-//! Ferguson et al. 2005 (ApJ 623, 585) below.
+//! Our own spline fit of OPAL (Iglesias & Rogers 1996, Astrophys. J. 464, 943; GN93 metals) above log T 3.9–4.0 and of
+//! Ferguson et al. 2005 (Astrophys. J. 623, 585) below.
 //! # Valid for
 //! X 0–0.8, Z 0.001–0.03, log T 3–8. Above log R = 1 both published tables end and their last slope is carried on.
 //! # Accuracy
@@ -166,7 +166,7 @@ fn parse(text: &str) -> Option<(Named, Named)> {
                 let name = format!("{}{}", parts.next()?, parts.next()?);
                 grids.insert(name, parts.map(str::parse).collect::<Result<_, _>>().ok()?);
             }
-            "table" => current = parts.nth(1)?.to_owned(),
+            "table" => parts.nth(1)?.clone_into(&mut current),
             _ => {
                 let values: Vec<f64> = parts.map(str::parse).collect::<Result<_, _>>().ok()?;
                 tables.entry(current.clone()).or_default().extend(values);

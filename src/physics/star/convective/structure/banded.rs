@@ -85,7 +85,7 @@ mod tests {
     fn a_band_with_a_zero_diagonal_is_solved() {
         let size = 40_usize;
         let entry = |i: usize, j: usize| {
-            if i == j && i % 3 == 0 {
+            if i == j && i.is_multiple_of(3) {
                 0.0
             } else {
                 f64::from(u32::try_from((7 * i + 3 * j + i * j) % 11).unwrap()) - 4.5

@@ -4,7 +4,7 @@
 //! - balance: Δ ln P + G m Δm/(4π r⁴ P) = 0
 //! - mass: (r'³ − r³)/r̄³ − 3Δm/(4π ρ r̄³) = 0
 //! - temperature: Δ ln T − ∇ Δ ln P = 0
-//! - energy: Δl − ε Δm = 0 with ε = ε_nuclear − c_P T [d ln T − ∇_ad d ln P]/dt
+//! - energy: Δl − ε Δm = 0 with `ε = ε_nuclear − c_P T [d ln T − ∇_ad d ln P]/dt`
 //!
 //! At the centre r³ = 3m/(4πρ) and l = εm; at the surface L = 4πR²σT⁴ and P = (2/3) g/κ.
 
@@ -30,17 +30,17 @@ pub(super) struct Point {
 
 impl Point {
     /// Point number `k` of a mesh, its matter already worked out.
-    pub(super) fn new(mesh: &Mesh, k: usize, unknowns: Unknowns, unit: f64, matter: Matter, past: &Past) -> Self {
+    pub(super) fn new(mesh: &Mesh, k: usize, unknowns: Unknowns, unit: f64, matter: &Matter, past: &Past) -> Self {
         let gas = &matter.gas;
         let ln_temperature = Dual::variable(unknowns[1], 1);
         let warming =
             ln_temperature - past.ln_temperature[k] - gas.adiabatic_gradient * (gas.ln_pressure - past.ln_pressure[k]);
         let stored = gas.heat_capacity * ln_temperature.exp() * warming * past.step_s.recip();
         Self {
-            gradient: gradient(&matter, &unknowns, unit, mesh.inside_g[k]),
+            gradient: gradient(matter, &unknowns, unit, mesh.inside_g[k]),
             heat: matter.burning.heat - stored,
             unknowns,
-            matter,
+            matter: *matter,
         }
     }
 }

@@ -1,8 +1,8 @@
 //! How steeply temperature falls outwards.
 //!
 //! Where the radiative gradient ∇_r exceeds the adiabatic ∇_ad (Schwarzschild), gas rises and sinks. With
-//! U = 3acT³/(c_P ρ² κ l²) √(8 H_P/(g δ)), l = α H_P, and ξ = s + U, the gradient ∇ = ∇_ad + s² + 2Us solves
-//! (ξ − U)³ + (8U/9)(ξ² − U² − (∇_r − ∇_ad)) = 0.
+//! `U = 3acT³/(c_P ρ² κ l²) √(8 H_P/(g δ))`, `l = α H_P`, and `ξ = s + U`, the gradient `∇ = ∇_ad + s² + 2Us` solves
+//! `(ξ − U)³ + (8U/9)(ξ² − U² − (∇_r − ∇_ad)) = 0`.
 //!
 //! # Source
 //! Kippenhahn, Weigert & Weiss 2012, *Stellar Structure and Evolution*, section 7.2 (Böhm-Vitense 1958).

@@ -74,7 +74,9 @@ impl Model {
             heat += weight * point[1].exp();
             point[3] = heat;
         }
-        unknowns.iter_mut().for_each(|point| point[3] /= heat);
+        for point in &mut unknowns {
+            point[3] /= heat;
+        }
         Self {
             unknowns,
             composition: vec![composition; count],

@@ -53,7 +53,7 @@ impl Model {
                 let state = [unknowns[0], unknowns[1]];
                 let guess = self.settled[k].ln_f;
                 let matter = Matter::at(laws, &self.composition[k], self.helium3[k], state, guess)?;
-                points.push(Point::new(mesh, k, unknowns, unit, matter, past));
+                points.push(Point::new(mesh, k, unknowns, unit, &matter, past));
             }
             system.clear();
             write(&mut system, mesh, &points, unit);
