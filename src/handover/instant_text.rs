@@ -180,3 +180,30 @@ fn named(remark: &Remark) -> String {
         None => remark.about.replace('_', " "),
     }
 }
+
+#[cfg(test)]
+mod tests {
+    use super::*;
+
+    #[test]
+    fn long_phrases_break_near_their_middle() {
+        assert_eq!(in_two_lines("conservative habitable zone"), ["conservative", "habitable zone"]);
+        assert_eq!(in_two_lines("too much light"), ["too much light", ""]);
+        assert_eq!(in_two_lines("unbreakable-phrase-of-one-word"), ["unbreakable-phrase-of-one-word", ""]);
+    }
+
+    #[test]
+    fn as_many_columns_as_fit_and_always_one() {
+        let column = |cell_width: usize| vec!["x".repeat(cell_width)];
+        assert_eq!(fitting_count(&[column(16), column(16), column(16), column(16)]), 3);
+        assert_eq!(fitting_count(&[column(60), column(5)]), 1);
+        assert_eq!(fitting_count(&[column(5), column(60)]), 1);
+    }
+
+    #[test]
+    fn what_has_no_value_has_no_unit() {
+        assert_eq!(with_unit(None, 4, "K"), "–");
+        assert_eq!(with_unit(Some(5772.0), 4, "K"), "5772 K");
+        assert_eq!(with_unit(Some(0.5), 2, ""), "0.50");
+    }
+}

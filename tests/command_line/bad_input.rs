@@ -84,9 +84,10 @@ fn every_problem_of_a_scenario_is_told_at_once() {
 
 #[test]
 fn what_is_no_scenario_is_3() {
-    for text in [&b""[..], b"hello", b"{}", b"\xff\xfe\x00", b"(", b"Longember(version: 99)", &[b'('; 100_000]] {
+    let deep = "(".repeat(100_000);
+    for text in [&b""[..], b"hello", b"{}", b"\xff\xfe\x00", b"(", b"Longember(version: 99)", deep.as_bytes()] {
         let finished = run_with_input(["events", "-"], text);
-        assert_eq!((finished.code, finished.results.as_str()), (3, ""), "{text:?}: {}", finished.messages);
+        assert_eq!((finished.code, finished.results.as_str()), (3, ""), "{}", finished.messages);
         assert!(!finished.messages.contains("panicked"), "{}", finished.messages);
     }
     let huge = vec![b' '; 5 << 20];

@@ -1,5 +1,7 @@
 //! The program as a shell sees it: results, messages, files and exit codes of the real binary.
 
+#![expect(clippy::expect_used, clippy::panic, reason = "a test that cannot go on has failed")]
+
 mod bad_input;
 mod demos;
 mod events;

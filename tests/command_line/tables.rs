@@ -152,7 +152,7 @@ fn the_enhanced_form_describes_every_column_once() {
         .filter_map(|line| line.strip_prefix("# - {name: \""))
         .filter_map(|rest| rest.split('"').next())
         .collect();
-    let body: String = text.lines().filter(|line| !line.starts_with('#')).map(|line| format!("{line}\n")).collect();
+    let body = text.lines().filter(|line| !line.starts_with('#')).collect::<Vec<_>>().join("\n");
     let (header, rows) = records(&body);
     assert_eq!(described, header);
     assert_eq!(rows.len(), 3);
