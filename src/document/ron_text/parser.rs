@@ -29,7 +29,7 @@ pub fn parse(text: &str, wanted: &'static str) -> Parsed {
     let header_end = parser.here();
     let header_comments = parser.lexer.comments;
     let header = text[..header_end].trim_start_matches('\u{feff}').trim();
-    let header = if header_comments > 0 { header.to_owned() } else { String::new() };
+    let header = if header_comments > 0 { header.replace("\r\n", "\n") } else { String::new() };
     let root = if *parser.peek() == Word::End {
         if parser.lexer.faults.found.is_empty() {
             parser.lexer.faults.push(0, SyntaxFault::Empty { wanted });
