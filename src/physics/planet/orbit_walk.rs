@@ -9,10 +9,12 @@ use crate::units::constants::{EARTH_MASSES_PER_SOLAR_MASS, EARTH_RADIUS_AU, SOLA
 /// Change of ln a and of ln e in one step of the tides.
 const AXIS_STEP: f64 = 0.02;
 const ECCENTRICITY_STEP: f64 = 0.05;
+/// Change of ln a over a whole interval that one step can carry, even if the star swells meanwhile.
+const WEAK: f64 = 1e-3;
 /// Eccentricity that counts as none.
 const ROUND: f64 = 1e-5;
 /// Change over a whole interval too small to be worth following.
-const NEGLIGIBLE: f64 = 1e-10;
+const NEGLIGIBLE: f64 = 1e-9;
 
 /// Walks checked input to the end of the track or of the orbit.
 pub(super) fn walk(input: &OrbitInput, track: &[StarPoint], tides: &Tides) -> OrbitHistory {
@@ -88,7 +90,7 @@ impl<'a> Walk<'a> {
             self.note_mass_loss_rate(before, after);
             let mut next = OrbitNode { age_yr: after.age_yr, ..self.now };
             next.semi_major_axis_au *= before.mass_msun / after.mass_msun;
-            if self.tides_matter(before, after, &next) {
+            if self.tides_matter(before, after) {
                 self.advance_under_tides(before, after);
             } else {
                 self.settle(next, after);
@@ -96,18 +98,24 @@ impl<'a> Walk<'a> {
         }
     }
 
-    /// Whether tides change the orbit noticeably between two nodes; `widened` is the orbit without them.
-    fn tides_matter(&self, before: &StarPoint, after: &StarPoint, widened: &OrbitNode) -> bool {
+    /// Whether tides may change the orbit noticeably between two nodes.
+    fn tides_matter(&self, before: &StarPoint, after: &StarPoint) -> bool {
         let span_yr = after.age_yr - before.age_yr;
-        if span_yr <= 0.0 || self.tides.is_off() {
-            return false;
-        }
-        let at_start = self.rates(&self.now, before, after);
-        let at_end = self.rates(widened, after, after);
-        [at_start, at_end].iter().any(|rates| {
-            let rounding = if self.now.eccentricity > ROUND { rates.eccentricity_per_yr } else { 0.0 };
-            (rates.axis_per_yr.abs() + rounding.abs()) * span_yr > NEGLIGIBLE
-        })
+        span_yr > 0.0 && !self.tides.is_off() && (after.is_giant || !self.is_too_far_for_tides(before, after, span_yr))
+    }
+
+    /// A quick look before the full rates: whether even rates far above both forms' would change nothing.
+    fn is_too_far_for_tides(&self, before: &StarPoint, after: &StarPoint, span_yr: f64) -> bool {
+        let OrbitNode { semi_major_axis_au: a, eccentricity: e, .. } = self.now;
+        let nearest = a * (1.0 - e);
+        let mass_ratio = self.input.mass_mearth / (before.mass_msun * EARTH_MASSES_PER_SOLAR_MASS);
+        let on_planet = (self.input.radius_rearth * EARTH_RADIUS_AU / nearest).powi(5) / mass_ratio;
+        let on_star = (before.radius_rsun.max(after.radius_rsun) * SOLAR_RADIUS_AU / nearest).powi(5) * mass_ratio;
+        let dissipation = on_planet / self.tides.planet_quality + on_star / self.tides.star_quality;
+        // Mean motion at the nearest point, with room for a lag that dissipates more on orbits inside the reference.
+        let turns_per_yr = 10.0 * (before.mass_msun / (nearest * nearest * nearest)).sqrt();
+        let faster_than_reference = (turns_per_yr * 0.02).max(1.0);
+        1000.0 * dissipation * turns_per_yr * faster_than_reference * span_yr < NEGLIGIBLE
     }
 
     /// Integrates the tides by the midpoint rule, the star's values running straight between its nodes.
@@ -119,7 +127,8 @@ impl<'a> Walk<'a> {
         let mut star = *before;
         while elapsed_yr < span_yr && self.history.end.is_none() {
             let rates = self.rates(&self.now, &star, after);
-            let mut step_yr = (span_yr / 4.0).min(AXIS_STEP / rates.axis_per_yr.abs().max(1e-300));
+            let longest_yr = if rates.axis_per_yr.abs() * span_yr < WEAK { span_yr } else { 0.25 * span_yr };
+            let mut step_yr = longest_yr.min(AXIS_STEP / rates.axis_per_yr.abs().max(1e-300));
             if self.now.eccentricity > ROUND {
                 step_yr = step_yr.min(ECCENTRICITY_STEP / rates.eccentricity_per_yr.abs().max(1e-300));
             }

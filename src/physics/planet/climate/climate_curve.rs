@@ -4,16 +4,19 @@ use super::ice_line_model::{CELLS, Climate, IceLineModel, Profile};
 use crate::units::constants::SOLAR_CONSTANT_W_M2;
 
 /// Lengths that make a kelvin and a unit of starlight comparable along the curve.
-const STEP_K: f64 = 1.5;
+const STEP_K: f64 = 2.0;
 const STEP_INSOLATION: f64 = 0.06;
 /// Warmest latitude of a frozen planet and of one with open water, K: the ice changes between them.
 const FROZEN_BELOW_K: f64 = 265.15;
 const OPEN_ABOVE_K: f64 = 263.15;
-/// Newton's method ends when no cell changes by more, K.
-const CLOSE_ENOUGH_K: f64 = 1e-4;
+/// Newton's method ends when no cell changed by more, K; being quadratic, it has then come a hundred times closer.
+const CLOSE_ENOUGH_K: f64 = 0.01;
 const MOST_POINTS: usize = 600;
 /// Steps along the curve, in units of the two lengths above, and how straight the curve must be to lengthen them.
-const LONGEST_STEP: f64 = 2.5;
+const LONGEST_STEP: f64 = 4.0;
+const LONGEST_OPEN_STEP: f64 = 1.8;
+/// Mean temperature below which a climate is frozen or does not last, K: nobody reads a figure off the curve there.
+const MOSTLY_ICE_K: f64 = 258.0;
 const SHORTEST_STEP: f64 = 1e-3;
 const TOO_SHARP: f64 = 0.9;
 const NEARLY_STRAIGHT: f64 = 0.985;
@@ -73,8 +76,9 @@ impl ClimateCurve {
                 break;
             }
             if straightness > NEARLY_STRAIGHT {
-                length = (length * 1.5_f64).min(LONGEST_STEP);
+                length *= 1.5;
             }
+            length = length.min(if mean_k < MOSTLY_ICE_K { LONGEST_STEP } else { LONGEST_OPEN_STEP });
         }
         Self::read_off(model, &points)
     }

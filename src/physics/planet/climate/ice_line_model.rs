@@ -92,8 +92,9 @@ pub struct IceLineModel {
     weight: Profile,
     /// Starlight on each cell over the flux at the planet.
     sunlight: Profile,
-    /// Exchange with the next cell polewards, per unit of this and of the next cell's share of the globe.
-    exchange: Profile,
+    /// Exchange with the neighbours towards the equator and towards the pole, per unit of the cell, W m⁻² K⁻¹.
+    lower: Profile,
+    upper: Profile,
     open_albedo: Profile,
     ice_albedo: Profile,
     has_ice_line: bool,
@@ -109,7 +110,8 @@ pub(crate) struct Latitudes {
     sine: Profile,
     weight: Profile,
     sunlight: Profile,
-    exchange: Profile,
+    lower: Profile,
+    upper: Profile,
     has_ice_line: bool,
 }
 
@@ -127,14 +129,14 @@ impl Latitudes {
         for share in &mut sunlight {
             *share *= 0.25 / total;
         }
-        let exchange: Profile = std::array::from_fn(|i| {
-            if i + 1 == CELLS {
-                return 0.0;
-            }
-            let x = edge(i + 1);
-            transport * (1.0 - x * x) / (sine[i + 1] - sine[i])
-        });
-        Ok(Self { infrared, sine, weight, sunlight, exchange, has_ice_line: obliquity_deg <= BELTS_ABOVE_DEG })
+        // Nothing crosses the equator, by symmetry, nor the pole.
+        let across = |i: usize| {
+            let x = edge(i);
+            if i == 0 || i == CELLS { 0.0 } else { transport * (1.0 - x * x) / (sine[i] - sine[i - 1]) }
+        };
+        let lower: Profile = std::array::from_fn(|i| across(i) / weight[i]);
+        let upper: Profile = std::array::from_fn(|i| across(i + 1) / weight[i]);
+        Ok(Self { infrared, sine, weight, sunlight, lower, upper, has_ice_line: obliquity_deg <= BELTS_ABOVE_DEG })
     }
 
     pub(crate) fn under(&self, teff_k: f64) -> IceLineModel {
@@ -145,7 +147,8 @@ impl Latitudes {
             sine: self.sine,
             weight: self.weight,
             sunlight: self.sunlight,
-            exchange: self.exchange,
+            lower: self.lower,
+            upper: self.upper,
             open_albedo,
             ice_albedo: std::array::from_fn(|i| open_albedo[i].max(reflection.ice)),
             has_ice_line: self.has_ice_line,
@@ -181,19 +184,17 @@ impl IceLineModel {
     pub(crate) fn balance(&self, temperature_k: &Profile, insolation_earth: f64) -> Balance {
         let mut balance = Balance { excess: [0.0; CELLS], slope: [0.0; CELLS], absorbed: [0.0; CELLS] };
         let flux = insolation_earth * SOLAR_CONSTANT_W_M2;
-        let mut from_equatorward = 0.0;
         for i in 0..CELLS {
             let t = temperature_k[i];
             let (ice, ice_slope) = ice_share(t);
             let (open, frozen) = (self.open_albedo[i], self.ice_albedo[i]);
             let absorbed_share = 1.0 - open - ice * (frozen - open);
             let (infrared, infrared_slope) = self.infrared.flux_and_slope(t);
-            let to_poleward = if i + 1 < CELLS { self.exchange[i] * (t - temperature_k[i + 1]) } else { 0.0 };
+            let exchanged = self.lower[i] * (temperature_k[i.saturating_sub(1)] - t)
+                + self.upper[i] * (temperature_k[(i + 1).min(CELLS - 1)] - t);
             balance.absorbed[i] = SOLAR_CONSTANT_W_M2 * self.sunlight[i] * absorbed_share;
-            balance.excess[i] =
-                (from_equatorward - to_poleward) / self.weight[i] + balance.absorbed[i] * insolation_earth - infrared;
+            balance.excess[i] = exchanged + balance.absorbed[i] * insolation_earth - infrared;
             balance.slope[i] = -flux * self.sunlight[i] * ice_slope * (frozen - open) - infrared_slope;
-            from_equatorward = to_poleward;
         }
         balance
     }
@@ -201,22 +202,15 @@ impl IceLineModel {
     /// Solves (exchange + diagonal) u = r for two right-hand sides at once, in place: tridiagonal elimination (Thomas).
     pub(crate) fn solve(&self, diagonal: &Profile, first: &mut Profile, second: &mut Profile) {
         let mut above = [0.0; CELLS];
-        let mut previous_exchange = 0.0;
+        let (mut last_above, mut last_first, mut last_second) = (0.0, 0.0, 0.0);
         for i in 0..CELLS {
-            let inverse_weight = 1.0 / self.weight[i];
-            let lower = previous_exchange * inverse_weight;
-            let upper = self.exchange[i] * inverse_weight;
-            let mut pivot = diagonal[i] - lower - upper;
-            if i > 0 {
-                pivot -= lower * above[i - 1];
-                first[i] -= lower * first[i - 1];
-                second[i] -= lower * second[i - 1];
-            }
+            let (lower, upper) = (self.lower[i], self.upper[i]);
+            let pivot = diagonal[i] - lower - upper - lower * last_above;
             let inverse = 1.0 / if pivot.abs() < 1e-12 { 1e-12_f64.copysign(pivot) } else { pivot };
-            above[i] = upper * inverse;
-            first[i] *= inverse;
-            second[i] *= inverse;
-            previous_exchange = self.exchange[i];
+            last_above = upper * inverse;
+            last_first = (first[i] - lower * last_first) * inverse;
+            last_second = (second[i] - lower * last_second) * inverse;
+            (above[i], first[i], second[i]) = (last_above, last_first, last_second);
         }
         for i in (0..CELLS - 1).rev() {
             first[i] -= above[i] * first[i + 1];

@@ -16,6 +16,8 @@ const HOTTEST_STAR_K: f64 = 7200.0;
 /// Temperature where half the surface is ice, K, and the width of the change, K.
 const HALF_ICE_K: f64 = 263.15;
 const ICE_WIDTH_K: f64 = 2.0;
+/// Distance from the change, in half widths, beyond which less than 10⁻¹¹ of the surface is in doubt.
+const SURE_ICE: f64 = 26.0;
 /// Albedo of an open surface under the Sun: mean, and change towards the poles with (3 sin²φ − 1)/2.
 /// The mean is fitted so that the Earth has 288.0 K and its ice line at 72°.
 const OPEN_MEAN: f64 = 0.31002;
@@ -116,7 +118,10 @@ impl Reflection {
 #[inline]
 pub(crate) fn ice_share(t: f64) -> (f64, f64) {
     // (1 − tanh y)/2 = 1/(1 + e^(2y)); the logistic form needs one exponential.
-    let y = (2.0 * (t - HALF_ICE_K) / ICE_WIDTH_K).clamp(-80.0, 80.0);
+    let y = 2.0 * (t - HALF_ICE_K) / ICE_WIDTH_K;
+    if y.abs() > SURE_ICE {
+        return (if y > 0.0 { 0.0 } else { 1.0 }, 0.0);
+    }
     let share = 1.0 / (1.0 + y.exp());
     (share, -2.0 / ICE_WIDTH_K * share * (1.0 - share))
 }

@@ -10,7 +10,7 @@ use crate::units::constants::SOLAR_CONSTANT_W_M2;
 use std::borrow::Cow;
 
 /// Effective temperatures for which the curve is followed, K; between them it is interpolated.
-const TEFF_NODES_K: [f64; 9] = [2600.0, 3000.0, 3400.0, 3900.0, 4500.0, 5150.0, 5800.0, 6500.0, 7200.0];
+const TEFF_NODES_K: [f64; 7] = [2600.0, 3200.0, 3900.0, 4500.0, 5100.0, 5800.0, 7200.0];
 /// How far beyond the heaviest planet's runaway limit a curve is followed, dimensionless.
 const BEYOND_RUNAWAY: f64 = 1.02;
 
@@ -82,7 +82,7 @@ impl ClimateTable {
     /// Where the climate turns under a star's light.
     ///
     /// # Accuracy
-    /// Interpolated between curves in units of the runaway limit: within 0.003 of the model itself.
+    /// Interpolated between curves in units of the runaway limit: the freeze within 0.003 and the thaw within 0.007 of the model itself.
     /// # Errors
     /// [`OutOfRange`] for a temperature that is not positive.
     pub fn limits(&self, effective_temperature_k: f64) -> Result<ClimateLimits, OutOfRange> {
@@ -118,7 +118,7 @@ impl ClimateTable {
     /// Held at the climate of the freeze below it, and at the end of the curve (345 K, or past the runaway limit) above.
     ///
     /// # Accuracy
-    /// 0.5 K against the model itself.
+    /// 0.7 K against the model itself.
     /// # Errors
     /// [`OutOfRange`] for a negative insolation or a temperature that is not positive.
     pub fn open_climate(&self, insolation_earth: f64, effective_temperature_k: f64) -> Result<Climate, OutOfRange> {
@@ -172,16 +172,16 @@ mod tests {
     fn between_the_nodes_the_table_follows_the_model() {
         let air = WaterWorldAir::default();
         let table = ClimateTable::new(&air).expect("in range");
-        for teff_k in [2800.0, 3650.0, 4200.0, 4850.0, 5480.0, 6150.0, 6850.0] {
+        for teff_k in [2900.0, 3550.0, 4200.0, 4800.0, 5450.0, 5700.0, 6500.0] {
             let model = IceLineModel::new(&air, teff_k).expect("in range");
             let exact = ClimateCurve::follow(&model, 1.4);
             let read = table.limits(teff_k).expect("in range");
-            assert!((read.freeze_insolation_earth - exact.freeze_insolation_earth).abs() < 0.004, "{teff_k}");
-            assert!((read.thaw_insolation_earth - exact.thaw_insolation_earth).abs() < 0.006, "{teff_k}");
+            assert!((read.freeze_insolation_earth - exact.freeze_insolation_earth).abs() < 0.004, "{teff_k}: {read:?}");
+            assert!((read.thaw_insolation_earth - exact.thaw_insolation_earth).abs() < 0.007, "{teff_k}");
             let s = 1.05 * exact.freeze_insolation_earth;
             let relaxed = model.from_warm(s).expect("in range");
             let climate = table.open_climate(s, teff_k).expect("in range");
-            assert!((climate.mean_k - relaxed.mean_k).abs() < 1.5, "{teff_k}: {climate:?} {relaxed:?}");
+            assert!((climate.mean_k - relaxed.mean_k).abs() < 0.7, "{teff_k}: {climate:?} {relaxed:?}");
         }
     }
 

@@ -139,6 +139,15 @@ struct HutSeries {
 
 impl HutSeries {
     fn new(e2: f64) -> Self {
+        if e2 <= 0.0 {
+            let star_eccentricity = 18.0 / 11.0;
+            return Self {
+                planet_axis: 0.0,
+                planet_eccentricity: 1.0 - star_eccentricity,
+                star_axis: 1.0,
+                star_eccentricity,
+            };
+        }
         let beta2 = 1.0 - e2;
         let beta = beta2.sqrt();
         let f1 = 1.0 + e2 * (15.5 + e2 * (255.0 / 8.0 + e2 * (185.0 / 16.0 + e2 * 25.0 / 64.0)));
