@@ -16,8 +16,8 @@ pub const HOTTEST_CORRELATED_K: f64 = 1e6;
 const ILL_CONDITIONED_K: f64 = 50_000.0;
 /// Points of the locus that bracket the answer, even in 1/T.
 const NODES: u32 = 257;
-/// Halvings of one bracket: enough for the last digit of an `f64`.
-const HALVINGS: u32 = 46;
+/// Most steps of the search; it takes about eight.
+const STEPS: u32 = 60;
 
 /// The temperature of the blackbody whose colour is nearest.
 #[derive(Clone, Copy, Debug, PartialEq)]
@@ -106,16 +106,7 @@ pub fn correlated_temperature(colour: Chromaticity) -> Result<CorrelatedTemperat
         }
         (nearest - 1, nearest)
     };
-    let (mut low, mut high) = (LOCUS[hot].inverse_per_k, LOCUS[cool].inverse_per_k);
-    for _ in 0..HALVINGS {
-        let middle = 0.5 * (low + high);
-        if ahead(uv, &locus_point(middle)) > 0.0 {
-            low = middle;
-        } else {
-            high = middle;
-        }
-    }
-    let foot = locus_point(0.5 * (low + high));
+    let foot = foot_between(uv, LOCUS[hot], LOCUS[cool]);
     let duv = distance(uv, foot.uv).copysign(uv[1] - foot.uv[1]);
     if duv.abs() > LARGEST_DUV {
         return Err(NoCorrelatedTemperature::TooFarFromLocus { duv });
@@ -123,6 +114,38 @@ pub fn correlated_temperature(colour: Chromaticity) -> Result<CorrelatedTemperat
     let temperature_k = 1.0 / foot.inverse_per_k;
     let caution = (temperature_k > ILL_CONDITIONED_K).then_some(Caution::IllConditioned);
     Ok(CorrelatedTemperature { temperature_k, duv, caution })
+}
+
+/// The point of the locus between two that bracket it where the line to `uv` stands upright on the tangent.
+fn foot_between(uv: [f64; 2], hot: LocusPoint, cool: LocusPoint) -> LocusPoint {
+    let (mut low, mut high) = (hot.inverse_per_k, cool.inverse_per_k);
+    let (mut at_low, mut at_high) = (ahead(uv, &hot), ahead(uv, &cool));
+    let mut foot = hot;
+    // Regula falsi with the halving of a stale end (Illinois); it ends long before the last step.
+    let mut last_side = 0;
+    for _ in 0..STEPS {
+        let gap = at_low - at_high;
+        let share = if gap > 0.0 { at_low / gap } else { 0.5 };
+        foot = locus_point(low + share.clamp(0.0, 1.0) * (high - low));
+        let here = ahead(uv, &foot);
+        if here == 0.0 || high - low < 1e-14 * high {
+            break;
+        }
+        let moved = if here > 0.0 { foot.inverse_per_k - low } else { high - foot.inverse_per_k };
+        if here > 0.0 {
+            (low, at_low) = (foot.inverse_per_k, here);
+            at_high *= if last_side == 1 { 0.5 } else { 1.0 };
+            last_side = 1;
+        } else {
+            (high, at_high) = (foot.inverse_per_k, here);
+            at_low *= if last_side == -1 { 0.5 } else { 1.0 };
+            last_side = -1;
+        }
+        if moved < 1e-14 * high {
+            break;
+        }
+    }
+    foot
 }
 
 fn distance(one: [f64; 2], other: [f64; 2]) -> f64 {

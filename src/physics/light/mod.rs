@@ -15,6 +15,7 @@ mod gamut;
 mod magnitudes;
 mod observer;
 mod observer_table;
+mod occupation;
 mod photometry;
 mod photometry_tables;
 mod photons;

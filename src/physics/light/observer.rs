@@ -2,7 +2,8 @@
 
 use super::chromaticity::Tristimulus;
 use super::observer_table::{OBSERVER, OBSERVER_FROM_NM, OBSERVER_ROWS, OBSERVER_STEP_NM};
-use super::planck::{FIRST_RADIATION_W_M2, LARGEST_EXPONENT, SECOND_RADIATION_M_K};
+use super::occupation::occupations;
+use super::planck::{FIRST_RADIATION_W_M2, SECOND_RADIATION_M_K};
 use super::range::{OutOfRange, temperature};
 
 /// Maximum luminous efficacy of radiation, lm W⁻¹.
@@ -52,45 +53,41 @@ pub fn blackbody_tristimulus(temperature_k: f64) -> Result<Tristimulus, OutOfRan
     Ok(blackbody_unchecked(temperature(temperature_k)?))
 }
 
-/// One row of the table with everything that does not depend on temperature multiplied in.
-struct Row {
+/// The table with everything multiplied in that does not depend on temperature.
+struct Prepared {
     /// c₂/λ, K.
-    exponent_k: f64,
+    exponents_k: [f64; OBSERVER_ROWS],
     /// 683 c₁ λ⁻⁵ (x̄, ȳ, z̄) · 5 nm.
-    weights: [f64; 3],
+    weights: [[f64; 3]; OBSERVER_ROWS],
 }
 
-static ROWS: [Row; OBSERVER_ROWS] = prepared_rows();
+static PREPARED: Prepared = prepared();
 
-const fn prepared_rows() -> [Row; OBSERVER_ROWS] {
-    let mut rows = [const { Row { exponent_k: 0.0, weights: [0.0; 3] } }; OBSERVER_ROWS];
-    let mut index = 0;
-    while index < OBSERVER_ROWS {
-        let wavelength_m = (OBSERVER_FROM_NM + OBSERVER_STEP_NM * index as f64) * 1e-9;
+const fn prepared() -> Prepared {
+    let mut table = Prepared { exponents_k: [0.0; OBSERVER_ROWS], weights: [[0.0; 3]; OBSERVER_ROWS] };
+    let mut row = 0;
+    while row < OBSERVER_ROWS {
+        let wavelength_m = (OBSERVER_FROM_NM + OBSERVER_STEP_NM * row as f64) * 1e-9;
         let squared_m2 = wavelength_m * wavelength_m;
         let weight = MAXIMUM_EFFICACY_LM_W * FIRST_RADIATION_W_M2 / (squared_m2 * squared_m2 * wavelength_m)
             * OBSERVER_STEP_NM
             * 1e-9;
-        let [x, y, z] = OBSERVER[index];
-        rows[index] =
-            Row { exponent_k: SECOND_RADIATION_M_K / wavelength_m, weights: [weight * x, weight * y, weight * z] };
-        index += 1;
+        let [x, y, z] = OBSERVER[row];
+        table.exponents_k[row] = SECOND_RADIATION_M_K / wavelength_m;
+        table.weights[row] = [weight * x, weight * y, weight * z];
+        row += 1;
     }
-    rows
+    table
 }
 
 /// [`blackbody_tristimulus`] for a temperature known to be in range.
 pub(crate) fn blackbody_unchecked(temperature_k: f64) -> Tristimulus {
     let (mut x, mut y, mut z) = (0.0, 0.0, 0.0);
-    for row in &ROWS {
-        let exponent = row.exponent_k / temperature_k;
-        if exponent > LARGEST_EXPONENT {
-            continue;
-        }
-        let occupation = 1.0 / exp_m1_positive(exponent);
-        x += row.weights[0] * occupation;
-        y += row.weights[1] * occupation;
-        z += row.weights[2] * occupation;
+    let occupations = occupations(&PREPARED.exponents_k, temperature_k);
+    for (occupation, weights) in occupations.iter().zip(&PREPARED.weights) {
+        x += weights[0] * occupation;
+        y += weights[1] * occupation;
+        z += weights[2] * occupation;
     }
     Tristimulus { x, y, z }
 }
@@ -99,25 +96,16 @@ pub(crate) fn blackbody_unchecked(temperature_k: f64) -> Tristimulus {
 pub(crate) fn blackbody_with_slope(temperature_k: f64) -> (Tristimulus, Tristimulus) {
     let mut value = [0.0; 3];
     let mut slope = [0.0; 3];
-    for row in &ROWS {
-        let exponent = row.exponent_k / temperature_k;
-        if exponent > LARGEST_EXPONENT {
-            continue;
-        }
-        let occupation = 1.0 / exp_m1_positive(exponent);
-        let by_kelvin = occupation * (1.0 + occupation) * exponent / temperature_k;
+    let occupations = occupations(&PREPARED.exponents_k, temperature_k);
+    for ((occupation, weights), exponent_k) in occupations.iter().zip(&PREPARED.weights).zip(&PREPARED.exponents_k) {
+        let by_kelvin = occupation * (1.0 + occupation) * exponent_k / (temperature_k * temperature_k);
         for channel in 0..3 {
-            value[channel] += row.weights[channel] * occupation;
-            slope[channel] += row.weights[channel] * by_kelvin;
+            value[channel] += weights[channel] * occupation;
+            slope[channel] += weights[channel] * by_kelvin;
         }
     }
     let pack = |[x, y, z]: [f64; 3]| Tristimulus { x, y, z };
     (pack(value), pack(slope))
-}
-
-/// eˣ − 1 for x > 0. Above one the plain exponential loses at most one more bit and is twice as fast.
-fn exp_m1_positive(exponent: f64) -> f64 {
-    if exponent > 1.0 { exponent.exp() - 1.0 } else { exponent.exp_m1() }
 }
 
 #[cfg(test)]
