@@ -99,7 +99,7 @@ proptest! {
     }
 
     #[test]
-    fn a_point_beside_the_locus_finds_its_foot(inverse in 20.0..900.0_f64, duv in -0.02..0.02_f64) {
+    fn a_point_beside_the_locus_finds_its_foot(inverse in 20.0..700.0_f64, duv in -0.0495..0.0495_f64) {
         let temperature_k = 1e6 / inverse;
         let uv = |temperature_k: f64| {
             blackbody_tristimulus(temperature_k).expect("in range").chromaticity().expect("light").u_v_1960()
@@ -112,7 +112,9 @@ proptest! {
         let (u, v) = (here[0] + duv * normal[0], here[1] + duv * normal[1]);
         let colour = Tristimulus { x: 1.5 * u, y: v, z: 2.0 - 0.5 * u - 5.0 * v }.chromaticity().expect("light");
         // Deep red lies close to the spectrum's edge, beyond which there is no light.
-        prop_assume!(colour.x + colour.y <= 1.0);
+        if colour.x + colour.y > 1.0 {
+            return Ok(());
+        }
         let found = correlated_temperature(colour).expect("near the locus");
         prop_assert!((found.temperature_k / temperature_k - 1.0).abs() < 2e-3, "{:?} {}", found, temperature_k);
         prop_assert!((found.duv - duv).abs() < 1e-5, "{:?} {}", found, duv);

@@ -94,3 +94,16 @@ fn a_blackbody_is_never_exactly_the_display_white() {
     let hex = longember::physics::light::blackbody_swatch(nearest.temperature_k).hex();
     assert_eq!(hex, "#fff9fe");
 }
+
+/// CIE 15, spectral locus of the 1931 observer: 460 nm (0.1440, 0.0297), 520 nm (0.0743, 0.8338), 580 nm (0.5125,
+/// 0.4866), 700 nm (0.7347, 0.2653).
+#[test]
+fn spectral_colours_lie_on_the_locus() {
+    for (wavelength_nm, [x, y]) in
+        [(460.0, [0.1440, 0.0297]), (520.0, [0.0743, 0.8338]), (580.0, [0.5125, 0.4866]), (700.0, [0.7347, 0.2653])]
+    {
+        let light = longember::physics::light::monochromatic(wavelength_nm).expect("in range");
+        let found = light.chromaticity().expect("light");
+        assert!((found.x - x).abs() < 6e-5 && (found.y - y).abs() < 6e-5, "{wavelength_nm}: {found:?}");
+    }
+}

@@ -25,6 +25,7 @@ mod rayleigh;
 mod rgb;
 mod screen;
 mod sky;
+mod spectral_colour;
 mod swatch;
 mod twilight;
 mod visual_photometry;
@@ -70,6 +71,7 @@ pub use rayleigh::{Atmosphere, Gas, rayleigh_cross_section_m2};
 pub use rgb::{RgbSpace, encode_srgb, largest_channel_one};
 pub use screen::{ScreenColour, hex, screen_colour};
 pub use sky::{Sky, SkyScene, light_through_air, sky};
+pub use spectral_colour::{SpectralColour, monochromatic, spectral_colour};
 pub use swatch::{DRAPER_POINT_K, FULL_COLOUR_FROM_CD_M2, Glow, Swatch, blackbody_swatch};
 pub use twilight::{DayPhase, SUNSET_ALTITUDE_DEG, Twilight, twilight};
 pub use visual_photometry::{
