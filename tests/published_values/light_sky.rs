@@ -83,16 +83,16 @@ fn the_disc_reddens_as_computed_outside() {
 }
 
 /// Two streams at 1013.25 hPa over black ground, computed outside in plane-parallel air: at 5° of altitude the
-/// curved path used here differs by less than 0.004.
+/// curved path used here differs by 0.005.
 #[test]
 fn low_and_thick_skies_agree() {
     let black = Atmosphere { ground_albedo: 0.0, ..Atmosphere::EARTH };
     assert_at(sky_under(5772.0, 45.0, black).dome, [0.2414, 0.2461], 5e-4, "45 deg");
     assert_at(sky_under(3000.0, 45.0, black).dome, [0.3409, 0.3571], 5e-4, "3000 K");
-    assert_at(sky_under(5772.0, 5.0, black).dome, [0.2819, 0.3063], 9e-3, "5 deg");
+    assert_at(sky_under(5772.0, 5.0, black).dome, [0.2819, 0.3063], 6e-3, "5 deg");
     let bars = |surface_pressure_bar| Atmosphere { surface_pressure_bar, ..black };
-    assert_at(sky_under(5772.0, 45.0, bars(10.0)).dome, [0.306, 0.338], 6e-3, "10 bar: white");
-    assert_at(sky_under(5772.0, 45.0, bars(90.0)).dome, [0.420, 0.395], 6e-3, "90 bar: orange");
+    assert_at(sky_under(5772.0, 45.0, bars(10.0)).dome, [0.306, 0.338], 2e-3, "10 bar: white");
+    assert_at(sky_under(5772.0, 45.0, bars(90.0)).dome, [0.420, 0.395], 1e-3, "90 bar: orange");
 }
 
 /// A clean sky under the Sun at 30°: 6700 lx from the dome and 55 300 lx from the disc of 133 100 lx above the air
