@@ -89,8 +89,8 @@ impl Atmosphere {
 /// 1.1427·10³ (misprinted as 10⁶), King factor from the same paper.
 ///
 /// # Valid for
-/// 350 to 850 nm, which holds the whole visible band; good to 1 % for air; for CO₂ the cross-section measured at 532 nm is
-/// about 7 % lower.
+/// 350 to 850 nm, which holds the whole visible band; good to 1 % for air. For CO₂ the cross-section that the
+/// same paper measured at 532 nm is about 7 % lower (from memory).
 ///
 /// # Errors
 /// [`OutOfRange`] for a wavelength outside 350 to 850 nm.
