@@ -51,7 +51,7 @@ impl History {
         let problems = system.problems();
         if !problems.is_empty() {
             // A star outside the computed masses gets the sentence that says why; ranges alone do not.
-            Track::check(star_input(&system))?;
+            star_input(&system).checked()?;
             return Err(HistoryError::Inputs(problems));
         }
         let track = Track::compute(star_input(&system))?;

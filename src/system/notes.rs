@@ -4,7 +4,7 @@ use super::moment::{PlanetMoment, PlanetState};
 use super::specification::{Body, PlanetSpecification};
 use crate::physics::planet::Greenhouse;
 use crate::physics::planet::habitable_zone::{ZoneLimit, limit_flux};
-use crate::physics::star::{StarState, Track};
+use crate::physics::star::{StarCaution, StarState, Track};
 
 /// A remark about one quantity of one body.
 #[derive(Clone, Debug, PartialEq)]
@@ -68,8 +68,8 @@ pub(super) fn of_star(track: &Track, time_yr: f64, state: &StarState) -> Vec<Not
         .map(|caution| Note {
             body: Body::Star,
             about: caution.about(),
-            kind: if caution.is_extrapolation() { NoteKind::Extrapolated } else { NoteKind::Limited },
-            text: caution.text().to_owned(),
+            kind: kind_of(caution),
+            text: caution.text().trim_end_matches('.').to_owned(),
         })
         .collect();
     if state.phase.is_dark() {
@@ -89,6 +89,26 @@ pub(super) fn of_star(track: &Track, time_yr: f64, state: &StarState) -> Vec<Not
         });
     }
     notes
+}
+
+/// What kind of remark a caution of the star is.
+fn kind_of(caution: StarCaution) -> NoteKind {
+    match caution {
+        StarCaution::HeavierThanModels
+        | StarCaution::LighterThanModels
+        | StarCaution::UncheckedLongLife
+        | StarCaution::HotterThanModels
+        | StarCaution::CoolingMassOutsideTables
+        | StarCaution::CoolingOlderThanTables => NoteKind::Extrapolated,
+        StarCaution::MassLossUncertain => NoteKind::OrderOfMagnitude,
+        StarCaution::RemnantLightNotModelled => NoteKind::NotModelled,
+        StarCaution::NearBlueIgnition
+        | StarCaution::CoreHydrogenEstimated
+        | StarCaution::PulsesAveraged
+        | StarCaution::GiantRadiusUncertain
+        | StarCaution::CoolingCoreDiffers
+        | StarCaution::RemnantMassUncertain => NoteKind::Limited,
+    }
 }
 
 /// Remarks about a planet.

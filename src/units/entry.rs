@@ -4,7 +4,7 @@ use super::constants::{
     AU_M, EARTH_MASS_KG, EARTH_MASSES_PER_SOLAR_MASS, EARTH_RADIUS_M, JUPITER_MASS_KG, JUPITER_RADIUS_M, LIGHT_YEAR_M,
     SOLAR_MASS_KG, SOLAR_RADIUS_M,
 };
-use super::number_text::parse_number;
+use super::number_text::{machine, parse_number};
 use super::time_words::parse_span;
 use thiserror::Error;
 
@@ -153,6 +153,29 @@ pub fn parse_entry(text: &str, kind: EntryKind) -> Result<f64, EntryProblem> {
     Err(not_understood(trimmed, kind))
 }
 
+/// Writes a value as the shortest text that [`parse_entry`] reads back to the same value; spans of time get their unit.
+///
+/// # Example
+/// ```
+/// use longember::units::entry::{EntryKind, write_entry};
+/// assert_eq!(write_entry(4.57e9, EntryKind::SpanYr), "4.57 Gyr");
+/// assert_eq!(write_entry(0.12, EntryKind::MassMsun), "0.12");
+/// ```
+#[must_use]
+pub fn write_entry(value: f64, kind: EntryKind) -> String {
+    if kind == EntryKind::SpanYr {
+        for (length_yr, unit) in [(1e12, "Tyr"), (1e9, "Gyr"), (1e6, "Myr"), (1e3, "kyr")] {
+            // A quotient can carry rounding noise, so only a text that reads back exactly will do.
+            let text = machine(value / length_yr).map(|number| format!("{number} {unit}"));
+            if let Some(text) = text.filter(|text| value.abs() >= length_yr && parse_span(text) == Ok(value)) {
+                return text;
+            }
+        }
+        return machine(value).map_or_else(String::new, |number| format!("{number} yr"));
+    }
+    machine(value).unwrap_or_default()
+}
+
 fn not_understood(text: &str, kind: EntryKind) -> EntryProblem {
     let known: Vec<&str> = match kind {
         EntryKind::SpanYr => vec!["Gyr", "trillion years", "yr"],
@@ -178,6 +201,15 @@ mod tests {
         close("30 %", EntryKind::Plain, 0.3);
         close("400 mbar", EntryKind::PressureBar, 0.4);
         close("7.6 Gyr", EntryKind::SpanYr, 7.6e9);
+    }
+
+    #[test]
+    fn what_is_written_is_read_back_to_the_same_value() {
+        for value in [0.0, 1.0, 4.57e9, 1.234_567_890_123e10, 9.3e8, 0.35, 1e14, 123.456] {
+            for kind in [EntryKind::SpanYr, EntryKind::MassMsun, EntryKind::Plain] {
+                assert_eq!(parse_entry(&write_entry(value, kind), kind), Ok(value));
+            }
+        }
     }
 
     #[test]

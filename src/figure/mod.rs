@@ -1,0 +1,13 @@
+//! Every plot as plain data: samples, scales, series, bands. Whoever draws adds nothing but ink.
+
+pub mod chart;
+pub mod curves;
+pub mod distance;
+pub mod ribbon;
+pub mod samples;
+pub mod value_axis;
+
+pub use chart::{Band, Chart, Level, Owner, Run, Series};
+pub use ribbon::Ribbon;
+pub use samples::Samples;
+pub use value_axis::{ValueAxis, ValueTick};

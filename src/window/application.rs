@@ -1,0 +1,194 @@
+//! The program behind the window: one frame after another.
+
+use super::background::Keeper;
+use super::command::{self, Command};
+use super::dialogs::{self, Answer, Dialog};
+use super::theme::{self, GRID};
+use super::workspace::Workspace;
+use super::{fonts, life_strip, menu_bar, moment_panel, pages, system_panel};
+use crate::document::recovery::Recovered;
+use crate::document::{Scenario, Session, Settings};
+use crate::system::{History, HistoryError};
+use egui::{CentralPanel, Context, Frame, Margin, Panel, Stroke, Ui, ViewportCommand};
+use std::sync::Arc;
+use std::time::Duration;
+
+/// Time between two frames of a life being played.
+const PLAY_FRAME: Duration = Duration::from_millis(33);
+
+/// The window's program. [`Longember::root_ui`] is the whole of it and needs no display.
+pub struct Longember {
+    /// What it works on.
+    pub workspace: Workspace,
+    pub(super) with_system_dialogs: bool,
+    pub(super) may_close: bool,
+    /// The user said that unsaved changes are not wanted.
+    pub(super) drop_unsaved: bool,
+    pub(super) keeper: Keeper,
+    title: String,
+}
+
+impl Longember {
+    /// A program on a scenario. System file dialogs and files of the user are used only in a real window.
+    ///
+    /// # Errors
+    /// [`HistoryError`] when the scenario has no history to show.
+    pub fn new(context: &Context, session: Session, settings: Settings, keeper: Keeper) -> Result<Self, HistoryError> {
+        let history = History::compute(session.scenario().system.clone())?;
+        fonts::install(context);
+        let workspace = Workspace::new(session, settings, Arc::new(history));
+        theme::apply(context, workspace.theme());
+        Ok(Self { workspace, with_system_dialogs: keeper.is_real(), may_close: false, drop_unsaved: false, keeper, title: String::new() })
+    }
+
+    /// A program without files of the user or dialogs of the system, for tests.
+    ///
+    /// # Errors
+    /// [`HistoryError`] when the scenario has no history to show.
+    pub fn for_tests(context: &Context, scenario: Scenario) -> Result<Self, HistoryError> {
+        Self::new(context, Session::of(scenario), Settings::default(), Keeper::none())
+    }
+
+    /// Offers unsaved work of an earlier run.
+    pub fn offer_recovered(&mut self, recovered: Recovered) {
+        self.workspace.dialog = Some(Dialog::Recovered { found: Some(Box::new(recovered)) });
+    }
+
+    /// Opens a file at the start, saying everything that is wrong with it.
+    pub fn open_at_start(&mut self, context: &Context, path: &std::path::Path) {
+        self.open(context, path);
+    }
+
+    /// One frame.
+    pub fn root_ui(&mut self, ui: &mut Ui) {
+        let context = ui.ctx().clone();
+        self.receive(&context);
+        self.play(&context);
+        let mut commands = if self.workspace.dialog.is_none() { command::from_keys(&context) } else { Vec::new() };
+        commands.extend(dropped_files(&context));
+        commands.extend(self.draw(ui));
+        let answer = dialogs::show(&context, &mut self.workspace);
+        for command in commands {
+            self.perform(&context, command);
+        }
+        if let Answer::Close(replies) = answer {
+            for reply in replies {
+                self.reply(&context, reply);
+            }
+        }
+        if !self.drop_unsaved
+            && let Err(sentence) = self.keeper.keep_unsaved(&self.workspace.session)
+        {
+            self.workspace.say_error(sentence);
+        }
+        self.watch_closing(&context);
+        self.show_title(&context);
+    }
+
+    fn draw(&mut self, ui: &mut Ui) -> Vec<Command> {
+        let palette = self.workspace.palette();
+        let mut commands = Vec::new();
+        let line = Stroke::new(1.0, palette.hairline);
+        let panel = Frame::new().fill(palette.panel).inner_margin(Margin::symmetric(0, GRID as i8));
+        let side = Frame::new().fill(palette.panel).inner_margin(Margin::symmetric(4 * GRID as i8, 0));
+        Panel::top("menu_bar").frame(panel).exact_size(menu_bar::HEIGHT).resizable(false).show(ui, |ui| {
+            commands.extend(menu_bar::show(ui, &self.workspace));
+        });
+        Panel::bottom("life_strip").frame(panel).exact_size(life_strip::HEIGHT).resizable(false).show(ui, |ui| {
+            commands.extend(life_strip::show(ui, &self.workspace));
+        });
+        Panel::left("system").frame(side).exact_size(system_panel::WIDTH).resizable(false).show(ui, |ui| {
+            commands.extend(system_panel::show(ui, &self.workspace));
+        });
+        Panel::right("moment").frame(side).exact_size(moment_panel::WIDTH).resizable(false).show(ui, |ui| {
+            commands.extend(moment_panel::show(ui, &self.workspace));
+        });
+        let stage = Frame::new().fill(palette.ground).inner_margin(Margin::symmetric(3 * GRID as i8, GRID as i8)).stroke(line);
+        CentralPanel::default().frame(stage).show(ui, |ui| {
+            if self.workspace.is_stale() {
+                // The old curves stay while new ones are made, and look like it.
+                ui.multiply_opacity(0.55);
+            }
+            commands.extend(pages::show(ui, &mut self.workspace));
+        });
+        commands
+    }
+
+    /// Takes over a history that was computed in the background.
+    fn receive(&mut self, context: &Context) {
+        let workspace = &mut self.workspace;
+        match workspace.job.poll() {
+            Some(Ok(history)) => {
+                workspace.history = history;
+                workspace.trouble = None;
+                workspace.refresh();
+                self.keep_moment_in_view();
+            }
+            Some(Err(error)) => workspace.trouble = Some(error.to_string()),
+            None if workspace.job.is_running() => context.request_repaint_after(PLAY_FRAME),
+            None => {}
+        }
+    }
+
+    fn play(&mut self, context: &Context) {
+        let workspace = &mut self.workspace;
+        if !workspace.playback.is_running {
+            return;
+        }
+        let elapsed_s = f64::from(context.input(|input| input.stable_dt.min(0.1)));
+        workspace.moment_yr = workspace.playback.advance(&workspace.derived.axis, workspace.moment_yr, elapsed_s);
+        self.keep_moment_in_view();
+        context.request_repaint_after(PLAY_FRAME);
+    }
+
+    /// Closing waits while there is unsaved work.
+    fn watch_closing(&mut self, context: &Context) {
+        let wants_to_close = context.input(|input| input.viewport().close_requested());
+        if !wants_to_close || self.may_close {
+            return;
+        }
+        if self.workspace.session.is_dirty() {
+            context.send_viewport_cmd(ViewportCommand::CancelClose);
+            self.workspace.dialog = Some(Dialog::Unsaved { then: Command::Quit });
+        }
+    }
+
+    fn show_title(&mut self, context: &Context) {
+        let mark = if self.workspace.session.is_dirty() { " *" } else { "" };
+        let title = format!("{}{mark} – Longember", self.workspace.scenario().title);
+        if title != self.title {
+            context.send_viewport_cmd(ViewportCommand::Title(title.clone()));
+            self.title = title;
+        }
+    }
+
+    /// Writes the settings; trouble with them is said and stops nothing.
+    pub(super) fn keep_settings(&mut self) {
+        if let Err(sentence) = self.keeper.keep_settings(&mut self.workspace.settings) {
+            self.workspace.say_error(sentence);
+        }
+    }
+
+    /// Removes the copy of recovered work that was taken up or is not wanted.
+    pub(super) fn settle_recovered(&mut self, recovered: Recovered) {
+        if let Err(error) = self.keeper.keep_unsaved(&self.workspace.session).and_then(|()| recovered.discard().map_err(|error| error.to_string())) {
+            self.workspace.say_error(error);
+        }
+    }
+}
+
+fn dropped_files(context: &Context) -> Option<Command> {
+    context.input(|input| input.raw.dropped_files.iter().find_map(|file| (!file.path().as_os_str().is_empty()).then(|| file.path().to_path_buf()))).map(Command::Open)
+}
+
+impl eframe::App for Longember {
+    fn ui(&mut self, ui: &mut Ui, _frame: &mut eframe::Frame) {
+        self.root_ui(ui);
+    }
+
+    fn on_exit(&mut self, _gl: Option<&eframe::glow::Context>) {
+        if self.drop_unsaved || !self.workspace.session.is_dirty() {
+            self.keeper.close();
+        }
+    }
+}

@@ -1,0 +1,185 @@
+//! Everything the window can be told, from menu, key, pointer or test, as one value.
+//!
+//! Drawing returns commands; they are applied after the frame, in one place.
+
+use super::pages::Page;
+use crate::document::{Scenario, Theme};
+use crate::figure::curves::Curve;
+use crate::system::{Body, TimeScale};
+use egui::{Key, KeyboardShortcut, Modifiers};
+use std::path::PathBuf;
+
+/// One thing to do.
+#[derive(Clone, Debug, PartialEq)]
+pub enum Command {
+    /// Start an empty scenario.
+    New,
+    /// Ask for a file and open it.
+    AskOpen,
+    /// Open this file.
+    Open(PathBuf),
+    /// Open a built-in scenario.
+    OpenBuiltIn(&'static str),
+    /// Save, asking for a place if there is none yet.
+    Save,
+    /// Ask for a place and save there.
+    AskSaveAs,
+    /// Save to this file.
+    SaveAs(PathBuf),
+    /// Close the window.
+    Quit,
+    /// Take an edit back.
+    Undo,
+    /// Do an edit again.
+    Redo,
+    /// Change the scenario; the label says what changes.
+    Edit(Edit),
+    /// Go to a moment.
+    Time(TimeCommand),
+    /// Choose the scale of time.
+    SetScale(TimeScale),
+    /// Zoom about a place of the view by a factor.
+    Zoom {
+        /// Place in the view, 0 to 1.
+        about: f64,
+        /// More than one shows less time.
+        factor: f64,
+    },
+    /// Move the view by a share of its width.
+    Pan(f64),
+    /// Show the whole life.
+    ShowWhole,
+    /// Choose what the panels show.
+    Select(Body),
+    /// Turn to a page of the stage.
+    ShowPage(Page),
+    /// Show or hide a chart.
+    ToggleCurve(Curve),
+    /// Choose a look.
+    SetTheme(Theme),
+    /// Show the source of a method.
+    ShowSource(&'static str),
+    /// Put a text on the clipboard.
+    Copy(String),
+    /// Show every key.
+    ShowKeys,
+    /// Say what this program is.
+    ShowAbout,
+    /// Stop a computation that takes long.
+    CancelComputation,
+}
+
+/// A change of the scenario as a whole value.
+#[derive(Clone, Debug, PartialEq)]
+pub struct Edit {
+    /// What changes: `Change Bond albedo of Ember`.
+    pub label: String,
+    /// The scenario afterwards.
+    pub scenario: Box<Scenario>,
+}
+
+/// Where the moment goes.
+#[derive(Clone, Copy, Debug, PartialEq)]
+pub enum TimeCommand {
+    /// To an age, yr.
+    To(f64),
+    /// By steps along the axis; a fine step is a tenth of a step.
+    Step {
+        /// How many steps, negative to go back.
+        steps: f64,
+    },
+    /// To the event before the moment.
+    PreviousEvent,
+    /// To the event after the moment.
+    NextEvent,
+    /// To birth.
+    Birth,
+    /// To the end of what is shown.
+    End,
+    /// To the scenario's present.
+    Now,
+    /// Start or stop playing.
+    TogglePlay,
+    /// Seconds that a whole life takes when played.
+    SetLifeSeconds(f64),
+}
+
+/// A key with the command it gives and the words that explain it.
+#[derive(Clone, Debug)]
+pub struct KeyBinding {
+    /// The key.
+    pub shortcut: KeyboardShortcut,
+    /// What it does.
+    pub command: Command,
+    /// In words.
+    pub words: &'static str,
+    /// Whether it also works while a text field has the focus.
+    pub even_while_typing: bool,
+}
+
+/// One step of the moment as a share of the view.
+pub const STEP: f64 = 0.01;
+
+/// Every key of the window; the help page is made from this list.
+#[must_use]
+pub fn key_bindings() -> Vec<KeyBinding> {
+    let none = Modifiers::NONE;
+    let shift = Modifiers::SHIFT;
+    let command = Modifiers::COMMAND;
+    let command_shift = Modifiers::COMMAND.plus(Modifiers::SHIFT);
+    let step = |steps| Command::Time(TimeCommand::Step { steps });
+    let time = Command::Time;
+    let rows = [
+        (none, Key::ArrowRight, step(1.0), "step forward", false),
+        (none, Key::ArrowLeft, step(-1.0), "step back", false),
+        (shift, Key::ArrowRight, step(0.1), "step forward finely", false),
+        (shift, Key::ArrowLeft, step(-0.1), "step back finely", false),
+        (none, Key::PageDown, time(TimeCommand::NextEvent), "next event", false),
+        (none, Key::PageUp, time(TimeCommand::PreviousEvent), "previous event", false),
+        (none, Key::Home, time(TimeCommand::Birth), "birth of the star", false),
+        (none, Key::End, time(TimeCommand::End), "end of what is shown", false),
+        (none, Key::Space, time(TimeCommand::TogglePlay), "play or pause", false),
+        (none, Key::N, time(TimeCommand::Now), "the scenario's present", false),
+        (none, Key::Plus, Command::Zoom { about: f64::NAN, factor: 1.5 }, "zoom in about the moment", false),
+        (none, Key::Minus, Command::Zoom { about: f64::NAN, factor: 1.0 / 1.5 }, "zoom out", false),
+        (none, Key::Num0, Command::ShowWhole, "show the whole life", false),
+        (none, Key::Num1, Command::SetScale(TimeScale::Paced), "paced time", false),
+        (none, Key::Num2, Command::SetScale(TimeScale::Log), "logarithmic time", false),
+        (none, Key::Num3, Command::SetScale(TimeScale::Linear), "linear time", false),
+        (command_shift, Key::Z, Command::Redo, "redo", true),
+        (command, Key::Z, Command::Undo, "undo", true),
+        (command, Key::N, Command::New, "new scenario", true),
+        (command, Key::O, Command::AskOpen, "open", true),
+        (command_shift, Key::S, Command::AskSaveAs, "save as", true),
+        (command, Key::S, Command::Save, "save", true),
+        (command, Key::Q, Command::Quit, "quit", true),
+        (none, Key::F1, Command::ShowKeys, "all keys", true),
+    ];
+    rows.into_iter()
+        .map(|(modifiers, key, command, words, even_while_typing)| KeyBinding {
+            shortcut: KeyboardShortcut::new(modifiers, key),
+            command,
+            words,
+            even_while_typing,
+        })
+        .collect()
+}
+
+/// The key of a command, for menus.
+#[must_use]
+pub fn shortcut_of(command: &Command) -> Option<KeyboardShortcut> {
+    key_bindings().into_iter().find(|binding| binding.command == *command).map(|binding| binding.shortcut)
+}
+
+/// Commands that the keys pressed in this frame ask for.
+pub fn from_keys(context: &egui::Context) -> Vec<Command> {
+    let is_typing = context.text_edit_focused();
+    context.input_mut(|input| {
+        key_bindings()
+            .into_iter()
+            .filter(|binding| binding.even_while_typing || !is_typing)
+            .filter(|binding| input.consume_shortcut(&binding.shortcut))
+            .map(|binding| binding.command)
+            .collect()
+    })
+}

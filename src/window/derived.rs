@@ -1,0 +1,67 @@
+//! What is drawn for a history and a view, made once and kept until one of them changes.
+
+use super::view::{View, WHOLE};
+use crate::figure::curves::Curve;
+use crate::figure::ribbon::LightRange;
+use crate::figure::{Chart, Ribbon, Samples};
+use crate::system::{History, TimeAxis, TimeScale};
+use std::sync::Arc;
+
+/// Places at which a view is read: more than the pixels of a usual screen would not be seen.
+const SAMPLES: usize = 700;
+/// Places at which the whole life is read for the range of light.
+const COARSE_SAMPLES: usize = 240;
+
+/// Axis, samples, charts and ribbon.
+#[derive(Debug)]
+pub(super) struct Derived {
+    /// The time axis of the whole life.
+    pub axis: TimeAxis,
+    /// The history read across the view.
+    pub samples: Samples,
+    /// The charts on the curves page, in order.
+    pub charts: Vec<Chart>,
+    /// The ribbon of the view.
+    pub ribbon: Ribbon,
+    history: Arc<History>,
+    view: View,
+    curves: Vec<Curve>,
+    light: LightRange,
+}
+
+impl Derived {
+    /// Everything for a history and a view.
+    pub(super) fn new(history: &Arc<History>, scale: TimeScale, view: View, curves: &[Curve]) -> Self {
+        let axis = TimeAxis::new(history, scale);
+        let light = LightRange::of(&Samples::new(history, &axis, WHOLE.from, WHOLE.to, COARSE_SAMPLES));
+        let samples = Samples::new(history, &axis, view.from, view.to, SAMPLES);
+        Self {
+            charts: curves.iter().map(|curve| curve.chart(&samples)).collect(),
+            ribbon: Ribbon::new(&samples, light),
+            axis,
+            samples,
+            history: Arc::clone(history),
+            view,
+            curves: curves.to_vec(),
+            light,
+        }
+    }
+
+    /// Makes anew only what changed.
+    pub(super) fn update(&mut self, history: &Arc<History>, scale: TimeScale, view: View, curves: &[Curve]) {
+        if !Arc::ptr_eq(history, &self.history) || scale != self.axis.scale() {
+            *self = Self::new(history, scale, view, curves);
+            return;
+        }
+        let view_changed = view != self.view;
+        if view_changed {
+            self.samples = Samples::new(history, &self.axis, view.from, view.to, SAMPLES);
+            self.ribbon = Ribbon::new(&self.samples, self.light);
+            self.view = view;
+        }
+        if view_changed || *curves != self.curves[..] {
+            self.charts = curves.iter().map(|curve| curve.chart(&self.samples)).collect();
+            self.curves = curves.to_vec();
+        }
+    }
+}

@@ -1,0 +1,66 @@
+//! The stage: pages that all show the one moment.
+
+mod chart_view;
+mod chronicle;
+mod curves;
+mod introduction;
+mod sources;
+
+use super::command::Command;
+use super::theme::GRID;
+use super::widgets::choice::word;
+use super::workspace::Workspace;
+use egui::Ui;
+
+/// A page of the stage.
+#[derive(Clone, Copy, Debug, Default, PartialEq, Eq, Hash)]
+pub enum Page {
+    /// Strip charts over one shared time axis.
+    #[default]
+    Curves,
+    /// Every dated event.
+    Chronicle,
+    /// What the scenario is about.
+    Introduction,
+    /// Methods, papers, ranges.
+    Sources,
+}
+
+impl Page {
+    /// Every page, in order.
+    pub const ALL: [Self; 4] = [Self::Curves, Self::Chronicle, Self::Introduction, Self::Sources];
+
+    /// Name on its tab.
+    #[must_use]
+    pub fn name(self) -> &'static str {
+        match self {
+            Self::Curves => "Curves",
+            Self::Chronicle => "Chronicle",
+            Self::Introduction => "What to look for",
+            Self::Sources => "Sources",
+        }
+    }
+}
+
+/// Draws tabs and page and returns what they were told.
+pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
+    let palette = workspace.palette();
+    let mut commands = Vec::new();
+    ui.horizontal(|ui| {
+        ui.spacing_mut().item_spacing.x = 4.0 * GRID;
+        for page in Page::ALL {
+            if word(ui, palette, page.name(), workspace.page == page).clicked() {
+                commands.push(Command::ShowPage(page));
+            }
+        }
+    });
+    ui.add_space(GRID);
+    workspace.chart_line_x = None;
+    commands.extend(match workspace.page {
+        Page::Curves => curves::show(ui, workspace),
+        Page::Chronicle => chronicle::show(ui, workspace),
+        Page::Introduction => introduction::show(ui, workspace),
+        Page::Sources => sources::show(ui, workspace),
+    });
+    commands
+}

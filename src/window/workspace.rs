@@ -1,0 +1,143 @@
+//! Everything the window knows at one time: the session, the history, the moment, the view.
+
+use super::derived::Derived;
+use super::dialogs::Dialog;
+use super::jobs::HistoryJob;
+use super::pages::Page;
+use super::playback::Playback;
+use super::theme::{self, Palette};
+use super::view::{View, WHOLE};
+use crate::document::{Scenario, Session, Settings, Theme};
+use crate::figure::curves::Curve;
+use crate::system::{Body, History, Moment, TimeScale};
+use std::sync::Arc;
+
+/// What the window works on.
+#[derive(Debug)]
+pub struct Workspace {
+    /// The scenario with its undo history and file.
+    pub session: Session,
+    /// What the user likes, kept between runs.
+    pub settings: Settings,
+    /// The last computed history; stays while a new one is being computed.
+    pub history: Arc<History>,
+    /// What is being computed.
+    pub(super) job: HistoryJob,
+    /// Why the scenario as it stands has no history, in one sentence.
+    pub trouble: Option<String>,
+    /// The instant that everything shows, yr.
+    pub moment_yr: f64,
+    /// The scale of time.
+    pub scale: TimeScale,
+    /// The part of the axis in view.
+    pub view: View,
+    /// Whose figures the panels show below the star's.
+    pub selected: Body,
+    /// The page of the stage.
+    pub page: Page,
+    /// Charts on the curves page.
+    pub curves: Vec<Curve>,
+    /// Playing.
+    pub playback: Playback,
+    /// Axis, samples, charts and ribbon for the history and view.
+    pub(super) derived: Derived,
+    /// A dialog that waits for an answer.
+    pub(super) dialog: Option<Dialog>,
+    /// The last message to the user.
+    pub notice: Option<Notice>,
+    /// Method to scroll to on the sources page.
+    pub wanted_source: Option<&'static str>,
+    /// Where the moment's line stands in the charts, for the connector to the strip, points.
+    pub(super) chart_line_x: Option<f32>,
+}
+
+/// A message that needs no answer.
+#[derive(Clone, Debug, PartialEq, Eq)]
+pub struct Notice {
+    /// The sentence.
+    pub text: String,
+    /// Whether something went wrong.
+    pub is_error: bool,
+}
+
+impl Workspace {
+    /// A workspace on a scenario whose history is known.
+    #[must_use]
+    pub fn new(session: Session, settings: Settings, history: Arc<History>) -> Self {
+        let scale = TimeScale::from_key(&settings.time_scale).unwrap_or_default();
+        let view = WHOLE;
+        let curves = vec![Curve::Luminosity, Curve::Temperature, Curve::PlanetTemperatures, Curve::Distance];
+        let moment_yr = history.system().star.present_age_yr;
+        let derived = Derived::new(&history, scale, view, &curves);
+        Self {
+            session,
+            settings,
+            history,
+            job: HistoryJob::default(),
+            trouble: None,
+            moment_yr,
+            scale,
+            view,
+            selected: Body::Star,
+            page: Page::Curves,
+            curves,
+            playback: Playback::default(),
+            derived,
+            dialog: None,
+            notice: None,
+            wanted_source: None,
+            chart_line_x: None,
+        }
+    }
+
+    /// The scenario as it stands.
+    #[must_use]
+    pub fn scenario(&self) -> &Scenario {
+        self.session.scenario()
+    }
+
+    /// The chosen look.
+    #[must_use]
+    pub fn theme(&self) -> Theme {
+        self.settings.theme
+    }
+
+    /// The colours of the chosen look.
+    #[must_use]
+    pub fn palette(&self) -> &'static Palette {
+        theme::palette(self.theme())
+    }
+
+    /// Whether the history shown belongs to an earlier state of the scenario.
+    #[must_use]
+    pub fn is_stale(&self) -> bool {
+        self.job.is_running() || *self.history.system() != self.scenario().system
+    }
+
+    /// Everything at the moment.
+    #[must_use]
+    pub fn moment(&self) -> Moment {
+        self.history.moment(self.moment_yr)
+    }
+
+    /// Place of the moment in the view; outside 0 to 1 when it is not in view.
+    #[must_use]
+    pub fn moment_place(&self) -> f64 {
+        self.view.place_of(self.derived.axis.fraction_at(self.moment_yr))
+    }
+
+    /// Builds axis, samples and charts anew after a change of history, scale, view or charts.
+    pub(super) fn refresh(&mut self) {
+        self.derived.update(&self.history, self.scale, self.view, &self.curves);
+    }
+
+    /// Says something that needs no answer.
+    pub fn say(&mut self, text: impl Into<String>) {
+        self.notice = Some(Notice { text: text.into(), is_error: false });
+    }
+
+    /// Says that something went wrong.
+    pub fn say_error(&mut self, text: impl Into<String>) {
+        self.notice = Some(Notice { text: text.into(), is_error: true });
+    }
+}
