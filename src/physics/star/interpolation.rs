@@ -34,11 +34,6 @@ impl Curve {
         &self.ages
     }
 
-    /// Values at the nodes.
-    pub(super) fn values(&self) -> &[[f64; QUANTITIES]] {
-        &self.values
-    }
-
     /// Values at an age, held at the ends.
     pub(super) fn at(&self, age: f64) -> [f64; QUANTITIES] {
         let count = self.ages.len();
@@ -53,11 +48,15 @@ impl Curve {
         let width = self.ages[after] - self.ages[before];
         let s = (age - self.ages[before]) / width;
         let t = 1.0 - s;
-        let (start, end) = (t * t * (1.0 + 2.0 * s), s * s * (1.0 + 2.0 * t));
+        let blend = s * s * (1.0 + 2.0 * t);
         let (rise_start, rise_end) = (width * s * t * t, -width * s * s * t);
         let ((v0, v1), (d0, d1)) =
             ((&self.values[before], &self.values[after]), (&self.slopes[before], &self.slopes[after]));
-        std::array::from_fn(|q| v0[q] * start + v1[q] * end + d0[q] * rise_start + d1[q] * rise_end)
+        // Rounding alone could step outside the nodes by the last digit.
+        std::array::from_fn(|q| {
+            let value = v0[q] + blend * (v1[q] - v0[q]) + d0[q] * rise_start + d1[q] * rise_end;
+            value.clamp(v0[q].min(v1[q]), v0[q].max(v1[q]))
+        })
     }
 }
 

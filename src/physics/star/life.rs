@@ -15,6 +15,8 @@ const GONE: f64 = 1e-4;
 const TRACE: f64 = 0.2;
 /// Largest error of log luminosity and log radius halfway between two nodes if joined by a straight line.
 const NODE_TOLERANCE: f64 = 2e-3;
+/// Largest change of log luminosity and log radius between two nodes.
+const NODE_CHANGE: f64 = 0.2;
 /// Largest error of the mass lost in one step, as a fraction of the envelope.
 const LOSS_TOLERANCE: f64 = 5e-4;
 /// Longest step in units of the time of a phase, with wind.
@@ -280,7 +282,11 @@ impl Walk<'_> {
             ));
             let room = envelope.clamp(GONE * star.mass_msun, star.mass_msun);
             let loss = (middle_rate - 0.5 * (rate + end_rate_yr * YR_PER_MYR)).abs() * length / room;
-            let error = (surface / NODE_TOLERANCE).max(loss / LOSS_TOLERANCE);
+            let change = (end.luminosity_lsun / look.luminosity_lsun)
+                .ln()
+                .abs()
+                .max((end.radius_rsun / look.radius_rsun).ln().abs());
+            let error = (surface / NODE_TOLERANCE).max(loss / LOSS_TOLERANCE).max((change / NODE_CHANGE).powi(2));
             let growth = (end.eating_core_msun(star.phase) - look.eating_core_msun(star.phase)) / (CORE_STEP * room);
             if (error > 1.0 || growth > 1.0) && length > 4.0 * least {
                 length *= (0.9 / error.sqrt()).min(0.9 / growth.max(1e-9)).clamp(0.1, 0.7);

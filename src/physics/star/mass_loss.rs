@@ -41,7 +41,8 @@ impl WindSource {
     /// * giants: Reimers 1975 (4·10⁻¹³ η L R / M) and Kudritzki & Reimers 1978;
     /// * asymptotic giants: Vassiliadis & Wood 1993, ApJ 413, 641, with its superwind limit;
     /// * luminous stars (L > 4000): Nieuwenhuijzen & de Jager 1990, A&A 231, 134, times √(Z/0.02);
-    /// * stars with thin or no hydrogen envelopes: Hamann & Koesterke 1998 (10⁻¹³ L^1.5);
+    /// * stars with thin or no hydrogen envelopes: Hamann & Koesterke 1998, A&A 335, 1003 (10⁻¹³ L^1.5), times
+    ///   (Z/0.02)^0.86 after Vink & de Koter 2005, A&A 442, 587, which the other authors leave out;
     /// * luminous blue variables: Humphreys & Davidson 1994 limit.
     ///
     /// # Source
@@ -65,10 +66,10 @@ impl WindSource {
         if matches!(phase, Phase::EarlyAsymptoticGiant | Phase::PulsingAsymptoticGiant) {
             rate = rate.max(pulsation_wind_msun_yr(m, l, r));
         }
-        if phase.is_helium_star() {
-            rate = rate.max(1e-13 * l * l.sqrt());
-        } else if self.envelope_measure < 1.0 {
-            rate = rate.max(1e-13 * l * l.sqrt() * (1.0 - self.envelope_measure.max(0.0)));
+        let bareness = if phase.is_helium_star() { 1.0 } else { 1.0 - self.envelope_measure.max(0.0) };
+        if bareness > 0.0 {
+            let wolf_rayet = 1e-13 * l * l.sqrt() * (self.heavy_elements / 0.02).powf(0.86);
+            rate = rate.max(wolf_rayet * bareness);
         }
         let limit = 1e-5 * r * l.sqrt();
         if l > 6e5 && limit > 1.0 {

@@ -24,8 +24,8 @@ use super::white_dwarf::{CoolingCurve, WhiteDwarf};
 /// memory). The shape is ours.
 const SETTLING_YR: f64 = 1e4;
 
-/// Node ages put into a settling.
-const SETTLING_NODES: u32 = 16;
+/// Largest change of log luminosity and log radius between two node ages of a settling.
+const SETTLING_STEP: f64 = 0.15;
 
 /// A star's whole life.
 ///
@@ -90,6 +90,15 @@ impl Settling {
         let x = (since_yr / self.lasts_yr).clamp(0.0, 1.0);
         (1.0 - x) * (1.0 - x) * (1.0 + 2.0 * x)
     }
+
+    /// Times since the start between which it is nearly straight, yr.
+    fn node_times_yr(&self) -> impl Iterator<Item = f64> {
+        // The middle of the settling is half again as steep as its mean.
+        let wanted = 1.5 * self.log_luminosity.abs().max(self.log_radius.abs()) / SETTLING_STEP;
+        let count = (8_u32..=128).find(|&count| f64::from(count) >= wanted).unwrap_or(128);
+        let lasts_yr = self.lasts_yr;
+        (1..=count).map(move |step| lasts_yr * f64::from(step) / f64::from(count))
+    }
 }
 
 /// Luminosity, radius, mass, core mass and mass loss in the units of [`StarState`].
@@ -142,8 +151,8 @@ impl Track {
         };
         pieces.push(Piece { course, settling: None });
         settle(&spans, &mut pieces);
-        note_extremes(&pieces, &mut events);
         let node_ages = node_ages(&spans, &pieces);
+        note_extremes(&spans, &pieces, &node_ages, &mut events);
         Self {
             input,
             spans,
@@ -370,21 +379,29 @@ fn settle(spans: &[PhaseSpan], pieces: &mut [Piece]) {
 }
 
 /// Adds the moments of largest radius and highest luminosity, and puts all events in order of age.
-fn note_extremes(pieces: &[Piece], events: &mut Vec<StarEvent>) {
-    for (quantity, kind) in [(1, StarEventKind::LargestRadius), (0, StarEventKind::HighestLuminosity)] {
-        let mut best: Option<(f64, f64)> = None;
-        for piece in pieces {
-            let Course::Burning(curve) = &piece.course else { continue };
-            for (age, values) in curve.ages().iter().zip(curve.values()) {
-                if best.is_none_or(|(most, _)| values[quantity] > most) {
-                    best = Some((values[quantity], *age));
-                }
+fn note_extremes(spans: &[PhaseSpan], pieces: &[Piece], node_ages: &[f64], events: &mut Vec<StarEvent>) {
+    let mut largest = (f64::NEG_INFINITY, 0.0);
+    let mut brightest = (f64::NEG_INFINITY, 0.0);
+    for (span, piece) in spans.iter().zip(pieces).filter(|(span, _)| !span.phase.is_remnant()) {
+        let from = node_ages.partition_point(|&age| age < span.from_yr);
+        for &age in node_ages[from..].iter().take_while(|&&age| age < span.to_yr) {
+            let figures = piece.figures(*span, age);
+            if figures.log_radius > largest.0 {
+                largest = (figures.log_radius, age);
+            }
+            if figures.log_luminosity > brightest.0 {
+                brightest = (figures.log_luminosity, age);
             }
         }
-        if let Some((_, age_yr)) = best {
-            events.push(StarEvent { age_yr, kind });
-        }
     }
+    // First in the list, so that of equal ages the summit comes before what ends it.
+    events.splice(
+        0..0,
+        [
+            StarEvent { age_yr: largest.1, kind: StarEventKind::LargestRadius },
+            StarEvent { age_yr: brightest.1, kind: StarEventKind::HighestLuminosity },
+        ],
+    );
     events.sort_by(|a, b| a.age_yr.total_cmp(&b.age_yr));
 }
 
@@ -404,10 +421,7 @@ fn node_ages(spans: &[PhaseSpan], pieces: &[Piece]) -> Vec<f64> {
             Course::Dark { .. } => ages.extend([span.from_yr, END_YR]),
         }
         if let Some(settling) = &piece.settling {
-            ages.extend(
-                (1..=SETTLING_NODES)
-                    .map(|step| span.from_yr + settling.lasts_yr * f64::from(step) / f64::from(SETTLING_NODES)),
-            );
+            ages.extend(settling.node_times_yr().map(|since_yr| span.from_yr + since_yr));
         }
         // The last node of a phase stands just before the first of the next.
         let end = if last { END_YR } else { span.to_yr.next_down() };

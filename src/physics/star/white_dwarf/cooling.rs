@@ -105,23 +105,32 @@ impl WhiteDwarf {
         10.0_f64.powf(end(&ROWS[self.lighter]).min(end(&ROWS[self.lighter + 1])))
     }
 
-    /// Cooling ages between which the course is smooth, yr, in rising order, up to `end_yr`.
+    /// Cooling ages in rising order up to `end_yr`, yr, so close that the luminosity falls by less than a quarter between.
     #[must_use]
     pub fn node_ages_yr(&self, end_yr: f64) -> Vec<f64> {
-        let rows = [&ROWS[self.lighter], &ROWS[self.lighter + 1]];
-        let mut logs: Vec<f64> = rows.iter().flat_map(|row| row.nodes.iter().map(|node| node.1)).collect();
-        // Before the first node and past the last an even logarithmic spacing; the exponential end needs a finer one.
-        logs.extend((0..56).map(|step| 0.25 * f64::from(step)));
-        let oldest = self.oldest_tabulated_yr().log10();
-        logs.extend((1..64).map(|step| oldest + 0.02 * f64::from(step)));
-        let last = end_yr.log10();
-        logs.retain(|&log| log < last);
-        logs.sort_by(f64::total_cmp);
-        logs.dedup_by(|next, kept| *next - *kept < 1e-3);
-        let mut ages: Vec<f64> = logs.into_iter().map(|log| 10.0_f64.powf(log)).collect();
-        if end_yr > 0.0 {
-            ages.push(end_yr);
+        const STEP: f64 = 0.25;
+        let last = end_yr.max(1.0).log10();
+        let mut logs = vec![0.0];
+        for row in [&ROWS[self.lighter], &ROWS[self.lighter + 1]] {
+            logs.extend(row.nodes.iter().map(|node| node.1).filter(|&log| log < last));
         }
+        logs.push(last);
+        logs.sort_by(f64::total_cmp);
+        let log_luminosity = |log: f64| self.logarithms_at(10.0_f64.powf(log)).0;
+        let mut ages = vec![1.0];
+        for pair in logs.windows(2) {
+            let (mut from, to) = (pair[0], pair[1]);
+            while to - from > 1e-4 {
+                let mut next = to.min(from + STEP);
+                while log_luminosity(from) - log_luminosity(next) > STEP && next - from > 1e-4 {
+                    next = 0.5 * (from + next);
+                }
+                from = next;
+                ages.push(10.0_f64.powf(from));
+            }
+        }
+        ages.retain(|&age| age < end_yr);
+        ages.push(end_yr);
         ages
     }
 }
@@ -232,6 +241,9 @@ mod tests {
     fn node_ages_rise_and_end_where_asked() {
         let ages = WhiteDwarf::new(0.55).node_ages_yr(1e14);
         assert!(ages.windows(2).all(|pair| pair[0] < pair[1]));
+        let dwarf = WhiteDwarf::new(0.55);
+        let logs: Vec<f64> = ages.iter().map(|&age| dwarf.logarithms_at(age).0).collect();
+        assert!(logs.windows(2).all(|pair| (0.0..0.26).contains(&(pair[0] - pair[1]))));
         assert_eq!(ages.last(), Some(&1e14));
     }
 }
