@@ -23,7 +23,7 @@ pub mod tides;
 pub mod transit;
 
 pub use caution::Caution;
-pub use climate::{ClimateState, WaterWorldAir};
+pub use climate::{CarbonCycle, ClimateState, WaterWorldAir};
 pub use greenhouse::Greenhouse;
 pub use history::{PlanetEvent, PlanetEventKind, PlanetHistory, PlanetInput, PlanetMoment, WaterWorld};
 pub use irradiation::Redistribution;

@@ -125,9 +125,12 @@ impl<'a> Walk<'a> {
         let start_yr = before.age_yr;
         let mut elapsed_yr = 0.0;
         let mut star = *before;
+        // A star that swells between the nodes pulls hardest at the second.
+        let final_pull = self.rates(&self.now, after, after).axis_per_yr.abs();
         while elapsed_yr < span_yr && self.history.end.is_none() {
             let rates = self.rates(&self.now, &star, after);
-            let longest_yr = if rates.axis_per_yr.abs() * span_yr < WEAK { span_yr } else { 0.25 * span_yr };
+            let longest_yr =
+                if rates.axis_per_yr.abs().max(final_pull) * span_yr < WEAK { span_yr } else { 0.25 * span_yr };
             let mut step_yr = longest_yr.min(AXIS_STEP / rates.axis_per_yr.abs().max(1e-300));
             if self.now.eccentricity > ROUND {
                 step_yr = step_yr.min(ECCENTRICITY_STEP / rates.eccentricity_per_yr.abs().max(1e-300));

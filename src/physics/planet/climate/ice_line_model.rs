@@ -139,6 +139,11 @@ impl Latitudes {
         Ok(Self { infrared, sine, weight, sunlight, lower, upper, has_ice_line: obliquity_deg <= BELTS_ABOVE_DEG })
     }
 
+    /// The same latitudes under other air.
+    pub(crate) fn breathing(&self, infrared: OutgoingInfrared) -> Self {
+        Self { infrared, ..self.clone() }
+    }
+
     pub(crate) fn under(&self, teff_k: f64) -> IceLineModel {
         let reflection = Reflection::new(teff_k);
         let open_albedo: Profile = std::array::from_fn(|i| reflection.open(self.sine[i]));

@@ -52,6 +52,17 @@ impl ClimateTable {
         })
     }
 
+    /// The same planet under another pressure of carbon dioxide.
+    pub(crate) fn sharing(other: &Self, carbon_dioxide_bar: f64) -> Result<Self, OutOfRange> {
+        let infrared = OutgoingInfrared::new(carbon_dioxide_bar)?;
+        let latitudes = other.latitudes.breathing(infrared);
+        Ok(Self { latitudes, infrared, curves: [const { None }; TEFF_NODES_K.len()] })
+    }
+
+    pub(crate) fn latitudes(&self) -> &Latitudes {
+        &self.latitudes
+    }
+
     /// Works out and keeps the curves around a temperature.
     pub(crate) fn prepare(&mut self, teff_k: f64) {
         let (low, share) = bracket(teff_k);

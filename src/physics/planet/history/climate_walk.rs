@@ -1,16 +1,16 @@
 //! The climate's states and the planet's water along the walk.
 
 use super::super::caution::Caution;
+use super::super::climate::ClimateState;
+use super::super::climate::carbon::WorldClimate;
 use super::super::climate::state::{Standing, next_change};
-use super::super::climate::table::{SURELY_FROZEN, SURELY_THAWED};
-use super::super::climate::{ClimateState, ClimateTable};
 use super::super::escape;
-use super::super::habitable_zone::moist_insolation_earth;
 use super::super::range::OutOfRange;
 use super::event::{PlanetEvent, PlanetEventKind};
 use super::input::{PlanetInput, WaterWorld};
 use super::passage::w_m2;
 use super::surroundings::Surroundings;
+use super::thresholds::standing;
 use crate::units::constants::YEAR_S;
 
 /// Changes of state between two nodes after which something would be wrong with the thresholds.
@@ -19,7 +19,7 @@ const MOST_CHANGES: usize = 16;
 /// The states of a climate and its water through a life.
 #[derive(Clone, Debug)]
 pub(super) struct ClimateHistory {
-    pub(super) table: ClimateTable,
+    pub(super) world: WorldClimate,
     /// Each state with the age it begins, yr.
     pub(super) states: Vec<(f64, ClimateState)>,
     /// Ages, yr, and water, oceans of the Earth; straight in between.
@@ -71,7 +71,7 @@ impl<'a> ClimateWalk<'a> {
         water: &WaterWorld,
         first: &Standing,
         age_yr: f64,
-        table: ClimateTable,
+        world: WorldClimate,
     ) -> Self {
         let water_oceans = water.water_oceans;
         let mut state = if water_oceans <= 0.0 {
@@ -87,8 +87,23 @@ impl<'a> ClimateWalk<'a> {
             let Some(next) = first.leads_from(state) else { break };
             state = next;
         }
-        let history = ClimateHistory { table, states: vec![(age_yr, state)], water: vec![(age_yr, water_oceans)] };
+        let history = ClimateHistory { world, states: vec![(age_yr, state)], water: vec![(age_yr, water_oceans)] };
         Self { input, history, state, water_oceans }
+    }
+
+    /// Whether the water is gone, after which nothing changes any more.
+    pub(super) fn is_over(&self) -> bool {
+        self.state == ClimateState::Dry
+    }
+
+    /// Where the starlight stands to the thresholds at one of the nodes.
+    pub(super) fn standing(
+        &mut self,
+        met: &[Surroundings],
+        at: usize,
+        locked_yr: Option<f64>,
+    ) -> Result<Standing, OutOfRange> {
+        standing(met, at, &mut self.history.world, locked_yr)
     }
 
     /// Runs from one node to the next.
@@ -211,41 +226,4 @@ impl<'a> ClimateWalk<'a> {
             runaway: by_energy.min(hydrogen(escape::hydrogen_through_oxygen_kg_s(m, r))),
         }
     }
-}
-
-/// Where the starlight stands to the climate's thresholds at every node.
-///
-/// Curves are only worked out where the starlight is near enough to matter: at such nodes and their neighbours.
-pub(super) fn standings(
-    met: &[Surroundings],
-    table: &mut ClimateTable,
-    locked_yr: Option<f64>,
-) -> Result<Vec<Standing>, OutOfRange> {
-    let near =
-        |at: usize| met.get(at).is_some_and(|node| (SURELY_FROZEN..=SURELY_THAWED).contains(&node.insolation_earth));
-    let mut standings = Vec::with_capacity(met.len());
-    for (at, node) in met.iter().enumerate() {
-        let log_light = node.insolation_earth.ln();
-        let (mut freeze, mut thaw) =
-            if node.insolation_earth < 1.0 { (SURELY_FROZEN, SURELY_FROZEN) } else { (SURELY_THAWED, SURELY_THAWED) };
-        let mut moist = moist_insolation_earth(node.effective_temperature_k);
-        if near(at) || near(at + 1) || at.checked_sub(1).is_some_and(near) {
-            table.prepare(node.effective_temperature_k);
-            let limits = table.limits(node.effective_temperature_k)?;
-            (freeze, thaw) = (limits.freeze_insolation_earth, limits.thaw_insolation_earth);
-            moist = limits.hot_insolation_earth.map_or(moist, |hot| hot.min(moist));
-            // A planet that always shows one face has a single climate at each starlight.
-            if locked_yr.is_some_and(|age_yr| age_yr <= node.age_yr) {
-                thaw = freeze;
-            }
-        }
-        standings.push(Standing {
-            over_freeze: log_light - freeze.ln(),
-            over_thaw: log_light - thaw.max(freeze).ln(),
-            over_moist: log_light - moist.ln(),
-            over_runaway: node.over_inner,
-            extrapolated: node.zone_extrapolated,
-        });
-    }
-    Ok(standings)
 }

@@ -1,6 +1,6 @@
 //! What has to be known of a planet before its history can be walked.
 
-use super::super::climate::WaterWorldAir;
+use super::super::climate::{CarbonCycle, WaterWorldAir};
 use super::super::deep_time::InnerHeat;
 use super::super::greenhouse::Greenhouse;
 use super::super::irradiation::{Redistribution, checked_emissivity};
@@ -13,15 +13,26 @@ use super::super::tides::{Spin, Tides};
 pub struct WaterWorld {
     /// Air and tilt of the axis.
     pub air: WaterWorldAir,
+    /// What sets the carbon dioxide; `air.carbon_dioxide_bar` counts where it is held.
+    pub carbon: CarbonCycle,
     /// Water at the start, in oceans of the Earth (1.4 × 10²¹ kg).
     pub water_oceans: f64,
     /// The planet starts frozen over where the starlight would allow either.
     pub starts_frozen: bool,
+    /// Time after the star's birth when the planet has its ocean, yr; climate and loss of water begin then.
+    pub ocean_after_yr: f64,
 }
 
 impl Default for WaterWorld {
     fn default() -> Self {
-        Self { air: WaterWorldAir::default(), water_oceans: 1.0, starts_frozen: false }
+        // Rocky planets are put together within 30 to 100 Myr (recalled); the early end is our own choice.
+        Self {
+            air: WaterWorldAir::default(),
+            carbon: CarbonCycle::default(),
+            water_oceans: 1.0,
+            starts_frozen: false,
+            ocean_after_yr: 3e7,
+        }
     }
 }
 
@@ -83,6 +94,8 @@ impl PlanetInput {
         fraction("escape_efficiency", self.escape_efficiency)?;
         if let Some(water) = &self.water {
             water.air.check()?;
+            water.carbon.check()?;
+            within("ocean_after_yr", water.ocean_after_yr, 0.0, 1e12, "0 to 1e12 yr")?;
             within("water_oceans", water.water_oceans, 0.0, 1e4, "0 to 10 000 oceans")?;
         }
         Ok(())

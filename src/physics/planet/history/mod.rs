@@ -7,6 +7,7 @@ pub mod moment;
 mod passage;
 pub mod planet_history;
 mod surroundings;
+mod thresholds;
 
 pub use event::{PlanetEvent, PlanetEventKind};
 pub use input::{PlanetInput, WaterWorld};

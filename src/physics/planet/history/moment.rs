@@ -51,6 +51,8 @@ pub struct ClimateMoment {
     pub ice_line_deg: Option<f64>,
     /// Temperature at the equator and at the poles, K; `None` where only a mean is known.
     pub equator_pole_k: Option<(f64, f64)>,
+    /// Partial pressure of carbon dioxide, bar; `None` under steam and without water.
+    pub carbon_dioxide_bar: Option<f64>,
 }
 
 /// One planet at one moment.
@@ -162,6 +164,7 @@ impl PlanetHistory {
             ice_fraction: None,
             ice_line_deg: None,
             equator_pole_k: None,
+            carbon_dioxide_bar: None,
         };
         let (surface, caution) = match state {
             ClimateState::Dry => (SurfaceTemperature::Known(held), held_caution),
@@ -172,11 +175,15 @@ impl PlanetHistory {
                 let heat = &self.input.inner_heat;
                 let sky_k = background_temperature_k(heat.birth_cosmic_age_yr + age_yr.max(0.0));
                 let other_w_m2 = heat.heat_flow_at_w_m2(age_yr) + STEFAN_BOLTZMANN_W_M2_K4 * sky_k.powi(4);
-                let mean_k = climate.table.frozen_mean_k(insolation_earth, teff_k, other_w_m2)?.max(sky_k);
-                (SurfaceTemperature::Known(mean_k), None)
+                let (mean_k, carbon_dioxide_bar) =
+                    climate.world.frozen_climate(insolation_earth, teff_k, other_w_m2)?;
+                moment.carbon_dioxide_bar = Some(carbon_dioxide_bar);
+                (SurfaceTemperature::Known(mean_k.max(sky_k)), None)
             }
             ClimateState::Temperate | ClimateState::Moist => {
-                let open = climate.table.open_climate(insolation_earth, teff_k)?;
+                let aired = climate.world.open_climate(insolation_earth, teff_k)?;
+                let open = aired.climate;
+                moment.carbon_dioxide_bar = Some(aired.carbon_dioxide_bar);
                 moment.ice_fraction = Some(open.ice_fraction);
                 moment.ice_line_deg = open.ice_line_deg;
                 moment.equator_pole_k = Some((open.equator_k, open.pole_k));

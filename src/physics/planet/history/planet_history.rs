@@ -1,16 +1,18 @@
 //! The whole history of one planet.
 
 use super::super::caution::Caution;
-use super::super::climate::{ClimateState, ClimateTable};
+use super::super::climate::ClimateState;
+use super::super::climate::carbon::WorldClimate;
 use super::super::orbit_history::OrbitHistory;
 use super::super::range::OutOfRange;
 use super::super::star_point::{StarPoint, check_track};
 use super::super::tides::{LockLevel, Tides};
-use super::climate_walk::{ClimateHistory, ClimateWalk, standings};
+use super::climate_walk::{ClimateHistory, ClimateWalk};
 use super::event::{PlanetEvent, PlanetEventKind};
 use super::input::PlanetInput;
 use super::passage::{Accumulated, Passage};
 use super::surroundings::{HighEnergyHistory, Surroundings};
+use super::thresholds::standing;
 
 /// Periastron over the star's reach within which nobody can say whether a planet survives: 15 % either way.
 const UNDECIDED_WITHIN: f64 = 1.15;
@@ -86,12 +88,21 @@ impl PlanetHistory {
     }
 
     fn walk_climate(&mut self, met: &[Surroundings]) -> Result<(), OutOfRange> {
-        let (Some(water), Some(first)) = (self.input.water, met.first()) else { return Ok(()) };
-        let mut table = ClimateTable::new(&water.air)?;
-        let standings = standings(met, &mut table, self.locked_yr)?;
-        let mut walk = ClimateWalk::start(&self.input, &water, &standings[0], first.age_yr, table);
+        let (Some(water), Some(birth)) = (self.input.water, met.first()) else { return Ok(()) };
+        // The birth of a star whose track starts on the main sequence is taken at age zero.
+        let ocean_yr = birth.age_yr.min(0.0) + water.ocean_after_yr;
+        let met = &met[met.partition_point(|node| node.age_yr < ocean_yr)..];
+        let Some(first) = met.first() else { return Ok(()) };
+        let mut world = WorldClimate::new(&water.air, water.carbon)?;
+        let mut before = standing(met, 0, &mut world, self.locked_yr)?;
+        let mut walk = ClimateWalk::start(&self.input, &water, &before, first.age_yr, world);
         for at in 1..met.len() {
-            walk.advance((&met[at - 1], &standings[at - 1]), (&met[at], &standings[at]), &mut self.events);
+            if walk.is_over() {
+                break;
+            }
+            let after = walk.standing(met, at, self.locked_yr)?;
+            walk.advance((&met[at - 1], &before), (&met[at], &after), &mut self.events);
+            before = after;
         }
         self.climate = Some(walk.history);
         Ok(())
