@@ -155,3 +155,27 @@ fn ends_are_of_the_right_kind() {
         assert_eq!(track.state_at(1e14).phase, end, "{mass}");
     }
 }
+
+#[test]
+fn a_track_follows_the_formula_between_its_nodes() {
+    // No wind below 4000 solar luminosities, so that the main sequence is the formula itself.
+    let mut worst = (0.0_f64, String::new());
+    for z in [1e-4, 1e-3, 0.01, 0.0184, 0.03] {
+        let fit = Fit::new(z).unwrap();
+        for mass in [0.35, 0.5, 0.8, 1.0, 1.1, 1.15, 1.3, 1.47, 1.6, 2.0, 3.0, 5.0] {
+            let track = Track::compute_with(mass, &fit).unwrap();
+            let main_sequence = fit.main_sequence(mass);
+            for step in 0..2000 {
+                let myr = main_sequence.end_myr * (f64::from(step) + 0.5) / 2000.0;
+                let (luminosity, radius) = main_sequence.at(myr);
+                let state = track.state_at(myr * 1e6);
+                let error =
+                    (state.luminosity_lsun / luminosity).ln().abs().max((state.radius_rsun / radius).ln().abs());
+                if error > worst.0 {
+                    worst = (error, format!("Z {z} M {mass} {myr} Myr"));
+                }
+            }
+        }
+    }
+    assert!(worst.0 < 1.5e-3, "{worst:?}");
+}

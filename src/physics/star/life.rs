@@ -1,35 +1,11 @@
-//! A whole life: phase after phase, step by step, with the wind.
+//! A whole life: phase after phase, and what each passes on to the next.
 
-use super::analytic::{CARBON_IGNITION_CORE_MSUN, CORE_COLLAPSE_CORE_MSUN, CoreGrowth, Fit, helium_star};
+use super::analytic::{CARBON_IGNITION_CORE_MSUN, CORE_COLLAPSE_CORE_MSUN, Fit, helium_star};
 use super::burning::{Burning, HeliumStar, Look, helium_giant_end_msun};
 use super::event::{StarEvent, StarEventKind};
-use super::phase::Phase;
+use super::phase::{Phase, PhaseSpan};
 use super::remnant::Collapse;
-use super::small_envelope::thin_envelope_measure;
-
-const YR_PER_MYR: f64 = 1e6;
-
-/// The envelope counts as gone when the star is heavier than its core by less than this fraction.
-const GONE: f64 = 1e-4;
-/// A burnt-out helium core counts as bare below this fraction of the measure at which it outshines its envelope.
-const TRACE: f64 = 0.2;
-/// Largest error of log luminosity and log radius halfway between two nodes if joined by a straight line.
-const NODE_TOLERANCE: f64 = 2e-3;
-/// Largest change of log luminosity and log radius between two nodes.
-const NODE_CHANGE: f64 = 0.2;
-/// Largest error of the mass lost in one step, as a fraction of the envelope.
-const LOSS_TOLERANCE: f64 = 5e-4;
-/// Longest step in units of the time of a phase, with wind.
-const SPAN_STEP: f64 = 5e-3;
-/// Longest step in units of the time of a phase, without noticeable wind.
-const CALM_SPAN_STEP: f64 = 2e-2;
-/// Longest step in units of the time left until core growth would run away.
-const GROWTH_STEP: f64 = 1.5e-2;
-/// Largest fraction of the envelope, and of the star, lost in one step.
-const ENVELOPE_STEP: f64 = 2e-2;
-const MASS_STEP: f64 = 1e-2;
-/// Largest growth of the core in one step, as a fraction of the envelope.
-const CORE_STEP: f64 = 5e-2;
+use super::step::YR_PER_MYR;
 
 /// The star at one node: what is interpolated.
 #[derive(Clone, Copy, Debug)]
@@ -45,6 +21,14 @@ pub(super) struct Node {
 pub(super) struct Chapter {
     pub(super) phase: Phase,
     pub(super) nodes: Vec<Node>,
+}
+
+impl Chapter {
+    /// The phase with the ages of the first and last node.
+    pub(super) fn span(&self) -> PhaseSpan {
+        let age = |node: Option<&Node>| node.map_or(0.0, |node| node.age_yr);
+        PhaseSpan { phase: self.phase, from_yr: age(self.nodes.first()), to_yr: age(self.nodes.last()) }
+    }
 }
 
 /// What burning ends in.
@@ -120,97 +104,22 @@ impl Walk<'_> {
         Node { age_yr: self.age_yr(), look, mass_msun: self.star.mass_msun, mass_loss_msun_yr }
     }
 
-    /// Time on the clock at which the phase is over, Myr: burning ends, or the core is massive enough to explode.
-    fn phase_end_myr(&self) -> f64 {
-        let (star, a) = (&self.star, &self.star.anchors);
-        match star.phase {
-            Phase::MainSequence => star.main_sequence.end_myr,
-            Phase::HertzsprungGap => a.main_sequence.base_myr,
-            Phase::FirstGiantBranch => a.ignition_myr,
-            Phase::CoreHeliumBurning => a.asymptotic_base_myr(),
-            Phase::EarlyAsymptoticGiant => a.early_end_myr(),
-            Phase::PulsingAsymptoticGiant => a.pulses_explosion_myr(),
-            Phase::HeliumMainSequence => star.helium.burning_myr,
-            _ => {
-                let growth = &star.helium.growth;
-                growth.time_at_myr(growth.relation().luminosity_lsun(star.helium.explosive_core_msun))
-            }
-        }
-    }
-
-    /// Longest step the course itself allows, Myr.
-    fn course_step_myr(&self, rate_msun_myr: f64) -> f64 {
-        let (star, a) = (&self.star, &self.star.anchors);
-        let growth = |growth: &CoreGrowth| GROWTH_STEP * growth.left_myr(star.clock_myr);
-        let span = |span_myr: f64| {
-            let calm = rate_msun_myr * span_myr < 1e-3 * star.mass_msun;
-            span_myr * if calm { CALM_SPAN_STEP } else { SPAN_STEP }
-        };
-        match star.phase {
-            Phase::MainSequence => span(star.main_sequence.end_myr),
-            Phase::HertzsprungGap => span(a.main_sequence.base_myr - a.main_sequence.end_myr),
-            Phase::FirstGiantBranch => a.giant_growth.as_ref().map_or(f64::INFINITY, growth),
-            Phase::CoreHeliumBurning => span(a.core_helium_myr),
-            Phase::EarlyAsymptoticGiant => growth(&a.early_growth),
-            Phase::PulsingAsymptoticGiant => growth(a.pulse_growth.as_ref().unwrap_or(&a.early_growth)),
-            Phase::HeliumMainSequence => span(star.helium.burning_myr),
-            _ => growth(&star.helium.growth),
-        }
-    }
-
-    /// Times on the clock at which the course bends sharply; nodes are put there.
-    fn bends_myr(&self) -> [f64; 2] {
-        let (star, a) = (&self.star, &self.star.anchors);
-        let none = f64::NEG_INFINITY;
-        match star.phase {
-            Phase::MainSequence => star.main_sequence.bends_myr(),
-            Phase::FirstGiantBranch => [a.giant_growth.as_ref().map_or(none, CoreGrowth::bend_myr), none],
-            Phase::CoreHeliumBurning => {
-                star.fit.blue_phase(a).map(|fraction| a.ignition_myr + fraction * a.core_helium_myr)
-            }
-            Phase::EarlyAsymptoticGiant => [a.early_growth.bend_myr(), none],
-            Phase::PulsingAsymptoticGiant => [a.pulse_growth.as_ref().map_or(none, CoreGrowth::bend_myr), none],
-            Phase::HeliumGiant => [star.helium.growth.bend_myr(), none],
-            _ => [none, none],
-        }
-    }
-
-    /// Whether the star has nothing left around its core, so that the phase cannot go on.
-    fn is_bare(&self, look: &Look) -> bool {
-        let (star, a) = (&self.star, &self.star.anchors);
-        match star.phase {
-            Phase::MainSequence | Phase::HeliumMainSequence => false,
-            // A core that explodes does so with or without its envelope.
-            Phase::HeliumGiant => look.envelope_msun <= 0.0 && look.inner_core_msun < star.helium.explosive_core_msun,
-            Phase::PulsingAsymptoticGiant if look.core_msun >= a.explosive_core_msun => false,
-            // Under the last trace of envelope the helium star inside has burnt out: it cools from now on.
-            Phase::EarlyAsymptoticGiant
-                if look.envelope_measure < TRACE * thin_envelope_measure(star.mass_msun)
-                    && look.inner_core_msun >= helium_star::largest_core_msun(look.core_msun)
-                    && look.inner_core_msun < a.explosive_core_msun =>
-            {
-                true
-            }
-            _ => look.envelope_msun <= GONE * look.core_msun,
-        }
-    }
-
     /// Walks through the present phase and adds its chapter.
     fn walk_phase(&mut self) -> PhaseEnd {
         let phase = self.star.phase;
-        let end_myr = self.phase_end_myr();
+        let end_myr = self.star.phase_end_myr();
         let mut nodes = Vec::with_capacity(256);
         let mut look = self.star.look();
         let mut rate_yr = self.star.wind_msun_yr(&look, self.star.mass_msun);
         let mut trusted_step_myr = f64::INFINITY;
         let reason = loop {
             nodes.push(self.node(look, rate_yr));
-            if self.is_bare(&look) {
+            if self.star.is_bare(&look) {
                 break PhaseEnd::Bare;
             }
             // With wind the main sequence changes and its end with it.
             let end_myr = if phase == Phase::MainSequence || phase == Phase::HeliumMainSequence {
-                self.phase_end_myr()
+                self.star.phase_end_myr()
             } else {
                 end_myr
             };
@@ -218,9 +127,11 @@ impl Walk<'_> {
             if left_myr <= 0.0 {
                 break PhaseEnd::Time;
             }
-            let step = self.step(&look, rate_yr * YR_PER_MYR, left_myr, trusted_step_myr);
+            let least_myr = 8.0 * f64::EPSILON * self.age_myr.max(self.star.clock_myr);
+            let step = self.star.step(&look, rate_yr * YR_PER_MYR, left_myr, trusted_step_myr, least_myr);
             trusted_step_myr = step.next_myr;
-            self.take(&step, left_myr);
+            self.age_myr += step.length_myr;
+            self.star.take(&step, left_myr);
             (look, rate_yr) = (step.look, step.rate_msun_yr);
             if step.track_changed {
                 look = self.star.look();
@@ -231,103 +142,12 @@ impl Walk<'_> {
                 nodes.push(self.node(look, rate_yr));
             }
         };
-        let lasted = nodes.last().zip(nodes.first()).is_some_and(|(last, first)| last.age_yr > first.age_yr);
-        if lasted {
-            self.chapters.push(Chapter { phase, nodes });
+        let chapter = Chapter { phase, nodes };
+        let span = chapter.span();
+        if span.to_yr > span.from_yr {
+            self.chapters.push(chapter);
         }
         reason
-    }
-
-    /// One midpoint step, as long as accuracy allows.
-    fn step(&self, look: &Look, rate: f64, left_myr: f64, trusted_myr: f64) -> Step {
-        let star = &self.star;
-        let envelope = look.envelope_msun;
-        let mut length = self.course_step_myr(rate).min(trusted_myr);
-        if rate > 0.0 {
-            length = length.min(ENVELOPE_STEP * envelope / rate).min(MASS_STEP * star.mass_msun / rate);
-        }
-        let mut bend_myr = f64::INFINITY;
-        for bend in self.bends_myr() {
-            if bend > star.clock_myr * (1.0 + 1e-14) {
-                bend_myr = bend_myr.min(bend - star.clock_myr);
-            }
-        }
-        length = length.min(bend_myr);
-        length = length.min(left_myr);
-        // Below this the age would not advance.
-        let least = 8.0 * f64::EPSILON * self.age_myr.max(star.clock_myr);
-        loop {
-            length = length.max(least.min(left_myr));
-            let middle_mass = (star.mass_msun - 0.5 * rate * length).max(0.5 * star.mass_msun);
-            let middle = star.look_at(star.clock_myr + 0.5 * length, middle_mass);
-            let middle_rate = star.wind_msun_yr(&middle, middle_mass) * YR_PER_MYR;
-            if middle_rate * length > envelope && length > least {
-                length = 0.5 * envelope / middle_rate;
-                continue;
-            }
-            let lost = (middle_rate * length).min(envelope.max(0.0));
-            let mut mass = star.mass_msun - lost;
-            let mut end = star.look_at(star.clock_myr + length, mass);
-            if end.envelope_msun < 0.0 && end.core_msun < star.mass_msun {
-                // The core has grown into the last of the envelope.
-                mass = end.core_msun.max(mass);
-                end = star.look_at(star.clock_myr + length, mass);
-            }
-            let end_rate_yr = star.wind_msun_yr(&end, mass);
-            let bow = |middle: f64, start: f64, end: f64| (middle * middle / (start * end)).ln().abs() * 0.5;
-            let surface = bow(middle.luminosity_lsun, look.luminosity_lsun, end.luminosity_lsun).max(bow(
-                middle.radius_rsun,
-                look.radius_rsun,
-                end.radius_rsun,
-            ));
-            let room = envelope.clamp(GONE * star.mass_msun, star.mass_msun);
-            let loss = (middle_rate - 0.5 * (rate + end_rate_yr * YR_PER_MYR)).abs() * length / room;
-            let change = (end.luminosity_lsun / look.luminosity_lsun)
-                .ln()
-                .abs()
-                .max((end.radius_rsun / look.radius_rsun).ln().abs());
-            let error = (surface / NODE_TOLERANCE).max(loss / LOSS_TOLERANCE).max((change / NODE_CHANGE).powi(2));
-            let growth = (end.eating_core_msun(star.phase) - look.eating_core_msun(star.phase)) / (CORE_STEP * room);
-            if (error > 1.0 || growth > 1.0) && length > 4.0 * least {
-                length *= (0.9 / error.sqrt()).min(0.9 / growth.max(1e-9)).clamp(0.1, 0.7);
-                continue;
-            }
-            return Step {
-                length_myr: length,
-                next_myr: length * (0.8 / error.max(1e-9).sqrt()).clamp(0.5, 2.0),
-                mass_msun: mass,
-                look: end,
-                rate_msun_yr: end_rate_yr,
-                track_changed: lost > 0.0 && matches!(star.phase, Phase::MainSequence | Phase::HeliumMainSequence),
-                at_bend: length >= bend_myr,
-            };
-        }
-    }
-
-    /// Moves the star by a step.
-    fn take(&mut self, step: &Step, left_myr: f64) {
-        let end_of_phase = step.length_myr >= left_myr;
-        self.age_myr += step.length_myr;
-        let star = &mut self.star;
-        star.mass_msun = step.mass_msun;
-        if !step.track_changed {
-            star.clock_myr += if end_of_phase { left_myr } else { step.length_myr };
-            return;
-        }
-        // The pace is the mean of that on the old and on the new track.
-        let advance = |old: f64, new: f64| {
-            let fraction = star.clock_myr / old + 0.5 * step.length_myr * (1.0 / old + 1.0 / new);
-            if end_of_phase { new } else { fraction.min(1.0) * new }
-        };
-        if star.phase == Phase::MainSequence {
-            let new = star.fit.main_sequence(star.mass_msun);
-            star.clock_myr = advance(star.main_sequence.end_myr, new.end_myr);
-            star.main_sequence = new;
-        } else {
-            let new = HeliumStar::new(star.mass_msun);
-            star.clock_myr = advance(star.helium.burning_myr, new.burning_myr);
-            star.helium = new;
-        }
     }
 
     /// Starts what comes after the phase.
@@ -490,17 +310,4 @@ impl Walk<'_> {
 /// Stars with a hook exhaust it there. Below, the fits stretch the main sequence past it; the Sun's own ratio is kept.
 fn core_exhausted_fraction(hook_fraction: f64) -> f64 {
     hook_fraction.clamp(0.847, 1.0)
-}
-
-/// One step of the walk.
-struct Step {
-    length_myr: f64,
-    next_myr: f64,
-    mass_msun: f64,
-    look: Look,
-    rate_msun_yr: f64,
-    /// The star has come to the track of another mass.
-    track_changed: bool,
-    /// The course bends sharply where the step ends.
-    at_bend: bool,
 }

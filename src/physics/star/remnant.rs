@@ -12,7 +12,7 @@ pub const NEUTRON_STAR_RADIUS_KM: f64 = 12.0;
 /// Greatest mass of a neutron star, solar masses.
 ///
 /// # Source
-/// Fryer et al. 2012, ApJ 749, 91, section 4.
+/// Fryer et al. 2012, ApJ 749, 91 (from memory).
 pub const NEUTRON_STAR_LIMIT_MSUN: f64 = 2.5;
 
 /// Baryonic mass of the core that collapses by electron capture, solar masses.
@@ -42,7 +42,7 @@ impl Collapse {
     /// A proto-neutron star forms, and part of the star falls back on it: the delayed explosion.
     ///
     /// # Source
-    /// Fryer et al. 2012, ApJ 749, 91, eqs. 10–14 and 18–20.
+    /// Fryer et al. 2012, ApJ 749, 91, section 4 (from memory).
     ///
     /// # Valid for
     /// Single stars below the pair-instability range (helium cores below about 35 solar masses).
@@ -66,7 +66,7 @@ impl Collapse {
 /// Baryonic mass left by a delayed explosion, from total and carbon–oxygen core mass, solar masses.
 ///
 /// # Source
-/// Fryer et al. 2012, ApJ 749, 91, eqs. 18–20.
+/// Fryer et al. 2012, ApJ 749, 91, eqs. 18–20 (from memory).
 #[must_use]
 pub fn delayed_baryonic_mass_msun(mass_msun: f64, core_msun: f64) -> f64 {
     let proto = match core_msun {
@@ -92,7 +92,7 @@ pub fn delayed_baryonic_mass_msun(mass_msun: f64, core_msun: f64) -> f64 {
 /// Gravitational mass of a neutron star of a baryonic mass: `M_b` − `M_g` = 0.075 `M_g`², solar masses.
 ///
 /// # Source
-/// Lattimer & Yahil 1989, ApJ 340, 426, as used by Fryer et al. 2012, eq. 13.
+/// Lattimer & Yahil 1989, ApJ 340, 426, as used by Fryer et al. 2012.
 #[must_use]
 pub fn neutron_star_mass_msun(baryonic_msun: f64) -> f64 {
     ((1.0 + 0.3 * baryonic_msun).sqrt() - 1.0) / 0.15
