@@ -1,28 +1,30 @@
 //! Lives that several tests look at, each computed once.
 
-use longember::physics::star::convective::{ConvectiveInput, Life, Node, Options, SurfaceOpacity, compute_with};
+use longember::physics::star::convective::{
+    ConvectiveInput, Life, Node, Options, Resolution, SurfaceOpacity, compute_with,
+};
 use std::ops::ControlFlow;
 use std::sync::LazyLock;
 
-fn life(mass_msun: f64, metallicity_dex: f64, surface: SurfaceOpacity) -> Life {
-    let options = Options { surface, ..Options::default() };
-    let input = ConvectiveInput { mass_msun, metallicity_dex };
+fn life(mass_msun: f64, resolution: Resolution, surface: SurfaceOpacity) -> Life {
+    let options = Options { resolution, surface };
+    let input = ConvectiveInput { mass_msun, metallicity_dex: 0.0 };
     compute_with(input, options, &mut |_| ControlFlow::Continue(())).expect("a mass and metallicity in range")
 }
 
 macro_rules! lives {
-    ($($name:ident: $mass:expr, $metallicity:expr, $surface:ident;)*) => {
-        $(pub static $name: LazyLock<Life> = LazyLock::new(|| life($mass, $metallicity, SurfaceOpacity::$surface));)*
+    ($($name:ident: $mass:expr, $resolution:ident, $surface:ident;)*) => {
+        $(pub static $name: LazyLock<Life> = LazyLock::new(|| life($mass, Resolution::$resolution, SurfaceOpacity::$surface));)*
     };
 }
 
 lives! {
-    M008: 0.08, 0.0, Modern;
-    M010: 0.10, 0.0, Modern;
-    M015: 0.15, 0.0, Modern;
-    M020: 0.20, 0.0, Modern;
-    M030: 0.30, 0.0, Modern;
-    M010_OF_1997: 0.10, 0.0, Of1997;
+    M008: 0.08, Coarse, Modern;
+    M010: 0.10, Standard, Modern;
+    M015: 0.15, Coarse, Modern;
+    M020: 0.20, Standard, Modern;
+    M030: 0.30, Coarse, Modern;
+    M010_OF_1997: 0.10, Coarse, Of1997;
 }
 
 /// The star this many years after its birth.

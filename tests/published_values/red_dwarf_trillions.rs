@@ -66,8 +66,25 @@ fn light_stars_become_blue_dwarfs_and_heavier_ones_giants() {
         assert!(life.nodes.iter().any(|node| node.stage == Stage::HeliumWhiteDwarf));
     }
     assert!(M030.nodes.iter().any(|node| node.stage == Stage::GiantBranch));
+    assert!(!M030.nodes.iter().any(|node| node.stage == Stage::BlueDwarf));
     let onset = M015.nodes.iter().find(|node| node.stage == Stage::RadiativeCore).expect("a radiative core");
     assert!(onset.age_yr > 0.75 * brightest(&M015).age_yr);
+}
+
+#[test]
+fn a_small_giant_shines_as_its_core_tells() {
+    // Hurley, Pols & Tout 2000, MNRAS 315, 543, eq. 37 and section 5.2: L = D M_c⁶ with log₁₀ D = 5.37 on the lower
+    // giant branch of stars of a solar mass (Z = 0.02). Less light is expected here: ¹⁴N burns at half the rate used
+    // there, and the core of so small a star is counted from where hydrogen is spent, inside the burning shell.
+    let life = &*M030;
+    for core_msun in [0.22, 0.24, 0.26] {
+        let giant = life.nodes.iter().find(|node| node.helium_core_mass_msun > core_msun).expect("a growing core");
+        assert_eq!(giant.stage, Stage::GiantBranch);
+        let published = 10_f64.powf(5.37) * giant.helium_core_mass_msun.powi(6);
+        assert!((0.45..0.9).contains(&(giant.luminosity_lsun / published)), "{} of {published}", giant.luminosity_lsun);
+    }
+    let last = life.nodes[life.nodes.len() - 1];
+    assert!((0.25..0.29).contains(&last.mass_msun), "white dwarf of {}", last.mass_msun);
 }
 
 #[test]

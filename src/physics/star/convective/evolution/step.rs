@@ -1,6 +1,7 @@
 //! One time step.
 
 use super::super::burning::{Helium3, Rates, helium3_after};
+use super::super::cgs::SOLAR_RADIUS;
 use super::super::gas::gas_pressure;
 use super::super::matter::Microphysics;
 use super::super::structure::{Mesh, Model, Past};
@@ -22,6 +23,13 @@ const LITTLE_HYDROGEN_EASE: f64 = 0.3;
 const AIM_LN_LUMINOSITY: f64 = 0.10;
 const AIM_LN_SURFACE_TEMPERATURE: f64 = 0.035;
 
+/// A giant larger than this whose core is spent, solar radii, …
+const GIANT_RSUN: f64 = 1.5;
+const SPENT_CORE: f64 = 0.05;
+/// … may change so many times more at each point: its thin shell eats its way outwards through mesh points without
+/// changing otherwise.
+const GIANT_EASE: f64 = 4.0;
+
 /// A step that was computed.
 pub(in super::super) struct Step {
     /// The star after it.
@@ -33,16 +41,16 @@ pub(in super::super) struct Step {
 }
 
 /// Computes steps on one mesh.
-pub(in super::super) struct Stepper<'a> {
+pub(in super::super) struct Stepper {
     /// What holds for the star's matter.
     pub(in super::super) laws: Microphysics,
     /// Mass shells.
-    pub(in super::super) mesh: &'a Mesh,
+    pub(in super::super) mesh: Mesh,
     /// Changes aimed at, over those of the standard resolution.
     pub(in super::super) stride: f64,
 }
 
-impl Stepper<'_> {
+impl Stepper {
     /// The star `step_s` seconds later. Nothing if no structure is found.
     ///
     /// First with the old rates; then again with the mean of old and new rates for p+p and CN, and with the new rates
@@ -76,26 +84,28 @@ impl Stepper<'_> {
         ln_temperature: &[f64],
         step_s: f64,
     ) -> Option<usize> {
-        burn_and_mix(model, self.mesh, rates, step_s);
+        burn_and_mix(model, &self.mesh, rates, step_s);
         let ln_pressure = past_pressure(old, model)?;
         let past = Past { step_s, ln_temperature, ln_pressure: &ln_pressure };
-        Some(model.relax(&self.laws, self.mesh, &past, MOST_ITERATIONS)?.iterations)
+        Some(model.relax(&self.laws, &self.mesh, &past, MOST_ITERATIONS)?.iterations)
     }
 
     /// Largest change over the change aimed at.
     fn change(&self, old: &Model, new: &Model) -> f64 {
         let mut largest = 0.0_f64;
         let mut note = |change: f64, aim: f64| largest = largest.max(change.abs() / aim);
+        let giant = old.radius_cm() > GIANT_RSUN * SOLAR_RADIUS && old.helium_core_share(&self.mesh) > SPENT_CORE;
+        let scale = if giant { GIANT_EASE } else { 1.0 };
         for k in 0..self.mesh.len() {
             let above = self.mesh.above[k];
             if above > INTERIOR_ABOVE {
-                note(new.unknowns[k][1] - old.unknowns[k][1], AIM_LN_TEMPERATURE);
-                note(new.unknowns[k][0] - old.unknowns[k][0], AIM_LN_DENSITY);
+                note(new.unknowns[k][1] - old.unknowns[k][1], scale * AIM_LN_TEMPERATURE);
+                note(new.unknowns[k][0] - old.unknowns[k][0], scale * AIM_LN_DENSITY);
             }
             let aim = AIM_HYDROGEN[usize::from(above < 0.2)];
-            note(new.composition[k].hydrogen - old.composition[k].hydrogen, aim);
+            note(new.composition[k].hydrogen - old.composition[k].hydrogen, scale * aim);
         }
-        let [before, after] = [old, new].map(|model| model.mean_hydrogen(self.mesh));
+        let [before, after] = [old, new].map(|model| model.mean_hydrogen(&self.mesh));
         let ease = if after < LITTLE_HYDROGEN { LITTLE_HYDROGEN_EASE } else { 1.0 };
         note((after / before).ln() * ease, AIM_LN_MEAN_HYDROGEN);
         note((new.luminosity_erg_s() / old.luminosity_erg_s()).ln(), AIM_LN_LUMINOSITY);

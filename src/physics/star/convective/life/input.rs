@@ -57,8 +57,8 @@ impl SurfaceOpacity {
 impl ConvectiveInput {
     /// Masses that can be computed, solar masses.
     pub const MASS_RANGE_MSUN: [f64; 2] = [0.075, 0.5];
-    /// Metallicities that can be computed, dex: metals 0.001 to 0.03.
-    pub const METALLICITY_RANGE_DEX: [f64; 2] = [-1.18, 0.29];
+    /// Metallicities that can be computed, dex: metals up to 0.03; below 0.001 with the opacity of 0.001.
+    pub const METALLICITY_RANGE_DEX: [f64; 2] = [-2.0, 0.29];
 
     /// Checks both inputs.
     pub(super) fn check(&self) -> Result<(), ConvectiveError> {
@@ -97,6 +97,6 @@ mod tests {
         let error = ConvectiveInput { mass_msun: f64::NAN, metallicity_dex: 0.0 }.check().unwrap_err();
         assert!(matches!(error, ConvectiveError::OutOfRange { what: "mass_msun", .. }));
         let error = ConvectiveInput { mass_msun: 0.1, metallicity_dex: 0.5 }.check().unwrap_err();
-        assert_eq!(error.to_string(), "metallicity_dex is 0.5, allowed -1.18 to 0.29");
+        assert_eq!(error.to_string(), "metallicity_dex is 0.5, allowed -2 to 0.29");
     }
 }

@@ -2,6 +2,7 @@
 
 mod compute;
 mod error;
+mod follow;
 mod input;
 mod node;
 mod stage;

@@ -7,7 +7,7 @@ use super::stage::Stage;
 pub struct Node {
     /// Age, yr; zero on arrival on the main sequence (99 % of the light comes from burning), negative before.
     pub age_yr: f64,
-    /// Mass, solar masses.
+    /// Mass, solar masses; less than at birth once a giant has blown off a wind.
     pub mass_msun: f64,
     /// Luminosity, solar luminosities.
     pub luminosity_lsun: f64,
@@ -40,9 +40,9 @@ pub struct Node {
 /// How the computed life ends.
 #[derive(Clone, Copy, Debug, PartialEq, Eq, Hash)]
 pub enum Ending {
-    /// As a helium white dwarf of the star's whole mass, cold and dark.
+    /// As a helium white dwarf, cold and dark.
     BlackDwarf,
-    /// At the foot of the giant branch, at three solar radii; the giant is not computed here.
+    /// On the giant branch, where the structure could not be followed further.
     GiantBranch,
 }
 
@@ -58,6 +58,10 @@ pub enum Caution {
     OutdatedSurface,
     /// Late hydrogen burns in flashes, of which only the first, or none, is followed.
     ShellFlashes,
+    /// The star was a giant and lost mass in a wind, known to a factor of two.
+    GiantWind,
+    /// Fewer metals than the opacity tables know: the opacity is that of Z = 0.001.
+    OpacityOfMoreMetals,
     /// Cold cooling was begun early because the structure could not be followed to 1000 K.
     EarlyCrystal,
 }
@@ -84,6 +88,10 @@ impl Caution {
             Self::OutsideCalibratedMetallicity => "The red-dwarf model was fitted to stars of solar metallicity.",
             Self::OutdatedSurface => "The surface is as opaque as in calculations of 1997; today's are brighter.",
             Self::ShellFlashes => "Late hydrogen flashes of the contracting star are not followed in detail.",
+            Self::GiantWind => "The wind of the red giant, and so the white dwarf's mass, is uncertain.",
+            Self::OpacityOfMoreMetals => {
+                "There are fewer metals than the opacity tables know; those of Z = 0.001 are used."
+            }
             Self::EarlyCrystal => "The last cooling is that of a simple crystal from an earlier moment than usual.",
         }
     }
@@ -113,7 +121,7 @@ impl Node {
         let log = |a: f64, b: f64| if a > 0.0 && b > 0.0 { even(a.ln(), b.ln()).exp() } else { even(a, b) };
         Self {
             age_yr: even(self.age_yr, later.age_yr),
-            mass_msun: self.mass_msun,
+            mass_msun: even(self.mass_msun, later.mass_msun),
             luminosity_lsun: log(self.luminosity_lsun, later.luminosity_lsun),
             radius_rsun: log(self.radius_rsun, later.radius_rsun),
             effective_temperature_k: log(self.effective_temperature_k, later.effective_temperature_k),

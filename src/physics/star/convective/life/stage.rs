@@ -14,9 +14,9 @@ pub enum Stage {
     RadiativeCore,
     /// Bright and ever hotter while the last hydrogen burns.
     BlueDwarf,
-    /// On the way up the giant branch, burning hydrogen in a shell.
+    /// A small red giant, burning hydrogen in a shell, up to where it has shrunk again.
     GiantBranch,
-    /// A helium white dwarf of the star's whole mass, at first with hydrogen still glowing.
+    /// A helium white dwarf, at first with hydrogen still glowing.
     HeliumWhiteDwarf,
     /// A helium white dwarf colder than 1000 K.
     BlackDwarf,
@@ -28,6 +28,10 @@ pub(super) const BLACK_BELOW_K: f64 = 1000.0;
 const BRIGHTENED: f64 = 3.0;
 /// … and ends at this share of its peak.
 const FADED: f64 = 0.1;
+/// A star that once was larger than this was a giant, solar radii …
+const GIANT_RSUN: f64 = 3.0;
+/// … until it is smaller than this.
+const SHRUNK_RSUN: f64 = 1.0;
 
 /// Writes the stage of every node; the ages must already count from arrival on the main sequence.
 pub(super) fn assign(nodes: &mut [Node], ending: Ending) {
@@ -47,6 +51,15 @@ pub(super) fn assign(nodes: &mut [Node], ending: Ending) {
     let faded = nodes.iter().enumerate().skip(peak.0).find(|(_, node)| node.luminosity_lsun < FADED * peak.1);
     let faded = faded.map_or(nodes.len(), |(place, _)| place);
 
+    // A giant is one until it has shrunk again for good, even if it is on its way back as bright as ever.
+    let largest = nodes.iter().skip(onset).map(|node| node.radius_rsun).fold(0.0, f64::max);
+    let grown = nodes.iter().rposition(|node| node.radius_rsun > SHRUNK_RSUN).map_or(0, |place| place + 1);
+    let (late, settled) = if ending == Ending::GiantBranch || largest > GIANT_RSUN {
+        (Stage::GiantBranch, if ending == Ending::GiantBranch { nodes.len() } else { grown })
+    } else {
+        (Stage::BlueDwarf, faded)
+    };
+
     for (place, node) in nodes.iter_mut().enumerate() {
         node.stage = if node.age_yr < 0.0 {
             Stage::Contraction
@@ -54,10 +67,8 @@ pub(super) fn assign(nodes: &mut [Node], ending: Ending) {
             Stage::MainSequence
         } else if place < brightened {
             Stage::RadiativeCore
-        } else if ending == Ending::GiantBranch {
-            Stage::GiantBranch
-        } else if place < faded {
-            Stage::BlueDwarf
+        } else if place < settled {
+            late
         } else if node.effective_temperature_k < BLACK_BELOW_K {
             Stage::BlackDwarf
         } else {

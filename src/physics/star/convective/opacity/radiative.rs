@@ -58,6 +58,9 @@ fn rise(position: f64, from: f64, to: f64) -> (f64, f64) {
 }
 
 impl RadiativeOpacity {
+    /// Metal mass fractions of the tables.
+    pub(in super::super) const METALS_RANGE: [f64; 2] = [HOT_METALS[0], HOT_METALS[3]];
+
     /// The tables for a metal mass fraction (kept within 0.001–0.03). Nothing if the table's text is damaged.
     pub(in super::super) fn new(metals: f64) -> Option<Self> {
         let metals = metals.clamp(HOT_METALS[0], HOT_METALS[3]);

@@ -1,4 +1,4 @@
-//! The mass shells into which the star is divided, once and for all.
+//! The mass shells into which the star is divided.
 
 /// Mass inside the innermost point, as a share of the star. Much smaller values make the luminosity per mass there
 /// pure rounding noise in a burnt-out core.
@@ -23,6 +23,8 @@ pub(in super::super) struct Mesh {
     pub(in super::super) shell_g: Vec<f64>,
     /// Mass that each point stands for, g.
     pub(in super::super) weight_g: Vec<f64>,
+    /// Which points are there for good; the others follow a burning shell.
+    pub(super) lasting: Vec<bool>,
 }
 
 impl Mesh {
@@ -54,6 +56,12 @@ impl Mesh {
         }
         above.push(0.0);
 
+        let lasting = vec![true; above.len()];
+        Self::measured(star_g, above, lasting)
+    }
+
+    /// A mesh from its shares of mass above each point.
+    pub(super) fn measured(star_g: f64, above: Vec<f64>, lasting: Vec<bool>) -> Self {
         let inside_g = above.iter().map(|share| star_g * (1.0 - share)).collect::<Vec<_>>();
         // Differences of the mass above keep their digits where the mass inside no longer changes.
         let shell_g = above.windows(2).map(|pair| star_g * (pair[0] - pair[1])).collect::<Vec<_>>();
@@ -63,7 +71,29 @@ impl Mesh {
             weight_g[k] += 0.5 * shell;
             weight_g[k + 1] += 0.5 * shell;
         }
-        Self { star_g, above, inside_g, shell_g, weight_g }
+        Self { star_g, above, inside_g, shell_g, weight_g, lasting }
+    }
+
+    /// Takes mass (g) off the surface; what lies outside `base`, all of one composition, spreads over what is left.
+    ///
+    /// Nothing happens if that would take more than half of it.
+    pub(in super::super) fn shed(&mut self, base: usize, lost_g: f64) {
+        let envelope_g = self.star_g * self.above[base];
+        if lost_g > 0.5 * envelope_g {
+            return;
+        }
+        let shrunk = 1.0 - lost_g / envelope_g;
+        let star_g = self.star_g - lost_g;
+        let above = self
+            .above
+            .iter()
+            .enumerate()
+            .map(|(k, share)| {
+                let above_g = self.star_g * share;
+                (if k < base { above_g - lost_g } else { above_g * shrunk }) / star_g
+            })
+            .collect();
+        *self = Self::measured(star_g, above, std::mem::take(&mut self.lasting));
     }
 
     /// Number of points.
@@ -75,6 +105,24 @@ impl Mesh {
 #[cfg(test)]
 mod tests {
     use super::*;
+
+    #[test]
+    fn a_wind_takes_mass_from_the_envelope_only() {
+        let mut mesh = Mesh::new(2e32, 1.0);
+        let before = mesh.clone();
+        let base = mesh.above.iter().position(|share| *share < 0.3).expect("an envelope");
+        mesh.shed(base, 1e30);
+        assert!((mesh.star_g / 1.99e32 - 1.0).abs() < 1e-12);
+        for k in 0..=base {
+            assert!((mesh.inside_g[k] / before.inside_g[k] - 1.0).abs() < 1e-12);
+        }
+        assert!(mesh.shell_g.iter().all(|shell| *shell > 0.0));
+        assert!((mesh.weight_g.iter().sum::<f64>() / mesh.star_g - 1.0).abs() < 1e-12);
+        // More than half the envelope at once is refused.
+        let kept = mesh.star_g;
+        mesh.shed(base, 0.2 * kept);
+        assert!(mesh.star_g == kept);
+    }
 
     #[test]
     fn shells_add_up_to_the_star() {

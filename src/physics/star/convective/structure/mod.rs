@@ -6,6 +6,7 @@ mod isentrope;
 mod mesh;
 mod mixing_length;
 mod model;
+mod refinement;
 mod relaxation;
 
 pub(super) use isentrope::Isentrope;

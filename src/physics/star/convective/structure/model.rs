@@ -123,6 +123,15 @@ impl Model {
         strongest.map_or(0.0, |(place, _)| self.unknowns[place][1].exp())
     }
 
+    /// Innermost point of the envelope that has the surface's composition.
+    pub(in super::super) fn envelope_base(&self) -> usize {
+        const ALIKE: f64 = 1e-3;
+        let last = self.composition.len() - 1;
+        let surface = self.composition[last].hydrogen;
+        let alike = self.composition.iter().rev().take_while(|c| (c.hydrogen - surface).abs() < ALIKE).count();
+        last + 1 - alike
+    }
+
     /// Mean hydrogen mass fraction of the star.
     pub(in super::super) fn mean_hydrogen(&self, mesh: &Mesh) -> f64 {
         let total: f64 = self.composition.iter().zip(&mesh.weight_g).map(|(c, weight)| c.hydrogen * weight).sum();
