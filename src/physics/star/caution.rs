@@ -106,8 +106,8 @@ impl StarCaution {
                 "The cooling tables cover white dwarfs of 0.2 to 1.2 solar masses; outside them the nearest one is used."
             }
             Self::CoolingCoreDiffers => {
-                "The cooling tables are for carbon–oxygen cores; a core of another kind cools up to about twice as slow or \
-                 fast."
+                "The cooling tables are for carbon–oxygen cores; a core of lighter nuclei holds more heat and cools up to \
+                 three times as slowly, a heavier one somewhat faster."
             }
             Self::CoolingOlderThanTables => {
                 "This white dwarf is older than the published cooling tables; its temperature is extrapolated."

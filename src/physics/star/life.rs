@@ -16,6 +16,38 @@ pub(super) struct Node {
     pub(super) mass_loss_msun_yr: f64,
 }
 
+impl Node {
+    /// Whether the star looks the same at both nodes, far within the accuracy of the interpolation.
+    fn is_like(&self, other: &Self) -> bool {
+        let close = |a: f64, b: f64, tolerance: f64| (a - b).abs() <= tolerance * a.abs();
+        close(self.look.luminosity_lsun, other.look.luminosity_lsun, 1e-4)
+            && close(self.look.radius_rsun, other.look.radius_rsun, 1e-4)
+            && close(self.mass_msun, other.mass_msun, 1e-5)
+            && close(self.look.core_msun, other.look.core_msun, 1e-5)
+            && close(self.mass_loss_msun_yr, other.mass_loss_msun_yr, 1e-2)
+    }
+}
+
+/// The nodes without those at which nothing has changed, which a stiff wind leaves by the thousand.
+///
+/// Ends and bends stay, and so does the last node before a change, so that the change keeps its pace.
+fn thinned(nodes: &[Node]) -> Vec<Node> {
+    let mut kept: Vec<Node> = Vec::with_capacity(nodes.len());
+    for (index, node) in nodes.iter().enumerate() {
+        let before = index.checked_sub(1).and_then(|index| nodes.get(index));
+        let stays = match (before, nodes.get(index + 1), kept.last()) {
+            (Some(before), Some(next), Some(last)) => {
+                before.age_yr == node.age_yr || next.age_yr == node.age_yr || !last.is_like(next)
+            }
+            _ => true,
+        };
+        if stays {
+            kept.push(*node);
+        }
+    }
+    kept
+}
+
 /// One phase with its nodes, first and last at its ends.
 #[derive(Clone, Debug)]
 pub(super) struct Chapter {
@@ -142,7 +174,7 @@ impl Walk<'_> {
                 nodes.push(self.node(look, rate_yr));
             }
         };
-        let chapter = Chapter { phase, nodes };
+        let chapter = Chapter { phase, nodes: thinned(&nodes) };
         let span = chapter.span();
         if span.to_yr > span.from_yr {
             self.chapters.push(chapter);
@@ -310,4 +342,50 @@ impl Walk<'_> {
 /// Stars with a hook exhaust it there. Below, the fits stretch the main sequence past it; the Sun's own ratio is kept.
 fn core_exhausted_fraction(hook_fraction: f64) -> f64 {
     hook_fraction.clamp(0.847, 1.0)
+}
+
+#[cfg(test)]
+mod tests {
+    use super::*;
+
+    /// A helium giant of a mass at the moment its core explodes, and what it leaves.
+    fn exploded(helium_msun: f64) -> (End, Vec<StarEvent>) {
+        let fit = Fit::new(0.02).unwrap();
+        let mut star = Burning::born(&fit, 12.0);
+        star.phase = Phase::HeliumGiant;
+        star.mass_msun = helium_msun;
+        star.helium = HeliumStar::new(helium_msun);
+        star.clock_myr = star.phase_end_myr();
+        let mut walk = Walk { star, age_myr: 20.0, events: Vec::new(), chapters: Vec::new(), core_exhausted_yr: 0.0 };
+        match walk.pass_on(PhaseEnd::Time) {
+            Next::Remnant(end) => (end, walk.events),
+            Next::Burning => unreachable!("an exploded star does not burn on"),
+        }
+    }
+
+    #[test]
+    fn a_light_helium_giant_that_explodes_leaves_nothing() {
+        let (end, events) = exploded(1.55);
+        assert_eq!((end.phase, end.mass_msun), (Phase::NoRemnant, 0.0));
+        assert_eq!(events.last().map(|event| event.kind), Some(StarEventKind::ThermonuclearDisruption));
+    }
+
+    #[test]
+    fn a_heavy_helium_giant_that_explodes_leaves_its_core() {
+        for (mass, phase) in [(3.0, Phase::NeutronStar), (15.0, Phase::BlackHole)] {
+            let (end, events) = exploded(mass);
+            assert_eq!(end.phase, phase);
+            assert!(end.mass_msun > 1.0 && end.mass_msun < mass);
+            assert!(events.iter().any(|event| event.kind == StarEventKind::SupernovaCollapse));
+        }
+    }
+
+    #[test]
+    fn the_chapters_of_a_life_follow_without_gaps() {
+        let life = follow(&Fit::new(0.02).unwrap(), 1.0);
+        let spans: Vec<PhaseSpan> = life.chapters.iter().map(Chapter::span).collect();
+        assert_eq!(spans.len(), 6);
+        assert!(spans.windows(2).all(|pair| pair[0].to_yr == pair[1].from_yr));
+        assert_eq!(spans.last().map(|span| span.to_yr), Some(life.end.age_yr));
+    }
 }

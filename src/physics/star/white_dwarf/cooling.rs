@@ -11,6 +11,12 @@ use crate::units::constants::SOLAR_TEMPERATURE_K;
 /// Fixsen 2009, ApJ 707, 916: 2.72548 K.
 pub const BACKGROUND_TEMPERATURE_K: f64 = 2.725;
 
+/// Mass above which an oxygen–neon core collapses, so that there is no heavier cold white dwarf, solar masses.
+///
+/// # Source
+/// Nomoto 1984, ApJ 277, 791: 1.37.
+const HEAVIEST_MSUN: f64 = 1.37;
+
 /// Rows of a mass from its end over which the late fall of temperature is measured.
 const LATE_ROWS: usize = 5;
 
@@ -26,7 +32,7 @@ const LATE_ROWS: usize = 5;
 ///
 /// # Valid for
 /// 0.2 to 1.2 solar masses. Lighter ones take the curve of 0.2; heavier ones the temperature of 1.2, with the radius
-/// scaled by the cold radius.
+/// scaled by the cold radius, to 1.37, where such a core collapses; heavier ones keep that radius.
 #[derive(Clone, Copy, Debug)]
 pub struct WhiteDwarf {
     mass_msun: f64,
@@ -44,8 +50,11 @@ impl WhiteDwarf {
         let mass = mass_msun.clamp(ROWS[0].mass_msun, heaviest);
         let heavier = ROWS.partition_point(|row| row.mass_msun < mass).clamp(1, last);
         let (low, high) = (ROWS[heavier - 1].mass_msun, ROWS[heavier].mass_msun);
-        let log_radius_shift =
-            if mass_msun > heaviest { (cold_radius_rsun(mass_msun) / cold_radius_rsun(heaviest)).log10() } else { 0.0 };
+        let log_radius_shift = if mass_msun > heaviest {
+            (cold_radius_rsun(mass_msun.min(HEAVIEST_MSUN)) / cold_radius_rsun(heaviest)).log10()
+        } else {
+            0.0
+        };
         Self { mass_msun, lighter: heavier - 1, weight: (mass - low) / (high - low), log_radius_shift }
     }
 
