@@ -85,6 +85,8 @@ impl Fit {
     }
 
     /// Fraction of core helium burning spent away from the giant branches (eq. 58).
+    ///
+    /// Less than a hundred-thousandth counts as none: it would be over within the years a supergiant takes to fall freely.
     #[must_use]
     pub fn blue_fraction(&self, m: f64) -> f64 {
         let b = &self.c.b;
@@ -97,7 +99,7 @@ impl Fit {
         } else {
             (1.0 - b[47]) * self.blue_extent(m) / self.blue_extent_at_ignition
         };
-        fraction.clamp(0.0, 1.0)
+        if fraction < 1e-5 { 0.0 } else { fraction.min(1.0) }
     }
 
     /// The mass dependence f of eq. 58.
