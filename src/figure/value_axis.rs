@@ -97,12 +97,12 @@ impl ValueAxis {
             // Less than a factor of five: even steps read better than ones and twos.
             return self.even_marks(count);
         }
-        let factors: &[f64] = if decades > 2.2 || count < 3 {
-            &[1.0]
-        } else if decades > 1.2 {
+        let factors: &[f64] = if decades * 3.0 < count as f64 {
+            &[1.0, 2.0, 5.0]
+        } else if decades * 1.6 < count as f64 {
             &[1.0, 3.0]
         } else {
-            &[1.0, 2.0, 5.0]
+            &[1.0]
         };
         let every = (decades / count as f64).ceil().max(1.0) as i32;
         (low.floor() as i32..=high.ceil() as i32)

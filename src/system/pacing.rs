@@ -2,8 +2,8 @@
 //!
 //! Linear and logarithmic scales are what they say. The paced scale gives every visible change a
 //! similar width: its coordinate is the length of the star's path,
-//! s(t) = ∫ √((d lg L)² + (4 d lg T)² + (w d lg t)²), squeezed so that no phase of life takes less
-//! than [`LEAST_SHARE`] or more than [`LARGEST_SHARE`] of the width. Our own choice.
+//! s(t) = ∫ √((d lg L)² + (4 d lg T)² + (w d lg t)² + (u dt/t₀)²), t₀ the length of the shining life before
+//! a remnant is left, squeezed so that no phase of life takes less than [`LEAST_SHARE`] or more than [`LARGEST_SHARE`] of the width. Our own choice.
 
 use super::history::History;
 use crate::physics::star::{PhaseSpan, StarState};
@@ -14,6 +14,8 @@ pub const LEAST_SHARE: f64 = 0.04;
 pub const LARGEST_SHARE: f64 = 0.40;
 /// Weight of a decade of time against a decade of luminosity: quiet ages keep some width.
 const TIME_WEIGHT: f64 = 0.35;
+/// Weight of the share of the shining life: long quiet ages, in which planets have their history, keep room.
+const LIFE_WEIGHT: f64 = 8.0;
 /// Decades of time that the logarithmic scale shows.
 const LOG_DECADES: f64 = 5.0;
 /// No single step counts for more than this, so that a collapse takes no width.
@@ -142,11 +144,13 @@ fn paced_knots(history: &History, from_yr: f64, to_yr: f64) -> Vec<(f64, f64)> {
     // The offset makes lg t harmless at birth; a hundredth of the first phase is early enough to matter to nobody.
     let first_phase_yr = history.spans().first().map_or(to_yr, |span| span.to_yr - span.from_yr);
     let offset_yr = 0.01 * first_phase_yr.min(to_yr);
+    let shining_yr = history.spans().iter().find(|span| span.phase.is_remnant()).map_or(to_yr, |span| span.from_yr);
     let steps: Vec<f64> = (1..ages.len())
         .map(|index| {
-            let (before, after) = (&states[index - 1], &states[index]);
             let decades = ((ages[index] + offset_yr) / (ages[index - 1] + offset_yr)).log10();
-            path_length(before, after, decades)
+            let shining = (ages[index].min(shining_yr) - ages[index - 1].min(shining_yr)) / shining_yr;
+            let pace = (TIME_WEIGHT * decades).hypot(LIFE_WEIGHT * shining);
+            path_length(&states[index - 1], &states[index]).hypot(pace)
         })
         .collect();
     let widths = bounded_widths(history.spans(), &ages, &steps);
@@ -168,15 +172,14 @@ fn paced_knots(history: &History, from_yr: f64, to_yr: f64) -> Vec<(f64, f64)> {
     knots
 }
 
-fn path_length(before: &StarState, after: &StarState, decades_of_time: f64) -> f64 {
-    let pace = TIME_WEIGHT * decades_of_time;
+fn path_length(before: &StarState, after: &StarState) -> f64 {
     if before.phase.is_dark() || after.phase.is_dark() {
-        return pace;
+        return 0.0;
     }
     let decades = |from: f64, to: f64| if from > 0.0 && to > 0.0 { (to / from).log10() } else { 0.0 };
     let luminosity = decades(before.luminosity_lsun, after.luminosity_lsun);
     let temperature = 4.0 * decades(before.effective_temperature_k, after.effective_temperature_k);
-    luminosity.hypot(temperature).min(LARGEST_STEP).hypot(pace)
+    luminosity.hypot(temperature).min(LARGEST_STEP)
 }
 
 /// Ages at which the path is measured: the star's nodes, the ends, and fill-ins where nodes are far apart.

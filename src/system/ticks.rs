@@ -37,8 +37,11 @@ pub fn ticks(axis: &TimeAxis, from_fraction: f64, to_fraction: f64, count: usize
     for age_yr in ages {
         let fraction = axis.fraction_at(age_yr);
         let far_enough = ticks.last().is_none_or(|last| fraction - last.fraction > 0.4 * (to_fraction - from_fraction) / count as f64);
-        if fraction >= from_fraction && fraction <= to_fraction && far_enough {
-            ticks.push(TimeTick { age_yr, fraction, label: age_label(age_yr) });
+        let label = age_label(age_yr);
+        // Ages that differ only beyond the digits of a label would look like a mistake.
+        let is_new = ticks.last().is_none_or(|last| last.label != label);
+        if fraction >= from_fraction && fraction <= to_fraction && far_enough && is_new {
+            ticks.push(TimeTick { age_yr, fraction, label });
         }
     }
     ticks
@@ -85,7 +88,7 @@ pub fn age_label(age_yr: f64) -> String {
     let value = age_yr / length_yr;
     let decimals = (0..=9).find(|decimals| {
         let scaled = value * 10_f64.powi(*decimals);
-        (scaled - scaled.round()).abs() < 1e-5 * scaled.abs().max(1e-3)
+        (scaled - scaled.round()).abs() < 1e-7 * scaled.abs().max(1e-3)
     });
     format!("{} {unit}", fixed(value, decimals.map_or(3, |decimals| decimals as usize)))
 }

@@ -2,7 +2,7 @@
 //!
 //! A year is the Julian year of 365.25 days throughout.
 
-use super::number_text::{number, parse_number};
+use super::number_text::{USUAL_DIGITS, number, parse_number};
 use thiserror::Error;
 
 /// Unit names with their length in years, largest first; the first of each row is how we write it.
@@ -58,6 +58,33 @@ pub fn span(time_yr: f64, digits: usize, style: SpanStyle) -> String {
         SpanStyle::Words => names.iter().find(|name| name.ends_with("years")).unwrap_or(&names[0]),
     };
     format!("{} {unit}", number(time_yr / length_yr, digits))
+}
+
+/// Most digits that [`spans_apart`] uses: beyond them two dates count as one.
+const MOST_DIGITS_APART: usize = 10;
+
+/// Writes spans in order, each with the fewest digits (at least four) that tell it from its neighbours.
+///
+/// # Example
+/// ```
+/// use longember::units::time_words::{SpanStyle, spans_apart};
+/// assert_eq!(spans_apart(&[1e9, 1.477_1e9, 1.477_2e9], SpanStyle::Symbols), ["1.000 Gyr", "1.4771 Gyr", "1.4772 Gyr"]);
+/// ```
+#[must_use]
+pub fn spans_apart(times_yr: &[f64], style: SpanStyle) -> Vec<String> {
+    (0..times_yr.len())
+        .map(|index| {
+            let time_yr = times_yr[index];
+            let neighbours = [index.checked_sub(1).and_then(|before| times_yr.get(before)), times_yr.get(index + 1)];
+            let others = || neighbours.into_iter().flatten().filter(|other_yr| **other_yr != time_yr);
+            let is_apart = |digits: &usize| {
+                let text = span(time_yr, *digits, style);
+                others().all(|other_yr| span(*other_yr, *digits, style) != text)
+            };
+            let digits = (USUAL_DIGITS..MOST_DIGITS_APART).find(is_apart).unwrap_or(MOST_DIGITS_APART);
+            span(time_yr, digits, style)
+        })
+        .collect()
 }
 
 /// Writes a span in symbols with the usual four digits.

@@ -9,7 +9,7 @@ use super::{fonts, life_strip, menu_bar, moment_panel, pages, system_panel};
 use crate::document::recovery::Recovered;
 use crate::document::{Scenario, Session, Settings};
 use crate::system::{History, HistoryError};
-use egui::{CentralPanel, Context, Frame, Margin, Panel, Stroke, Ui, ViewportCommand};
+use egui::{CentralPanel, Context, Frame, Margin, Panel, Ui, ViewportCommand};
 use std::sync::Arc;
 use std::time::Duration;
 
@@ -38,6 +38,7 @@ impl Longember {
         fonts::install(context);
         let workspace = Workspace::new(session, settings, Arc::new(history));
         theme::apply(context, workspace.theme());
+        context.set_zoom_factor(workspace.settings.text_scale as f32);
         Ok(Self { workspace, with_system_dialogs: keeper.is_real(), may_close: false, drop_unsaved: false, keeper, title: String::new() })
     }
 
@@ -83,12 +84,25 @@ impl Longember {
         }
         self.watch_closing(&context);
         self.show_title(&context);
+        self.note_window(&context);
+    }
+
+    /// Size of window and text for the next start; written when the window closes.
+    fn note_window(&mut self, context: &Context) {
+        let settings = &mut self.workspace.settings;
+        settings.text_scale = f64::from(context.zoom_factor());
+        context.input(|input| {
+            let viewport = input.viewport();
+            settings.is_maximised = viewport.maximized.unwrap_or(false);
+            if let Some(inner) = viewport.inner_rect.filter(|_| !settings.is_maximised) {
+                settings.window_size_px = (f64::from(inner.width()), f64::from(inner.height()));
+            }
+        });
     }
 
     fn draw(&mut self, ui: &mut Ui) -> Vec<Command> {
         let palette = self.workspace.palette();
         let mut commands = Vec::new();
-        let line = Stroke::new(1.0, palette.hairline);
         let panel = Frame::new().fill(palette.panel).inner_margin(Margin::symmetric(0, GRID as i8));
         let side = Frame::new().fill(palette.panel).inner_margin(Margin::symmetric(4 * GRID as i8, 0));
         Panel::top("menu_bar").frame(panel).exact_size(menu_bar::HEIGHT).resizable(false).show(ui, |ui| {
@@ -103,7 +117,7 @@ impl Longember {
         Panel::right("moment").frame(side).exact_size(moment_panel::WIDTH).resizable(false).show(ui, |ui| {
             commands.extend(moment_panel::show(ui, &self.workspace));
         });
-        let stage = Frame::new().fill(palette.ground).inner_margin(Margin::symmetric(3 * GRID as i8, GRID as i8)).stroke(line);
+        let stage = Frame::new().fill(palette.ground).inner_margin(Margin::symmetric(3 * GRID as i8, GRID as i8));
         CentralPanel::default().frame(stage).show(ui, |ui| {
             if self.workspace.is_stale() {
                 // The old curves stay while new ones are made, and look like it.
@@ -111,6 +125,7 @@ impl Longember {
             }
             commands.extend(pages::show(ui, &mut self.workspace));
         });
+        life_strip::connector(ui, &self.workspace);
         commands
     }
 
@@ -187,6 +202,7 @@ impl eframe::App for Longember {
     }
 
     fn on_exit(&mut self, _gl: Option<&eframe::glow::Context>) {
+        self.keep_settings();
         if self.drop_unsaved || !self.workspace.session.is_dirty() {
             self.keeper.close();
         }

@@ -6,6 +6,7 @@ use super::pages::Page;
 use crate::document::{Scenario, Theme};
 use crate::figure::curves::Curve;
 use crate::system::{Body, TimeScale};
+use crate::units::time_words::SpanStyle;
 use egui::{Key, KeyboardShortcut, Modifiers};
 use std::path::PathBuf;
 
@@ -57,6 +58,8 @@ pub enum Command {
     ToggleCurve(Curve),
     /// Choose a look.
     SetTheme(Theme),
+    /// Write spans of time with symbols or in words.
+    SetSpanStyle(SpanStyle),
     /// Show the source of a method.
     ShowSource(&'static str),
     /// Put a text on the clipboard.

@@ -26,7 +26,12 @@ pub fn definitions() -> FontDefinitions {
     let bundled =
         [("regular", REGULAR_FONT), (BOLD, BOLD_FONT), ("math", MATH_FONT), ("symbols", SYMBOL_FONT)];
     for (name, bytes) in bundled {
-        fonts.font_data.insert(name.to_owned(), Arc::new(FontData::from_static(bytes)));
+        let mut data = FontData::from_static(bytes);
+        if name == "symbols" {
+            // The sign of the Sun stands too high beside letters in this font.
+            data.tweak.y_offset_factor = 0.14;
+        }
+        fonts.font_data.insert(name.to_owned(), Arc::new(data));
     }
     let fallback: Vec<String> = fonts.families.get(&FontFamily::Proportional).cloned().unwrap_or_default();
     let family = |first: &[&str]| -> Vec<String> {

@@ -6,6 +6,7 @@ use super::theme::{GRID, TEXT_SIZE, small};
 use super::widgets::icon::{Icon, icon_button};
 use super::workspace::Workspace;
 use crate::document::{Theme, built_in};
+use crate::units::time_words::SpanStyle;
 use egui::{Align, Button, FontFamily, FontId, Layout, MenuBar, RichText, Ui};
 
 /// Height of the bar, points.
@@ -124,6 +125,13 @@ fn view_menu(ui: &mut Ui, workspace: &Workspace, commands: &mut Vec<Command>) {
         for scale in crate::system::TimeScale::ALL {
             if ui.radio(workspace.scale == scale, format!("{} time", scale.key())).clicked() {
                 commands.push(Command::SetScale(scale));
+                ui.close();
+            }
+        }
+        ui.separator();
+        for (style, text) in [(SpanStyle::Symbols, "Times as 7.600 Gyr"), (SpanStyle::Words, "Times as 7.600 billion years")] {
+            if ui.radio(workspace.settings.span_style == style, text).clicked() {
+                commands.push(Command::SetSpanStyle(style));
                 ui.close();
             }
         }

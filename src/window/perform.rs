@@ -63,6 +63,10 @@ impl Longember {
                 theme::apply(context, theme);
                 self.keep_settings();
             }
+            Command::SetSpanStyle(style) => {
+                workspace.settings.span_style = style;
+                self.keep_settings();
+            }
             Command::SetScale(scale) => {
                 workspace.scale = scale;
                 workspace.view = WHOLE;
@@ -195,7 +199,8 @@ impl Longember {
     fn ask(&mut self, context: &Context, purpose: Purpose, then: Option<Command>) {
         let typed = match (purpose, self.workspace.session.path()) {
             (Purpose::Save, Some(path)) => path.to_string_lossy().into_owned(),
-            _ => String::new(),
+            // A folder with a separator at its end: the name is yet to be typed.
+            _ => self.workspace.settings.folder.as_ref().map_or_else(String::new, |folder| folder.join("").to_string_lossy().into_owned()),
         };
         let system = self.with_system_dialogs.then_some(context);
         self.workspace.dialog = Some(Dialog::Path(Asked::new(purpose, typed, then, system)));

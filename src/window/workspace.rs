@@ -10,6 +10,8 @@ use super::view::{View, WHOLE};
 use crate::document::{Scenario, Session, Settings, Theme};
 use crate::figure::curves::Curve;
 use crate::system::{Body, History, Moment, TimeScale};
+use crate::units::number_text::USUAL_DIGITS;
+use crate::units::time_words::span;
 use std::sync::Arc;
 
 /// What the window works on.
@@ -47,8 +49,8 @@ pub struct Workspace {
     pub notice: Option<Notice>,
     /// Method to scroll to on the sources page.
     pub wanted_source: Option<&'static str>,
-    /// Where the moment's line stands in the charts, for the connector to the strip, points.
-    pub(super) chart_line_x: Option<f32>,
+    /// Foot of the moment's line in the charts, for the connector to the strip.
+    pub(super) chart_line_foot: Option<egui::Pos2>,
 }
 
 /// A message that needs no answer.
@@ -86,7 +88,7 @@ impl Workspace {
             dialog: None,
             notice: None,
             wanted_source: None,
-            chart_line_x: None,
+            chart_line_foot: None,
         }
     }
 
@@ -124,6 +126,12 @@ impl Workspace {
     #[must_use]
     pub fn moment_place(&self) -> f64 {
         self.view.place_of(self.derived.axis.fraction_at(self.moment_yr))
+    }
+
+    /// A span of time as the user likes it written.
+    #[must_use]
+    pub fn time_text(&self, time_yr: f64) -> String {
+        span(time_yr, USUAL_DIGITS, self.settings.span_style)
     }
 
     /// Builds axis, samples and charts anew after a change of history, scale, view or charts.

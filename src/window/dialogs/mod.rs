@@ -72,10 +72,11 @@ pub(super) fn show(context: &Context, workspace: &mut Workspace) -> Answer {
         Dialog::Path(_) => ("path", 460.0),
         Dialog::LoadProblems { .. } => ("load_problems", 560.0),
         Dialog::Recovered { .. } => ("recovered", 420.0),
-        Dialog::Keys => ("keys", 380.0),
+        Dialog::Keys => ("keys", 520.0),
         Dialog::About => ("about", 440.0),
     };
-    let response = Modal::new(Id::unique(name)).show(context, |ui| {
+    let frame = egui::Frame::popup(&context.global_style()).inner_margin(5.0 * GRID);
+    let response = Modal::new(Id::unique(name)).frame(frame).show(context, |ui| {
         ui.set_width(width);
         ui.spacing_mut().item_spacing.y = 2.0 * GRID;
         match &mut dialog {

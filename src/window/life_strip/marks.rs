@@ -3,7 +3,6 @@
 use super::{fitting_text, named};
 use crate::system::Event;
 use crate::system::ticks::ticks;
-use crate::units::time_words::short_span;
 use crate::window::command::{Command, TimeCommand};
 use crate::window::theme::small;
 use crate::window::workspace::Workspace;
@@ -57,7 +56,7 @@ pub(super) fn events(ui: &Ui, band: Rect, workspace: &Workspace) -> Vec<Command>
         let words: Vec<String> = group
             .events
             .iter()
-            .map(|(_, event)| format!("{} · {}", short_span(event.time_yr), event.label(&workspace.history)))
+            .map(|(_, event)| format!("{} · {}", workspace.time_text(event.time_yr), event.label(&workspace.history)))
             .collect();
         named(&response, &words.join("; "));
         let is_hot = response.hovered() || response.has_focus();

@@ -8,7 +8,6 @@ use super::command::Command;
 use super::theme::{GRID, Palette, SMALL_SIZE, small};
 use super::workspace::Workspace;
 use super::{time_gesture, widgets};
-use crate::units::time_words::short_span;
 use egui::{Align2, Pos2, Rect, Role, Sense, Stroke, Ui, WidgetInfo, pos2, vec2};
 
 /// Height of the whole strip with its controls, points.
@@ -49,18 +48,31 @@ fn draw_moment(ui: &Ui, band: Rect, top: f32, workspace: &Workspace, palette: &P
     }
     let x = band.left() + place as f32 * band.width();
     let painter = ui.painter();
-    if let Some(chart_x) = workspace.chart_line_x {
-        painter.line_segment([pos2(chart_x, top - 6.0), pos2(x, top + 16.0)], Stroke::new(1.0, palette.accent.gamma_multiply(0.45)));
-    }
     // A dark casing on both sides keeps the line visible on any colour of the ribbon.
     painter.line_segment([pos2(x, top + 16.0), pos2(x, band.bottom() + 4.0)], Stroke::new(3.5, palette.ground));
     painter.line_segment([pos2(x, top + 16.0), pos2(x, band.bottom() + 4.0)], Stroke::new(1.5, palette.accent));
-    let label = short_span(workspace.moment_yr);
+    let label = workspace.time_text(workspace.moment_yr);
     let galley = painter.layout_no_wrap(label, small(), palette.accent);
     let left = (x - 0.5 * galley.size().x).clamp(band.left(), (band.right() - galley.size().x).max(band.left()));
     let plate = Rect::from_min_size(Pos2::new(left, top + 1.0), galley.size());
     painter.rect_filled(plate.expand2(vec2(4.0, 1.0)), 3.0, palette.panel);
     painter.galley(plate.min, galley, palette.accent);
+}
+
+/// Leads the eye from the moment's line in the charts to the one on the strip: the two differ in width.
+/// Drawn after both, over the border between their panels.
+pub(super) fn connector(ui: &Ui, workspace: &Workspace) {
+    let (Some(foot), place) = (workspace.chart_line_foot, workspace.moment_place()) else { return };
+    if !(0.0..=1.0).contains(&place) {
+        return;
+    }
+    let window = ui.ctx().content_rect();
+    let strip_top = window.bottom() - HEIGHT + GRID;
+    let x = window.left() + INSET + place as f32 * (window.width() - 2.0 * INSET);
+    let quiet = Stroke::new(1.0, workspace.palette().accent.gamma_multiply(0.45));
+    let painter = ui.painter().with_clip_rect(window);
+    painter.line_segment([foot, pos2(foot.x, strip_top - 12.0)], quiet);
+    painter.line_segment([pos2(foot.x, strip_top - 12.0), pos2(x, strip_top)], quiet);
 }
 
 /// A small text that gives way when there is no room.

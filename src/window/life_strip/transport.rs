@@ -3,7 +3,7 @@
 use super::icon::{Icon, icon_button};
 use crate::system::TimeScale;
 use crate::system::limits::PRESENT_AGE;
-use crate::units::time_words::{parse_span, short_span};
+use crate::units::time_words::parse_span;
 use crate::window::command::{Command, TimeCommand};
 use crate::window::playback::LIFE_SECONDS;
 use crate::window::theme::{GRID, small, usual};
@@ -81,7 +81,7 @@ fn typed_moment(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
     let id = Id::unique("typed_moment");
     let draft = ui.data(|data| data.get_temp::<String>(id));
     let is_refused = draft.as_ref().is_some_and(|text| judged(text).is_err());
-    let mut text = draft.unwrap_or_else(|| short_span(workspace.moment_yr));
+    let mut text = draft.unwrap_or_else(|| workspace.time_text(workspace.moment_yr));
     let ink: Color32 = if is_refused { palette.error } else { palette.text };
     let field = TextEdit::singleline(&mut text).id(id.with("field")).desired_width(112.0).text_color(ink).font(usual());
     let response = ui.add(field).accessible_name("Moment");
@@ -90,7 +90,7 @@ fn typed_moment(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
     let keeps_draft = if response.lost_focus() && !given_up {
         match judged(&text) {
             Ok(age_yr) => {
-                if text != short_span(workspace.moment_yr) {
+                if text != workspace.time_text(workspace.moment_yr) {
                     commands.push(Command::Time(TimeCommand::To(age_yr)));
                 }
                 false

@@ -7,7 +7,7 @@ use crate::window::workspace::Workspace;
 use egui::{Align2, Color32, Rect, RichText, Role, Sense, Shape, Stroke, Ui, WidgetInfo, pos2, vec2};
 
 /// Largest radius of a disc, points.
-const LARGEST: f32 = 46.0;
+const LARGEST: f32 = 38.0;
 /// Smallest disc that can be seen, points.
 const SMALLEST: f32 = 1.5;
 
@@ -23,8 +23,8 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace, moment: &Moment) {
     let scale = LARGEST / radius_rsun.max(1.0);
     let star_radius = (radius_rsun * scale).max(SMALLEST);
     let sun_radius = scale.max(SMALLEST);
-    let star_centre = pos2(rect.left() + 0.31 * rect.width(), rect.center().y);
-    let sun_centre = pos2(rect.left() + 0.76 * rect.width(), rect.center().y);
+    let star_centre = pos2(rect.left() + 0.31 * rect.width(), rect.center().y - 7.0);
+    let sun_centre = pos2(rect.left() + 0.75 * rect.width(), rect.center().y - 7.0);
     let glow = moment.star.swatch.as_ref().filter(|swatch| swatch.chromaticity.is_some());
     let fill = glow.map_or(Color32::from_gray(8), |swatch| {
         let [r, g, b] = swatch.srgb;

@@ -74,12 +74,8 @@ fn figure(ui: &mut Ui, palette: &Palette, row: &Row) -> Option<Command> {
     let value_right = rect.right() - 84.0;
     let painter = ui.painter();
     painter.text(pos2(rect.left(), y), Align2::LEFT_CENTER, row.name, usual(), palette.dim);
-    if row.symbol.is_empty() {
-        painter.text(pos2(value_right + 44.0, y), Align2::RIGHT_CENTER, &row.text, usual(), palette.text);
-    } else {
-        painter.text(pos2(value_right, y), Align2::RIGHT_CENTER, &row.text, usual(), palette.text);
-        painter.text(pos2(value_right + 6.0, y), Align2::LEFT_CENTER, row.symbol, small(), palette.dim);
-    }
+    painter.text(pos2(value_right, y), Align2::RIGHT_CENTER, &row.text, usual(), palette.text);
+    painter.text(pos2(value_right + 6.0, y), Align2::LEFT_CENTER, row.symbol, small(), palette.dim);
     if let Some(spread) = row.spread {
         let text = format!("± {} %", number(100.0 * spread, 2));
         painter.text(pos2(rect.right(), y), Align2::RIGHT_CENTER, text, small(), palette.dim);

@@ -9,7 +9,7 @@ use super::widgets::heading::section;
 use super::workspace::Workspace;
 use crate::system::{Body, Moment};
 use crate::units::number_text::number;
-use crate::units::time_words::{SpanStyle, short_span, span};
+use crate::units::time_words::{SpanStyle, span};
 use egui::{RichText, ScrollArea, Ui};
 
 /// Width of the panel, points.
@@ -51,9 +51,9 @@ fn beside_now(workspace: &Workspace, moment: &Moment) -> String {
     if distance_yr == 0.0 {
         "now".to_owned()
     } else if distance_yr > 0.0 {
-        format!("{} after now", short_span(distance_yr))
+        format!("{} after now", workspace.time_text(distance_yr))
     } else {
-        format!("{} before now", short_span(-distance_yr))
+        format!("{} before now", workspace.time_text(-distance_yr))
     }
 }
 
@@ -73,7 +73,7 @@ fn next_event(ui: &mut Ui, workspace: &Workspace) -> Option<Command> {
     let palette = workspace.palette();
     let event = workspace.history.events().iter().find(|event| event.time_yr > workspace.moment_yr)?;
     section(ui, palette, "Next");
-    let ahead = short_span(event.time_yr - workspace.moment_yr);
+    let ahead = workspace.time_text(event.time_yr - workspace.moment_yr);
     let text = format!("{} in {ahead}", event.label(&workspace.history));
     let response = ui.link(RichText::new(text).color(palette.accent));
     response

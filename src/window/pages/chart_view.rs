@@ -34,7 +34,7 @@ pub(super) fn draw(ui: &Ui, frame: &Frame, chart: &Chart, workspace: &Workspace)
             inside.add(Shape::mesh(band_mesh(&place, run, ink)));
         }
     }
-    for tick in chart.axis.ticks((rect.height() / 26.0).max(2.0) as usize) {
+    for tick in chart.axis.ticks((rect.height() / 19.0).max(2.0) as usize) {
         let y = rect.bottom() - tick.height as f32 * rect.height();
         painter.hline(rect.x_range(), y, Stroke::new(1.0, palette.hairline.gamma_multiply(0.75)));
         painter.text(pos2(rect.left() - 6.0, y), Align2::RIGHT_CENTER, tick.label, small(), palette.dim);
@@ -43,13 +43,14 @@ pub(super) fn draw(ui: &Ui, frame: &Frame, chart: &Chart, workspace: &Workspace)
         if let Some(y) = place.y(level.value) {
             let line = [pos2(rect.left(), y), pos2(rect.right(), y)];
             inside.extend(Shape::dashed_line(&line, Stroke::new(1.0, palette.dim.gamma_multiply(0.7)), 1.5, 4.0));
-            inside.text(pos2(rect.left() + 4.0, y - 1.0), Align2::LEFT_BOTTOM, &level.name, small(), palette.dim);
         }
     }
     for series in &chart.series {
         draw_series(&inside, &place, series, palette);
     }
+    band_labels(&inside, &place, palette);
     direct_labels(&inside, &place, palette);
+    moment_line(painter, &place, palette);
     moment_dots(&inside, &place, palette);
     reading(painter, frame, &place, palette);
 }
@@ -147,7 +148,65 @@ fn dashed(points: &[Pos2], stroke: Stroke, index: usize) -> Vec<Shape> {
     if dashes.is_empty() {
         return vec![Shape::line(points.to_vec(), stroke)];
     }
-    Shape::dashed_line_with_offset(points, stroke, dashes, gaps, 0.0)
+    pieces(points, dashes, gaps).into_iter().map(|piece| Shape::line(piece, stroke)).collect()
+}
+
+/// Cuts a line into dashes that run smoothly through its many short segments.
+fn pieces(points: &[Pos2], dashes: &[f32], gaps: &[f32]) -> Vec<Vec<Pos2>> {
+    let mut found = Vec::new();
+    let Some(mut here) = points.first().copied() else { return found };
+    let (mut step, mut is_dash, mut left) = (0, true, dashes[0]);
+    let mut piece = vec![here];
+    for next in &points[1..] {
+        loop {
+            let distance = here.distance(*next);
+            if distance < left {
+                left -= distance;
+                here = *next;
+                piece.push(here);
+                break;
+            }
+            here += (*next - here) * (left / distance.max(f32::EPSILON));
+            if is_dash {
+                piece.push(here);
+                found.push(std::mem::take(&mut piece));
+                left = gaps[step % gaps.len()];
+            } else {
+                step += 1;
+                left = dashes[step % dashes.len()];
+            }
+            is_dash = !is_dash;
+            piece = vec![here];
+        }
+    }
+    if is_dash {
+        found.push(piece);
+    }
+    found
+}
+
+/// Names of bands of constant height, above their left end, where curves of the present rarely run.
+fn band_labels(painter: &Painter, place: &Places<'_>, palette: &Palette) {
+    for band in place.chart.bands.iter().filter(|band| band.meaning == BandMeaning::LiquidWater) {
+        let Some(y) = band.runs.first().and_then(|run| run.first()).and_then(|[_, _, high]| place.y(*high)) else { continue };
+        let galley = painter.layout_no_wrap(band.name.clone(), small(), palette.dim);
+        let x = freest_x(place, y - 6.0);
+        let plate = Align2::CENTER_BOTTOM.anchor_size(pos2(x, y - 1.0), galley.size());
+        painter.galley(plate.min, galley, palette.dim);
+    }
+}
+
+/// Where along a height the curves keep farthest away.
+fn freest_x(place: &Places<'_>, y: f32) -> f32 {
+    let view = place.workspace.view;
+    let clearance = |share: f64| {
+        let fraction = view.fraction_of(share);
+        let curves = place.chart.series.iter().filter_map(|series| place.y(place.chart.value_at(series, fraction)?));
+        curves.map(|curve_y| (curve_y - y).abs()).fold(f32::INFINITY, f32::min)
+    };
+    let shares = (2..=16).map(|step| f64::from(step) * 0.05);
+    let best = shares.max_by(|first, second| clearance(*first).total_cmp(&clearance(*second))).unwrap_or(0.5);
+    place.rect.left() + best as f32 * place.rect.width()
 }
 
 /// Names of planets at the right end of their curves; crowded ones give way to each other.
@@ -179,6 +238,15 @@ fn direct_labels(painter: &Painter, place: &Places<'_>, palette: &Palette) {
     }
 }
 
+/// The line of the moment through this chart.
+fn moment_line(painter: &Painter, place: &Places<'_>, palette: &Palette) {
+    let moment = place.workspace.moment_place();
+    if (0.0..=1.0).contains(&moment) {
+        let x = place.rect.left() + moment as f32 * place.rect.width();
+        painter.vline(x, place.rect.y_range(), Stroke::new(1.2, palette.accent));
+    }
+}
+
 /// A ring on every curve at the moment.
 fn moment_dots(painter: &Painter, place: &Places<'_>, palette: &Palette) {
     let fraction = place.workspace.derived.axis.fraction_at(place.workspace.moment_yr);
@@ -207,7 +275,7 @@ fn reading(painter: &Painter, frame: &Frame, place: &Places<'_>, palette: &Palet
         })
         .collect();
     let age_yr = place.workspace.derived.axis.age_at(fraction);
-    words.insert(0, crate::units::time_words::short_span(age_yr));
+    words.insert(0, place.workspace.time_text(age_yr));
     let text = words.join(" · ");
     let galley = painter.layout_no_wrap(text, small(), palette.text);
     let plate = Align2::RIGHT_CENTER.anchor_size(pos2(place.rect.right(), frame.title_y), galley.size());

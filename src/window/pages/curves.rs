@@ -30,7 +30,7 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
     let count = workspace.derived.charts.len() as f32;
     let room = ui.available_height() - FOOT - GRID;
     let height = (room / count).max(LEAST_HEIGHT);
-    let mut line_x = None;
+    let mut line_foot = None;
     ScrollArea::vertical().max_height(room).auto_shrink([false, true]).show(ui, |ui| {
         let (area, response) =
             ui.allocate_exact_size(vec2(ui.available_width(), height * count), Sense::click_and_drag());
@@ -47,14 +47,13 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
         let place = workspace.moment_place();
         if (0.0..=1.0).contains(&place) {
             let x = plot.left() + place as f32 * plot.width();
-            ui.painter().vline(x, area.top() + 18.0..=area.bottom() + FOOT, Stroke::new(1.2, palette.accent));
-            line_x = Some(x);
+            line_foot = Some(pos2(x, area.bottom().min(ui.clip_rect().bottom()) - 8.0));
         }
         if let Some(position) = hover {
             ui.painter().vline(position.x, area.top() + 18.0..=area.bottom(), Stroke::new(1.0, palette.dim.gamma_multiply(0.5)));
         }
     });
-    workspace.chart_line_x = line_x;
+    workspace.chart_line_foot = line_foot;
     time_labels(ui, workspace);
     commands
 }

@@ -55,7 +55,7 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
         }
     });
     ui.add_space(GRID);
-    workspace.chart_line_x = None;
+    workspace.chart_line_foot = None;
     commands.extend(match workspace.page {
         Page::Curves => curves::show(ui, workspace),
         Page::Chronicle => chronicle::show(ui, workspace),

@@ -6,6 +6,7 @@ mod star_form;
 
 use super::command::{Command, Edit};
 use super::theme::GRID;
+use super::widgets::heading::section;
 use super::widgets::text_entry::text_entry;
 use super::workspace::Workspace;
 use crate::document::{LONGEST_TITLE, Scenario};
@@ -21,7 +22,7 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
     let palette = workspace.palette();
     ScrollArea::vertical().auto_shrink(false).show(ui, |ui| {
         ui.set_width(WIDTH - 8.0 * GRID);
-        ui.add_space(2.0 * GRID);
+        section(ui, palette, "Scenario");
         let scenario = workspace.scenario();
         let width = ui.available_width() - 2.0 * GRID;
         if let Some(title) = text_entry(ui, palette, "Title of the scenario", &scenario.title, LONGEST_TITLE, width) {

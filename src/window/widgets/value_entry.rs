@@ -1,7 +1,7 @@
 //! A field for a number with a unit: takes what people type, keeps what it cannot understand.
 
 use crate::system::limits::Limit;
-use crate::units::entry::{parse_entry, write_entry};
+use crate::units::entry::{EntryKind, parse_entry, write_entry};
 use crate::window::theme::{GRID, Palette, ROW, small};
 use crate::window::widgets::draft::keep_draft;
 use egui::{Align2, Id, Key, RichText, Sense, Stroke, StrokeKind, TextEdit, Ui, pos2, vec2};
@@ -31,7 +31,7 @@ pub fn value_entry(ui: &mut Ui, palette: &Palette, body: &str, limit: &Limit, va
         .horizontal(|ui| {
             name_label(ui, palette, limit);
             ui.with_layout(egui::Layout::right_to_left(egui::Align::Center), |ui| {
-                unit_label(ui, palette, limit.entry.symbol());
+                unit_label(ui, palette, if limit.entry == EntryKind::SpanYr { "" } else { limit.entry.symbol() });
                 let field = TextEdit::singleline(&mut text)
                     .id(id.with("field"))
                     .align(egui::Align2::RIGHT_CENTER)
