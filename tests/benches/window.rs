@@ -1,0 +1,55 @@
+//! From an edit to redrawn curves, and one frame of the window's logic, both without a display.
+
+use criterion::{Criterion, criterion_group, criterion_main};
+use longember::document::built_in;
+use longember::figure::curves::Curve;
+use longember::figure::{Samples, ribbon::LightRange, ribbon::Ribbon};
+use longember::system::{History, TimeAxis, TimeScale};
+use longember::window::Longember;
+use std::hint::black_box;
+
+/// Places at which the window reads a view.
+const PLACES: usize = 700;
+
+/// The whole way from a changed scenario to what the curves page draws, with five planets.
+fn edit_to_curves(criterion: &mut Criterion) {
+    let scenario = built_in::demo().scenario().expect("the demo is sound");
+    criterion.bench_function("edit to curves, five planets", |bencher| {
+        bencher.iter(|| {
+            let history = History::compute(black_box(scenario.system.clone())).expect("the demo can be computed");
+            let axis = TimeAxis::new(&history, TimeScale::Paced);
+            let samples = Samples::new(&history, &axis, 0.0, 1.0, PLACES);
+            let ribbon = Ribbon::new(&samples, LightRange::of(&samples));
+            let charts: Vec<_> = Curve::ALL.iter().map(|curve| curve.chart(&samples)).collect();
+            (ribbon, charts)
+        });
+    });
+    criterion.bench_function("whole history, five planets", |bencher| {
+        bencher.iter(|| History::compute(black_box(scenario.system.clone())));
+    });
+}
+
+/// Layout and shapes of one frame while the moment is dragged along the strip.
+fn one_frame(criterion: &mut Criterion) {
+    let context = egui::Context::default();
+    let scenario = built_in::demo().scenario().expect("the demo is sound");
+    let mut program = Longember::for_tests(&context, scenario).expect("the demo can be computed");
+    let input = || egui::RawInput {
+        screen_rect: Some(egui::Rect::from_min_size(egui::Pos2::ZERO, egui::vec2(1280.0, 800.0))),
+        ..egui::RawInput::default()
+    };
+    let end_yr = program.workspace.history.shown_until_yr();
+    let mut step = 0_u32;
+    criterion.bench_function("one frame of the window's logic, 1280 x 800", |bencher| {
+        bencher.iter(|| {
+            step = (step + 1) % 1000;
+            program.workspace.moment_yr = end_yr * f64::from(step) / 1000.0;
+            let output = context.run_ui(input(), |ui| program.root_ui(ui));
+            black_box(context.tessellate(output.shapes.clone(), 1.0));
+            output.drop_without_applying_deltas();
+        });
+    });
+}
+
+criterion_group!(benches, edit_to_curves, one_frame);
+criterion_main!(benches);
