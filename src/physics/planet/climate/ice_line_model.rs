@@ -36,7 +36,7 @@ impl WaterWorldAir {
     pub fn check(&self) -> Result<(), OutOfRange> {
         checked_carbon_dioxide(self.carbon_dioxide_bar)?;
         within("obliquity_deg", self.obliquity_deg, 0.0, 90.0, "0 to 90 degrees")?;
-        within("heat_transport_w_m2_k", self.heat_transport_w_m2_k, 0.1, 5.0, "0.1 to 5 W/m2/K")?;
+        within("heat_transport_w_m2_k", self.heat_transport_w_m2_k, 0.3, 3.0, "0.3 to 3 W/m2/K")?;
         Ok(())
     }
 }

@@ -2,6 +2,7 @@
 
 pub mod carbon;
 pub mod climate_curve;
+mod continuation;
 pub mod ice_line_model;
 pub mod infrared;
 pub mod reflection;
