@@ -18,9 +18,12 @@ const LONGEST_THAWING_STEP: f64 = 1.0;
 const THAWING_ABOVE_K: f64 = 249.0;
 const LONGEST_OPEN_STEP: f64 = 1.8;
 /// The open branch is given up where climates have needed so much more light again, and so much less warmth, than
-/// the faintest yet: no further lasting climate with open water follows.
-const GIVE_UP_LIGHT: f64 = 1.1;
-const GIVE_UP_COOLING_K: f64 = 14.0;
+/// the faintest yet: no further lasting climate with open water follows. Under a steep tilt, where ice comes in belts,
+/// one may follow late.
+const GIVE_UP_LIGHT: f64 = 1.02;
+const GIVE_UP_COOLING_K: f64 = 7.0;
+const GIVE_UP_LIGHT_BELTS: f64 = 1.1;
+const GIVE_UP_COOLING_BELTS_K: f64 = 14.0;
 /// Mean temperature at which water reaches the upper air in quantity, K. Kasting 1988, Kasting et al. 1993.
 pub(crate) const HOT_MEAN_K: f64 = 340.0;
 
@@ -127,13 +130,18 @@ fn follow_open(model: &IceLineModel, up_to_insolation_earth: f64) -> (Vec<Point>
         }
     }
     let start = start.unwrap_or_else(|| at_starlight_of(model, OPEN_STARTS_K[1]));
+    let (give_up_light, give_up_cooling_k) = if model.has_ice_line {
+        (GIVE_UP_LIGHT, GIVE_UP_COOLING_K)
+    } else {
+        (GIVE_UP_LIGHT_BELTS, GIVE_UP_COOLING_BELTS_K)
+    };
     let (mut least, mut mean_there_k) = (f64::INFINITY, 0.0);
     let points = trace(model, &start, -1.0, |point| {
         let mean_k = model.mean(&point.t);
         if point.s < least {
             (least, mean_there_k) = (point.s, mean_k);
         }
-        let given_up = point.s > GIVE_UP_LIGHT * least || mean_k < mean_there_k - GIVE_UP_COOLING_K;
+        let given_up = point.s > give_up_light * least || mean_k < mean_there_k - give_up_cooling_k;
         let goes_on = !given_up && point.t.iter().any(|local_k| *local_k >= OPEN_ABOVE_K - 2.0);
         goes_on.then_some(LONGEST_OPEN_STEP)
     });

@@ -97,7 +97,7 @@ pub struct IceLineModel {
     upper: Profile,
     open_albedo: Profile,
     ice_albedo: Profile,
-    has_ice_line: bool,
+    pub(super) has_ice_line: bool,
 }
 
 /// Tilt above which the poles receive more light than the equator, degrees.

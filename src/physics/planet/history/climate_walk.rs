@@ -112,12 +112,12 @@ impl<'a> ClimateWalk<'a> {
         before: (&Surroundings, &Standing),
         after: (&Surroundings, &Standing),
         events: &mut Vec<PlanetEvent>,
-    ) {
+    ) -> Result<(), OutOfRange> {
         let (start_yr, span_yr) = (before.0.age_yr, after.0.age_yr - before.0.age_yr);
         let mut share = 0.0;
         let losses = match self.state {
-            ClimateState::Dry => return,
-            _ => self.losses(before.0, after.0),
+            ClimateState::Dry => return Ok(()),
+            _ => self.losses(before.0, after.0)?,
         };
         let mut from = self.state;
         for _ in 0..MOST_CHANGES {
@@ -128,7 +128,7 @@ impl<'a> ClimateWalk<'a> {
                 let dry_share = share + (until - share) * self.water_oceans / lost_oceans;
                 self.report(from, self.state, start_yr + share * span_yr, before.1, after.1, events);
                 self.run_dry(start_yr + dry_share * span_yr, events);
-                return;
+                return Ok(());
             }
             if until > share {
                 self.report(from, self.state, start_yr + share * span_yr, before.1, after.1, events);
@@ -145,6 +145,7 @@ impl<'a> ClimateWalk<'a> {
             (share, self.state) = (at, next);
         }
         self.report(from, self.state, start_yr + share * span_yr, before.1, after.1, events);
+        Ok(())
     }
 
     /// Writes down a change of state, however many states were passed in the same instant.
@@ -207,23 +208,21 @@ impl<'a> ClimateWalk<'a> {
     }
 
     /// How fast water goes between two nodes, at the mean of the high-energy light at both.
-    fn losses(&mut self, before: &Surroundings, after: &Surroundings) -> Losses {
+    fn losses(&self, before: &Surroundings, after: &Surroundings) -> Result<Losses, OutOfRange> {
         let flux_w_m2 = w_m2(0.5 * (before.high_energy_earth + after.high_energy_earth));
         if flux_w_m2 <= 0.0 {
-            return Losses::default();
+            return Ok(Losses::default());
         }
         let orbit = &self.input.orbit;
         let (m, r) = (orbit.mass_mearth, orbit.radius_rearth);
-        // A planet that fills its Roche lobe is torn apart before it gets here; the factor is kept from vanishing.
-        let lobe =
-            escape::roche_lobe_factor(m, r, before.semi_major_axis_au, before.star_mass_msun).unwrap_or(0.01).max(0.01);
-        let hydrogen = |rate: Result<f64, OutOfRange>| {
-            rate.unwrap_or(0.0) * escape::WATER_PER_HYDROGEN * YEAR_S / escape::EARTH_OCEAN_KG
-        };
-        let by_energy = hydrogen(escape::energy_limited_kg_s(flux_w_m2, self.input.escape_efficiency, m, r, lobe));
-        Losses {
-            moist: by_energy.min(hydrogen(escape::moist_hydrogen_leak_kg_s(r))),
-            runaway: by_energy.min(hydrogen(escape::hydrogen_through_oxygen_kg_s(m, r))),
-        }
+        // A planet that fills its Roche lobe has been torn apart before it gets here.
+        let lobe = escape::roche_lobe_factor(m, r, before.semi_major_axis_au, before.star_mass_msun)?;
+        let by_energy = escape::energy_limited_kg_s(flux_w_m2, self.input.escape_efficiency, m, r, lobe)?;
+        let oceans_per_yr =
+            |hydrogen_kg_s: f64| hydrogen_kg_s * escape::WATER_PER_HYDROGEN * YEAR_S / escape::EARTH_OCEAN_KG;
+        Ok(Losses {
+            moist: oceans_per_yr(by_energy.min(escape::moist_hydrogen_leak_kg_s(r)?)),
+            runaway: oceans_per_yr(by_energy.min(escape::hydrogen_through_oxygen_kg_s(m, r)?)),
+        })
     }
 }

@@ -104,7 +104,10 @@ impl PlanetHistory {
     /// [`OutOfRange`] for a star that cannot be used.
     pub fn at(&self, star: &StarPoint) -> Result<Option<PlanetMoment>, OutOfRange> {
         check_track(std::slice::from_ref(star))?;
-        let Some(place) = self.orbit.at(star.age_yr) else { return Ok(None) };
+        let Some((place, shoreline_ratio)) = self.orbit.at(star.age_yr).zip(self.shoreline_ratio_at(star.age_yr))
+        else {
+            return Ok(None);
+        };
         let (a, e) = (place.semi_major_axis_au, place.eccentricity);
         let input = &self.input;
         let mass = input.orbit.mass_mearth;
@@ -139,7 +142,7 @@ impl PlanetHistory {
                 .high_energy
                 .luminosity_lsun(star)
                 .map(|l| l / (a * a * (1.0 - e * e).sqrt()) * SOLAR_CONSTANT_W_M2),
-            shoreline_ratio: self.shoreline_ratio_at(star.age_yr).unwrap_or(0.0),
+            shoreline_ratio,
         }))
     }
 
@@ -153,14 +156,16 @@ impl PlanetHistory {
         let held = self.input.greenhouse.surface_temperature_k(equilibrium_k)?;
         let held_caution =
             (self.input.greenhouse != super::super::greenhouse::Greenhouse::None).then_some(Caution::HeldByUser);
-        let Some((climate, state)) =
-            self.climate.as_ref().and_then(|climate| Some((climate, climate.state_at(age_yr)?)))
+        let Some((climate, state, water_oceans)) = self
+            .climate
+            .as_ref()
+            .and_then(|climate| Some((climate, climate.state_at(age_yr)?, climate.water_oceans_at(age_yr)?)))
         else {
             return Ok((SurfaceTemperature::Known(held), held_caution, None));
         };
         let mut moment = ClimateMoment {
             state,
-            water_oceans: climate.water_oceans_at(age_yr).unwrap_or(0.0),
+            water_oceans,
             ice_fraction: None,
             ice_line_deg: None,
             equator_pole_k: None,

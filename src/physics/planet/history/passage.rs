@@ -2,6 +2,7 @@
 
 use super::super::caution::Caution;
 use super::super::escape;
+use super::super::range::OutOfRange;
 use super::event::{PlanetEvent, PlanetEventKind};
 use super::input::PlanetInput;
 use super::surroundings::Surroundings;
@@ -31,8 +32,8 @@ pub(super) struct Passage<'a> {
 }
 
 impl<'a> Passage<'a> {
-    pub(super) fn start(input: &'a PlanetInput, first: &Surroundings) -> Self {
-        let speed_4 = escape::escape_speed_ratio_4(input.orbit.mass_mearth, input.orbit.radius_rearth).unwrap_or(1.0);
+    pub(super) fn start(input: &'a PlanetInput, first: &Surroundings) -> Result<Self, OutOfRange> {
+        let speed_4 = escape::escape_speed_ratio_4(input.orbit.mass_mearth, input.orbit.radius_rearth)?;
         let mut passage = Self {
             input,
             shoreline_per_fluence: 1.0 / (EARTH_FLUENCE_YR * speed_4),
@@ -45,7 +46,7 @@ impl<'a> Passage<'a> {
             passage.probable_yr = Some(first.age_yr);
             passage.locked_yr = Some(first.age_yr);
         }
-        passage
+        Ok(passage)
     }
 
     /// Runs from one node to the next and writes down what is passed on the way.

@@ -69,22 +69,23 @@ impl PlanetHistory {
             locked_yr: None,
             events: Vec::new(),
         };
-        history.pass_marks(&met);
+        history.pass_marks(&met)?;
         history.walk_climate(&met)?;
         history.close_events();
         Ok(history)
     }
 
-    fn pass_marks(&mut self, met: &[Surroundings]) {
-        let Some(first) = met.first() else { return };
+    fn pass_marks(&mut self, met: &[Surroundings]) -> Result<(), OutOfRange> {
+        let Some(first) = met.first() else { return Ok(()) };
         let input = self.input;
-        let mut passage = Passage::start(&input, first);
+        let mut passage = Passage::start(&input, first)?;
         self.accumulated.push(passage.now);
         for pair in met.windows(2) {
             passage.advance(&pair[0], &pair[1], &mut self.events);
             self.accumulated.push(passage.now);
         }
         (self.probable_lock_yr, self.locked_yr) = (passage.probable_yr, passage.locked_yr);
+        Ok(())
     }
 
     fn walk_climate(&mut self, met: &[Surroundings]) -> Result<(), OutOfRange> {
@@ -101,7 +102,7 @@ impl PlanetHistory {
                 break;
             }
             let after = walk.standing(met, at, self.locked_yr)?;
-            walk.advance((&met[at - 1], &before), (&met[at], &after), &mut self.events);
+            walk.advance((&met[at - 1], &before), (&met[at], &after), &mut self.events)?;
             before = after;
         }
         self.climate = Some(walk.history);
