@@ -49,6 +49,20 @@ mod tests {
     }
 
     #[test]
+    fn the_earths_second_legendre_coefficient_is_the_published_one() {
+        // q = (1 + s₂ P₂)/4 on the sine of latitude: s₂ = 5 ∫ 4q P₂ dx over half the globe. North 1975: −0.477.
+        let steps = 2000;
+        let sum: f64 = (0..steps)
+            .map(|i| {
+                let x = (f64::from(i) + 0.5) / f64::from(steps);
+                annual_share(x, 23.44_f64.to_radians()) * 0.5 * (3.0 * x * x - 1.0)
+            })
+            .sum();
+        let s2 = 5.0 * 4.0 * sum / f64::from(steps);
+        assert!((s2 + 0.477).abs() < 2e-3, "{s2}");
+    }
+
+    #[test]
     fn an_upright_planet_has_the_cosine_law() {
         for sine in [0.0_f64, 0.3, 0.8] {
             assert!((annual_share(sine, 0.0) - (1.0 - sine * sine).sqrt() / PI).abs() < 1e-12);
