@@ -104,6 +104,11 @@ fn inputs_outside_are_refused_by_name() {
 }
 
 #[test]
+fn a_metal_poor_star_at_the_lower_end_is_a_brown_dwarf() {
+    assert_eq!(life(0.07, -1.0), Err(ConvectiveError::BrownDwarf { mass_msun: 0.07 }));
+}
+
+#[test]
 fn a_computation_stops_when_told_to() {
     let mut calls = 0;
     let input = ConvectiveInput { mass_msun: 0.1, metallicity_dex: 0.0 };

@@ -6,25 +6,26 @@ use longember::physics::star::convective::{
 use std::ops::ControlFlow;
 use std::sync::LazyLock;
 
-fn life(mass_msun: f64, resolution: Resolution, surface: SurfaceOpacity) -> Life {
+fn life(mass_msun: f64, metallicity_dex: f64, resolution: Resolution, surface: SurfaceOpacity) -> Life {
     let options = Options { resolution, surface };
-    let input = ConvectiveInput { mass_msun, metallicity_dex: 0.0 };
+    let input = ConvectiveInput { mass_msun, metallicity_dex };
     compute_with(input, options, &mut |_| ControlFlow::Continue(())).expect("a mass and metallicity in range")
 }
 
 macro_rules! lives {
-    ($($name:ident: $mass:expr, $resolution:ident, $surface:ident;)*) => {
-        $(pub static $name: LazyLock<Life> = LazyLock::new(|| life($mass, Resolution::$resolution, SurfaceOpacity::$surface));)*
+    ($($name:ident: $mass:expr, $metallicity:expr, $resolution:ident, $surface:ident;)*) => {
+        $(pub static $name: LazyLock<Life> = LazyLock::new(|| life($mass, $metallicity, Resolution::$resolution, SurfaceOpacity::$surface));)*
     };
 }
 
 lives! {
-    M008: 0.08, Coarse, Modern;
-    M010: 0.10, Standard, Modern;
-    M015: 0.15, Coarse, Modern;
-    M020: 0.20, Standard, Modern;
-    M030: 0.30, Coarse, Modern;
-    M010_OF_1997: 0.10, Coarse, Of1997;
+    M008: 0.08, 0.0, Coarse, Modern;
+    M010: 0.10, 0.0, Standard, Modern;
+    M015: 0.15, 0.0, Coarse, Modern;
+    M020: 0.20, 0.0, Coarse, Modern;
+    M030: 0.30, 0.0, Coarse, Modern;
+    // log₁₀(0.02/0.0153): the metals of the 1997 calculations.
+    M010_OF_1997: 0.10, 0.1163, Coarse, Of1997;
 }
 
 /// The star this many years after its birth.

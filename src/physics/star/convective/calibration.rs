@@ -17,9 +17,12 @@ pub(super) struct MolecularOpacity {
     pub(super) factor: f64,
     /// Extra log₁₀ of opacity per log₁₀ of temperature below 2900 K (condensates).
     pub(super) slope: f64,
+    /// The factor is whole below the first and gone above the second log₁₀ of temperature.
+    pub(super) fades: [f64; 2],
 }
 
 /// Surfaces as opaque as today's model atmospheres.
-pub(super) const MODERN_SURFACE: MolecularOpacity = MolecularOpacity { factor: 0.86, slope: 5.0 };
-/// Surfaces as opaque as those of the 1997 calculations, which doubles the lifetimes.
-pub(super) const SURFACE_1997: MolecularOpacity = MolecularOpacity { factor: 45.0, slope: 0.0 };
+pub(super) const MODERN_SURFACE: MolecularOpacity = MolecularOpacity { factor: 0.86, slope: 5.0, fades: [3.56, 3.66] };
+/// Surfaces as opaque as those of the 1997 calculations, which makes lives 1.7 times longer. So large a factor fades out
+/// slowly, or else a surface at 4500 K has two structures between which it would have to jump.
+pub(super) const SURFACE_1997: MolecularOpacity = MolecularOpacity { factor: 45.0, slope: 0.0, fades: [3.50, 3.76] };

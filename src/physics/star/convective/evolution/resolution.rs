@@ -3,15 +3,16 @@
 /// Fineness of mass shells and time steps.
 ///
 /// # Accuracy
-/// Against ever finer runs; see each variant.
+/// Measured at 0.10, 0.16 and 0.25 solar masses against [`Resolution::Fine`]: ages within 0.4 % (standard) and 0.7 %
+/// (coarse), peak luminosities within 1.5 % and 2 %, peak temperatures within 0.4 % and 2 %.
 #[derive(Clone, Copy, Debug, Default, PartialEq, Eq, Hash)]
 pub enum Resolution {
-    /// For a first look.
+    /// For a first look: half the time of [`Resolution::Standard`].
     Coarse,
     /// For use.
     #[default]
     Standard,
-    /// For checks: half the steps of [`Resolution::Standard`] in mass and in time.
+    /// For checks: half the steps of [`Resolution::Standard`] in mass and in time, four times its time.
     Fine,
 }
 

@@ -4,7 +4,7 @@ use super::super::burning::{Helium3, Rates, helium3_after};
 use super::super::cgs::SOLAR_RADIUS;
 use super::super::gas::gas_pressure;
 use super::super::matter::Microphysics;
-use super::super::structure::{Mesh, Model, Past};
+use super::super::structure::{Mesh, Model, Past, Unknowns};
 use super::mixing::burn_and_mix;
 
 /// Newton iterations granted to a step.
@@ -55,11 +55,16 @@ impl Stepper {
     ///
     /// First with the old rates; then again with the mean of old and new rates for p+p and CN, and with the new rates
     /// for ³He, which follows them at once.
-    pub(in super::super) fn advance(&self, old: &Model, step_s: f64) -> Option<Step> {
+    ///
+    /// `trend` is how fast each unknown changed in the step before (per second); it makes the first guess.
+    pub(in super::super) fn advance(&self, old: &Model, trend: Option<&[Unknowns]>, step_s: f64) -> Option<Step> {
         let old_rates: Vec<Rates<f64>> = old.settled.iter().map(|point| point.rates).collect();
         let ln_temperature: Vec<f64> = old.unknowns.iter().map(|point| point[1]).collect();
 
         let mut model = old.clone();
+        if let Some(trend) = trend {
+            model.extrapolate(trend, step_s);
+        }
         self.burn_and_relax(old, &mut model, &old_rates, &ln_temperature, step_s)?;
         let rates: Vec<Rates<f64>> = old_rates
             .iter()

@@ -6,7 +6,7 @@ use super::super::matter::Microphysics;
 use super::super::opacity::{Opacity, RadiativeOpacity};
 use super::super::structure::{Mesh, Model};
 use super::error::ConvectiveError;
-use super::follow::follow;
+use super::follow::{follow, stuck};
 use super::input::{ConvectiveInput, Options, SurfaceOpacity};
 use super::node::{Caution, Ending, Life, Node};
 use super::stage::assign;
@@ -77,21 +77,22 @@ pub fn compute_with(
         if followed.stopped_early {
             cautions.push(Caution::EarlyCrystal);
         }
-        cool_on(&mut nodes, &followed.model, &followed.mesh);
+        cool_on(&mut nodes, &followed.model, &followed.mesh)
+            .ok_or_else(|| stuck(mass_msun, &nodes[nodes.len() - 1]))?;
     }
     let contraction_yr = count_from_arrival(&mut nodes).ok_or(ConvectiveError::BrownDwarf { mass_msun })?;
     assign(&mut nodes, followed.ending);
     Ok(Life { nodes, contraction_yr, ending: followed.ending, cautions })
 }
 
-/// Adds the moments of the crystal.
-fn cool_on(nodes: &mut Vec<Node>, model: &Model, mesh: &Mesh) {
+/// Adds the moments of the crystal. Nothing if the structure did not cool at its end.
+fn cool_on(nodes: &mut Vec<Node>, model: &Model, mesh: &Mesh) -> Option<()> {
     let track: Vec<[f64; 3]> =
         nodes.iter().map(|node| [node.age_yr, node.core_temperature_k, node.luminosity_lsun]).collect();
     let last = nodes[nodes.len() - 1];
     let density = mean_density(model, mesh);
     let end = last.luminosity_lsun * (END_K / last.effective_temperature_k).powi(4);
-    let Some(cooling) = LateCooling::after(&track, density) else { return };
+    let cooling = LateCooling::after(&track, density)?;
     nodes.extend(cooling.moments(end).map(|moment| Node {
         age_yr: last.age_yr + moment.time,
         luminosity_lsun: moment.luminosity,
@@ -102,6 +103,7 @@ fn cool_on(nodes: &mut Vec<Node>, model: &Model, mesh: &Mesh) {
         still_core_mass_fraction: 1.0,
         ..last
     }));
+    Some(())
 }
 
 /// Mean of the density over mass, g cm⁻³.

@@ -1,7 +1,7 @@
 //! The part of a life of which the structure is computed, step by step.
 
 use super::super::evolution::{Step, Stepper, blow};
-use super::super::structure::{Mesh, Model};
+use super::super::structure::{Mesh, Model, Unknowns};
 use super::error::ConvectiveError;
 use super::node::{Ending, Node};
 use super::stage::BLACK_BELOW_K;
@@ -74,9 +74,10 @@ pub(super) fn follow(
     let mut nodes = vec![node(&model, &stepper.mesh, age_s)];
     let mut done = Progress::new(&nodes[0]);
     let mut arrived = false;
+    let mut trend: Option<Vec<Unknowns>> = None;
     for _ in 0..MOST_STEPS {
         let last = nodes[nodes.len() - 1];
-        let Some((step, taken_s)) = attempt(&stepper, &model, step_s) else {
+        let Some((step, taken_s)) = attempt(&stepper, &model, trend.as_deref(), step_s) else {
             let ending = match last {
                 _ if !arrived => break,
                 Node { effective_temperature_k, .. } if effective_temperature_k < CRYSTAL_BELOW_K => Ending::BlackDwarf,
@@ -88,6 +89,8 @@ pub(super) fn follow(
         age_s += taken_s;
         let stretch = (0.9 / step.change.max(0.05)).clamp(LENGTHENED[0], LENGTHENED[1]);
         step_s = taken_s * stretch * if step.iterations > MANY_ITERATIONS { 0.7 } else { 1.0 };
+        let points = stepper.mesh.len();
+        let new_trend = step.model.trend_since(&model, taken_s);
         model = step.model;
         if arrived && model.helium_core_share(&stepper.mesh) > SHELL_FROM {
             step_s = step_s.min(blow(&model, &mut stepper.mesh, taken_s));
@@ -95,6 +98,7 @@ pub(super) fn follow(
                 break;
             }
         }
+        trend = (stepper.mesh.len() == points).then_some(new_trend);
         let now = node(&model, &stepper.mesh, age_s);
         nodes.push(now);
         arrived |= shines_by_burning(&now);
@@ -114,12 +118,16 @@ pub(super) fn follow(
             return Ok(Followed::new(nodes, model, Ending::GiantBranch, false, stepper));
         }
     }
-    let last = nodes[nodes.len() - 1];
-    Err(ConvectiveError::NotConverged {
+    Err(stuck(mass_msun, &nodes[nodes.len() - 1]))
+}
+
+/// The error of a life that could not be followed beyond a moment.
+pub(super) fn stuck(mass_msun: f64, last: &Node) -> ConvectiveError {
+    ConvectiveError::NotConverged {
         mass_msun,
         age_yr: last.age_yr,
         effective_temperature_k: last.effective_temperature_k,
-    })
+    }
 }
 
 /// Whether hydrogen burns so much faster than the star shines that it will flash.
@@ -128,11 +136,11 @@ fn runs_away(node: &Node) -> bool {
 }
 
 /// The next step and its length, from the longest that succeeds.
-fn attempt(stepper: &Stepper, model: &Model, first_s: f64) -> Option<(Step, f64)> {
+fn attempt(stepper: &Stepper, model: &Model, trend: Option<&[Unknowns]>, first_s: f64) -> Option<(Step, f64)> {
     for stretch in FRESH_STARTS {
         let mut step_s = stretch * first_s;
         for _ in 0..SHORTENINGS {
-            match stepper.advance(model, step_s) {
+            match stepper.advance(model, trend, step_s) {
                 Some(step) if step.change <= REJECTED_ABOVE => return Some((step, step_s)),
                 Some(_) => step_s *= 0.5,
                 None => step_s *= SHORTENED,

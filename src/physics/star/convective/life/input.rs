@@ -55,8 +55,8 @@ impl SurfaceOpacity {
 }
 
 impl ConvectiveInput {
-    /// Masses that can be computed, solar masses.
-    pub const MASS_RANGE_MSUN: [f64; 2] = [0.075, 0.5];
+    /// Masses that can be computed, solar masses; lighter ones, and metal-poor ones near the lower end, are brown dwarfs.
+    pub const MASS_RANGE_MSUN: [f64; 2] = [0.07, 0.5];
     /// Metallicities that can be computed, dex: metals up to 0.03; below 0.001 with the opacity of 0.001.
     pub const METALLICITY_RANGE_DEX: [f64; 2] = [-2.0, 0.29];
 

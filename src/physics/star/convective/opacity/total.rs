@@ -7,8 +7,6 @@ use super::conduction::conductive_opacity;
 use super::radiative::RadiativeOpacity;
 use std::f64::consts::LN_10;
 
-/// The molecular calibration fades out between these log T.
-const MOLECULES_FADE: [f64; 2] = [3.56, 3.66];
 /// The condensates' slope begins below this log T.
 const CONDENSATES_BELOW: f64 = 3.46;
 /// Conduction fades in between these log T.
@@ -53,10 +51,11 @@ impl Opacity {
     /// ln of the calibrated factor on molecular opacity.
     fn molecular_factor(&self, ln_temperature: Dual<2>) -> Dual<2> {
         let log_t = ln_temperature.value / LN_10;
-        if log_t >= MOLECULES_FADE[1] {
+        let [whole, gone] = self.molecular.fades;
+        if log_t >= gone {
             return Dual::constant(0.0);
         }
-        let share = fade(ln_temperature, [MOLECULES_FADE[1], MOLECULES_FADE[0]]);
+        let share = fade(ln_temperature, [gone, whole]);
         let below = (-ln_temperature + CONDENSATES_BELOW * LN_10).at_least(0.0);
         share * (below * self.molecular.slope + self.molecular.factor.ln())
     }

@@ -11,5 +11,5 @@ mod relaxation;
 
 pub(super) use isentrope::Isentrope;
 pub(super) use mesh::Mesh;
-pub(super) use model::Model;
+pub(super) use model::{Model, Unknowns};
 pub(super) use relaxation::Past;

@@ -87,6 +87,31 @@ impl Model {
         }
     }
 
+    /// Carries every unknown on along a trend (per second): a first guess for the next structure.
+    pub(in super::super) fn extrapolate(&mut self, trend: &[Unknowns], step_s: f64) {
+        /// No unknown is carried farther than this.
+        const FARTHEST: f64 = 0.1;
+        for ((point, settled), slopes) in self.unknowns.iter_mut().zip(&mut self.settled).zip(trend) {
+            let by = slopes.map(|slope| (slope * step_s).clamp(-FARTHEST, FARTHEST));
+            point.iter_mut().zip(by).for_each(|(unknown, change)| *unknown += change);
+            // In a degenerate or an ionised gas ln f follows density and temperature about like this.
+            settled.ln_f += by[0] - 1.5 * by[1];
+        }
+    }
+
+    /// How fast every unknown changed since an older model on the same mesh, per second.
+    pub(in super::super) fn trend_since(&self, older: &Self, step_s: f64) -> Vec<Unknowns> {
+        let unit = older.luminosity_unit / self.luminosity_unit;
+        self.unknowns
+            .iter()
+            .zip(&older.unknowns)
+            .map(|(new, old)| {
+                let old = [old[0], old[1], old[2], old[3] * unit];
+                std::array::from_fn(|i| (new[i] - old[i]) / step_s)
+            })
+            .collect()
+    }
+
     fn surface(&self) -> &Unknowns {
         &self.unknowns[self.unknowns.len() - 1]
     }

@@ -6,10 +6,12 @@ use super::super::matter::{Matter, Microphysics};
 use super::mesh::Mesh;
 use super::model::{Model, Settled, Unknowns};
 
-/// Largest differences between neighbours: hydrogen mass fraction, luminosity over that of the surface, ln pressure.
+/// Largest differences between neighbours: hydrogen mass fraction, luminosity over the largest anywhere, ln pressure.
 const LARGEST: [f64; 3] = [0.06, 0.06, 0.5];
 /// Added points go when all differences across them are smaller than this share of the largest.
 const NEEDLESS: f64 = 0.4;
+/// At most so many points are added.
+const MOST_ADDED: usize = 200;
 /// No points are added with a mass share above them smaller than this, …
 const SKIN: f64 = 1e-7;
 /// … nor in shells thinner than this share of the star.
@@ -21,9 +23,12 @@ impl Model {
     /// Nothing where the gas has no neutral state at a new point.
     pub(in super::super) fn refine(&mut self, laws: &Microphysics, mesh: &mut Mesh) -> Option<()> {
         let count = mesh.len();
+        let brightest = self.brightest();
         let kept: Vec<bool> =
-            (0..count).map(|k| mesh.lasting[k] || self.unlike(mesh, k - 1, k + 1) > NEEDLESS).collect();
-        let split: Vec<bool> = (0..count - 1).map(|k| kept[k] && kept[k + 1] && self.splits(mesh, k)).collect();
+            (0..count).map(|k| mesh.lasting[k] || self.unlike(mesh, k - 1, k + 1, brightest) > NEEDLESS).collect();
+        let room = MOST_ADDED > mesh.lasting.iter().filter(|lasting| !**lasting).count();
+        let split: Vec<bool> =
+            (0..count - 1).map(|k| room && kept[k] && kept[k + 1] && self.splits(mesh, k, brightest)).collect();
         if kept.iter().all(|keep| *keep) && !split.iter().any(|wanted| *wanted) {
             return Some(());
         }
@@ -72,21 +77,26 @@ impl Model {
         self.convective.push(convective);
     }
 
+    /// Largest luminosity at any point, in the model's unit, but at least that of the surface.
+    fn brightest(&self) -> f64 {
+        self.unknowns.iter().map(|point| point[3].abs()).fold(1.0, f64::max)
+    }
+
     /// Largest difference between two points over that allowed.
-    fn unlike(&self, mesh: &Mesh, a: usize, b: usize) -> f64 {
+    fn unlike(&self, mesh: &Mesh, a: usize, b: usize, brightest: f64) -> f64 {
         if mesh.above[b] < SKIN {
             return 0.0;
         }
         let differences = [
             self.composition[b].hydrogen - self.composition[a].hydrogen,
-            self.unknowns[b][3] - self.unknowns[a][3],
+            (self.unknowns[b][3] - self.unknowns[a][3]) / brightest,
             self.settled[b].ln_pressure - self.settled[a].ln_pressure,
         ];
         differences.iter().zip(LARGEST).map(|(difference, largest)| difference.abs() / largest).fold(0.0, f64::max)
     }
 
-    fn splits(&self, mesh: &Mesh, k: usize) -> bool {
-        mesh.shell_g[k] > THINNEST * mesh.star_g && self.unlike(mesh, k, k + 1) > 1.0
+    fn splits(&self, mesh: &Mesh, k: usize, brightest: f64) -> bool {
+        mesh.shell_g[k] > THINNEST * mesh.star_g && self.unlike(mesh, k, k + 1, brightest) > 1.0
     }
 
     /// Unknowns half-way in mass between a point and the next, on a cubic that neither overshoots nor undershoots.

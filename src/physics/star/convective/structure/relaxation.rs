@@ -8,6 +8,8 @@ use super::model::{Model, Settled};
 
 /// Largest change of a logarithm in one iteration.
 const LARGEST_CHANGE: f64 = 0.3;
+/// A correction this large means that the structure is lost.
+const HOPELESS: f64 = 300.0;
 /// Largest change of luminosity in one iteration, of that at the surface.
 const LARGEST_LUMINOSITY_CHANGE: f64 = 0.5;
 /// Iterations after which corrections are halved two times out of three, which ends two-cycles at corners.
@@ -63,6 +65,9 @@ impl Model {
             for point in corrections.chunks_exact(4) {
                 largest[0] = point[..3].iter().fold(largest[0], |sum, value| sum.max(value.abs()));
                 largest[1] = largest[1].max(point[3].abs());
+            }
+            if largest[0] > HOPELESS {
+                return None;
             }
             let surface = self.unknowns[count - 1][3].abs();
             let share = damping(iteration, largest, surface);
