@@ -89,16 +89,15 @@ pub(super) fn follow(
         age_s += taken_s;
         let stretch = (0.9 / step.change.max(0.05)).clamp(LENGTHENED[0], LENGTHENED[1]);
         step_s = taken_s * stretch * if step.iterations > MANY_ITERATIONS { 0.7 } else { 1.0 };
-        let points = stepper.mesh.len();
         let new_trend = step.model.trend_since(&model, taken_s);
         model = step.model;
         if arrived && model.helium_core_share(&stepper.mesh) > SHELL_FROM {
             step_s = step_s.min(blow(&model, &mut stepper.mesh, taken_s));
-            if model.refine(&stepper.laws, &mut stepper.mesh).is_none() {
-                break;
-            }
+            let Some(changed) = model.refine(&stepper.laws, &mut stepper.mesh) else { break };
+            trend = (!changed).then_some(new_trend);
+        } else {
+            trend = Some(new_trend);
         }
-        trend = (stepper.mesh.len() == points).then_some(new_trend);
         let now = node(&model, &stepper.mesh, age_s);
         nodes.push(now);
         arrived |= shines_by_burning(&now);

@@ -18,10 +18,10 @@ const SKIN: f64 = 1e-7;
 const THINNEST: f64 = 1e-8;
 
 impl Model {
-    /// Adds points where neighbours differ too much and takes away added ones that are no longer needed.
+    /// Adds points where neighbours differ too much and takes away added ones that are no longer needed; tells whether any were.
     ///
     /// Nothing where the gas has no neutral state at a new point.
-    pub(in super::super) fn refine(&mut self, laws: &Microphysics, mesh: &mut Mesh) -> Option<()> {
+    pub(in super::super) fn refine(&mut self, laws: &Microphysics, mesh: &mut Mesh) -> Option<bool> {
         let count = mesh.len();
         let brightest = self.brightest();
         let kept: Vec<bool> =
@@ -30,7 +30,7 @@ impl Model {
         let split: Vec<bool> =
             (0..count - 1).map(|k| room && kept[k] && kept[k + 1] && self.splits(mesh, k, brightest)).collect();
         if kept.iter().all(|keep| *keep) && !split.iter().any(|wanted| *wanted) {
-            return Some(());
+            return Some(false);
         }
         let mut grown = Self {
             unknowns: Vec::with_capacity(count + 8),
@@ -66,7 +66,7 @@ impl Model {
         }
         *mesh = Mesh::measured(mesh.star_g, above, lasting);
         *self = grown;
-        Some(())
+        Some(true)
     }
 
     fn push(&mut self, unknowns: Unknowns, composition: Composition, settled: Settled, convective: bool) {
