@@ -21,6 +21,9 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
         section(ui, palette, "Other scenarios to look at");
         for scenario in built_in::all() {
             let Ok(sheet) = scenario.scenario() else { continue };
+            if sheet.title == workspace.scenario().title {
+                continue;
+            }
             ui.add_space(GRID);
             if ui.link(RichText::new(&sheet.title).color(palette.accent)).on_hover_text("Open this scenario").clicked() {
                 commands.push(Command::OpenBuiltIn(scenario.name));

@@ -46,7 +46,7 @@ impl Page {
 pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
     let palette = workspace.palette();
     let mut commands = Vec::new();
-    ui.horizontal(|ui| {
+    ui.horizontal_wrapped(|ui| {
         ui.spacing_mut().item_spacing.x = 4.0 * GRID;
         for page in Page::ALL {
             if word(ui, palette, page.name(), workspace.page == page).clicked() {

@@ -4,9 +4,9 @@ use super::edit;
 use crate::physics::planet::{Greenhouse, Redistribution};
 use crate::system::limits::{
     BOND_ALBEDO, ECCENTRICITY, EMISSIVITY, GREENHOUSE_INCREMENT, LONGEST_NAME, Limit, OPTICAL_DEPTH, PLANET_MASS,
-    PLANET_RADIUS, SEMI_MAJOR_AXIS,
+    PLANET_RADIUS, SEMI_MAJOR_AXIS, SURFACE_PRESSURE,
 };
-use crate::system::PlanetSpecification;
+use crate::system::{Air, PlanetSpecification};
 use crate::window::command::Command;
 use crate::window::theme::{GRID, usual};
 use crate::window::widgets::heading::section;
@@ -77,6 +77,14 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace, index: usize) -> Option<C
             }
         }
     }
+    if let Some(air) = air_row(ui, workspace, planet.air) {
+        command = change("air", &|planet| planet.air = air);
+    }
+    if let Some(current_bar) = planet.air.surface_pressure_bar()
+        && let Some(value) = value_entry(ui, palette, &planet.name, &SURFACE_PRESSURE, current_bar)
+    {
+        command = change("pressure of the air", &|planet| planet.air = planet.air.at_pressure(value));
+    }
     command
 }
 
@@ -103,6 +111,20 @@ fn greenhouse_row(ui: &mut Ui, workspace: &Workspace, current: Greenhouse) -> Op
             let is_current = option.key() == current.key();
             if ui.selectable_label(is_current, option.name()).clicked() && !is_current {
                 chosen = Some(option);
+            }
+        }
+    });
+    chosen
+}
+
+/// The pressure is kept when only the gas changes.
+fn air_row(ui: &mut Ui, workspace: &Workspace, current: Air) -> Option<Air> {
+    let mut chosen = None;
+    choice_row(ui, workspace, "Air", "Clear air that makes the sky; it does not warm the ground.", current.name(), |ui| {
+        for option in Air::KINDS {
+            let is_current = option.key() == current.key();
+            if ui.selectable_label(is_current, option.name()).clicked() && !is_current {
+                chosen = Some(current.surface_pressure_bar().map_or(option, |pressure_bar| option.at_pressure(pressure_bar)));
             }
         }
     });
