@@ -36,6 +36,7 @@ impl EditedField {
             "about" => "Description",
             "redistribution" => "Heat redistribution",
             "greenhouse" => "Greenhouse",
+            "air" => "Air",
             key => limit.map_or(key, |limit| limit.name),
         }
     }

@@ -160,8 +160,18 @@ pub const OPTICAL_DEPTH: Limit = Limit {
     meaning: "Infrared optical depth of the air, held fixed.",
 };
 
+/// Pressure of a planet's air.
+pub const SURFACE_PRESSURE: Limit = Limit {
+    key: "surface_pressure_bar",
+    name: "Pressure",
+    lowest: 1e-6,
+    highest: 1000.0,
+    entry: EntryKind::PressureBar,
+    meaning: "Pressure of the air at the ground, held fixed; it makes the sky.",
+};
+
 /// Every limit, for tables in documents and tests.
-pub const ALL: [&Limit; 11] = [
+pub const ALL: [&Limit; 12] = [
     &STAR_MASS,
     &METALLICITY,
     &PRESENT_AGE,
@@ -173,6 +183,7 @@ pub const ALL: [&Limit; 11] = [
     &EMISSIVITY,
     &GREENHOUSE_INCREMENT,
     &OPTICAL_DEPTH,
+    &SURFACE_PRESSURE,
 ];
 
 /// Most planets a system may hold.

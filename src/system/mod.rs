@@ -3,6 +3,7 @@
 //!
 //! Nothing here knows a file, a screen or a clock.
 
+pub mod air;
 pub mod events;
 pub mod history;
 pub mod limits;
@@ -15,6 +16,7 @@ pub mod quantities;
 pub mod specification;
 pub mod ticks;
 
+pub use air::Air;
 pub use events::{Event, EventKind};
 pub use history::{History, HistoryError};
 pub use moment::{Moment, PlanetMoment, PlanetState, StarMoment};

@@ -1,5 +1,6 @@
 //! What a person says about a system: the inputs, and what can be wrong with them.
 
+use super::air::Air;
 use super::limits::{self, Limit, OutOfLimit};
 use crate::physics::planet::{Greenhouse, Redistribution};
 use thiserror::Error;
@@ -47,6 +48,8 @@ pub struct PlanetSpecification {
     pub emissivity: f64,
     /// Greenhouse effect, held fixed.
     pub greenhouse: Greenhouse,
+    /// Clear air that makes the sky, held fixed.
+    pub air: Air,
 }
 
 /// Where in a system a problem sits.
@@ -164,7 +167,7 @@ impl Default for StarSpecification {
 }
 
 impl PlanetSpecification {
-    /// Every number of the planet with its limit; the greenhouse parameter only where there is one.
+    /// Every number of the planet with its limit; those of greenhouse and air only where there is one.
     #[must_use]
     pub fn inputs(&self) -> Vec<(&'static Limit, f64)> {
         let mut inputs = vec![
@@ -180,6 +183,7 @@ impl PlanetSpecification {
             Greenhouse::FixedIncrement { increment_k } => inputs.push((&limits::GREENHOUSE_INCREMENT, increment_k)),
             Greenhouse::Grey { optical_depth } => inputs.push((&limits::OPTICAL_DEPTH, optical_depth)),
         }
+        inputs.extend(self.air.surface_pressure_bar().map(|pressure_bar| (&limits::SURFACE_PRESSURE, pressure_bar)));
         inputs
     }
 }
@@ -196,6 +200,7 @@ impl Default for PlanetSpecification {
             redistribution: Redistribution::WholePlanet,
             emissivity: 1.0,
             greenhouse: Greenhouse::None,
+            air: Air::default(),
         }
     }
 }

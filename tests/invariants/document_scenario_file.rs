@@ -3,6 +3,7 @@
 
 use longember::document::{LoadError, Problem, Scenario, built_in, parse_scenario, scenario_from_bytes, scenario_text};
 use longember::physics::planet::{Greenhouse, Redistribution};
+use longember::system::Air;
 use longember::system::limits::{self, Limit};
 use longember::system::specification::{PlanetSpecification, StarSpecification, System};
 use proptest::prelude::*;
@@ -46,6 +47,7 @@ mod oracle {
         pub(super) redistribution: Redistribution,
         pub(super) emissivity: f64,
         pub(super) greenhouse: Greenhouse,
+        pub(super) air: Air,
     }
 
     impl Default for Planet {
@@ -60,6 +62,7 @@ mod oracle {
                 redistribution: Redistribution::WholePlanet,
                 emissivity: 1.0,
                 greenhouse: Greenhouse::None,
+                air: Air::EarthLike { surface_pressure_bar: 1.0 },
             }
         }
     }
@@ -78,6 +81,14 @@ mod oracle {
         None,
         FixedIncrement { increment_k: f64 },
         Grey { optical_depth: f64 },
+    }
+
+    #[derive(Deserialize)]
+    #[serde(deny_unknown_fields)]
+    pub(super) enum Air {
+        Airless,
+        EarthLike { surface_pressure_bar: f64 },
+        CarbonDioxide { surface_pressure_bar: f64 },
     }
 }
 
@@ -107,6 +118,11 @@ fn read_by_oracle(text: &str, ours: &Scenario) -> Result<Scenario, String> {
             oracle::Greenhouse::None => Greenhouse::None,
             oracle::Greenhouse::FixedIncrement { increment_k } => Greenhouse::FixedIncrement { increment_k },
             oracle::Greenhouse::Grey { optical_depth } => Greenhouse::Grey { optical_depth },
+        },
+        air: match planet.air {
+            oracle::Air::Airless => Air::None,
+            oracle::Air::EarthLike { surface_pressure_bar } => Air::EarthLike { surface_pressure_bar },
+            oracle::Air::CarbonDioxide { surface_pressure_bar } => Air::CarbonDioxide { surface_pressure_bar },
         },
     });
     let star = StarSpecification {
@@ -144,6 +160,11 @@ fn greenhouse() -> impl Strategy<Value = Greenhouse> {
     ]
 }
 
+fn air() -> impl Strategy<Value = Air> {
+    (0..3_usize, value(&limits::SURFACE_PRESSURE))
+        .prop_map(|(kind, pressure_bar)| Air::KINDS[kind].at_pressure(pressure_bar))
+}
+
 fn planet() -> impl Strategy<Value = PlanetSpecification> {
     let numbers = (
         value(&limits::SEMI_MAJOR_AXIS),
@@ -153,7 +174,7 @@ fn planet() -> impl Strategy<Value = PlanetSpecification> {
         value(&limits::BOND_ALBEDO),
         value(&limits::EMISSIVITY),
     );
-    (name(), numbers, 0..4_usize, greenhouse()).prop_map(|(name, numbers, redistribution, greenhouse)| {
+    (name(), numbers, 0..4_usize, greenhouse(), air()).prop_map(|(name, numbers, redistribution, greenhouse, air)| {
         let (semi_major_axis_au, eccentricity, mass_mearth, radius_rearth, bond_albedo, emissivity) = numbers;
         PlanetSpecification {
             name,
@@ -165,6 +186,7 @@ fn planet() -> impl Strategy<Value = PlanetSpecification> {
             redistribution: Redistribution::ALL[redistribution],
             emissivity,
             greenhouse,
+            air,
         }
     })
 }
@@ -374,6 +396,14 @@ fn each_kind_of_problem_reads_as_a_sentence() {
         (
             format!("(version: 1, title: \"T\", {star}, planets: [({ember}, redistribution: Dayside)])"),
             "planet 1 \"Ember\": redistribution is Dayside, allowed WholePlanet, DaySide, DaySideFullPhase, SubStellar; did you mean DaySide? (a.ron:1:182)",
+        ),
+        (
+            format!("(version: 1, title: \"T\", {star}, planets: [({ember}, air: EarthLike)])"),
+            "planet 1 \"Ember\": air is EarthLike, allowed Airless, EarthLike(surface_pressure_bar: …), CarbonDioxide(surface_pressure_bar: …) (a.ron:1:171)",
+        ),
+        (
+            format!("(version: 1, title: \"T\", {star}, planets: [({ember}, air: Airles)])"),
+            "planet 1 \"Ember\": air is Airles, allowed Airless, EarthLike, CarbonDioxide; did you mean Airless? (a.ron:1:171)",
         ),
     ];
     for (text, expected) in cases {

@@ -20,9 +20,13 @@ pub(super) const PLANET_KEYS: &[&str] = &[
     "redistribution",
     "emissivity",
     "greenhouse",
+    "air",
 ];
 pub(super) const GREENHOUSES: &[&str] = &["None", "FixedIncrement", "Grey"];
 pub(super) const FIXED_INCREMENT_KEYS: &[&str] = &["increment_k"];
 pub(super) const GREY_KEYS: &[&str] = &["optical_depth"];
+/// In the order of `Air::KINDS`.
+pub(super) const AIRS: &[&str] = &["Airless", "EarthLike", "CarbonDioxide"];
+pub(super) const AIR_KEYS: &[&str] = &["surface_pressure_bar"];
 /// In the order of `Redistribution::ALL`.
 pub(super) const REDISTRIBUTIONS: &[&str] = &["WholePlanet", "DaySide", "DaySideFullPhase", "SubStellar"];

@@ -1,8 +1,8 @@
 //! Text to scenario.
 
 use super::keys::{
-    CURRENT_VERSION, FIXED_INCREMENT_KEYS, GREENHOUSES, GREY_KEYS, PLANET_KEYS, REDISTRIBUTIONS, SCENARIO,
-    SCENARIO_KEYS, STAR_KEYS,
+    AIR_KEYS, AIRS, CURRENT_VERSION, FIXED_INCREMENT_KEYS, GREENHOUSES, GREY_KEYS, PLANET_KEYS, REDISTRIBUTIONS,
+    SCENARIO, SCENARIO_KEYS, STAR_KEYS,
 };
 use crate::document::problem::{Fault, Problem, Subject};
 use crate::document::record_reading::{Fields, Reading};
@@ -10,6 +10,7 @@ use crate::document::ron_text::{Node, Value, number_text};
 use crate::document::scenario::Scenario;
 use crate::physics::planet::bulk::default_radius_rearth;
 use crate::physics::planet::{Greenhouse, Redistribution};
+use crate::system::Air;
 use crate::system::limits::{self, Limit};
 use crate::system::specification::{self, Body, PlanetSpecification, StarSpecification, System};
 use std::collections::HashMap;
@@ -185,6 +186,7 @@ fn read_planet(
         redistribution: body.redistribution().unwrap_or(usual.redistribution),
         emissivity: body.optional_number(&limits::EMISSIVITY).unwrap_or(usual.emissivity),
         greenhouse: body.greenhouse().unwrap_or(usual.greenhouse),
+        air: body.air().unwrap_or(usual.air),
     })
 }
 
@@ -247,12 +249,13 @@ impl BodyReading<'_, '_, '_> {
         match (kind, &node.value) {
             (0, Value::Name(_)) => Some(Greenhouse::None),
             (1, Value::Record(_)) => {
-                let increment_k =
-                    self.parameter(node, GREENHOUSES[1], FIXED_INCREMENT_KEYS, &limits::GREENHOUSE_INCREMENT)?;
+                let group = ("greenhouse", GREENHOUSES[1], FIXED_INCREMENT_KEYS);
+                let increment_k = self.parameter(node, group, &limits::GREENHOUSE_INCREMENT)?;
                 Some(Greenhouse::FixedIncrement { increment_k })
             }
             (2, Value::Record(_)) => {
-                let optical_depth = self.parameter(node, GREENHOUSES[2], GREY_KEYS, &limits::OPTICAL_DEPTH)?;
+                let optical_depth =
+                    self.parameter(node, ("greenhouse", GREENHOUSES[2], GREY_KEYS), &limits::OPTICAL_DEPTH)?;
                 Some(Greenhouse::Grey { optical_depth })
             }
             _ => {
@@ -263,16 +266,34 @@ impl BodyReading<'_, '_, '_> {
         }
     }
 
-    /// The one number in the brackets of a greenhouse.
+    fn air(&mut self) -> Option<Air> {
+        let node = self.fields.given("air")?;
+        let kind = self.reading.choice(node, &self.fields.subject, "air", AIRS)?;
+        match (Air::KINDS.get(kind)?, &node.value) {
+            (Air::None, Value::Name(_)) => Some(Air::None),
+            (air @ (Air::EarthLike { .. } | Air::CarbonDioxide { .. }), Value::Record(_)) => {
+                let pressure_bar = self.parameter(node, ("air", AIRS[kind], AIR_KEYS), &limits::SURFACE_PRESSURE)?;
+                Some(air.at_pressure(pressure_bar))
+            }
+            _ => {
+                let allowed =
+                    "Airless, EarthLike(surface_pressure_bar: …), CarbonDioxide(surface_pressure_bar: …)".to_owned();
+                self.reading.wrong_kind(node, &self.fields.subject, "air", allowed);
+                None
+            }
+        }
+    }
+
+    /// The one number in the brackets of a choice: `of` is the key of the choice, its name, and the key in the brackets.
     fn parameter(
         &mut self,
         node: &Node,
-        name: &'static str,
-        keys: &'static [&'static str],
+        of: (&'static str, &'static str, &'static [&'static str]),
         limit: &'static Limit,
     ) -> Option<f64> {
         let subject = self.fields.subject.clone();
-        let inner = self.reading.fields(node, name, "greenhouse", keys, subject)?;
+        let (choice, name, keys) = of;
+        let inner = self.reading.fields(node, name, choice, keys, subject)?;
         let number = self.reading.required(&inner, limit.key, &limit.allowed())?;
         self.number(number, limit)
     }

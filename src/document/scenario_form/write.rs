@@ -1,9 +1,10 @@
 //! Scenario to text.
 
-use super::keys::{CURRENT_VERSION, REDISTRIBUTIONS, SCENARIO};
+use super::keys::{AIRS, CURRENT_VERSION, REDISTRIBUTIONS, SCENARIO};
 use crate::document::ron_text::{Writer, number_text};
 use crate::document::scenario::Scenario;
 use crate::physics::planet::{Greenhouse, Redistribution};
+use crate::system::Air;
 use crate::system::specification::{PlanetSpecification, StarSpecification};
 
 /// Writes a scenario in its file form, every key in a fixed order, one a line.
@@ -51,6 +52,7 @@ fn write_planet(writer: &mut Writer, planet: &PlanetSpecification) {
     writer.field("redistribution", redistribution_text(planet.redistribution));
     writer.number("emissivity", planet.emissivity);
     writer.field("greenhouse", &greenhouse_text(planet.greenhouse));
+    writer.field("air", &air_text(planet.air));
     writer.close(')');
 }
 
@@ -70,5 +72,14 @@ fn greenhouse_text(greenhouse: Greenhouse) -> String {
             format!("FixedIncrement(increment_k: {})", number_text(increment_k))
         }
         Greenhouse::Grey { optical_depth } => format!("Grey(optical_depth: {})", number_text(optical_depth)),
+    }
+}
+
+fn air_text(air: Air) -> String {
+    let of = |name: &str, pressure_bar| format!("{name}(surface_pressure_bar: {})", number_text(pressure_bar));
+    match air {
+        Air::None => AIRS[0].to_owned(),
+        Air::EarthLike { surface_pressure_bar } => of(AIRS[1], surface_pressure_bar),
+        Air::CarbonDioxide { surface_pressure_bar } => of(AIRS[2], surface_pressure_bar),
     }
 }
