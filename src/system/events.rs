@@ -93,7 +93,7 @@ impl Event {
 /// Every event of a history, oldest first.
 pub(super) fn of(history: &History) -> Vec<Event> {
     let mut events: Vec<Event> = history
-        .track()
+        .life()
         .events()
         .iter()
         .map(|event| Event { time_yr: event.age_yr, body: Body::Star, kind: EventKind::Star(event.kind) })
@@ -115,7 +115,7 @@ fn planet_events(history: &History, index: usize, events: &mut Vec<Event>) {
     }
     let until_yr = end.map_or(history.shown_until_yr(), |(time_yr, _)| time_yr);
     let reading = |time_yr: f64| Reading::of(&past.moment(time_yr, &history.star_at(time_yr)));
-    let ages: Vec<f64> = history.track().node_ages_yr().iter().copied().filter(|age_yr| *age_yr < until_yr).collect();
+    let ages: Vec<f64> = history.life().node_ages_yr().iter().copied().filter(|age_yr| *age_yr < until_yr).collect();
     for pair in ages.windows(2) {
         let (before, after) = (reading(pair[0]), reading(pair[1]));
         for crossing in Crossing::ALL {

@@ -7,7 +7,8 @@ use super::planet_past::PlanetPast;
 use super::specification::{Body, System, SystemProblem};
 use crate::physics::light::DRAPER_POINT_K;
 use crate::physics::planet::StarPoint;
-use crate::physics::star::{END_YR, PhaseSpan, StarError, StarInput, StarState, Track};
+use crate::physics::star::{END_YR, LifeOptions, PhaseSpan, StarError, StarInput, StarState, WholeLife};
+use std::ops::ControlFlow;
 use thiserror::Error;
 
 /// Why a system has no history.
@@ -18,7 +19,19 @@ pub enum HistoryError {
     Inputs(Vec<SystemProblem>),
     /// The star is outside what can be computed.
     #[error("{0}")]
-    Star(#[from] StarError),
+    Star(StarError),
+    /// The computation was asked to stop.
+    #[error("the computation was cancelled")]
+    Cancelled,
+}
+
+impl From<StarError> for HistoryError {
+    fn from(error: StarError) -> Self {
+        match error {
+            StarError::Cancelled => Self::Cancelled,
+            other => Self::Star(other),
+        }
+    }
 }
 
 fn sentence(problems: &[SystemProblem]) -> String {
@@ -32,11 +45,14 @@ fn sentence(problems: &[SystemProblem]) -> String {
     lines.join("; ")
 }
 
+/// Share of the time that goes into the star's life, where that takes seconds.
+const STAR_SHARE: f64 = 0.98;
+
 /// A system with everything that ever happens to it, from arrival on the main sequence to 10¹⁴ yr.
 #[derive(Debug)]
 pub struct History {
     system: System,
-    track: Track,
+    life: WholeLife,
     planets: Vec<PlanetPast>,
     events: Vec<Event>,
     shown_until_yr: f64,
@@ -48,18 +64,45 @@ impl History {
     /// # Errors
     /// [`HistoryError`] when an input is outside its permitted range.
     pub fn compute(system: System) -> Result<Self, HistoryError> {
-        let problems = system.problems();
-        if !problems.is_empty() {
-            // A star outside the computed masses gets the sentence that says why; ranges alone do not.
-            star_input(&system).checked()?;
-            return Err(HistoryError::Inputs(problems));
+        Self::compute_with(system, &mut |_| ControlFlow::Continue(()))
+    }
+
+    /// Like [`History::compute`]; `progress` is told the share that is done, 0 to 1, and may stop the computation.
+    ///
+    /// # Errors
+    /// As [`History::compute`], or [`HistoryError::Cancelled`].
+    pub fn compute_with(
+        system: System,
+        progress: &mut dyn FnMut(f64) -> ControlFlow<()>,
+    ) -> Result<Self, HistoryError> {
+        let input = checked_input(&system)?;
+        let mut star_progress = |share: f64| progress(STAR_SHARE * share);
+        let life = WholeLife::compute(input, life_options(&system), &mut star_progress)?;
+        Self::of_life(system, life, progress)
+    }
+
+    /// Carries the planets along a life of the star that is known already.
+    ///
+    /// # Errors
+    /// As [`History::compute_with`].
+    pub fn of_life(
+        system: System,
+        life: WholeLife,
+        progress: &mut dyn FnMut(f64) -> ControlFlow<()>,
+    ) -> Result<Self, HistoryError> {
+        checked_input(&system)?;
+        let points = star_points(&life);
+        let count = system.planets.len();
+        let mut planets: Vec<PlanetPast> = Vec::with_capacity(count);
+        for planet in &system.planets {
+            planets.push(PlanetPast::walk(planet.clone(), &points));
+            let share = planets.len() as f64 / count as f64;
+            if progress(STAR_SHARE + (1.0 - STAR_SHARE) * share).is_break() {
+                return Err(HistoryError::Cancelled);
+            }
         }
-        let track = Track::compute(star_input(&system))?;
-        let points = star_points(&track);
-        let planets: Vec<PlanetPast> =
-            system.planets.iter().map(|planet| PlanetPast::walk(planet.clone(), &points)).collect();
-        let shown_until_yr = shown_until_yr(&track);
-        let mut history = Self { system, track, planets, events: Vec::new(), shown_until_yr };
+        let shown_until_yr = shown_until_yr(&life);
+        let mut history = Self { system, life, planets, events: Vec::new(), shown_until_yr };
         history.events = events::of(&history);
         Ok(history)
     }
@@ -72,8 +115,8 @@ impl History {
 
     /// The star's life.
     #[must_use]
-    pub fn track(&self) -> &Track {
-        &self.track
+    pub fn life(&self) -> &WholeLife {
+        &self.life
     }
 
     /// The planets, in the order of the system.
@@ -91,7 +134,7 @@ impl History {
     /// The phases of the star's life, in order.
     #[must_use]
     pub fn spans(&self) -> &[PhaseSpan] {
-        self.track.spans()
+        self.life.spans()
     }
 
     /// The age up to which a whole life is shown, yr: a little beyond the last visible glow of a white
@@ -105,15 +148,15 @@ impl History {
     /// The star alone at an age, yr (held within 0 to [`END_YR`]).
     #[must_use]
     pub fn star_at(&self, age_yr: f64) -> StarState {
-        self.track.state_at(age_yr)
+        self.life.state_at(age_yr)
     }
 
     /// Everything at one moment, yr (held within 0 to [`END_YR`]).
     #[must_use]
     pub fn moment(&self, age_yr: f64) -> Moment {
         let time_yr = held(age_yr);
-        let state = self.track.state_at(time_yr);
-        let mut notes: Vec<Note> = notes::of_star(&self.track, time_yr, &state);
+        let state = self.life.state_at(time_yr);
+        let mut notes: Vec<Note> = notes::of_star(&self.life, time_yr, &state);
         let mut planets = Vec::with_capacity(self.planets.len());
         for (index, past) in self.planets.iter().enumerate() {
             let planet = past.moment(time_yr, &state);
@@ -127,7 +170,7 @@ impl History {
     #[must_use]
     pub fn figures_at(&self, age_yr: f64) -> (StarMoment, Vec<PlanetMoment>) {
         let time_yr = held(age_yr);
-        let state = self.track.state_at(time_yr);
+        let state = self.life.state_at(time_yr);
         (StarMoment::new(&state), self.planets.iter().map(|past| past.moment(time_yr, &state)).collect())
     }
 
@@ -135,7 +178,7 @@ impl History {
     #[must_use]
     pub fn planet_at(&self, index: usize, age_yr: f64) -> Option<PlanetMoment> {
         let time_yr = held(age_yr);
-        self.planets.get(index).map(|past| past.moment(time_yr, &self.track.state_at(time_yr)))
+        self.planets.get(index).map(|past| past.moment(time_yr, &self.life.state_at(time_yr)))
     }
 }
 
@@ -145,21 +188,41 @@ pub fn held(age_yr: f64) -> f64 {
     if age_yr.is_nan() { 0.0 } else { age_yr.clamp(0.0, END_YR) }
 }
 
-fn star_input(system: &System) -> StarInput {
+/// The star of a system without problems.
+fn checked_input(system: &System) -> Result<StarInput, HistoryError> {
+    let input = star_input(system);
+    let problems = system.problems();
+    if problems.is_empty() {
+        return Ok(input);
+    }
+    // A star outside the computed masses gets the sentence that says why; ranges alone do not.
+    input.checked()?;
+    Err(HistoryError::Inputs(problems))
+}
+
+/// What the life of a system's star follows from.
+#[must_use]
+pub fn star_input(system: &System) -> StarInput {
     StarInput { mass_msun: system.star.mass_msun, metallicity_dex: system.star.metallicity_dex }
 }
 
+/// The user's choices of how the life of the star is computed.
+#[must_use]
+pub fn life_options(_system: &System) -> LifeOptions {
+    LifeOptions::default()
+}
+
 /// The star's nodes as planets feel them.
-fn star_points(track: &Track) -> Vec<StarPoint> {
-    let mut points: Vec<StarPoint> = Vec::with_capacity(track.node_ages_yr().len());
+fn star_points(life: &WholeLife) -> Vec<StarPoint> {
+    let mut points: Vec<StarPoint> = Vec::with_capacity(life.node_ages_yr().len());
     let mut was_remnant = false;
-    for &age_yr in track.node_ages_yr() {
-        let state = track.state_at(age_yr);
+    for &age_yr in life.node_ages_yr() {
+        let state = life.state_at(age_yr);
         let is_remnant = state.phase.is_remnant();
         let collapses = is_remnant && !was_remnant && !state.phase.is_white_dwarf();
         if collapses {
             // The last moment before the collapse, so that the mass is lost at once and not over the last step.
-            let before = track.state_at(age_yr.next_down());
+            let before = life.state_at(age_yr.next_down());
             points.push(star_point(&before, false));
         }
         points.push(star_point(&state, collapses));
@@ -183,12 +246,12 @@ fn star_point(state: &StarState, lost_mass_suddenly: bool) -> StarPoint {
     }
 }
 
-fn shown_until_yr(track: &Track) -> f64 {
-    let Some(last) = track.spans().last() else { return END_YR };
+fn shown_until_yr(life: &WholeLife) -> f64 {
+    let Some(last) = life.spans().last() else { return END_YR };
     if !last.phase.is_white_dwarf() {
         return if last.phase.is_remnant() { (3.0 * last.from_yr).min(END_YR) } else { END_YR };
     }
-    let glows = |age_yr: f64| track.state_at(age_yr).effective_temperature_k > DRAPER_POINT_K;
+    let glows = |age_yr: f64| life.state_at(age_yr).effective_temperature_k > DRAPER_POINT_K;
     if glows(END_YR) {
         return END_YR;
     }

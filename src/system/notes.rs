@@ -4,7 +4,7 @@ use super::moment::{PlanetMoment, PlanetState};
 use super::specification::{Body, PlanetSpecification};
 use crate::physics::planet::Greenhouse;
 use crate::physics::planet::habitable_zone::{ZoneLimit, limit_flux};
-use crate::physics::star::{StarCaution, StarState, Track};
+use crate::physics::star::{StarCaution, StarState, WholeLife};
 
 /// A remark about one quantity of one body.
 #[derive(Clone, Debug, PartialEq)]
@@ -61,8 +61,8 @@ impl NoteKind {
 }
 
 /// Remarks about the star.
-pub(super) fn of_star(track: &Track, time_yr: f64, state: &StarState) -> Vec<Note> {
-    let mut notes: Vec<Note> = track
+pub(super) fn of_star(life: &WholeLife, time_yr: f64, state: &StarState) -> Vec<Note> {
+    let mut notes: Vec<Note> = life
         .cautions_at(time_yr)
         .into_iter()
         .map(|caution| Note {
@@ -99,15 +99,25 @@ fn kind_of(caution: StarCaution) -> NoteKind {
         | StarCaution::UncheckedLongLife
         | StarCaution::HotterThanModels
         | StarCaution::CoolingMassOutsideTables
-        | StarCaution::CoolingOlderThanTables => NoteKind::Extrapolated,
-        StarCaution::MassLossUncertain => NoteKind::OrderOfMagnitude,
+        | StarCaution::CoolingOlderThanTables
+        | StarCaution::LightRedDwarf
+        | StarCaution::UnusualMetals
+        | StarCaution::MetalPoorOpacity => NoteKind::Extrapolated,
+        StarCaution::MassLossUncertain | StarCaution::SmallGiantWind => NoteKind::OrderOfMagnitude,
+        StarCaution::OldSurface => NoteKind::HeldFixed,
         StarCaution::RemnantLightNotModelled => NoteKind::NotModelled,
         StarCaution::NearBlueIgnition
         | StarCaution::CoreHydrogenEstimated
         | StarCaution::PulsesAveraged
         | StarCaution::GiantRadiusUncertain
         | StarCaution::CoolingCoreDiffers
-        | StarCaution::RemnantMassUncertain => NoteKind::Limited,
+        | StarCaution::RemnantMassUncertain
+        | StarCaution::ShellFlashes
+        | StarCaution::EarlyCrystal
+        | StarCaution::LifetimesDiffer
+        | StarCaution::BlendedWithFits
+        | StarCaution::GiantNotFollowed
+        | StarCaution::QuickLook => NoteKind::Limited,
     }
 }
 

@@ -185,7 +185,7 @@ fn path_length(before: &StarState, after: &StarState) -> f64 {
 /// Ages at which the path is measured: the star's nodes, the ends, and fill-ins where nodes are far apart.
 fn sample_ages(history: &History, from_yr: f64, to_yr: f64) -> Vec<f64> {
     let mut coarse = vec![from_yr];
-    coarse.extend(history.track().node_ages_yr().iter().copied().filter(|age_yr| *age_yr > from_yr && *age_yr < to_yr));
+    coarse.extend(history.life().node_ages_yr().iter().copied().filter(|age_yr| *age_yr > from_yr && *age_yr < to_yr));
     coarse.push(to_yr);
     coarse.dedup();
     let largest_gap_yr = (to_yr - from_yr) / 400.0;

@@ -31,11 +31,33 @@ pub enum StarCaution {
     RemnantMassUncertain,
     /// A neutron star's own faint light is left out.
     RemnantLightNotModelled,
+    /// A red dwarf outside the masses the structure calculation was fitted to.
+    LightRedDwarf,
+    /// A red dwarf of a metallicity the structure calculation was not fitted to.
+    UnusualMetals,
+    /// The surface was asked to be as opaque as in calculations of 1997.
+    OldSurface,
+    /// Late hydrogen flashes are levelled off.
+    ShellFlashes,
+    /// A red dwarf that became a giant and lost mass.
+    SmallGiantWind,
+    /// Fewer metals than the opacity tables know.
+    MetalPoorOpacity,
+    /// The last cooling is begun earlier than usual.
+    EarlyCrystal,
+    /// Published lifetimes of red dwarfs differ.
+    LifetimesDiffer,
+    /// Between the structure calculation and the fits.
+    BlendedWithFits,
+    /// The structure of a giant could not be followed to its white dwarf.
+    GiantNotFollowed,
+    /// A quick look, interpolated between lives computed in advance.
+    QuickLook,
 }
 
 impl StarCaution {
     /// Every caution.
-    pub const ALL: [Self; 14] = [
+    pub const ALL: [Self; 25] = [
         Self::HeavierThanModels,
         Self::LighterThanModels,
         Self::UncheckedLongLife,
@@ -50,6 +72,17 @@ impl StarCaution {
         Self::CoolingOlderThanTables,
         Self::RemnantMassUncertain,
         Self::RemnantLightNotModelled,
+        Self::LightRedDwarf,
+        Self::UnusualMetals,
+        Self::OldSurface,
+        Self::ShellFlashes,
+        Self::SmallGiantWind,
+        Self::MetalPoorOpacity,
+        Self::EarlyCrystal,
+        Self::LifetimesDiffer,
+        Self::BlendedWithFits,
+        Self::GiantNotFollowed,
+        Self::QuickLook,
     ];
 
     /// Key of the quantity of the state the caution is about.
@@ -62,13 +95,21 @@ impl StarCaution {
             | Self::CoolingMassOutsideTables
             | Self::CoolingCoreDiffers
             | Self::CoolingOlderThanTables
-            | Self::RemnantLightNotModelled => "luminosity_lsun",
-            Self::UncheckedLongLife => "age_yr",
+            | Self::RemnantLightNotModelled
+            | Self::LightRedDwarf
+            | Self::UnusualMetals
+            | Self::OldSurface
+            | Self::ShellFlashes
+            | Self::MetalPoorOpacity
+            | Self::EarlyCrystal
+            | Self::BlendedWithFits
+            | Self::QuickLook => "luminosity_lsun",
+            Self::UncheckedLongLife | Self::LifetimesDiffer => "age_yr",
             Self::NearBlueIgnition | Self::HotterThanModels => "effective_temperature_k",
             Self::CoreHydrogenEstimated => "core_hydrogen_fraction",
             Self::GiantRadiusUncertain => "radius_rsun",
             Self::MassLossUncertain => "mass_loss_msun_yr",
-            Self::RemnantMassUncertain => "mass_msun",
+            Self::RemnantMassUncertain | Self::SmallGiantWind | Self::GiantNotFollowed => "mass_msun",
         }
     }
 
@@ -116,6 +157,39 @@ impl StarCaution {
                 "How much of the star falls back onto its collapsed core is uncertain; so is the mass that is left."
             }
             Self::RemnantLightNotModelled => "The faint light of the collapsed remnant itself is left out.",
+            Self::LightRedDwarf => "The red-dwarf model was fitted to stars of 0.08 to 0.30 solar masses.",
+            Self::UnusualMetals => "The red-dwarf model was fitted to stars of the Sun's metallicity.",
+            Self::OldSurface => {
+                "The surface is as opaque as in calculations of 1997, by choice: today's stars are brighter, and \
+                 live shorter by a factor of about 1.6."
+            }
+            Self::ShellFlashes => "Late hydrogen flashes of the contracting star are levelled off.",
+            Self::SmallGiantWind => {
+                "The wind of this small red giant, and so the mass of its white dwarf, is known to a factor of two \
+                 only."
+            }
+            Self::MetalPoorOpacity => {
+                "There are fewer heavy elements than the opacity tables know; those for a mass fraction of 0.001 \
+                 are used."
+            }
+            Self::EarlyCrystal => {
+                "The last cooling is that of a simple crystal, begun at an earlier moment than usual."
+            }
+            Self::LifetimesDiffer => {
+                "Published lifetimes of red dwarfs differ: calculations of 1997 with more opaque surfaces give \
+                 lives about 1.6 times as long."
+            }
+            Self::BlendedWithFits => {
+                "Between 0.40 and 0.50 solar masses the computed structure passes over into the published fits."
+            }
+            Self::GiantNotFollowed => {
+                "The structure of this small giant could not be followed to its end; the white dwarf of its core \
+                 takes over."
+            }
+            Self::QuickLook => {
+                "This is a quick look, interpolated between lives computed in advance; the exact life of this star \
+                 is not computed yet."
+            }
         }
     }
 }

@@ -31,7 +31,7 @@ pub(super) struct Piece {
 #[derive(Clone, Debug)]
 pub(super) enum Course {
     /// Logarithms of luminosity and radius, mass, core mass, mass-loss rate.
-    Burning(Curve),
+    Burning(Curve<5>),
     Cooling(CoolingCurve),
     Dark {
         mass_msun: f64,

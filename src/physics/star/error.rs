@@ -1,21 +1,40 @@
 //! Why a star's life cannot be computed.
 
+use super::convective::ConvectiveError;
 use thiserror::Error;
 
-/// A star outside what the analytic fits can follow.
-#[derive(Clone, Copy, Debug, PartialEq, Error)]
+/// A star outside what can be computed, or a computation that was stopped.
+#[derive(Clone, Debug, PartialEq, Error)]
 pub enum StarError {
-    /// The star is a real one, but the fits do not reach so low.
+    /// The body never shines by burning hydrogen.
     #[error(
-        "The mass of the star is {value_msun} solar masses. Stars below {least_msun} solar masses are not available yet: \
-         they are mixed to the centre, and the published fits do not follow them. Choose a mass of {least_msun} or more."
+        "The mass of the star is {value_msun} solar masses. So light a body never burns hydrogen fast enough to shine by \
+         it for long: it is a brown dwarf, which is not modelled. Choose a mass of {least_msun} or more; stars with few \
+         heavy elements need a little more."
     )]
-    BelowAnalyticRange {
+    BrownDwarf {
         /// The mass asked for, solar masses.
         value_msun: f64,
         /// The least mass allowed, solar masses.
         least_msun: f64,
     },
+    /// The star is too light for the analytic fits; its structure can be computed instead.
+    #[error(
+        "The mass of the star is {value_msun} solar masses. Stars below {least_msun} solar masses are mixed to the centre, \
+         and the published fits do not follow them. Choose a mass of {least_msun} or more."
+    )]
+    BelowFits {
+        /// The mass asked for, solar masses.
+        value_msun: f64,
+        /// The least mass allowed, solar masses.
+        least_msun: f64,
+    },
+    /// The structure of a red dwarf could not be followed.
+    #[error("The life of this red dwarf could not be computed: {0}. Choose a slightly different mass or metallicity.")]
+    Structure(ConvectiveError),
+    /// The computation was asked to stop.
+    #[error("The computation was cancelled.")]
+    Cancelled,
     /// The mass is no number, not positive or too large.
     #[error(
         "The mass of the star is {value_msun} solar masses. Allowed are {least_msun} to {most_msun} solar masses. \
@@ -63,10 +82,10 @@ mod tests {
 
     #[test]
     fn the_text_says_what_is_wrong_and_what_to_do() {
-        let text = StarError::BelowAnalyticRange { value_msun: 0.2, least_msun: 0.35 }.to_string();
-        assert!(
-            text.contains("0.2 solar masses") && text.contains("not available yet") && text.contains("0.35 or more")
-        );
+        let text = StarError::BrownDwarf { value_msun: 0.05, least_msun: 0.07 }.to_string();
+        assert!(text.contains("0.05 solar masses") && text.contains("brown dwarf") && text.contains("0.07 or more"));
+        let text = StarError::BelowFits { value_msun: 0.2, least_msun: 0.35 }.to_string();
+        assert!(text.contains("0.2 solar masses") && text.contains("0.35 or more"));
         let text = StarError::Metallicity { value_dex: 0.5, least_dex: -2.0, most_dex: 0.2 }.to_string();
         assert!(text.contains("0.5 dex") && text.contains("-2 to 0.2 dex"));
     }

@@ -5,8 +5,12 @@
 pub enum StarEventKind {
     /// Hydrogen starts to burn: age zero.
     MainSequenceStart,
+    /// A star that was mixed throughout is so no longer.
+    MixingEnds,
     /// Hydrogen in the core is spent.
     MainSequenceEnd,
+    /// A red dwarf starts its last, bright time as a blue dwarf.
+    BlueDwarfStart,
     /// The star starts its first climb as a red giant.
     GiantBranchBase,
     /// Helium starts to burn in the core.
@@ -24,12 +28,16 @@ pub enum StarEventKind {
     LargestRadius,
     /// The luminosity is the greatest of the whole life.
     HighestLuminosity,
+    /// The surface of a blue dwarf is the hottest of its whole life.
+    HottestSurface,
     /// The core collapses and the star explodes as a supernova.
     SupernovaCollapse,
     /// Carbon burns explosively and nothing is left.
     ThermonuclearDisruption,
     /// A white dwarf is left to cool.
     WhiteDwarfBirth,
+    /// A white dwarf is colder than 1000 K.
+    BlackDwarfBirth,
     /// A neutron star is left.
     NeutronStarBirth,
     /// A black hole is left.
@@ -42,7 +50,9 @@ impl StarEventKind {
     pub fn key(self) -> &'static str {
         match self {
             Self::MainSequenceStart => "main_sequence_start",
+            Self::MixingEnds => "mixing_ends",
             Self::MainSequenceEnd => "main_sequence_end",
+            Self::BlueDwarfStart => "blue_dwarf_start",
             Self::GiantBranchBase => "giant_branch_base",
             Self::HeliumIgnition { flash: true } => "helium_flash",
             Self::HeliumIgnition { flash: false } => "helium_ignition",
@@ -51,9 +61,11 @@ impl StarEventKind {
             Self::EnvelopeLost => "envelope_lost",
             Self::LargestRadius => "largest_radius",
             Self::HighestLuminosity => "highest_luminosity",
+            Self::HottestSurface => "hottest_surface",
             Self::SupernovaCollapse => "supernova_collapse",
             Self::ThermonuclearDisruption => "thermonuclear_disruption",
             Self::WhiteDwarfBirth => "white_dwarf_birth",
+            Self::BlackDwarfBirth => "black_dwarf_birth",
             Self::NeutronStarBirth => "neutron_star_birth",
             Self::BlackHoleBirth => "black_hole_birth",
         }
@@ -64,7 +76,9 @@ impl StarEventKind {
     pub fn name(self) -> &'static str {
         match self {
             Self::MainSequenceStart => "hydrogen starts to burn",
+            Self::MixingEnds => "core is no longer mixed with the rest",
             Self::MainSequenceEnd => "hydrogen in the core is spent",
+            Self::BlueDwarfStart => "blue dwarf phase begins",
             Self::GiantBranchBase => "first climb as a giant begins",
             Self::HeliumIgnition { flash: true } => "helium ignites in a flash",
             Self::HeliumIgnition { flash: false } => "helium ignites",
@@ -73,9 +87,11 @@ impl StarEventKind {
             Self::EnvelopeLost => "hydrogen envelope lost",
             Self::LargestRadius => "largest radius",
             Self::HighestLuminosity => "highest luminosity",
+            Self::HottestSurface => "hottest surface",
             Self::SupernovaCollapse => "core collapse, supernova",
             Self::ThermonuclearDisruption => "thermonuclear disruption",
             Self::WhiteDwarfBirth => "white dwarf is born",
+            Self::BlackDwarfBirth => "white dwarf has faded to a black dwarf",
             Self::NeutronStarBirth => "neutron star is born",
             Self::BlackHoleBirth => "black hole is born",
         }

@@ -1,24 +1,21 @@
 //! Monotone cubic interpolation of several quantities over common nodes.
 
-/// Number of quantities a curve carries.
-pub(super) const QUANTITIES: usize = 5;
-
-/// Smooth curves through common nodes that never overshoot: where nodes rise, so does the curve.
+/// Smooth curves of `N` quantities through common nodes that never overshoot: where nodes rise, so does the curve.
 ///
 /// # Source
 /// Piecewise cubic Hermite interpolation with the weighted harmonic mean slopes of Fritsch & Butland 1984, SIAM J. Sci.
 /// Stat. Comput. 5, 300; end slopes by the limited three-point formula of Moler 2004, Numerical Computing, section 3.4.
-#[derive(Clone, Debug, Default)]
-pub(super) struct Curve {
+#[derive(Clone, Debug)]
+pub(super) struct Curve<const N: usize> {
     ages: Vec<f64>,
-    values: Vec<[f64; QUANTITIES]>,
-    slopes: Vec<[f64; QUANTITIES]>,
+    values: Vec<[f64; N]>,
+    slopes: Vec<[f64; N]>,
 }
 
-impl Curve {
+impl<const N: usize> Curve<N> {
     /// The curve through nodes in order of age. Two nodes of one age mark a bend: the slope may change there.
-    pub(super) fn new(nodes: impl IntoIterator<Item = (f64, [f64; QUANTITIES])>) -> Self {
-        let (ages, values): (Vec<f64>, Vec<[f64; QUANTITIES]>) = nodes.into_iter().unzip();
+    pub(super) fn new(nodes: impl IntoIterator<Item = (f64, [f64; N])>) -> Self {
+        let (ages, values): (Vec<f64>, Vec<[f64; N]>) = nodes.into_iter().unzip();
         let mut slopes = Vec::with_capacity(ages.len());
         let mut start = 0;
         while start < ages.len() {
@@ -35,11 +32,11 @@ impl Curve {
     }
 
     /// Values at an age, held at the ends.
-    pub(super) fn at(&self, age: f64) -> [f64; QUANTITIES] {
+    pub(super) fn at(&self, age: f64) -> [f64; N] {
         let count = self.ages.len();
         let after = self.ages.partition_point(|&node| node <= age);
         if after == 0 || count < 2 {
-            return self.values.first().copied().unwrap_or_default();
+            return self.values.first().copied().unwrap_or([0.0; N]);
         }
         if after == count {
             return self.values[count - 1];
@@ -61,9 +58,9 @@ impl Curve {
 }
 
 /// Slopes at the nodes of one smooth stretch.
-fn stretch_slopes(ages: &[f64], values: &[[f64; QUANTITIES]]) -> Vec<[f64; QUANTITIES]> {
-    let mut slopes = vec![[0.0; QUANTITIES]; ages.len()];
-    for quantity in 0..QUANTITIES {
+fn stretch_slopes<const N: usize>(ages: &[f64], values: &[[f64; N]]) -> Vec<[f64; N]> {
+    let mut slopes = vec![[0.0; N]; ages.len()];
+    for quantity in 0..N {
         for (slope, found) in slopes.iter_mut().zip(node_slopes(ages, |index| values[index][quantity])) {
             slope[quantity] = found;
         }
@@ -111,8 +108,8 @@ fn end_slope(near_width: f64, far_width: f64, near: f64, far: f64) -> f64 {
 mod tests {
     use super::*;
 
-    fn all(value: f64) -> [f64; QUANTITIES] {
-        [value; QUANTITIES]
+    fn all(value: f64) -> [f64; 5] {
+        [value; 5]
     }
 
     #[test]

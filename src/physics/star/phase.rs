@@ -3,8 +3,14 @@
 /// What a star is doing, in the order lives can pass through.
 #[derive(Clone, Copy, Debug, PartialEq, Eq, Hash, PartialOrd, Ord)]
 pub enum Phase {
+    /// Hydrogen burns in a star that is stirred from centre to surface.
+    FullyMixedMainSequence,
     /// Hydrogen burns in the core.
     MainSequence,
+    /// Hydrogen burns in and around a core that is no longer stirred, in a star that used to be mixed throughout.
+    RadiativeCore,
+    /// A red dwarf that is bright and ever hotter while its last hydrogen burns, and never becomes a giant.
+    BlueDwarf,
     /// The core is spent and shrinks; hydrogen burns in a shell.
     HertzsprungGap,
     /// First ascent as a red giant, over an inert helium core.
@@ -25,6 +31,8 @@ pub enum Phase {
     CarbonOxygenWhiteDwarf,
     /// White dwarf of oxygen and neon.
     OxygenNeonWhiteDwarf,
+    /// White dwarf of any kind, colder than 1000 K.
+    BlackDwarf,
     /// Neutron star.
     NeutronStar,
     /// Black hole.
@@ -35,8 +43,11 @@ pub enum Phase {
 
 impl Phase {
     /// Every phase, in order.
-    pub const ALL: [Self; 14] = [
+    pub const ALL: [Self; 18] = [
+        Self::FullyMixedMainSequence,
         Self::MainSequence,
+        Self::RadiativeCore,
+        Self::BlueDwarf,
         Self::HertzsprungGap,
         Self::FirstGiantBranch,
         Self::CoreHeliumBurning,
@@ -47,6 +58,7 @@ impl Phase {
         Self::HeliumWhiteDwarf,
         Self::CarbonOxygenWhiteDwarf,
         Self::OxygenNeonWhiteDwarf,
+        Self::BlackDwarf,
         Self::NeutronStar,
         Self::BlackHole,
         Self::NoRemnant,
@@ -56,7 +68,10 @@ impl Phase {
     #[must_use]
     pub fn key(self) -> &'static str {
         match self {
+            Self::FullyMixedMainSequence => "fully_mixed_main_sequence",
             Self::MainSequence => "main_sequence",
+            Self::RadiativeCore => "radiative_core",
+            Self::BlueDwarf => "blue_dwarf",
             Self::HertzsprungGap => "hertzsprung_gap",
             Self::FirstGiantBranch => "first_giant_branch",
             Self::CoreHeliumBurning => "core_helium_burning",
@@ -67,6 +82,7 @@ impl Phase {
             Self::HeliumWhiteDwarf => "helium_white_dwarf",
             Self::CarbonOxygenWhiteDwarf => "carbon_oxygen_white_dwarf",
             Self::OxygenNeonWhiteDwarf => "oxygen_neon_white_dwarf",
+            Self::BlackDwarf => "black_dwarf",
             Self::NeutronStar => "neutron_star",
             Self::BlackHole => "black_hole",
             Self::NoRemnant => "no_remnant",
@@ -77,7 +93,10 @@ impl Phase {
     #[must_use]
     pub fn name(self) -> &'static str {
         match self {
+            Self::FullyMixedMainSequence => "fully mixed main sequence",
             Self::MainSequence => "main sequence",
+            Self::RadiativeCore => "main sequence with radiative core",
+            Self::BlueDwarf => "blue dwarf",
             Self::HertzsprungGap => "Hertzsprung gap (subgiant)",
             Self::FirstGiantBranch => "first giant branch",
             Self::CoreHeliumBurning => "core helium burning",
@@ -88,6 +107,7 @@ impl Phase {
             Self::HeliumWhiteDwarf => "helium white dwarf",
             Self::CarbonOxygenWhiteDwarf => "carbon–oxygen white dwarf",
             Self::OxygenNeonWhiteDwarf => "oxygen–neon white dwarf",
+            Self::BlackDwarf => "black dwarf",
             Self::NeutronStar => "neutron star",
             Self::BlackHole => "black hole",
             Self::NoRemnant => "no remnant",
@@ -100,10 +120,10 @@ impl Phase {
         self >= Self::HeliumWhiteDwarf
     }
 
-    /// A white dwarf of any kind.
+    /// A white dwarf of any kind, however cold.
     #[must_use]
     pub fn is_white_dwarf(self) -> bool {
-        (Self::HeliumWhiteDwarf..=Self::OxygenNeonWhiteDwarf).contains(&self)
+        (Self::HeliumWhiteDwarf..=Self::BlackDwarf).contains(&self)
     }
 
     /// A giant with a hydrogen envelope: either ascent, or core helium burning.

@@ -12,14 +12,14 @@ use super::phase::{Phase, PhaseSpan};
 use super::remnant::{Collapse, dark_radius_rsun};
 use super::state::{StarState, effective_temperature_k};
 
-/// A star's whole life.
+/// A star's whole life by the analytic fits.
 ///
 /// # Source
 /// Tout, Pols, Eggleton & Han 1996, MNRAS 281, 257; Hurley, Pols & Tout 2000, MNRAS 315, 543 (burning);
 /// Bédard et al. 2020, ApJ 901, 93 (white dwarfs); Fryer et al. 2012, ApJ 749, 91 (collapse).
 ///
 /// # Valid for
-/// Single, slowly rotating stars in [`MASS_RANGE_MSUN`](super::MASS_RANGE_MSUN) and
+/// Single, slowly rotating stars in [`FITTED_MASS_RANGE_MSUN`](super::FITTED_MASS_RANGE_MSUN) and
 /// [`METALLICITY_RANGE_DEX`](super::METALLICITY_RANGE_DEX), from the zero-age main sequence to [`END_YR`].
 ///
 /// # Example
@@ -50,7 +50,7 @@ impl Track {
     /// # Errors
     /// [`StarError`] when mass or metallicity is outside the range of the fits.
     pub fn compute(input: StarInput) -> Result<Self, StarError> {
-        let input = input.checked()?;
+        let input = input.checked_for_fits()?;
         let (least, most) = HEAVY_ELEMENTS_RANGE;
         let fit = Fit::new(heavy_elements(input.metallicity_dex).clamp(least, most))?;
         Ok(Self::put_together(input, &fit))
@@ -61,7 +61,7 @@ impl Track {
     /// # Errors
     /// [`StarError`] when the mass is outside the range of the fits.
     pub fn compute_with(mass_msun: f64, fit: &Fit) -> Result<Self, StarError> {
-        StarInput { mass_msun, metallicity_dex: 0.0 }.checked()?;
+        StarInput { mass_msun, metallicity_dex: 0.0 }.checked_for_fits()?;
         let input = StarInput { mass_msun, metallicity_dex: metallicity_dex(fit.heavy_elements()) };
         Ok(Self::put_together(input, fit))
     }
