@@ -42,6 +42,8 @@ pub const ELEMENTARY_CHARGE_C: f64 = 1.602_176_634e-19;
 pub const STEFAN_BOLTZMANN_W_M2_K4: f64 = 5.670_374_419_184_431e-8;
 /// Wien displacement constant (wavelength), m K. Exact combination, to f64: CODATA 2022.
 pub const WIEN_M_K: f64 = 2.897_771_955_185_172_7e-3;
+/// Wien displacement constant (frequency), Hz K⁻¹. Exact combination, to f64: CODATA 2022.
+pub const WIEN_HZ_K: f64 = 5.878_925_757_646_825e10;
 /// Newtonian constant of gravitation, m³ kg⁻¹ s⁻². CODATA 2022, standard uncertainty 1.5e-15.
 pub const GRAVITATION_M3_KG_S2: f64 = 6.674_30e-11;
 /// Proton mass, kg. CODATA 2022, standard uncertainty 5.2e-37.

@@ -120,12 +120,31 @@ impl fmt::Display for ColourName {
 /// Oklab: Ottosson (2020), through the crate `color`; own cut points in steps of the just noticeable difference.
 #[must_use]
 pub fn colour_name(light: Tristimulus) -> Option<ColourName> {
+    let (ratio, hue_deg) = ratio_and_hue(light)?;
+    Some(named(ratio, hue_deg))
+}
+
+/// [`colour_name`] that keeps the name shown before as long as a change of 1 % in chroma and of 1° in hue could bring it
+/// back, so that it does not flicker at a cut.
+#[must_use]
+pub fn steady_colour_name(shown_before: Option<ColourName>, light: Tristimulus) -> Option<ColourName> {
+    let (ratio, hue_deg) = ratio_and_hue(light)?;
+    let near = |before: &ColourName| {
+        [0.99, 1.0, 1.01].into_iter().any(|factor| {
+            [-1.0, 0.0, 1.0].into_iter().any(|step_deg| named(ratio * factor, hue_deg + step_deg) == *before)
+        })
+    };
+    shown_before.filter(near).or_else(|| Some(named(ratio, hue_deg)))
+}
+
+/// Chroma over lightness, and hue in degrees, in Oklab.
+fn ratio_and_hue(light: Tristimulus) -> Option<(f64, f64)> {
     let linear = largest_channel_one(RgbSpace::Rec709.linear(light))?;
     let [l, a, b] = Oklab::from_linear_srgb(linear.map(to_f32)).map(f64::from);
-    if l <= 0.0 {
-        return None;
-    }
-    let ratio = a.hypot(b) / l;
+    (l > 0.0).then(|| (a.hypot(b) / l, b.atan2(a).to_degrees()))
+}
+
+fn named(ratio: f64, hue_deg: f64) -> ColourName {
     let strength = match ratio {
         _ if ratio < f64::from(JUST_NOTICEABLE) => Strength::White,
         _ if ratio < 0.06 => Strength::Tinted,
@@ -134,7 +153,7 @@ pub fn colour_name(light: Tristimulus) -> Option<ColourName> {
         _ if ratio < 0.30 => Strength::Plain,
         _ => Strength::Deep,
     };
-    Some(ColourName { strength, hue: hue_word(b.atan2(a).to_degrees().rem_euclid(360.0)) })
+    ColourName { strength, hue: hue_word(hue_deg.rem_euclid(360.0)) }
 }
 
 fn hue_word(hue_deg: f64) -> &'static str {
@@ -192,6 +211,18 @@ mod tests {
         }
         assert_eq!(colour_words(f64::INFINITY), "light blue");
         assert_eq!(colour_name(Tristimulus::default()), None);
+    }
+
+    #[test]
+    fn a_name_once_shown_outlasts_a_small_step_over_the_cut() {
+        let at = |temperature_k| blackbody_tristimulus(temperature_k).expect("in range");
+        let name = |temperature_k| colour_name(at(temperature_k)).expect("light");
+        let shown = name(4575.0);
+        assert_ne!(shown, name(4565.0));
+        assert_eq!(steady_colour_name(Some(shown), at(4565.0)), Some(shown));
+        assert_eq!(steady_colour_name(Some(shown), at(4400.0)), Some(name(4400.0)));
+        assert_eq!(steady_colour_name(None, at(4565.0)), Some(name(4565.0)));
+        assert_eq!(steady_colour_name(Some(shown), Tristimulus::default()), None);
     }
 
     #[test]

@@ -1,5 +1,6 @@
 //! Bringing a colour that the screen cannot show to the nearest one it can.
 
+use super::rgb::{RgbSpace, apply, inverse, to_f32};
 use color::{ColorSpace, LinearSrgb, Oklab};
 
 /// Difference in Oklab that the eye just notices. CSS Color 4, section 13.2.
@@ -20,10 +21,39 @@ const SEARCH_END: f32 = 1e-4;
 /// Any finite colour; one in the gamut comes back unchanged.
 #[must_use]
 pub fn into_srgb_gamut(linear: [f32; 3]) -> [f32; 3] {
+    into_gamut(linear, &Oklab::from_linear_srgb, &Oklab::to_linear_srgb)
+}
+
+/// [`into_srgb_gamut`] for linear P3-D65 and its wider gamut.
+///
+/// # Source
+/// As [`into_srgb_gamut`]; the primaries of [`RgbSpace::P3D65`].
+#[must_use]
+pub fn into_p3_gamut(linear: [f32; 3]) -> [f32; 3] {
+    const TO_709: [[f64; 3]; 3] = inverse(&RgbSpace::P3D65.matrix_from_xyz());
+    let to_lab = |p3: [f32; 3]| {
+        let xyz = apply(&TO_709, p3.map(f64::from));
+        Oklab::from_linear_srgb(apply(&RgbSpace::Rec709.matrix_from_xyz(), xyz).map(to_f32))
+    };
+    let from_lab = |lab: [f32; 3]| {
+        const TO_XYZ: [[f64; 3]; 3] = inverse(&RgbSpace::Rec709.matrix_from_xyz());
+        let xyz = apply(&TO_XYZ, Oklab::to_linear_srgb(lab).map(f64::from));
+        apply(&RgbSpace::P3D65.matrix_from_xyz(), xyz).map(to_f32)
+    };
+    into_gamut(linear, &to_lab, &from_lab)
+}
+
+/// The mapping for any space that knows its way to Oklab and back.
+fn into_gamut(
+    linear: [f32; 3],
+    to_lab: &impl Fn([f32; 3]) -> [f32; 3],
+    from_lab: &impl Fn([f32; 3]) -> [f32; 3],
+) -> [f32; 3] {
     if in_gamut(linear) {
         return linear;
     }
-    let lab = Oklab::from_linear_srgb(linear);
+    let difference = |linear, lab| distance(to_lab(linear), lab);
+    let lab = to_lab(linear);
     if lab[0] >= 1.0 {
         return [1.0; 3];
     }
@@ -41,7 +71,7 @@ pub fn into_srgb_gamut(linear: [f32; 3]) -> [f32; 3] {
     while (high - low) * chroma > SEARCH_END {
         let share = 0.5 * (low + high);
         let trial_lab = [lab[0], lab[1] * share, lab[2] * share];
-        let trial = Oklab::to_linear_srgb(trial_lab);
+        let trial = from_lab(trial_lab);
         if low_is_in_gamut && in_gamut(trial) {
             low = share;
             continue;
@@ -67,9 +97,8 @@ pub fn in_gamut(linear: [f32; 3]) -> bool {
     linear.iter().all(|channel| (0.0..=1.0).contains(channel))
 }
 
-/// Distance in Oklab of a linear colour from a point already given in Oklab.
-fn difference(linear: [f32; 3], lab: [f32; 3]) -> f32 {
-    let [l, a, b] = Oklab::from_linear_srgb(linear);
+/// Distance of two points of Oklab.
+fn distance([l, a, b]: [f32; 3], lab: [f32; 3]) -> f32 {
     ((l - lab[0]).powi(2) + (a - lab[1]).powi(2) + (b - lab[2]).powi(2)).sqrt()
 }
 
@@ -90,6 +119,17 @@ mod tests {
             let (before, after) = (Oklab::from_linear_srgb(far), Oklab::from_linear_srgb(mapped));
             assert!((before[0] - after[0]).abs() < 0.0202, "{far:?}: {before:?} {after:?}");
         }
+    }
+
+    #[test]
+    fn the_wider_gamut_holds_what_the_narrow_one_holds_and_more() {
+        // The reddest of Rec. 709, in P3: inside. A red beyond P3: mapped to its edge.
+        let xyz = apply(&inverse(&RgbSpace::Rec709.matrix_from_xyz()), [1.0, 0.0, 0.0]);
+        let red_709 = RgbSpace::P3D65.linear(super::super::Tristimulus { x: xyz[0], y: xyz[1], z: xyz[2] }).map(to_f32);
+        assert!(in_gamut(red_709));
+        assert_eq!(into_p3_gamut(red_709), red_709);
+        let mapped = into_p3_gamut([1.0, -0.1, -0.02]);
+        assert!(in_gamut(mapped) && mapped[0] > mapped[1] + 0.7, "{mapped:?}");
     }
 
     #[test]

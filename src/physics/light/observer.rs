@@ -54,14 +54,14 @@ pub fn blackbody_tristimulus(temperature_k: f64) -> Result<Tristimulus, OutOfRan
 }
 
 /// The table with everything multiplied in that does not depend on temperature.
-struct Prepared {
+pub(super) struct Prepared {
     /// c₂/λ, K.
-    exponents_k: [f64; OBSERVER_ROWS],
+    pub(super) exponents_k: [f64; OBSERVER_ROWS],
     /// 683 c₁ λ⁻⁵ (x̄, ȳ, z̄) · 5 nm.
-    weights: [[f64; 3]; OBSERVER_ROWS],
+    pub(super) weights: [[f64; 3]; OBSERVER_ROWS],
 }
 
-static PREPARED: Prepared = prepared();
+pub(super) static PREPARED: Prepared = prepared();
 
 const fn prepared() -> Prepared {
     let mut table = Prepared { exponents_k: [0.0; OBSERVER_ROWS], weights: [[0.0; 3]; OBSERVER_ROWS] };

@@ -1,7 +1,9 @@
 //! Planck's law by wavelength, in energy and in photons, and Wien's displacement.
 
 use super::range::{OutOfRange, temperature, wavelength, within};
-use crate::units::constants::{BOLTZMANN_J_K, LIGHT_SPEED_M_S, PLANCK_J_S, STEFAN_BOLTZMANN_W_M2_K4, WIEN_M_K};
+use crate::units::constants::{
+    BOLTZMANN_J_K, LIGHT_SPEED_M_S, PLANCK_J_S, STEFAN_BOLTZMANN_W_M2_K4, WIEN_HZ_K, WIEN_M_K,
+};
 use std::f64::consts::PI;
 
 /// First radiation constant c₁ = 2πhc², W m². Exact combination of SI constants, to f64.
@@ -79,6 +81,20 @@ pub fn wien_peak_nm(temperature_k: f64) -> Result<f64, OutOfRange> {
     Ok(WIEN_M_K / temperature(temperature_k)? * 1e9)
 }
 
+/// Frequency of the peak of the spectrum per unit frequency, THz: b′T.
+///
+/// It is not the frequency of the peak per unit wavelength: equal steps of frequency are unequal steps of wavelength, and
+/// this peak lies at a wavelength 1.76 times as long.
+///
+/// # Source
+/// Wien's displacement law; b′ exact in SI 2019 to f64 (CODATA 2022).
+///
+/// # Errors
+/// [`OutOfRange`] for a temperature outside 1 to 10⁹ K.
+pub fn wien_peak_thz(temperature_k: f64) -> Result<f64, OutOfRange> {
+    Ok(WIEN_HZ_K * temperature(temperature_k)? * 1e-12)
+}
+
 /// Exitance of a blackbody over all wavelengths, W m⁻²: σT⁴.
 ///
 /// # Source
@@ -138,6 +154,19 @@ mod tests {
             let at = |wavelength_nm| spectral_radiance_w_m2_sr_nm(wavelength_nm, temperature_k).expect("in range");
             assert!(at(peak_nm) > at(peak_nm * 0.999) && at(peak_nm) > at(peak_nm * 1.001));
         }
+    }
+
+    #[test]
+    fn the_peak_by_frequency_stands_at_a_longer_wave() {
+        // Per unit frequency: the wavelength form times λ²/c.
+        let at = |frequency_thz: f64| {
+            let wavelength_nm = LIGHT_SPEED_M_S / frequency_thz * 1e-3;
+            spectral_radiance_w_m2_sr_nm(wavelength_nm, 5772.0).expect("in range") * wavelength_nm * wavelength_nm
+        };
+        let peak_thz = wien_peak_thz(5772.0).expect("in range");
+        assert!(at(peak_thz) > at(peak_thz * 0.999) && at(peak_thz) > at(peak_thz * 1.001));
+        let peak_nm = LIGHT_SPEED_M_S / peak_thz * 1e-3;
+        assert!((peak_nm / wien_peak_nm(5772.0).expect("in range") - 1.7600).abs() < 1e-3, "{peak_nm}");
     }
 
     #[test]

@@ -1,21 +1,15 @@
 //! The daylight sky of a clear atmosphere: its dome, the star's disc in it, and how bright both are.
 
-use super::air_mass::air_mass;
 use super::caution::Caution;
 use super::chromaticity::Tristimulus;
+use super::clear_air::ClearAir;
 use super::observer::tristimulus;
 use super::planck::exitance_unchecked_w_m2_nm;
 use super::range::{OutOfRange, amount, temperature, within};
 use super::rayleigh::{Atmosphere, Gas, cross_section_unchecked_m2};
+use super::visible_spectrum::VisibleSpectrum;
 use crate::units::constants::STEFAN_BOLTZMANN_W_M2_K4;
 use std::f64::consts::PI;
-
-/// Optical depth at 550 nm beyond which the dome is an average of light scattered many times.
-const THICK_AIR_DEPTH: f64 = 1.0;
-/// Optical depth at 550 nm up to which scattering once describes the zenith.
-const SINGLE_SCATTERING_DEPTH: f64 = 0.3;
-/// Altitude below which the air mass is the Earth's own, degrees.
-const LOW_STAR_DEG: f64 = 10.0;
 
 /// A star over a place with clear air.
 #[derive(Clone, Copy, Debug, PartialEq)]
@@ -120,38 +114,8 @@ impl Sky {
 /// # Ok::<(), longember::physics::light::OutOfRange>(())
 /// ```
 pub fn sky(scene: &SkyScene) -> Result<Sky, OutOfRange> {
-    let scale = spectral_scale(scene.star_temperature_k, scene.irradiance_w_m2)?;
-    let altitude_deg = within("altitude_deg", scene.altitude_deg, 0.0, 90.0, "0 to 90 deg")?;
-    let column_per_m2 = scene.atmosphere.column_per_m2()?;
-    let air_mass = air_mass(altitude_deg)?;
-    let gas = scene.atmosphere.gas;
-    let star = |wavelength_nm| exitance_unchecked_w_m2_nm(wavelength_nm, scene.star_temperature_k) * scale;
-    let depth = |wavelength_nm| cross_section_unchecked_m2(wavelength_nm, gas) * column_per_m2;
-
-    let cosine = 1.0 / air_mass;
-    let dome = tristimulus(|wavelength_nm| {
-        star(wavelength_nm) * diffuse_share(depth(wavelength_nm), cosine, scene.atmosphere.ground_albedo)
-    });
-    let optical_depth_550 = depth(550.0);
-    let zenith_scattered_once = (optical_depth_550 <= SINGLE_SCATTERING_DEPTH)
-        .then(|| tristimulus(|wavelength_nm| star(wavelength_nm) * zenith_once_per_sr(depth(wavelength_nm), cosine)));
-    let mut cautions = vec![Caution::BlackbodyStandsIn, Caution::CleanAirOnly];
-    if altitude_deg < LOW_STAR_DEG {
-        cautions.push(Caution::LowStar);
-    }
-    if optical_depth_550 > THICK_AIR_DEPTH {
-        cautions.push(Caution::ThickAir);
-    }
-    Ok(Sky {
-        star_above_air: tristimulus(star),
-        disc: tristimulus(|wavelength_nm| star(wavelength_nm) * (-depth(wavelength_nm) * air_mass).exp()),
-        dome,
-        zenith_scattered_once,
-        optical_depth_550,
-        air_mass,
-        level_share: altitude_deg.to_radians().sin(),
-        cautions,
-    })
+    let spectrum = VisibleSpectrum::of_blackbody(scene.star_temperature_k)?;
+    ClearAir::new(&scene.atmosphere, scene.altitude_deg)?.sky(&spectrum, scene.irradiance_w_m2)
 }
 
 /// A star's light after a number of air masses; Y in lx on a plane facing it.
@@ -178,32 +142,9 @@ pub fn light_through_air(
 }
 
 /// Irradiance over the star's own exitance: what a spectrum at its surface is multiplied by.
-fn spectral_scale(star_temperature_k: f64, irradiance_w_m2: f64) -> Result<f64, OutOfRange> {
+pub(super) fn spectral_scale(star_temperature_k: f64, irradiance_w_m2: f64) -> Result<f64, OutOfRange> {
     let exitance_w_m2 = STEFAN_BOLTZMANN_W_M2_K4 * temperature(star_temperature_k)?.powi(4);
     Ok(amount("irradiance_w_m2", irradiance_w_m2)? / exitance_w_m2)
-}
-
-/// Share of the irradiance facing the star that reaches level ground by way of the dome.
-fn diffuse_share(depth: f64, cosine: f64, ground_albedo: f64) -> f64 {
-    let direct = (-depth / cosine).exp();
-    let total = ((2.0 / 3.0 + cosine) + (2.0 / 3.0 - cosine) * direct) / (4.0 / 3.0 + depth);
-    let back = 3.0 * depth / (4.0 + 3.0 * depth);
-    // Bright ground under thick air throws light to and fro; both below one keeps the sum finite.
-    let passes = (1.0 - ground_albedo * back).max(f64::EPSILON);
-    (cosine * (total / passes - direct)).max(0.0)
-}
-
-/// Radiance of the zenith by scattering once, per unit irradiance, sr⁻¹.
-fn zenith_once_per_sr(depth: f64, cosine: f64) -> f64 {
-    let phase = 0.75 * (1.0 + cosine * cosine);
-    let gap = 1.0 - cosine;
-    // exp_m1 keeps the digits of the difference when the star nears the zenith.
-    let slant = if gap < 1e-9 {
-        depth * (-depth).exp()
-    } else {
-        -cosine / gap * (-depth).exp() * (-depth * gap / cosine).exp_m1()
-    };
-    phase / (4.0 * PI) * slant
 }
 
 #[cfg(test)]
@@ -224,24 +165,6 @@ mod tests {
         assert_eq!((sky.dome.y, sky.optical_depth_550), (0.0, 0.0));
         assert_eq!(sky.disc, sky.star_above_air);
         assert_eq!(sky.dome.chromaticity(), None);
-    }
-
-    #[test]
-    fn the_zenith_formula_is_smooth_where_the_star_stands_overhead() {
-        let overhead = zenith_once_per_sr(0.1, 1.0);
-        let nearly = zenith_once_per_sr(0.1, 1.0 - 1e-7);
-        assert!((nearly / overhead - 1.0).abs() < 1e-6, "{overhead} {nearly}");
-    }
-
-    #[test]
-    fn what_scatters_without_loss_is_neither_made_nor_lost() {
-        // Over black ground, light reaching the ground and light going back add up to the light coming in.
-        for depth in [1e-6, 0.1, 1.0, 30.0] {
-            for cosine in [0.03, 0.5, 1.0] {
-                let down = diffuse_share(depth, cosine, 0.0) / cosine + (-depth / cosine).exp();
-                assert!((0.0..=1.0 + 1e-12).contains(&down), "{depth} {cosine}: {down}");
-            }
-        }
     }
 
     #[test]
