@@ -1,0 +1,10 @@
+//! What must hold for every input: finite and in range, continuous, in order, the same after writing and reading.
+
+mod document_scenario_file;
+mod document_settings;
+mod light_colour;
+mod light_sky;
+mod planet_formulas;
+mod planet_lives;
+mod planet_track;
+mod star_life;
