@@ -15,13 +15,24 @@ use crate::system::{History, StarSpecification, System};
 use crate::units::number_text::machine;
 use clap::Parser;
 use std::ffi::OsString;
-use std::io;
+use std::io::{self, IsTerminal};
+use std::ops::ControlFlow;
+use std::time::{Duration, Instant};
+
+/// Computations shorter than this show no progress.
+const WORTH_SHOWING: Duration = Duration::from_millis(300);
 
 /// Runs a command line, the program's own name first, on the standard streams of the process.
 ///
 /// Without a sub-command nothing is computed and [`Outcome::OpenWindow`] says what to open.
 pub fn run(arguments: impl IntoIterator<Item = OsString>) -> Outcome {
-    let streams = &mut Streams { input: &mut io::stdin(), results: &mut io::stdout(), messages: &mut io::stderr() };
+    let shows_progress = io::stderr().is_terminal();
+    let streams = &mut Streams {
+        input: &mut io::stdin(),
+        results: &mut io::stdout(),
+        messages: &mut io::stderr(),
+        shows_progress,
+    };
     run_with(arguments, streams)
 }
 
@@ -91,7 +102,7 @@ fn state(arguments: &StateArguments, streams: &mut Streams<'_>) -> Result<(), Tr
     let request = MomentRequest::parse(&arguments.at)?;
     let scenario = arguments.scenario.load(streams)?;
     let present_age_yr = scenario.system.star.present_age_yr;
-    let (title, history) = computed(scenario)?;
+    let (title, history) = computed(scenario, streams)?;
     let time_yr = request.time_yr(&history, Some(present_age_yr))?;
     show_moment(&history, &title, time_yr, arguments.format, streams)
 }
@@ -103,7 +114,7 @@ fn star(arguments: &StarArguments, streams: &mut Streams<'_>) -> Result<(), Trou
         metallicity_dex: arguments.metallicity,
         ..StarSpecification::default()
     };
-    let history = History::compute(System { star, planets: Vec::new() })?;
+    let history = history_of(System { star, planets: Vec::new() }, streams)?;
     let time_yr = request.time_yr(&history, None)?;
     let mass = machine(arguments.mass).unwrap_or_default();
     let metallicity = machine(arguments.metallicity).unwrap_or_default();
@@ -135,7 +146,7 @@ fn table(arguments: &TableArguments, streams: &mut Streams<'_>) -> Result<(), Tr
     let (from, to) = (requested("from", &arguments.from)?, requested("to", &arguments.to)?);
     let scenario = arguments.scenario.load(streams)?;
     let present_age_yr = scenario.system.star.present_age_yr;
-    let (title, history) = computed(scenario)?;
+    let (title, history) = computed(scenario, streams)?;
     let resolved = |name, request: Option<MomentRequest>| {
         let time_yr =
             |request: MomentRequest| -> Result<f64, MomentProblem> { request.time_yr(&history, Some(present_age_yr)) };
@@ -158,7 +169,8 @@ fn table(arguments: &TableArguments, streams: &mut Streams<'_>) -> Result<(), Tr
 
 fn events(arguments: &EventsArguments, streams: &mut Streams<'_>) -> Result<(), Trouble> {
     arguments.destination.check()?;
-    let (title, history) = computed(arguments.scenario.load(streams)?)?;
+    let scenario = arguments.scenario.load(streams)?;
+    let (title, history) = computed(scenario, streams)?;
     let by_extension = || match arguments.destination.extension().as_deref() {
         Some("json") => EventsFormat::Json,
         Some("csv") => EventsFormat::Csv,
@@ -197,6 +209,24 @@ fn sources(arguments: &SourcesArguments, streams: &mut Streams<'_>) -> Result<()
     streams.result(&text).map_err(Trouble::StandardOutput)
 }
 
-fn computed(scenario: Scenario) -> Result<(String, History), Trouble> {
-    Ok((scenario.title, History::compute(scenario.system)?))
+fn computed(scenario: Scenario, streams: &mut Streams<'_>) -> Result<(String, History), Trouble> {
+    Ok((scenario.title, history_of(scenario.system, streams)?))
+}
+
+/// Computes a history and shows how far it is once that takes longer than a moment.
+fn history_of(system: System, streams: &mut Streams<'_>) -> Result<History, Trouble> {
+    let begun = Instant::now();
+    let mut shown = None;
+    let computed = History::compute_with(system, &mut |share| {
+        let percent = (0..=100).take_while(|percent| f64::from(*percent) <= 100.0 * share).last();
+        if percent != shown && begun.elapsed() > WORTH_SHOWING {
+            shown = percent;
+            streams.progress(percent.unwrap_or(0));
+        }
+        ControlFlow::Continue(())
+    });
+    if shown.is_some() {
+        streams.end_progress();
+    }
+    Ok(computed?)
 }

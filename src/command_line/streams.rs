@@ -10,6 +10,8 @@ pub struct Streams<'a> {
     pub results: &'a mut dyn Write,
     /// Where messages go.
     pub messages: &'a mut dyn Write,
+    /// Whether somebody watches the messages as they come, so that progress is worth showing.
+    pub shows_progress: bool,
 }
 
 impl Streams<'_> {
@@ -20,6 +22,22 @@ impl Streams<'_> {
         match self.results.write_all(text.as_bytes()).and_then(|()| self.results.flush()) {
             Err(error) if error.kind() == io::ErrorKind::BrokenPipe => Ok(()),
             written => written,
+        }
+    }
+
+    /// Shows how much of a long computation is done, on a line that is written over; nothing where nobody watches.
+    pub(super) fn progress(&mut self, percent: u32) {
+        if self.shows_progress {
+            let _ = write!(self.messages, "\rcomputing … {percent} % ");
+            let _ = self.messages.flush();
+        }
+    }
+
+    /// Clears the line of progress.
+    pub(super) fn end_progress(&mut self) {
+        if self.shows_progress {
+            let _ = write!(self.messages, "\r                    \r");
+            let _ = self.messages.flush();
         }
     }
 

@@ -139,6 +139,7 @@ impl Longember {
                 workspace.refresh();
                 self.keep_moment_in_view();
             }
+            Some(Err(HistoryError::Cancelled)) => {}
             Some(Err(error)) => workspace.trouble = Some(error.to_string()),
             None if workspace.job.is_running() => context.request_repaint_after(PLAY_FRAME),
             None => {}

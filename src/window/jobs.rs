@@ -1,7 +1,9 @@
 //! Work off the drawing thread: one history at a time, the newest request wins.
 
 use crate::system::{History, HistoryError, System};
+use std::ops::ControlFlow;
 use std::sync::Arc;
+use std::sync::atomic::{AtomicBool, AtomicU32, Ordering};
 use std::sync::mpsc::{Receiver, RecvTimeoutError, channel};
 use std::thread;
 use std::time::Duration;
@@ -15,20 +17,37 @@ const SHORT_WAIT: Duration = Duration::from_millis(6);
 /// The history being computed in the background.
 #[derive(Debug, Default)]
 pub struct HistoryJob {
-    running: Option<Receiver<Computed>>,
+    running: Option<Running>,
+}
+
+/// A computation with what it shares with its thread.
+#[derive(Debug)]
+struct Running {
+    results: Receiver<Computed>,
+    shared: Arc<Shared>,
+}
+
+#[derive(Debug, Default)]
+struct Shared {
+    /// Whole percent that are done.
+    percent: AtomicU32,
+    is_cancelled: AtomicBool,
 }
 
 impl HistoryJob {
-    /// Starts computing; the result of an earlier request is dropped when it comes.
+    /// Starts computing. What was being computed is stopped: its thread ends at its next step.
     pub fn start(&mut self, system: System, context: &egui::Context) {
-        let (sender, receiver) = channel();
-        let context = context.clone();
+        self.cancel();
+        let (sender, results) = channel();
+        let shared = Arc::new(Shared::default());
+        let (context, its) = (context.clone(), Arc::clone(&shared));
         let spawned = thread::Builder::new().name("history".to_owned()).spawn(move || {
+            let computed = History::compute_with(system, &mut |share| its.tell(share));
             // The window may have asked for something newer and stopped listening: nothing is lost then.
-            let _ = sender.send(History::compute(system).map(Arc::new));
+            let _ = sender.send(computed.map(Arc::new));
             context.request_repaint();
         });
-        self.running = spawned.ok().map(|_| receiver);
+        self.running = spawned.ok().map(|_| Running { results, shared });
     }
 
     /// Whether something is being computed.
@@ -37,14 +56,22 @@ impl HistoryJob {
         self.running.is_some()
     }
 
-    /// Forgets what is being computed.
+    /// Whole percent of the running computation that are done.
+    #[must_use]
+    pub fn percent(&self) -> Option<u32> {
+        self.running.as_ref().map(|running| running.shared.percent.load(Ordering::Relaxed))
+    }
+
+    /// Stops what is being computed.
     pub fn cancel(&mut self) {
-        self.running = None;
+        if let Some(running) = self.running.take() {
+            running.shared.is_cancelled.store(true, Ordering::Relaxed);
+        }
     }
 
     /// The result, once it is there.
     pub fn poll(&mut self) -> Option<Computed> {
-        let found = self.running.as_ref()?.recv_timeout(SHORT_WAIT);
+        let found = self.running.as_ref()?.results.recv_timeout(SHORT_WAIT);
         match found {
             Ok(computed) => {
                 self.running = None;
@@ -56,5 +83,61 @@ impl HistoryJob {
                 None
             }
         }
+    }
+}
+
+impl Drop for HistoryJob {
+    fn drop(&mut self) {
+        self.cancel();
+    }
+}
+
+impl Shared {
+    /// Takes the share that is done, and says whether to go on.
+    fn tell(&self, share: f64) -> ControlFlow<()> {
+        let whole = (0..=100).take_while(|percent| f64::from(*percent) <= 100.0 * share).last().unwrap_or(0);
+        self.percent.store(whole, Ordering::Relaxed);
+        if self.is_cancelled.load(Ordering::Relaxed) { ControlFlow::Break(()) } else { ControlFlow::Continue(()) }
+    }
+}
+
+#[cfg(test)]
+mod tests {
+    use super::*;
+    use crate::system::StarSpecification;
+    use std::time::Instant;
+
+    fn red_dwarf(mass_msun: f64) -> System {
+        System { star: StarSpecification { mass_msun, ..StarSpecification::default() }, planets: Vec::new() }
+    }
+
+    #[test]
+    fn a_newer_request_stops_the_older_one() {
+        let mut job = HistoryJob::default();
+        let context = egui::Context::default();
+        let mut threads = Vec::new();
+        for step in 0..20 {
+            job.start(red_dwarf(0.10 + 0.001 * f64::from(step)), &context);
+            threads.push(job.running.as_ref().map(|running| Arc::downgrade(&running.shared)));
+        }
+        job.cancel();
+        assert!(!job.is_running() && job.percent().is_none());
+        // Each thread holds its share of the state until it ends; alone a life takes longer than this by far.
+        let begun = Instant::now();
+        while threads.iter().flatten().any(|shared| shared.strong_count() > 0) {
+            assert!(begun.elapsed() < Duration::from_secs(60), "threads pile up");
+            thread::sleep(Duration::from_millis(5));
+        }
+    }
+
+    #[test]
+    fn progress_is_told_in_whole_percent() {
+        let shared = Shared::default();
+        for (share, percent) in [(0.0, 0), (0.429, 42), (1.0, 100), (2.0, 100), (f64::NAN, 0)] {
+            assert!(shared.tell(share).is_continue());
+            assert_eq!(shared.percent.load(Ordering::Relaxed), percent);
+        }
+        shared.is_cancelled.store(true, Ordering::Relaxed);
+        assert!(shared.tell(0.5).is_break());
     }
 }

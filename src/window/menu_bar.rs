@@ -57,11 +57,11 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
 /// The last message, or the progress of a computation.
 fn message(ui: &mut Ui, workspace: &Workspace, commands: &mut Vec<Command>) {
     let palette = workspace.palette();
-    if workspace.job.is_running() {
+    if let Some(percent) = workspace.job.percent() {
         if ui.small_button("Cancel").clicked() {
             commands.push(Command::CancelComputation);
         }
-        ui.label(RichText::new("computing …").font(small()).color(palette.dim));
+        ui.label(RichText::new(format!("computing … {percent} %")).font(small()).color(palette.dim));
     } else if let Some(notice) = &workspace.notice {
         let ink = if notice.is_error { palette.error } else { palette.dim };
         ui.add(egui::Label::new(RichText::new(&notice.text).font(small()).color(ink)).truncate()).on_hover_text(&notice.text);
