@@ -16,9 +16,11 @@ pub(super) fn chart(samples: &Samples) -> Chart {
     let count = samples.planet_names.len();
     let orbits =
         samples.all.iter().flat_map(|sample| sample.planets.iter().filter_map(|planet| planet.semi_major_axis_au));
-    let largest_star = samples.all.iter().filter_map(|sample| sample.star.radius_rsun).fold(0.0, f64::max) * SOLAR_RADIUS_AU;
+    let largest_star =
+        samples.all.iter().filter_map(|sample| sample.star.radius_rsun).fold(0.0, f64::max) * SOLAR_RADIUS_AU;
     let zone_now = samples.all.first().and_then(|sample| sample.star.habitable_zone_au).unwrap_or([LEAST_AU, 10.0]);
-    let wanted = orbits.flat_map(|axis_au| [axis_au / 2.0, axis_au * 1.5]).chain([LEAST_AU, zone_now[1] * 3.0, largest_star]);
+    let wanted =
+        orbits.flat_map(|axis_au| [axis_au / 2.0, axis_au * 1.5]).chain([LEAST_AU, zone_now[1] * 3.0, largest_star]);
     let axis = ValueAxis::log(wanted, MOST_DECADES);
     let zone = samples.all.iter().map(|sample| {
         let [inner_au, outer_au] = sample.star.habitable_zone_au?;

@@ -33,7 +33,12 @@ impl LightRange {
     #[must_use]
     pub fn of(samples: &Samples) -> Self {
         let logs = || {
-            samples.all.iter().filter_map(|sample| sample.star.luminosity_lsun).filter(|light| *light > 0.0).map(f64::log10)
+            samples
+                .all
+                .iter()
+                .filter_map(|sample| sample.star.luminosity_lsun)
+                .filter(|light| *light > 0.0)
+                .map(f64::log10)
         };
         let brightest_log = logs().reduce(f64::max).unwrap_or(0.0);
         let faintest_log = logs().reduce(f64::min).unwrap_or(0.0).max(brightest_log - MOST_DECADES);

@@ -72,7 +72,9 @@ impl ValueAxis {
         values
             .into_iter()
             .filter_map(|(value, label)| {
-                self.height(value).filter(|height| (0.0..=1.0).contains(height)).map(|height| ValueTick { height, label })
+                self.height(value)
+                    .filter(|height| (0.0..=1.0).contains(height))
+                    .map(|height| ValueTick { height, label })
             })
             .collect()
     }
@@ -80,7 +82,11 @@ impl ValueAxis {
     fn even_marks(&self, count: usize) -> Vec<(f64, String)> {
         let rough = (self.highest - self.lowest) / count as f64;
         let decade = 10_f64.powf(rough.log10().floor());
-        let step = [1.0, 2.0, 5.0, 10.0].map(|factor| factor * decade).into_iter().find(|step| *step >= rough).unwrap_or(rough);
+        let step = [1.0, 2.0, 5.0, 10.0]
+            .map(|factor| factor * decade)
+            .into_iter()
+            .find(|step| *step >= rough)
+            .unwrap_or(rough);
         let decimals = (-step.log10().floor()).clamp(0.0, 12.0) as usize;
         let first = (self.lowest / step).ceil();
         (0..=count + 1)
@@ -130,7 +136,6 @@ fn span(values: impl Iterator<Item = f64>) -> Option<(f64, f64)> {
     })
 }
 
-
 #[cfg(test)]
 mod tests {
     use super::*;
@@ -156,7 +161,11 @@ mod tests {
 
     #[test]
     fn an_empty_or_flat_set_still_makes_an_axis() {
-        for axis in [ValueAxis::linear(std::iter::empty()), ValueAxis::linear([2.0, 2.0].into_iter()), ValueAxis::log(std::iter::empty(), 5.0)] {
+        for axis in [
+            ValueAxis::linear(std::iter::empty()),
+            ValueAxis::linear([2.0, 2.0].into_iter()),
+            ValueAxis::log(std::iter::empty(), 5.0),
+        ] {
             assert!(axis.lowest < axis.highest);
             assert!(!axis.ticks(4).is_empty(), "{axis:?}");
         }

@@ -239,7 +239,11 @@ fn star_point(state: &StarState, lost_mass_suddenly: bool) -> StarPoint {
         luminosity_lsun: state.luminosity_lsun,
         radius_rsun: state.radius_rsun,
         effective_temperature_k: state.effective_temperature_k,
-        envelope_mass_msun: if state.phase.is_giant() { (state.mass_msun - state.core_mass_msun).max(0.0) } else { 0.0 },
+        envelope_mass_msun: if state.phase.is_giant() {
+            (state.mass_msun - state.core_mass_msun).max(0.0)
+        } else {
+            0.0
+        },
         is_giant: state.phase.is_giant(),
         is_remnant: state.phase.is_remnant(),
         lost_mass_suddenly,

@@ -126,7 +126,12 @@ impl TimeAxis {
 }
 
 /// Piecewise linear reading of rising knots.
-fn interpolate(knots: &[(f64, f64)], x: f64, from: impl Fn(&(f64, f64)) -> f64, to: impl Fn(&(f64, f64)) -> f64) -> f64 {
+fn interpolate(
+    knots: &[(f64, f64)],
+    x: f64,
+    from: impl Fn(&(f64, f64)) -> f64,
+    to: impl Fn(&(f64, f64)) -> f64,
+) -> f64 {
     let after = knots.partition_point(|knot| from(knot) <= x);
     match (after.checked_sub(1).and_then(|before| knots.get(before)), knots.get(after)) {
         (Some(before), Some(next)) => {
@@ -255,7 +260,9 @@ mod tests {
             let sum: f64 = shares.iter().sum();
             assert!((sum - 1.0).abs() < 1e-9, "{natural:?}: {shares:?}");
             if natural.len() > 3 {
-                assert!(shares.iter().all(|share| *share == 0.0 || (LEAST_SHARE..=LARGEST_SHARE + 1e-9).contains(share)));
+                assert!(
+                    shares.iter().all(|share| *share == 0.0 || (LEAST_SHARE..=LARGEST_SHARE + 1e-9).contains(share))
+                );
             }
         }
     }

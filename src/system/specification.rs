@@ -144,7 +144,12 @@ impl System {
         }
         let stem: String = wanted.chars().take(limits::LONGEST_NAME - 4).collect();
         let stem = stem.trim_end_matches(|character: char| character.is_ascii_digit()).trim_end();
-        (2..).map(|count| format!("{stem} {count}")).find(|name| !taken(name)).unwrap_or_else(|| wanted.to_owned())
+        let stem = if stem.is_empty() { "Planet" } else { stem };
+        // One of these is free: there are more of them than planets.
+        (2..=self.planets.len() + 2)
+            .map(|count| format!("{stem} {count}"))
+            .find(|name| !taken(name))
+            .unwrap_or_else(|| wanted.to_owned())
     }
 }
 

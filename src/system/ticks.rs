@@ -36,7 +36,9 @@ pub fn ticks(axis: &TimeAxis, from_fraction: f64, to_fraction: f64, count: usize
     let mut ticks: Vec<TimeTick> = Vec::with_capacity(ages.len());
     for age_yr in ages {
         let fraction = axis.fraction_at(age_yr);
-        let far_enough = ticks.last().is_none_or(|last| fraction - last.fraction > 0.4 * (to_fraction - from_fraction) / count as f64);
+        let far_enough = ticks
+            .last()
+            .is_none_or(|last| fraction - last.fraction > 0.4 * (to_fraction - from_fraction) / count as f64);
         let label = age_label(age_yr);
         // Ages that differ only beyond the digits of a label would look like a mistake.
         let is_new = ticks.last().is_none_or(|last| last.label != label);
@@ -53,7 +55,11 @@ fn even_ages(from_yr: f64, to_yr: f64, count: usize) -> Vec<f64> {
         return vec![from_yr];
     }
     let decade = 10_f64.powf(rough_yr.log10().floor());
-    let step_yr = [1.0, 2.0, 5.0, 10.0].map(|factor| factor * decade).into_iter().find(|step| *step >= rough_yr).unwrap_or(rough_yr);
+    let step_yr = [1.0, 2.0, 5.0, 10.0]
+        .map(|factor| factor * decade)
+        .into_iter()
+        .find(|step| *step >= rough_yr)
+        .unwrap_or(rough_yr);
     let first = (from_yr / step_yr).ceil();
     (0..=count + 1).map(|index| (first + index as f64) * step_yr).take_while(|age_yr| *age_yr <= to_yr).collect()
 }
@@ -84,7 +90,8 @@ pub fn age_label(age_yr: f64) -> String {
         return "0".to_owned();
     }
     let units = [(1e12, "Tyr"), (1e9, "Gyr"), (1e6, "Myr"), (1e3, "kyr"), (1.0, "yr")];
-    let (length_yr, unit) = units.into_iter().find(|(length_yr, _)| age_yr >= 0.999_999 * length_yr).unwrap_or((1.0, "yr"));
+    let (length_yr, unit) =
+        units.into_iter().find(|(length_yr, _)| age_yr >= 0.999_999 * length_yr).unwrap_or((1.0, "yr"));
     let value = age_yr / length_yr;
     let decimals = (0..=9).find(|decimals| {
         let scaled = value * 10_f64.powi(*decimals);

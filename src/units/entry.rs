@@ -88,7 +88,8 @@ impl EntryKind {
             ("RJ", JUPITER_RADIUS_M / EARTH_RADIUS_M),
             ("m", 1.0 / EARTH_RADIUS_M),
         ];
-        const PRESSURE_BAR: &[(&str, f64)] = &[("mbar", 1e-3), ("bar", 1.0), ("hPa", 1e-3), ("kPa", 1e-2), ("Pa", 1e-5), ("atm", 1.01325)];
+        const PRESSURE_BAR: &[(&str, f64)] =
+            &[("mbar", 1e-3), ("bar", 1.0), ("hPa", 1e-3), ("kPa", 1e-2), ("Pa", 1e-5), ("atm", 1.01325)];
         match self {
             Self::MassMsun => MASS_MSUN,
             Self::MassMearth => MASS_MEARTH,
@@ -144,10 +145,12 @@ pub fn parse_entry(text: &str, kind: EntryKind) -> Result<f64, EntryProblem> {
     }
     for (unit, factor) in kind.units() {
         let cut = trimmed.len().saturating_sub(unit.len());
-        if trimmed.is_char_boundary(cut) && trimmed[cut..].eq_ignore_ascii_case(unit) {
-            if let Some(value) = parse_number(&trimmed[..cut]).map(|value| value * factor).filter(|value| value.is_finite()) {
-                return Ok(value);
-            }
+        if trimmed.is_char_boundary(cut)
+            && trimmed[cut..].eq_ignore_ascii_case(unit)
+            && let Some(value) =
+                parse_number(&trimmed[..cut]).map(|value| value * factor).filter(|value| value.is_finite())
+        {
+            return Ok(value);
         }
     }
     Err(not_understood(trimmed, kind))

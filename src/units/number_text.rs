@@ -38,7 +38,7 @@ pub fn number(value: f64, digits: usize) -> String {
     let (mantissa, exponent) = split_scientific(&scientific);
     let sign = if value < 0.0 { TRUE_MINUS.to_string() } else { String::new() };
     if (-3..7).contains(&exponent) {
-        let decimals = usize::try_from((digits as i64 - 1 - i64::from(exponent)).max(0)).unwrap_or(0);
+        let decimals = usize::try_from((i32::try_from(digits).unwrap_or(17) - 1 - exponent).max(0)).unwrap_or(0);
         let rounded = scientific.parse::<f64>().unwrap_or(value.abs());
         return format!("{sign}{}", group_thousands(&format!("{rounded:.decimals$}")));
     }
@@ -113,7 +113,9 @@ pub fn parse_number(text: &str) -> Option<f64> {
     let plain = plain.replace("×10^", "e").replace("x10^", "e");
     let plain = plain.strip_prefix("10^").map_or(plain.clone(), |exponent| format!("1e{exponent}"));
     let shape_ok = !plain.is_empty()
-        && plain.chars().all(|character| character.is_ascii_digit() || matches!(character, '.' | '-' | '+' | 'e' | 'E'));
+        && plain
+            .chars()
+            .all(|character| character.is_ascii_digit() || matches!(character, '.' | '-' | '+' | 'e' | 'E'));
     shape_ok.then(|| plain.parse::<f64>().ok()).flatten().filter(|value| value.is_finite())
 }
 

@@ -49,8 +49,10 @@ pub fn span(time_yr: f64, digits: usize, style: SpanStyle) -> String {
     }
     // Half a unit in the last digit may carry into the next unit: 999.99 Myr at 4 digits is 1.000 Gyr.
     let rounded_yr = format!("{:.*e}", digits.clamp(1, 17) - 1, time_yr).parse::<f64>().unwrap_or(time_yr);
-    let (length_yr, names) =
-        UNITS.iter().find(|(length_yr, _)| rounded_yr.abs() >= *length_yr * 0.999_999_999).unwrap_or(&UNITS[UNITS.len() - 1]);
+    let (length_yr, names) = UNITS
+        .iter()
+        .find(|(length_yr, _)| rounded_yr.abs() >= *length_yr * 0.999_999_999)
+        .unwrap_or(&UNITS[UNITS.len() - 1]);
     let unit = match style {
         SpanStyle::Symbols => names[0],
         SpanStyle::Words if *length_yr < 1.0 => names[1],
@@ -113,7 +115,8 @@ pub fn parse_span(text: &str) -> Result<f64, NotASpan> {
         for name in *names {
             let number_part = if name.len() <= 3 { trimmed.strip_suffix(name) } else { strip_word(trimmed, name) };
             if let Some(value) = number_part.and_then(parse_number) {
-                return Ok(value * length_yr).and_then(|span_yr: f64| if span_yr.is_finite() { Ok(span_yr) } else { Err(unknown()) });
+                return Ok(value * length_yr)
+                    .and_then(|span_yr: f64| if span_yr.is_finite() { Ok(span_yr) } else { Err(unknown()) });
             }
         }
     }

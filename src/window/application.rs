@@ -39,7 +39,14 @@ impl Longember {
         let workspace = Workspace::new(session, settings, Arc::new(history));
         theme::apply(context, workspace.theme());
         context.set_zoom_factor(workspace.settings.text_scale as f32);
-        Ok(Self { workspace, with_system_dialogs: keeper.is_real(), may_close: false, drop_unsaved: false, keeper, title: String::new() })
+        Ok(Self {
+            workspace,
+            with_system_dialogs: keeper.is_real(),
+            may_close: false,
+            drop_unsaved: false,
+            keeper,
+            title: String::new(),
+        })
     }
 
     /// A program without files of the user or dialogs of the system, for tests.
@@ -58,6 +65,11 @@ impl Longember {
     /// Opens a file at the start, saying everything that is wrong with it.
     pub fn open_at_start(&mut self, context: &Context, path: &std::path::Path) {
         self.open(context, path);
+    }
+
+    /// Shows a scenario that has no file at the start.
+    pub fn show_at_start(&mut self, context: &Context, scenario: Scenario) {
+        self.replace(context, Session::of(scenario));
     }
 
     /// One frame.
@@ -109,20 +121,19 @@ impl Longember {
             commands.extend(menu_bar::show(ui, &self.workspace));
         });
         Panel::bottom("life_strip").frame(panel).exact_size(life_strip::HEIGHT).resizable(false).show(ui, |ui| {
+            dim_when_stale(ui, &self.workspace);
             commands.extend(life_strip::show(ui, &self.workspace));
         });
         Panel::left("system").frame(side).exact_size(system_panel::WIDTH).resizable(false).show(ui, |ui| {
             commands.extend(system_panel::show(ui, &self.workspace));
         });
         Panel::right("moment").frame(side).exact_size(moment_panel::WIDTH).resizable(false).show(ui, |ui| {
+            dim_when_stale(ui, &self.workspace);
             commands.extend(moment_panel::show(ui, &self.workspace));
         });
         let stage = Frame::new().fill(palette.ground).inner_margin(Margin::symmetric(3 * GRID as i8, GRID as i8));
         CentralPanel::default().frame(stage).show(ui, |ui| {
-            if self.workspace.is_stale() {
-                // The old curves stay while new ones are made, and look like it.
-                ui.multiply_opacity(0.55);
-            }
+            dim_when_stale(ui, &self.workspace);
             commands.extend(pages::show(ui, &mut self.workspace));
         });
         life_strip::connector(ui, &self.workspace);
@@ -187,14 +198,33 @@ impl Longember {
 
     /// Removes the copy of recovered work that was taken up or is not wanted.
     pub(super) fn settle_recovered(&mut self, recovered: Recovered) {
-        if let Err(error) = self.keeper.keep_unsaved(&self.workspace.session).and_then(|()| recovered.discard().map_err(|error| error.to_string())) {
+        if let Err(error) = self
+            .keeper
+            .keep_unsaved(&self.workspace.session)
+            .and_then(|()| recovered.discard().map_err(|error| error.to_string()))
+        {
             self.workspace.say_error(error);
         }
     }
 }
 
+/// The old figures stay while new ones are made, and look like it.
+fn dim_when_stale(ui: &mut Ui, workspace: &Workspace) {
+    if workspace.is_stale() {
+        ui.multiply_opacity(0.5);
+    }
+}
+
 fn dropped_files(context: &Context) -> Option<Command> {
-    context.input(|input| input.raw.dropped_files.iter().find_map(|file| (!file.path().as_os_str().is_empty()).then(|| file.path().to_path_buf()))).map(Command::Open)
+    context
+        .input(|input| {
+            input
+                .raw
+                .dropped_files
+                .iter()
+                .find_map(|file| (!file.path().as_os_str().is_empty()).then(|| file.path().to_path_buf()))
+        })
+        .map(Command::Open)
 }
 
 impl eframe::App for Longember {

@@ -121,7 +121,7 @@ pub struct KeyBinding {
 }
 
 /// One step of the moment as a share of the view.
-pub const STEP: f64 = 0.01;
+pub(crate) const STEP: f64 = 0.01;
 
 /// Every key of the window; the help page is made from this list.
 #[must_use]
@@ -170,12 +170,12 @@ pub fn key_bindings() -> Vec<KeyBinding> {
 
 /// The key of a command, for menus.
 #[must_use]
-pub fn shortcut_of(command: &Command) -> Option<KeyboardShortcut> {
+pub(crate) fn shortcut_of(command: &Command) -> Option<KeyboardShortcut> {
     key_bindings().into_iter().find(|binding| binding.command == *command).map(|binding| binding.shortcut)
 }
 
 /// Commands that the keys pressed in this frame ask for.
-pub fn from_keys(context: &egui::Context) -> Vec<Command> {
+pub(crate) fn from_keys(context: &egui::Context) -> Vec<Command> {
     let is_typing = context.text_edit_focused();
     context.input_mut(|input| {
         key_bindings()

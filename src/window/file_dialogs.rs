@@ -40,7 +40,12 @@ pub(super) enum Chosen {
 
 impl Asked {
     /// Asks for a path; the system's dialog opens only when it may.
-    pub(super) fn new(purpose: Purpose, typed: String, then: Option<Command>, with_system: Option<&egui::Context>) -> Self {
+    pub(super) fn new(
+        purpose: Purpose,
+        typed: String,
+        then: Option<Command>,
+        with_system: Option<&egui::Context>,
+    ) -> Self {
         let answer = with_system.and_then(|context| system_dialog(purpose, &typed, context));
         Self { purpose, typed, then, is_new: true, answer }
     }

@@ -4,7 +4,7 @@ use egui::{FontData, FontDefinitions, FontFamily};
 use std::sync::Arc;
 
 /// Name of the bold family.
-pub const BOLD: &str = "bold";
+pub(crate) const BOLD: &str = "bold";
 
 const REGULAR_FONT: &[u8] = include_bytes!("../../assets/fonts/NotoSans-Regular-subset.ttf");
 const BOLD_FONT: &[u8] = include_bytes!("../../assets/fonts/NotoSans-Bold-subset.ttf");
@@ -15,7 +15,7 @@ const SYMBOL_FONT: &[u8] = include_bytes!("../../assets/fonts/NotoSansSymbols2-s
 pub const SPECIAL_CHARACTERS: &str = "☉⊕×·±−–—…°µ²³⁰¹⁴⁵⁶⁷⁸⁹⁻₂¼½¾√σετδηαλ≈≤≥→←↑↓\u{2009}\u{202f}";
 
 /// Installs the fonts; the toolkit's own stay as a last resort for foreign names.
-pub fn install(context: &egui::Context) {
+pub(crate) fn install(context: &egui::Context) {
     context.set_fonts(definitions());
 }
 
@@ -23,8 +23,7 @@ pub fn install(context: &egui::Context) {
 #[must_use]
 pub fn definitions() -> FontDefinitions {
     let mut fonts = FontDefinitions::default();
-    let bundled =
-        [("regular", REGULAR_FONT), (BOLD, BOLD_FONT), ("math", MATH_FONT), ("symbols", SYMBOL_FONT)];
+    let bundled = [("regular", REGULAR_FONT), (BOLD, BOLD_FONT), ("math", MATH_FONT), ("symbols", SYMBOL_FONT)];
     for (name, bytes) in bundled {
         let mut data = FontData::from_static(bytes);
         if name == "symbols" {

@@ -9,14 +9,14 @@ use std::thread;
 use std::time::Duration;
 
 /// A computed history, or why there is none.
-pub type Computed = Result<Arc<History>, HistoryError>;
+pub(crate) type Computed = Result<Arc<History>, HistoryError>;
 
 /// Most of a frame that the drawing thread waits, so that a quick result shows without a flicker.
 const SHORT_WAIT: Duration = Duration::from_millis(6);
 
 /// The history being computed in the background.
 #[derive(Debug, Default)]
-pub struct HistoryJob {
+pub(crate) struct HistoryJob {
     running: Option<Running>,
 }
 
@@ -36,7 +36,7 @@ struct Shared {
 
 impl HistoryJob {
     /// Starts computing. What was being computed is stopped: its thread ends at its next step.
-    pub fn start(&mut self, system: System, context: &egui::Context) {
+    pub(crate) fn start(&mut self, system: System, context: &egui::Context) {
         self.cancel();
         let (sender, results) = channel();
         let shared = Arc::new(Shared::default());
@@ -52,25 +52,25 @@ impl HistoryJob {
 
     /// Whether something is being computed.
     #[must_use]
-    pub fn is_running(&self) -> bool {
+    pub(crate) fn is_running(&self) -> bool {
         self.running.is_some()
     }
 
     /// Whole percent of the running computation that are done.
     #[must_use]
-    pub fn percent(&self) -> Option<u32> {
+    pub(crate) fn percent(&self) -> Option<u32> {
         self.running.as_ref().map(|running| running.shared.percent.load(Ordering::Relaxed))
     }
 
     /// Stops what is being computed.
-    pub fn cancel(&mut self) {
+    pub(crate) fn cancel(&mut self) {
         if let Some(running) = self.running.take() {
             running.shared.is_cancelled.store(true, Ordering::Relaxed);
         }
     }
 
     /// The result, once it is there.
-    pub fn poll(&mut self) -> Option<Computed> {
+    pub(crate) fn poll(&mut self) -> Option<Computed> {
         let found = self.running.as_ref()?.results.recv_timeout(SHORT_WAIT);
         match found {
             Ok(computed) => {

@@ -19,14 +19,16 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
     MenuBar::new().ui(ui, |ui| {
         ui.set_height(HEIGHT - 2.0 * GRID);
         ui.add_space(2.0 * GRID);
-        let title = RichText::new(&workspace.scenario().title).font(FontId::new(TEXT_SIZE + 1.0, FontFamily::Name(BOLD.into())));
+        let title = RichText::new(&workspace.scenario().title)
+            .font(FontId::new(TEXT_SIZE + 1.0, FontFamily::Name(BOLD.into())));
         let room = (ui.available_width() - 420.0).clamp(80.0, 340.0);
         ui.scope(|ui| {
             ui.set_max_width(room);
             ui.add(egui::Label::new(title.color(palette.text)).truncate());
         });
         if workspace.session.is_dirty() {
-            ui.label(RichText::new("unsaved").font(small()).color(palette.accent)).on_hover_text("Changed since it was last saved");
+            ui.label(RichText::new("unsaved").font(small()).color(palette.accent))
+                .on_hover_text("Changed since it was last saved");
         }
         ui.add_space(2.0 * GRID);
         scenario_menu(ui, workspace, &mut commands);
@@ -64,7 +66,8 @@ fn message(ui: &mut Ui, workspace: &Workspace, commands: &mut Vec<Command>) {
         ui.label(RichText::new(format!("computing … {percent} %")).font(small()).color(palette.dim));
     } else if let Some(notice) = &workspace.notice {
         let ink = if notice.is_error { palette.error } else { palette.dim };
-        ui.add(egui::Label::new(RichText::new(&notice.text).font(small()).color(ink)).truncate()).on_hover_text(&notice.text);
+        ui.add(egui::Label::new(RichText::new(&notice.text).font(small()).color(ink)).truncate())
+            .on_hover_text(&notice.text);
     }
 }
 
@@ -129,7 +132,9 @@ fn view_menu(ui: &mut Ui, workspace: &Workspace, commands: &mut Vec<Command>) {
             }
         }
         ui.separator();
-        for (style, text) in [(SpanStyle::Symbols, "Times as 7.600 Gyr"), (SpanStyle::Words, "Times as 7.600 billion years")] {
+        for (style, text) in
+            [(SpanStyle::Symbols, "Times as 7.600 Gyr"), (SpanStyle::Words, "Times as 7.600 billion years")]
+        {
             if ui.radio(workspace.settings.span_style == style, text).clicked() {
                 commands.push(Command::SetSpanStyle(style));
                 ui.close();

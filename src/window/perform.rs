@@ -74,14 +74,14 @@ impl Longember {
                 workspace.refresh();
                 self.keep_settings();
             }
-            other => self.look(other),
+            other => self.look(&other),
         }
     }
 
     /// Commands that change only what is looked at.
-    fn look(&mut self, command: Command) {
+    fn look(&mut self, command: &Command) {
         let workspace = &mut self.workspace;
-        match command {
+        match *command {
             Command::Time(time) => self.go(time),
             Command::Zoom { about, factor } => {
                 let about = if about.is_nan() { workspace.moment_place().clamp(0.0, 1.0) } else { about };
@@ -103,7 +103,9 @@ impl Longember {
                     workspace.curves.retain(|shown| *shown != curve);
                 } else {
                     workspace.curves.push(curve);
-                    workspace.curves.sort_by_key(|shown| crate::figure::curves::Curve::ALL.iter().position(|curve| curve == shown));
+                    workspace
+                        .curves
+                        .sort_by_key(|shown| crate::figure::curves::Curve::ALL.iter().position(|curve| curve == shown));
                 }
                 workspace.refresh();
             }
@@ -127,7 +129,9 @@ impl Longember {
                 let axis = &workspace.derived.axis;
                 Some(axis.age_at(axis.fraction_at(now_yr) + steps * STEP * workspace.view.width()))
             }
-            TimeCommand::PreviousEvent => events.iter().rev().map(|event| event.time_yr).find(|time_yr| *time_yr < now_yr),
+            TimeCommand::PreviousEvent => {
+                events.iter().rev().map(|event| event.time_yr).find(|time_yr| *time_yr < now_yr)
+            }
             TimeCommand::NextEvent => events.iter().map(|event| event.time_yr).find(|time_yr| *time_yr > now_yr),
             TimeCommand::Birth => Some(0.0),
             TimeCommand::End => Some(workspace.history.shown_until_yr()),
@@ -164,7 +168,9 @@ impl Longember {
         match reply {
             Reply::Do(command) => self.perform(context, command),
             Reply::DoAnyway(command) => self.perform_anyway(context, command),
-            Reply::SaveThen(then) if self.workspace.session.path().is_none() => self.ask(context, Purpose::Save, Some(then)),
+            Reply::SaveThen(then) if self.workspace.session.path().is_none() => {
+                self.ask(context, Purpose::Save, Some(then));
+            }
             Reply::SaveThen(then) => {
                 self.save(context);
                 if !self.workspace.session.is_dirty() {
@@ -200,7 +206,12 @@ impl Longember {
         let typed = match (purpose, self.workspace.session.path()) {
             (Purpose::Save, Some(path)) => path.to_string_lossy().into_owned(),
             // A folder with a separator at its end: the name is yet to be typed.
-            _ => self.workspace.settings.folder.as_ref().map_or_else(String::new, |folder| folder.join("").to_string_lossy().into_owned()),
+            _ => self
+                .workspace
+                .settings
+                .folder
+                .as_ref()
+                .map_or_else(String::new, |folder| folder.join("").to_string_lossy().into_owned()),
         };
         let system = self.with_system_dialogs.then_some(context);
         self.workspace.dialog = Some(Dialog::Path(Asked::new(purpose, typed, then, system)));
@@ -216,7 +227,10 @@ impl Longember {
             }
             Err(error) => {
                 let file = path.file_name().unwrap_or(path.as_os_str()).to_string_lossy().into_owned();
-                self.workspace.dialog = Some(Dialog::LoadProblems { file, problems: error.to_string().lines().map(str::to_owned).collect() });
+                self.workspace.dialog = Some(Dialog::LoadProblems {
+                    file,
+                    problems: error.to_string().lines().map(str::to_owned).collect(),
+                });
             }
         }
     }
@@ -257,7 +271,7 @@ impl Longember {
     }
 
     /// Puts another session in place of the one that is open.
-    fn replace(&mut self, context: &Context, session: Session) {
+    pub(super) fn replace(&mut self, context: &Context, session: Session) {
         let present_yr = session.scenario().system.star.present_age_yr;
         let workspace = &mut self.workspace;
         workspace.session = session;

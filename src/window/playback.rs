@@ -3,7 +3,7 @@
 use crate::system::TimeAxis;
 
 /// Seconds that a whole life may take.
-pub const LIFE_SECONDS: [f64; 5] = [15.0, 30.0, 60.0, 120.0, 300.0];
+pub(crate) const LIFE_SECONDS: [f64; 5] = [15.0, 30.0, 60.0, 120.0, 300.0];
 
 /// A life being played.
 #[derive(Clone, Copy, Debug, PartialEq)]

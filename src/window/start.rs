@@ -59,16 +59,15 @@ pub fn run(opening: Opening) -> Result<(), NoWindow> {
         options,
         Box::new(move |creation| {
             let context = &creation.egui_ctx;
-            let session = match &opening {
-                Opening::Scenario(scenario) => Session::of((**scenario).clone()),
-                Opening::Demo | Opening::File(_) => demo_session()?,
-            };
-            let mut program = Longember::new(context, session, settings, keeper)?;
+            // The demo is there at once; a red dwarf would keep the window waiting for seconds.
+            let mut program = Longember::new(context, demo_session()?, settings, keeper)?;
             if let Some(warning) = warning {
                 program.workspace.say_error(warning.to_string());
             }
-            if let Opening::File(path) = &opening {
-                program.open_at_start(context, path);
+            match opening {
+                Opening::Demo => {}
+                Opening::File(path) => program.open_at_start(context, &path),
+                Opening::Scenario(scenario) => program.show_at_start(context, *scenario),
             }
             if let Some(recovered) = first_left_behind() {
                 program.offer_recovered(recovered);

@@ -5,7 +5,7 @@ use egui::{Color32, CornerRadius, FontFamily, FontId, Margin, Stroke, TextStyle,
 
 /// The colours of a theme.
 #[must_use]
-pub fn palette(theme: Theme) -> &'static Palette {
+pub(crate) fn palette(theme: Theme) -> &'static Palette {
     match theme {
         Theme::Dark => &DARK,
         Theme::Light => &LIGHT,
@@ -123,30 +123,30 @@ static DOME: Palette = Palette {
 };
 
 /// The grid everything stands on, points.
-pub const GRID: f32 = 4.0;
+pub(crate) const GRID: f32 = 4.0;
 /// Height of one row of figures, points.
-pub const ROW: f32 = 22.0;
+pub(crate) const ROW: f32 = 22.0;
 /// Usual text, points.
-pub const TEXT_SIZE: f32 = 13.0;
+pub(crate) const TEXT_SIZE: f32 = 13.0;
 /// Small text: units, ticks, headings, points.
-pub const SMALL_SIZE: f32 = 11.0;
+pub(crate) const SMALL_SIZE: f32 = 11.0;
 /// The moment in the answer panel, points.
-pub const LARGE_SIZE: f32 = 19.0;
+pub(crate) const LARGE_SIZE: f32 = 19.0;
 
 /// Small text.
 #[must_use]
-pub fn small() -> FontId {
+pub(crate) fn small() -> FontId {
     FontId::proportional(SMALL_SIZE)
 }
 
 /// Usual text.
 #[must_use]
-pub fn usual() -> FontId {
+pub(crate) fn usual() -> FontId {
     FontId::proportional(TEXT_SIZE)
 }
 
 /// Puts colours, sizes and spacing into the window toolkit.
-pub fn apply(context: &egui::Context, theme: Theme) {
+pub(crate) fn apply(context: &egui::Context, theme: Theme) {
     let palette = palette(theme);
     context.set_theme(if palette.is_dark { egui::Theme::Dark } else { egui::Theme::Light });
     context.all_styles_mut(|style| {
@@ -211,7 +211,8 @@ fn paint_visuals(visuals: &mut egui::Visuals, palette: &Palette) {
 #[must_use]
 pub fn contrast(first: Color32, second: Color32) -> f32 {
     let luminance = |color: Color32| {
-        let [r, g, b] = [color.r(), color.g(), color.b()].map(|channel| egui::ecolor::linear_f32_from_gamma_u8(channel));
+        let [r, g, b] =
+            [color.r(), color.g(), color.b()].map(egui::ecolor::linear_f32_from_gamma_u8);
         0.2126 * r + 0.7152 * g + 0.0722 * b
     };
     let (light, dark) = (luminance(first).max(luminance(second)), luminance(first).min(luminance(second)));

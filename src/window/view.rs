@@ -10,7 +10,7 @@ pub struct View {
 }
 
 /// The whole life.
-pub const WHOLE: View = View { from: 0.0, to: 1.0 };
+pub(crate) const WHOLE: View = View { from: 0.0, to: 1.0 };
 /// Closest zoom, as a share of the whole axis.
 const NARROWEST: f64 = 1e-4;
 

@@ -11,7 +11,8 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace) -> Answer {
     ui.label("A star's whole life and the fate of its planets, at any moment, with sources.");
     ui.label(RichText::new("Every figure has its method, paper, range and accuracy on the Sources page. Fonts: Noto Sans, SIL Open Font License 1.1.").color(palette.dim));
     ui.label(
-        RichText::new("Never look at the Sun without a filter made for it; the colours here say nothing about safety.").color(palette.dim),
+        RichText::new("Never look at the Sun without a filter made for it; the colours here say nothing about safety.")
+            .color(palette.dim),
     );
     match buttons(ui, &["Close"]) {
         Some(_) => Answer::Close(Vec::new()),

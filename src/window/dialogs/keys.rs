@@ -6,11 +6,8 @@ use crate::window::workspace::Workspace;
 use egui::{Grid, RichText, Ui};
 
 /// What the pointer does.
-const GESTURES: [(&str, &str); 3] = [
-    ("Drag", "move the moment"),
-    ("Wheel", "zoom about the pointer"),
-    ("Double click", "show the whole life"),
-];
+const GESTURES: [(&str, &str); 3] =
+    [("Drag", "move the moment"), ("Wheel", "zoom about the pointer"), ("Double click", "show the whole life")];
 
 /// Draws the list.
 pub(super) fn show(ui: &mut Ui, workspace: &Workspace) -> Answer {

@@ -18,7 +18,9 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace, asked: &mut Asked) -> Ans
     match asked.poll() {
         Chosen::Path(path) => return done(asked, path),
         Chosen::Waiting => {
-            ui.label(RichText::new("The system's file dialog is open. You can also type a path here.").color(palette.dim));
+            ui.label(
+                RichText::new("The system's file dialog is open. You can also type a path here.").color(palette.dim),
+            );
         }
         Chosen::None => {
             ui.label(RichText::new("Type a path; a scenario file ends in .ron.").color(palette.dim));

@@ -18,7 +18,8 @@ pub(super) fn time_ticks(painter: &Painter, band: Rect, workspace: &Workspace) {
     let count = (band.width() / LABEL_WIDTH).max(2.0) as usize;
     for tick in ticks(&workspace.derived.axis, view.from, view.to, count) {
         let x = band.left() + view.place_of(tick.fraction) as f32 * band.width();
-        painter.line_segment([pos2(x, band.bottom() + 1.0), pos2(x, band.bottom() + 5.0)], Stroke::new(1.0, palette.dim));
+        painter
+            .line_segment([pos2(x, band.bottom() + 1.0), pos2(x, band.bottom() + 5.0)], Stroke::new(1.0, palette.dim));
         painter.text(pos2(x, band.bottom() + 6.0), Align2::CENTER_TOP, tick.label, small(), palette.dim);
     }
 }

@@ -8,8 +8,8 @@ use crate::window::command::{Command, TimeCommand};
 use crate::window::playback::LIFE_SECONDS;
 use crate::window::theme::{GRID, small, usual};
 use crate::window::widgets::choice::word;
-use crate::window::workspace::Workspace;
 use crate::window::widgets::draft::keep_draft;
+use crate::window::workspace::Workspace;
 use egui::{Align, Color32, ComboBox, Id, Layout, RichText, TextEdit, Ui};
 
 /// The row under the ribbon.
@@ -51,7 +51,9 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
                 }
             }
             ui.label(RichText::new("Time").color(palette.dim).font(small()));
-            if workspace.view.width() < 1.0 && ui.button("Whole life").on_hover_text("Show the whole life (0)").clicked() {
+            if workspace.view.width() < 1.0
+                && ui.button("Whole life").on_hover_text("Show the whole life (0)").clicked()
+            {
                 commands.push(Command::ShowWhole);
             }
         });
@@ -64,13 +66,16 @@ fn pace(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
     let words = |seconds: f64| {
         if seconds < 60.0 { format!("life in {seconds} s") } else { format!("life in {} min", seconds / 60.0) }
     };
-    let response = ComboBox::from_id_salt("pace").width(104.0).selected_text(words(workspace.playback.life_seconds)).show_ui(ui, |ui| {
-        for seconds in LIFE_SECONDS {
-            if ui.selectable_label(workspace.playback.life_seconds == seconds, words(seconds)).clicked() {
-                commands.push(Command::Time(TimeCommand::SetLifeSeconds(seconds)));
+    let response = ComboBox::from_id_salt("pace")
+        .width(104.0)
+        .selected_text(words(workspace.playback.life_seconds))
+        .show_ui(ui, |ui| {
+            for seconds in LIFE_SECONDS {
+                if ui.selectable_label(workspace.playback.life_seconds == seconds, words(seconds)).clicked() {
+                    commands.push(Command::Time(TimeCommand::SetLifeSeconds(seconds)));
+                }
             }
-        }
-    });
+        });
     response.response.accessible_name("Speed of play").on_hover_text("How long a whole life takes when played");
     commands
 }
@@ -106,7 +111,9 @@ fn typed_moment(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
             ui.label(RichText::new(reason).font(small()).color(palette.error));
         }
         _ => {
-            response.on_hover_text("Time since the star reached the main sequence; type 7.6 Gyr, 2 trillion years or 3e12 yr");
+            response.on_hover_text(
+                "Time since the star reached the main sequence; type 7.6 Gyr, 2 trillion years or 3e12 yr",
+            );
         }
     }
     commands

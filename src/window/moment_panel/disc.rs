@@ -42,11 +42,23 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace, moment: &Moment) {
     } else {
         painter.circle_filled(sun_centre, sun_radius, palette.on_bed);
     }
-    painter.text(pos2(sun_centre.x, rect.bottom() - 4.0), Align2::CENTER_BOTTOM, "Sun, same scale", small(), palette.on_bed);
+    painter.text(
+        pos2(sun_centre.x, rect.bottom() - 4.0),
+        Align2::CENTER_BOTTOM,
+        "Sun, same scale",
+        small(),
+        palette.on_bed,
+    );
     if star_radius <= SMALLEST {
         let ring = Rect::from_center_size(star_centre, vec2(22.0, 22.0));
         painter.circle_stroke(ring.center(), 11.0, Stroke::new(1.0, palette.on_bed));
-        painter.text(pos2(star_centre.x, rect.bottom() - 4.0), Align2::CENTER_BOTTOM, "drawn larger", small(), palette.on_bed);
+        painter.text(
+            pos2(star_centre.x, rect.bottom() - 4.0),
+            Align2::CENTER_BOTTOM,
+            "drawn larger",
+            small(),
+            palette.on_bed,
+        );
     }
     ui.add_space(0.5 * GRID);
     ui.label(RichText::new(colour_line(moment)).font(small()).color(palette.dim));
@@ -60,6 +72,9 @@ fn colour_line(moment: &Moment) -> String {
 }
 
 fn description(moment: &Moment) -> String {
-    let size = moment.star.radius_rsun.map_or_else(|| "no size".to_owned(), |radius| format!("{} solar radii", number(radius, 3)));
+    let size = moment
+        .star
+        .radius_rsun
+        .map_or_else(|| "no size".to_owned(), |radius| format!("{} solar radii", number(radius, 3)));
     format!("Disc of the star: {}, {size}", colour_line(moment))
 }

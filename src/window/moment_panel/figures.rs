@@ -65,7 +65,8 @@ pub(super) fn planet(ui: &mut Ui, palette: &Palette, planet: &PlanetMoment) -> V
 fn figure(ui: &mut Ui, palette: &Palette, row: &Row) -> Option<Command> {
     let (rect, response) = ui.allocate_exact_size(vec2(ui.available_width(), ROW), Sense::click());
     let full = row.value.map_or_else(|| row.text.clone(), |value| format!("{} {}", number(value, 10), row.symbol));
-    response.widget_info(|| WidgetInfo::labeled(Role::Button, true, format!("{}: {} {}", row.name, row.text, row.symbol)));
+    response
+        .widget_info(|| WidgetInfo::labeled(Role::Button, true, format!("{}: {} {}", row.name, row.text, row.symbol)));
     if response.hovered() || response.has_focus() {
         ui.painter().rect_filled(rect.expand2(vec2(4.0, 0.0)), 3.0, palette.chosen);
     }

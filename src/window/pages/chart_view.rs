@@ -188,7 +188,9 @@ fn pieces(points: &[Pos2], dashes: &[f32], gaps: &[f32]) -> Vec<Vec<Pos2>> {
 /// Names of bands of constant height, above their left end, where curves of the present rarely run.
 fn band_labels(painter: &Painter, place: &Places<'_>, palette: &Palette) {
     for band in place.chart.bands.iter().filter(|band| band.meaning == BandMeaning::LiquidWater) {
-        let Some(y) = band.runs.first().and_then(|run| run.first()).and_then(|[_, _, high]| place.y(*high)) else { continue };
+        let Some(y) = band.runs.first().and_then(|run| run.first()).and_then(|[_, _, high]| place.y(*high)) else {
+            continue;
+        };
         let galley = painter.layout_no_wrap(band.name.clone(), small(), palette.dim);
         let x = freest_x(place, y - 6.0);
         let plate = Align2::CENTER_BOTTOM.anchor_size(pos2(x, y - 1.0), galley.size());

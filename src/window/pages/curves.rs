@@ -35,13 +35,15 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
         let (area, response) =
             ui.allocate_exact_size(vec2(ui.available_width(), height * count), Sense::click_and_drag());
         response.widget_info(|| WidgetInfo::slider(true, workspace.moment_yr, "Moment on the curves, years"));
-        let plot = Rect::from_min_max(pos2(area.left() + LABELS, area.top()), pos2(area.right() - RIGHT, area.bottom()));
+        let plot =
+            Rect::from_min_max(pos2(area.left() + LABELS, area.top()), pos2(area.right() - RIGHT, area.bottom()));
         commands.extend(time_gesture::commands(&response, plot, workspace));
         let hover = response.hover_pos().filter(|position| plot.x_range().contains(position.x));
         for (index, chart) in workspace.derived.charts.iter().enumerate() {
             let top = area.top() + index as f32 * height;
             let rect = Rect::from_min_max(pos2(plot.left(), top + 20.0), pos2(plot.right(), top + height - 8.0));
-            let frame = Frame { rect, title_y: top + 9.0, left: area.left(), hover_x: hover.map(|position| position.x) };
+            let frame =
+                Frame { rect, title_y: top + 9.0, left: area.left(), hover_x: hover.map(|position| position.x) };
             chart_view::draw(ui, &frame, chart, workspace);
         }
         let place = workspace.moment_place();
@@ -50,7 +52,11 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
             line_foot = Some(pos2(x, area.bottom().min(ui.clip_rect().bottom()) - 8.0));
         }
         if let Some(position) = hover {
-            ui.painter().vline(position.x, area.top() + 18.0..=area.bottom(), Stroke::new(1.0, palette.dim.gamma_multiply(0.5)));
+            ui.painter().vline(
+                position.x,
+                area.top() + 18.0..=area.bottom(),
+                Stroke::new(1.0, palette.dim.gamma_multiply(0.5)),
+            );
         }
     });
     workspace.chart_line_foot = line_foot;

@@ -3,9 +3,9 @@
 use crate::document::{LONGEST_ABOUT, built_in};
 use crate::window::command::{Command, Edit};
 use crate::window::theme::GRID;
+use crate::window::widgets::draft::keep_draft;
 use crate::window::widgets::heading::section;
 use crate::window::workspace::Workspace;
-use crate::window::widgets::draft::keep_draft;
 use egui::{Id, RichText, ScrollArea, TextEdit, Ui};
 
 /// Draws the page.
@@ -25,7 +25,8 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
                 continue;
             }
             ui.add_space(GRID);
-            if ui.link(RichText::new(&sheet.title).color(palette.accent)).on_hover_text("Open this scenario").clicked() {
+            if ui.link(RichText::new(&sheet.title).color(palette.accent)).on_hover_text("Open this scenario").clicked()
+            {
                 commands.push(Command::OpenBuiltIn(scenario.name));
             }
             ui.label(RichText::new(&sheet.about).color(palette.dim));

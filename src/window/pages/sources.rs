@@ -17,7 +17,9 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
     ScrollArea::vertical().auto_shrink(false).show(ui, |ui| {
         ui.set_max_width(ui.available_width().min(680.0));
         for method in METHODS {
-            let title = RichText::new(method.name).font(FontId::new(TEXT_SIZE, FontFamily::Name(BOLD.into()))).color(palette.text);
+            let title = RichText::new(method.name)
+                .font(FontId::new(TEXT_SIZE, FontFamily::Name(BOLD.into())))
+                .color(palette.text);
             let response = ui.label(title);
             if wanted == Some(method.key) {
                 response.scroll_to_me(Some(Align::TOP));

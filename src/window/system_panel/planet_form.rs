@@ -120,18 +120,34 @@ fn greenhouse_row(ui: &mut Ui, workspace: &Workspace, current: Greenhouse) -> Op
 /// The pressure is kept when only the gas changes.
 fn air_row(ui: &mut Ui, workspace: &Workspace, current: Air) -> Option<Air> {
     let mut chosen = None;
-    choice_row(ui, workspace, "Air", "Clear air that makes the sky; it does not warm the ground.", current.name(), |ui| {
-        for option in Air::KINDS {
-            let is_current = option.key() == current.key();
-            if ui.selectable_label(is_current, option.name()).clicked() && !is_current {
-                chosen = Some(current.surface_pressure_bar().map_or(option, |pressure_bar| option.at_pressure(pressure_bar)));
+    choice_row(
+        ui,
+        workspace,
+        "Air",
+        "Clear air that makes the sky; it does not warm the ground.",
+        current.name(),
+        |ui| {
+            for option in Air::KINDS {
+                let is_current = option.key() == current.key();
+                if ui.selectable_label(is_current, option.name()).clicked() && !is_current {
+                    chosen = Some(
+                        current.surface_pressure_bar().map_or(option, |pressure_bar| option.at_pressure(pressure_bar)),
+                    );
+                }
             }
-        }
-    });
+        },
+    );
     chosen
 }
 
-fn choice_row(ui: &mut Ui, workspace: &Workspace, name: &str, hint: &str, current: &str, options: impl FnOnce(&mut Ui)) {
+fn choice_row(
+    ui: &mut Ui,
+    workspace: &Workspace,
+    name: &str,
+    hint: &str,
+    current: &str,
+    options: impl FnOnce(&mut Ui),
+) {
     let palette = workspace.palette();
     ui.horizontal(|ui| {
         let (rect, _) = ui.allocate_exact_size(vec2(92.0, 22.0), Sense::hover());

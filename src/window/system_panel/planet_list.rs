@@ -34,7 +34,13 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
     commands
 }
 
-fn row(ui: &mut Ui, workspace: &Workspace, index: usize, planet: &PlanetSpecification, moment: Option<&PlanetMoment>) -> bool {
+fn row(
+    ui: &mut Ui,
+    workspace: &Workspace,
+    index: usize,
+    planet: &PlanetSpecification,
+    moment: Option<&PlanetMoment>,
+) -> bool {
     let palette = workspace.palette();
     let (rect, response) = ui.allocate_exact_size(vec2(ui.available_width(), ROW + 2.0), Sense::click());
     let is_chosen = workspace.selected == Body::Planet(index);
@@ -57,8 +63,15 @@ fn row(ui: &mut Ui, workspace: &Workspace, index: usize, planet: &PlanetSpecific
     let axis_au = moment.and_then(|moment| moment.semi_major_axis_au);
     let distance = axis_au.map_or_else(String::new, |axis_au| format!("{} au", number(axis_au, 3)));
     painter.text(pos2(rect.right() - 74.0, y), Align2::RIGHT_CENTER, distance, small(), palette.dim);
-    let name_room = egui::Rect::from_min_max(rect.min, pos2(rect.right() - 80.0 - 48.0_f32.min(state_width), rect.max.y));
-    painter.with_clip_rect(name_room).text(pos2(rect.left() + 24.0, y), Align2::LEFT_CENTER, &planet.name, usual(), palette.text);
+    let name_room =
+        egui::Rect::from_min_max(rect.min, pos2(rect.right() - 80.0 - 48.0_f32.min(state_width), rect.max.y));
+    painter.with_clip_rect(name_room).text(
+        pos2(rect.left() + 24.0, y),
+        Align2::LEFT_CENTER,
+        &planet.name,
+        usual(),
+        palette.text,
+    );
     response.on_hover_text(format!("{}: {state}", planet.name)).clicked()
 }
 
@@ -73,7 +86,11 @@ fn buttons(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
         let widest = scenario.system.planets.iter().map(|planet| planet.semi_major_axis_au).fold(0.0, f64::max);
         let semi_major_axis_au = if widest > 0.0 { (widest * 1.6).min(1e5) } else { 1.0 };
         commands.push(edit(format!("Add {name}"), scenario, |scenario| {
-            scenario.system.planets.push(PlanetSpecification { name, semi_major_axis_au, ..PlanetSpecification::default() });
+            scenario.system.planets.push(PlanetSpecification {
+                name,
+                semi_major_axis_au,
+                ..PlanetSpecification::default()
+            });
         }));
         commands.push(Command::Select(Body::Planet(count)));
     }

@@ -27,7 +27,8 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace) -> Option<Command> {
         command = Some(edit(label(STAR_MASS.name), scenario, |scenario| scenario.system.star.mass_msun = value));
     }
     if let Some(value) = value_entry(ui, palette, &star.name, &METALLICITY, star.metallicity_dex) {
-        command = Some(edit(label(METALLICITY.name), scenario, |scenario| scenario.system.star.metallicity_dex = value));
+        command =
+            Some(edit(label(METALLICITY.name), scenario, |scenario| scenario.system.star.metallicity_dex = value));
     }
     if let Some(value) = value_entry(ui, palette, &star.name, &PRESENT_AGE, star.present_age_yr) {
         command = Some(edit(label(PRESENT_AGE.name), scenario, |scenario| scenario.system.star.present_age_yr = value));

@@ -4,7 +4,7 @@ use crate::window::theme::{Palette, usual};
 use egui::{Align2, Response, Role, Sense, Stroke, Ui, WidgetInfo, pos2, vec2};
 
 /// One word of the row; the chosen one is underlined, not only coloured.
-pub fn word(ui: &mut Ui, palette: &Palette, text: &str, is_chosen: bool) -> Response {
+pub(crate) fn word(ui: &mut Ui, palette: &Palette, text: &str, is_chosen: bool) -> Response {
     let galley = ui.painter().layout_no_wrap(text.to_owned(), usual(), palette.text);
     let (rect, response) = ui.allocate_exact_size(vec2(galley.size().x + 4.0, 24.0), Sense::click());
     response.widget_info(|| WidgetInfo::selected(Role::RadioButton, true, is_chosen, text));

@@ -4,7 +4,7 @@ use egui::Ui;
 use egui::{Id, util::id_type_map::SerializableAny};
 
 /// Keeps a draft for a field, or forgets it.
-pub fn keep_draft<T: SerializableAny>(ui: &Ui, id: Id, draft: Option<T>) {
+pub(crate) fn keep_draft<T: SerializableAny>(ui: &Ui, id: Id, draft: Option<T>) {
     ui.data_mut(|data| match draft {
         Some(draft) => {
             data.insert_temp(id, draft);

@@ -5,7 +5,7 @@ use egui::{Color32, Painter, Pos2, Rect, Response, Role, Sense, Shape, Stroke, U
 
 /// A drawn sign.
 #[derive(Clone, Copy, Debug, PartialEq, Eq)]
-pub enum Icon {
+pub(crate) enum Icon {
     /// Triangle to the right.
     Play,
     /// Two bars.
@@ -21,7 +21,7 @@ pub enum Icon {
 }
 
 /// A button with a drawn sign; `name` is what assistive technology and the tooltip say.
-pub fn icon_button(ui: &mut Ui, palette: &Palette, icon: Icon, name: &str, is_enabled: bool) -> Response {
+pub(crate) fn icon_button(ui: &mut Ui, palette: &Palette, icon: Icon, name: &str, is_enabled: bool) -> Response {
     let (rect, response) = ui.allocate_exact_size(Vec2::splat(26.0), Sense::click());
     let response = if is_enabled { response } else { response.interact(Sense::hover()) };
     response.widget_info(|| WidgetInfo::labeled(Role::Button, is_enabled, name));
@@ -65,7 +65,7 @@ fn draw(painter: &Painter, centre: Pos2, icon: Icon, ink: Color32) {
                 })
                 .collect();
             painter.add(Shape::line(arc, Stroke::new(1.6, ink)));
-            painter.add(triangle(vec![at(mirror * -8.0, 0.0), at(mirror * -1.0, 0.0), at(mirror * -4.5, 5.0)]));
+            painter.add(triangle(vec![at(-8.0 * mirror, 0.0), at(-mirror, 0.0), at(-4.5 * mirror, 5.0)]));
         }
     }
 }

@@ -1,9 +1,9 @@
 //! Small controls used by several panels.
 
-pub mod choice;
-pub mod draft;
-pub mod heading;
-pub mod icon;
-pub mod state_mark;
-pub mod text_entry;
-pub mod value_entry;
+pub(crate) mod choice;
+pub(crate) mod draft;
+pub(crate) mod heading;
+pub(crate) mod icon;
+pub(crate) mod state_mark;
+pub(crate) mod text_entry;
+pub(crate) mod value_entry;

@@ -4,7 +4,7 @@ use crate::system::PlanetState;
 use egui::{Color32, Painter, Pos2, Shape, Stroke, vec2};
 
 /// Draws the mark of a state about a centre.
-pub fn draw(painter: &Painter, centre: Pos2, state: PlanetState, ink: Color32) {
+pub(crate) fn draw(painter: &Painter, centre: Pos2, state: PlanetState, ink: Color32) {
     let stroke = Stroke::new(1.6, ink);
     let at = |x: f32, y: f32| centre + vec2(x, y);
     match state {

@@ -22,7 +22,7 @@ struct Draft {
 ///
 /// What cannot be understood stays in the field, outlined, with the reason below it;
 /// the model keeps the last good value. Escape brings that value back.
-pub fn value_entry(ui: &mut Ui, palette: &Palette, body: &str, limit: &Limit, value: f64) -> Option<f64> {
+pub(crate) fn value_entry(ui: &mut Ui, palette: &Palette, body: &str, limit: &Limit, value: f64) -> Option<f64> {
     let id = Id::unique(("value_entry", body, limit.key));
     let mut draft = ui.data(|data| data.get_temp::<Draft>(id));
     let mut text = draft.as_ref().map_or_else(|| write_entry(value, limit.entry), |draft| draft.text.clone());
@@ -60,7 +60,12 @@ pub fn value_entry(ui: &mut Ui, palette: &Palette, body: &str, limit: &Limit, va
     keep_draft(ui, id, draft);
     match refusal {
         Some(refusal) => {
-            ui.painter().rect_stroke(response.rect.expand(1.0), 4.0, Stroke::new(1.5, palette.error), StrokeKind::Outside);
+            ui.painter().rect_stroke(
+                response.rect.expand(1.0),
+                4.0,
+                Stroke::new(1.5, palette.error),
+                StrokeKind::Outside,
+            );
             ui.label(RichText::new(refusal).font(small()).color(palette.error));
         }
         None => {
