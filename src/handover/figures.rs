@@ -1,10 +1,11 @@
 //! The figures of a star and of a planet as keyed values, in the one order that every file uses.
 
 use super::cell::Cell;
+use super::light_figures::{planet_light_cells, planet_light_figures, star_light_cells, star_light_figures};
 use crate::physics::light::Swatch;
 use crate::physics::planet::habitable_zone::ZonePlace;
 use crate::system::quantities::{PLANET, STAR};
-use crate::system::{PlanetMoment, StarMoment};
+use crate::system::{PlanetLight, PlanetMoment, StarMoment, Starlight};
 use std::borrow::Cow;
 
 /// A keyed figure: what it is called in files, its unit for table readers, and what it means.
@@ -18,11 +19,11 @@ pub(super) struct Figure {
     pub(super) is_number: bool,
 }
 
-const fn word(key: &'static str, name: &'static str) -> Figure {
+pub(super) const fn word(key: &'static str, name: &'static str) -> Figure {
     Figure { key, name, is_number: false }
 }
 
-const fn number(key: &'static str, name: &'static str) -> Figure {
+pub(super) const fn number(key: &'static str, name: &'static str) -> Figure {
     Figure { key, name, is_number: true }
 }
 
@@ -40,11 +41,14 @@ const STATE: Figure = word("state", "State");
 
 /// The star's figures.
 pub(super) fn star_figures() -> impl Iterator<Item = Figure> {
-    std::iter::once(PHASE).chain(STAR.iter().map(|quantity| number(quantity.key, quantity.name))).chain(COLOURS)
+    std::iter::once(PHASE)
+        .chain(STAR.iter().map(|quantity| number(quantity.key, quantity.name)))
+        .chain(COLOURS)
+        .chain(star_light_figures())
 }
 
 /// The star's values, in the order of [`star_figures`].
-pub(super) fn star_cells(star: &StarMoment) -> impl Iterator<Item = Cell> {
+pub(super) fn star_cells(star: &StarMoment, light: Option<&Starlight>) -> impl Iterator<Item = Cell> {
     let chromaticity = star.swatch.as_ref().and_then(|swatch| swatch.chromaticity);
     let colours = [
         star.swatch.as_ref().map_or(Cell::Missing, |swatch: &Swatch| Cell::Text(Cow::Owned(swatch.hex()))),
@@ -55,19 +59,21 @@ pub(super) fn star_cells(star: &StarMoment) -> impl Iterator<Item = Cell> {
     std::iter::once(Cell::word(Some(star.phase.key())))
         .chain(STAR.iter().map(|quantity| Cell::number((quantity.value)(star))))
         .chain(colours)
+        .chain(star_light_cells(light))
 }
 
 /// A planet's figures.
 pub(super) fn planet_figures() -> impl Iterator<Item = Figure> {
-    PLANET.iter().map(|quantity| number(quantity.key, quantity.name)).chain([ZONE, STATE])
+    PLANET.iter().map(|quantity| number(quantity.key, quantity.name)).chain([ZONE, STATE]).chain(planet_light_figures())
 }
 
 /// A planet's values, in the order of [`planet_figures`].
-pub(super) fn planet_cells(planet: &PlanetMoment) -> impl Iterator<Item = Cell> {
+pub(super) fn planet_cells(planet: &PlanetMoment, light: Option<&PlanetLight>) -> impl Iterator<Item = Cell> {
     PLANET
         .iter()
         .map(|quantity| Cell::number((quantity.value)(planet)))
         .chain([Cell::word(planet.zone.map(ZonePlace::key)), Cell::word(Some(planet.state.key()))])
+        .chain(planet_light_cells(light))
 }
 
 /// The unit of a key by its suffix, spelled as readers of astronomical tables expect it; empty where there is none.
@@ -76,7 +82,7 @@ pub(super) fn planet_cells(planet: &PlanetMoment) -> impl Iterator<Item = Cell> 
 /// IVOA Recommendation "Units in the VO" 1.0 (2014), from memory.
 pub(super) fn unit_of(key: &str) -> &'static str {
     // Longer suffixes first: "_msun_yr" also ends in "_yr".
-    const UNITS: [(&str, &str); 8] = [
+    const UNITS: [(&str, &str); 16] = [
         ("_msun_yr", "solMass/yr"),
         ("_msun", "solMass"),
         ("_lsun", "solLum"),
@@ -85,6 +91,14 @@ pub(super) fn unit_of(key: &str) -> &'static str {
         ("_au", "AU"),
         ("_yr", "yr"),
         ("_deg", "deg"),
+        ("_thz", "THz"),
+        ("_umol_m2_s", "umol/(m2 s)"),
+        ("_cd_m2", "cd/m2"),
+        ("_lm_w", "lm/W"),
+        ("_w_m2", "W/m2"),
+        ("_lm", "lm"),
+        ("_lx", "lx"),
+        ("_mag", "mag"),
     ];
     if key.ends_with("_k") {
         return "K";
@@ -95,6 +109,7 @@ pub(super) fn unit_of(key: &str) -> &'static str {
 #[cfg(test)]
 mod tests {
     use super::*;
+    use crate::system::light_quantities::{PLANET_LIGHT, STAR_LIGHT};
 
     #[test]
     fn the_names_that_other_programs_rely_on_are_there() {
@@ -126,6 +141,8 @@ mod tests {
             .iter()
             .map(|quantity| (quantity.key, quantity.symbol))
             .chain(PLANET.iter().map(|quantity| (quantity.key, quantity.symbol)))
+            .chain(STAR_LIGHT.iter().map(|quantity| (quantity.key, quantity.symbol)))
+            .chain(PLANET_LIGHT.iter().map(|quantity| (quantity.key, quantity.symbol)))
         {
             // Insolation is a ratio to the Earth's and carries no unit of its own.
             assert_eq!(unit_of(key).is_empty(), symbol.is_empty() || symbol == "S⊕", "{key}");

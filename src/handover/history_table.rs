@@ -6,8 +6,9 @@ use super::enhanced_table::header;
 use super::figures::{planet_cells, star_cells};
 use super::remarks::{SPREAD, remarks};
 use super::table_columns::{Column, planet_prefixes, table_columns};
+use crate::system::planet_light::USUAL_ALTITUDE_DEG;
 use crate::system::specification::Body;
-use crate::system::{History, Moment};
+use crate::system::{History, LightReader, Moment, MomentLight};
 use serde_json::{Map, Value};
 use std::borrow::Cow;
 use std::fmt::Write;
@@ -41,12 +42,13 @@ pub fn table_ecsv(history: &History, title: &str, ages_yr: &[f64]) -> String {
 pub fn table_json(history: &History, title: &str, ages_yr: &[f64]) -> String {
     let columns = table_columns(history.system());
     let prefixes = planet_prefixes(history.system());
+    let reader = LightReader::new(history, USUAL_ALTITUDE_DEG);
     let described: Vec<Value> = columns.iter().map(described).collect();
     let mut text = format!("{{\n\"title\": {},\n\"columns\": [", Value::from(title));
     push_lines(&mut text, described.into_iter());
     text.push_str("\n],\n\"rows\": [");
     let rows = ages_yr.iter().map(|age_yr| {
-        let cells = row(history, &prefixes, *age_yr);
+        let cells = row(history, &reader, &prefixes, *age_yr);
         Value::Object(columns.iter().zip(cells).map(|(column, cell)| (column.key.clone(), cell.json())).collect())
     });
     push_lines(&mut text, rows);
@@ -72,27 +74,29 @@ fn described(column: &Column) -> Value {
 
 fn push_rows(text: &mut String, history: &History, ages_yr: &[f64]) {
     let prefixes = planet_prefixes(history.system());
+    let reader = LightReader::new(history, USUAL_ALTITUDE_DEG);
     for age_yr in ages_yr {
-        push_record(text, row(history, &prefixes, *age_yr).iter().map(Cell::plain));
+        push_record(text, row(history, &reader, &prefixes, *age_yr).iter().map(Cell::plain));
     }
 }
 
 /// One row, in the order of [`table_columns`].
-fn row(history: &History, prefixes: &[String], age_yr: f64) -> Vec<Cell> {
+fn row(history: &History, reader: &LightReader<'_>, prefixes: &[String], age_yr: f64) -> Vec<Cell> {
     let moment = history.moment(age_yr);
+    let light = reader.at(&moment);
     let mut cells = vec![Cell::Number(moment.time_yr)];
-    cells.extend(star_cells(&moment.star));
-    for planet in &moment.planets {
-        cells.extend(planet_cells(planet));
+    cells.extend(star_cells(&moment.star, light.star.as_ref()));
+    for (planet, light) in moment.planets.iter().zip(&light.planets) {
+        cells.extend(planet_cells(planet, light.as_ref()));
     }
-    cells.push(notes(&moment, prefixes));
+    cells.push(notes(&moment, &light, prefixes));
     cells
 }
 
 /// The remarks of a row as `column:kind`. A method's typical spread is no news in any row and left to the list of sources.
-fn notes(moment: &Moment, prefixes: &[String]) -> Cell {
+fn notes(moment: &Moment, light: &MomentLight, prefixes: &[String]) -> Cell {
     let mut words: Vec<String> = Vec::new();
-    for remark in remarks(moment).iter().filter(|remark| remark.kind != SPREAD) {
+    for remark in remarks(moment, light).iter().filter(|remark| remark.kind != SPREAD) {
         let column = match remark.body {
             Body::Star => remark.about.to_owned(),
             Body::Planet(index) => match prefixes.get(index) {

@@ -4,7 +4,8 @@ use super::bodies::{body_name, planet_index};
 use super::cell::Cell;
 use super::figures::{Figure, planet_cells, planet_figures, star_cells, star_figures};
 use super::remarks::{Remark, remarks};
-use crate::system::{History, Moment};
+use crate::system::planet_light::USUAL_ALTITUDE_DEG;
+use crate::system::{History, LightReader, Moment};
 use serde_json::{Map, Value};
 
 /// A moment as a JSON object with `time_yr`, `star`, `planets` and `notes`.
@@ -13,15 +14,19 @@ use serde_json::{Map, Value};
 /// the key it is about; `planet_index` is the planet's place in `planets`, null for the star.
 #[must_use]
 pub fn instant_json(history: &History, moment: &Moment) -> String {
-    let mut star = object(&history.system().star.name, star_figures(), star_cells(&moment.star));
+    let light = LightReader::new(history, USUAL_ALTITUDE_DEG).at(moment);
+    let mut star = object(&history.system().star.name, star_figures(), star_cells(&moment.star, light.star.as_ref()));
     // The input that the star's life follows from besides its mass.
     star.insert("metallicity_dex".to_owned(), Cell::Number(history.system().star.metallicity_dex).json());
     let planets: Vec<Value> = moment
         .planets
         .iter()
-        .map(|planet| Value::Object(object(&planet.name, planet_figures(), planet_cells(planet))))
+        .zip(&light.planets)
+        .map(|(planet, light)| {
+            Value::Object(object(&planet.name, planet_figures(), planet_cells(planet, light.as_ref())))
+        })
         .collect();
-    let notes: Vec<Value> = remarks(moment).iter().map(|remark| note(history, remark)).collect();
+    let notes: Vec<Value> = remarks(moment, &light).iter().map(|remark| note(history, remark)).collect();
     let mut root = Map::new();
     root.insert("time_yr".to_owned(), Cell::Number(moment.time_yr).json());
     root.insert("star".to_owned(), Value::Object(star));

@@ -1,12 +1,16 @@
 //! Everything at one moment as a page for people.
 
 use super::bodies::body_name;
+use super::light_figures::sky_seen;
 use super::lines::{WIDTH, padded, push_columns, push_wrapped, width};
 use super::remarks::{ABSENT, Remark, SPREAD, percent, remarks};
+use crate::physics::light::{RgbSpace, Viewing, hex};
 use crate::physics::planet::habitable_zone::ZonePlace;
-use crate::system::quantities::{PLANET, STAR, planet_quantity, star_quantity};
+use crate::system::light_quantities::{LightQuantity, PLANET_LIGHT, STAR_LIGHT};
+use crate::system::planet_light::USUAL_ALTITUDE_DEG;
+use crate::system::quantities::{PLANET, STAR, planet_figure_name, star_figure_name};
 use crate::system::specification::Body;
-use crate::system::{History, Moment, PlanetMoment, StarMoment};
+use crate::system::{History, LightReader, Moment, MomentLight, PlanetLight, PlanetMoment, StarMoment, Starlight};
 use crate::units::number_text::{fixed, number};
 use crate::units::time_words::{SpanStyle, span};
 
@@ -25,9 +29,13 @@ pub fn instant_text(history: &History, title: &str, moment: &Moment) -> String {
     let time = span(moment.time_yr, 4, SpanStyle::Words);
     push_wrapped(&mut page, "", &format!("{time} after the star reached the main sequence"));
     page.push('\n');
+    let light = LightReader::new(history, USUAL_ALTITUDE_DEG).at(moment);
     push_star(&mut page, &history.system().star.name, &moment.star);
-    push_planets(&mut page, &moment.planets);
-    push_notes(&mut page, history, moment);
+    if let Some(light) = &light.star {
+        push_starlight(&mut page, light);
+    }
+    push_planets(&mut page, &moment.planets, &light.planets);
+    push_notes(&mut page, history, moment, &light);
     page
 }
 
@@ -58,15 +66,46 @@ fn colour(star: &StarMoment) -> String {
     }
 }
 
+/// The star's light: what has no value takes no line.
+fn push_starlight(page: &mut String, light: &Starlight) {
+    // Triples and colours of dwarfs stand in lines of their own below.
+    let is_single = |key: &str| !key.starts_with("linear_") && !key.starts_with("dwarf_");
+    let mut rows: Vec<Vec<String>> = STAR_LIGHT
+        .iter()
+        .filter(|quantity| is_single(quantity.key))
+        .filter_map(|quantity| {
+            let value = (quantity.value)(light)?;
+            Some(vec![padded(quantity.name, LABEL_WIDTH), with_unit(Some(value), quantity.digits, quantity.symbol)])
+        })
+        .collect();
+    if let Some(colour) = &light.colour {
+        for (space, linear) in RgbSpace::ALL.into_iter().zip(colour.linear_rgb) {
+            let channels = linear.map(|channel| fixed(channel, 4)).join("  ");
+            rows.push(vec![padded(&format!("Linear {}", space.name()), LABEL_WIDTH), channels]);
+        }
+        rows.push(vec![padded("Display P3", LABEL_WIDTH), hex(colour.wide.display_p3)]);
+    }
+    if let Some(dwarf) = &light.dwarf {
+        let [x, y] = dwarf.chromaticity.xy().map(|value| fixed(value, 4));
+        let difference = fixed(dwarf.difference_de00, 1);
+        let words = format!("{}, x {x} y {y}, like {}, {difference} apart", dwarf.screen.hex(), dwarf.nearest_type);
+        rows.push(vec![padded("Measured dwarfs", LABEL_WIDTH), words]);
+    }
+    push_columns(page, 2, &rows);
+}
+
 /// The planets side by side, as many as fit, then the next ones below.
-fn push_planets(page: &mut String, planets: &[PlanetMoment]) {
+fn push_planets(page: &mut String, planets: &[PlanetMoment], lights: &[Option<PlanetLight>]) {
     let labels: Vec<String> = std::iter::once("Planet".to_owned())
         .chain(["  State".to_owned()])
         .chain(PLANET.iter().map(|quantity| label(quantity.name, quantity.symbol)))
         .chain(["  Zone".to_owned(), String::new()])
+        .chain(planet_light().map(|quantity| label(quantity.name, quantity.symbol)))
+        .chain(SKY_LABELS.iter().flat_map(|label| [(*label).to_owned(), String::new()]))
         .map(|label| padded(&label, LABEL_WIDTH + 2))
         .collect();
-    let columns: Vec<Vec<String>> = planets.iter().map(planet_column).collect();
+    let columns: Vec<Vec<String>> =
+        planets.iter().zip(lights).map(|(planet, light)| planet_column(planet, light.as_ref())).collect();
     let mut rest = columns.as_slice();
     while !rest.is_empty() {
         let fitting = fitting_count(rest);
@@ -98,7 +137,15 @@ fn fitting_count(columns: &[Vec<String>]) -> usize {
     fitting.max(1)
 }
 
-fn planet_column(planet: &PlanetMoment) -> Vec<String> {
+/// Labels of the sky's colours, as emitted on a screen with D65 white and to an eye adapted to the star.
+const SKY_LABELS: [&str; 2] = ["  Sky as emitted", "  Sky, eye adapted"];
+
+/// Figures of light that a page for people shows: colours stand there in words.
+fn planet_light() -> impl Iterator<Item = &'static LightQuantity<PlanetLight>> {
+    PLANET_LIGHT.iter().filter(|quantity| !quantity.key.ends_with("_x") && !quantity.key.ends_with("_y"))
+}
+
+fn planet_column(planet: &PlanetMoment, light: Option<&PlanetLight>) -> Vec<String> {
     let figures = PLANET.iter().map(|quantity| {
         (quantity.value)(planet).map_or_else(|| NONE.to_owned(), |value| number(value, quantity.digits))
     });
@@ -106,6 +153,13 @@ fn planet_column(planet: &PlanetMoment) -> Vec<String> {
         .chain([planet.state.name().to_owned()])
         .chain(figures)
         .chain(in_two_lines(planet.zone.map_or(NONE, ZonePlace::name)))
+        .chain(planet_light().map(|quantity| {
+            light.and_then(quantity.value).map_or_else(|| NONE.to_owned(), |value| number(value, quantity.digits))
+        }))
+        .chain(Viewing::ALL.into_iter().flat_map(|viewing| {
+            let colour = light.and_then(|light| sky_seen(light, viewing)).map(|sky| sky.name.to_string());
+            in_two_lines(colour.as_deref().unwrap_or(NONE))
+        }))
         .collect()
 }
 
@@ -131,9 +185,9 @@ fn with_unit(value: Option<f64>, digits: usize, symbol: &str) -> String {
 }
 
 /// The notes: each sentence stands once, after everything it is about.
-fn push_notes(page: &mut String, history: &History, moment: &Moment) {
+fn push_notes(page: &mut String, history: &History, moment: &Moment, light: &MomentLight) {
     let mut gathered: Vec<(String, Vec<String>)> = Vec::new();
-    for remark in remarks(moment).iter().filter(|remark| remark.kind != SPREAD) {
+    for remark in remarks(moment, light).iter().filter(|remark| remark.kind != SPREAD) {
         let (about, sentence) = about_and_sentence(history, remark);
         match gathered.iter_mut().find(|(known, _)| *known == sentence) {
             Some((_, abouts)) if abouts.contains(&about) => {}
@@ -170,8 +224,8 @@ fn about_and_sentence(history: &History, remark: &Remark) -> (String, String) {
 /// The figure a remark is about, as the page names it.
 fn named(remark: &Remark) -> String {
     let name = match remark.body {
-        Body::Star => star_quantity(remark.about).map(|quantity| quantity.name),
-        Body::Planet(_) => planet_quantity(remark.about).map(|quantity| quantity.name),
+        Body::Star => star_figure_name(remark.about),
+        Body::Planet(_) => planet_figure_name(remark.about),
     };
     match name {
         Some(name) => name.to_owned(),

@@ -13,6 +13,7 @@ mod figures;
 mod history_table;
 mod instant_json;
 mod instant_text;
+mod light_figures;
 mod lines;
 mod named_list;
 mod remarks;

@@ -3,7 +3,8 @@
 use super::figures::{planet_cells, planet_figures, star_cells, star_figures};
 use crate::system::quantities::STAR;
 use crate::system::specification::Body;
-use crate::system::{Moment, PlanetMoment, PlanetState, StarMoment};
+use crate::system::starlight::is_dwarf;
+use crate::system::{Moment, MomentLight, PlanetLight, PlanetMoment, PlanetState, StarMoment, Starlight};
 
 /// Kind of a remark that says why there is no value.
 pub(super) const ABSENT: &str = "absent";
@@ -25,10 +26,11 @@ pub struct Remark {
 
 /// Every remark about a moment: the system's own notes, then spreads, then what is missing without a note.
 #[must_use]
-pub fn remarks(moment: &Moment) -> Vec<Remark> {
+pub fn remarks(moment: &Moment, light: &MomentLight) -> Vec<Remark> {
     let mut remarks: Vec<Remark> = moment
         .notes
         .iter()
+        .chain(&light.notes)
         .flat_map(|note| {
             keys_of(note.about).map(|about| Remark {
                 body: note.body,
@@ -44,14 +46,19 @@ pub fn remarks(moment: &Moment) -> Vec<Remark> {
             remarks.push(Remark { body: Body::Star, about: quantity.key, kind: SPREAD, text });
         }
     }
-    let star = star_figures().zip(star_cells(&moment.star)).filter(|(_, cell)| cell.is_missing());
+    let star = star_figures().zip(star_cells(&moment.star, light.star.as_ref())).filter(|(_, cell)| cell.is_missing());
     for (figure, _) in star {
-        push_absent(&mut remarks, Body::Star, figure.key, || why_no_star_figure(figure.key, &moment.star));
+        push_absent(&mut remarks, Body::Star, figure.key, || {
+            why_no_star_figure(figure.key, &moment.star, light.star.as_ref())
+        });
     }
-    for (index, planet) in moment.planets.iter().enumerate() {
-        let missing = planet_figures().zip(planet_cells(planet)).filter(|(_, cell)| cell.is_missing());
+    for (index, (planet, light)) in moment.planets.iter().zip(&light.planets).enumerate() {
+        let light = light.as_ref();
+        let missing = planet_figures().zip(planet_cells(planet, light)).filter(|(_, cell)| cell.is_missing());
         for (figure, _) in missing {
-            push_absent(&mut remarks, Body::Planet(index), figure.key, || why_no_planet_figure(planet));
+            push_absent(&mut remarks, Body::Planet(index), figure.key, || {
+                why_no_planet_figure(figure.key, planet, light)
+            });
         }
     }
     remarks
@@ -79,7 +86,7 @@ fn keys_of(about: &'static str) -> impl Iterator<Item = &'static str> {
     renamed.iter().copied().chain(renamed.is_empty().then_some(about))
 }
 
-fn why_no_star_figure(key: &str, star: &StarMoment) -> String {
+fn why_no_star_figure(key: &str, star: &StarMoment, light: Option<&Starlight>) -> String {
     let phase = star.phase.name();
     if star.phase.is_dark() {
         return format!("no value: the phase is \"{phase}\", of which no light is modelled");
@@ -87,20 +94,39 @@ fn why_no_star_figure(key: &str, star: &StarMoment) -> String {
     match key {
         "core_mass_msun" => "no value: the star has no core of spent hydrogen yet".to_owned(),
         "core_hydrogen_fraction" => format!("no value: none is computed in the phase \"{phase}\""),
-        "colour_x" | "colour_y" => "no value: there is no visible glow".to_owned(),
+        _ if key.starts_with("dwarf_") && !is_dwarf(star.phase) => {
+            "no value: measured colours are known of main-sequence dwarfs only".to_owned()
+        }
+        _ if key.starts_with("dwarf_") => "no value: dwarfs were measured from 2850 to 41 500 K".to_owned(),
+        _ if is_of_colour(key) && light.is_none_or(|light| light.colour.is_none()) => {
+            "no value: there is no visible glow".to_owned()
+        }
+        "correlated_temperature_k" | "colour_duv" => {
+            "no value: the colour is bluer than any blackbody it could be likened to".to_owned()
+        }
+        _ if key.ends_with("_mag") => "no value: the star is too cool for an estimate in V".to_owned(),
         "habitable_zone_inner_au" | "habitable_zone_outer_au" => "no value: the star gives no light".to_owned(),
         _ => format!("no value: none applies in the phase \"{phase}\""),
     }
 }
 
-fn why_no_planet_figure(planet: &PlanetMoment) -> String {
+/// Whether a key is about the colour of what glows.
+fn is_of_colour(key: &str) -> bool {
+    key.starts_with("colour_") || key.starts_with("linear_") || key == "correlated_temperature_k"
+}
+
+fn why_no_planet_figure(key: &str, planet: &PlanetMoment, light: Option<&PlanetLight>) -> String {
     match planet.state {
         PlanetState::Engulfed => "no value: the star has swallowed the planet",
         PlanetState::Unbound => "no value: the planet no longer orbits the star",
         PlanetState::Dark => "no value: the light of its star is not modelled",
-        PlanetState::Frozen | PlanetState::Temperate | PlanetState::TooHot => {
-            "no value: the method does not apply to this planet at this moment"
-        }
+        PlanetState::Frozen | PlanetState::Temperate | PlanetState::TooHot => match light {
+            Some(_) if key == "star_visual_mag" => "no value: the star is too cool for an estimate in V",
+            Some(light) if light.sky.is_none() => "no value: the planet's gravity cannot hold air",
+            Some(_) if key.starts_with("sky_") => "no value: the sky is black, for want of air or of light",
+            Some(_) if key.starts_with("disc_") => "no value: no light of the star comes through the air",
+            _ => "no value: the method does not apply to this planet at this moment",
+        },
     }
     .to_owned()
 }

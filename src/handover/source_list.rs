@@ -1,8 +1,8 @@
 //! Every method in use with its source, range and accuracy.
 
 use super::lines::{padded, push_wrapped};
-use crate::system::provenance::{METHODS, Method};
-use crate::system::quantities::{PLANET, STAR};
+use crate::system::provenance::METHODS;
+use crate::system::quantities::figures_of;
 use serde_json::{Map, Value};
 
 /// The methods for people.
@@ -13,7 +13,7 @@ pub fn sources_text() -> String {
     for method in METHODS {
         page.push('\n');
         push_wrapped(&mut page, "", method.name);
-        let figures = figures_of(method).map(|(_, name)| name).collect::<Vec<_>>().join(", ");
+        let figures = figures_of(method.key).map(|(_, name)| name).collect::<Vec<_>>().join(", ");
         let rows = [
             ("Relation", method.relation),
             ("Source", method.source),
@@ -44,7 +44,7 @@ pub fn sources_json() -> String {
                 ("accuracy", method.accuracy),
             ];
             object.extend(texts.map(|(key, text)| (key.to_owned(), Value::from(text))));
-            let figures: Vec<Value> = figures_of(method).map(|(key, _)| Value::from(key)).collect();
+            let figures: Vec<Value> = figures_of(method.key).map(|(key, _)| Value::from(key)).collect();
             object.insert("figures".to_owned(), Value::Array(figures));
             Value::Object(object)
         })
@@ -54,18 +54,12 @@ pub fn sources_json() -> String {
     format!("{:#}\n", Value::Object(root))
 }
 
-/// Key and name of every figure a method gives.
-fn figures_of(method: &Method) -> impl Iterator<Item = (&'static str, &'static str)> {
-    let star = STAR.iter().map(|quantity| (quantity.method, quantity.key, quantity.name));
-    let planet = PLANET.iter().map(|quantity| (quantity.method, quantity.key, quantity.name));
-    let key = method.key;
-    star.chain(planet).filter(move |(of, _, _)| *of == key).map(|(_, key, name)| (key, name))
-}
-
 #[cfg(test)]
 mod tests {
     use super::super::lines::width;
     use super::*;
+    use crate::system::light_quantities::{PLANET_LIGHT, STAR_LIGHT};
+    use crate::system::quantities::{PLANET, STAR};
 
     #[test]
     fn every_method_stands_in_both_forms() {
@@ -89,6 +83,6 @@ mod tests {
             .iter()
             .map(|method| method["figures"].as_array().map_or(0, Vec::len))
             .sum();
-        assert_eq!(figures, STAR.len() + PLANET.len());
+        assert_eq!(figures, STAR.len() + PLANET.len() + STAR_LIGHT.len() + PLANET_LIGHT.len());
     }
 }

@@ -3,6 +3,7 @@
 //! Panels, tables, curves and files walk these rows, so that a figure has one name, one unit and
 //! one source everywhere.
 
+use super::light_quantities::{PLANET_LIGHT, STAR_LIGHT};
 use super::moment::{PlanetMoment, StarMoment};
 
 /// One figure of the star.
@@ -222,6 +223,30 @@ pub fn star_quantity(key: &str) -> Option<&'static StarQuantity> {
 #[must_use]
 pub fn planet_quantity(key: &str) -> Option<&'static PlanetQuantity> {
     PLANET.iter().find(|quantity| quantity.key == key)
+}
+
+/// The name for people of any figure of the star, those of its light included.
+#[must_use]
+pub fn star_figure_name(key: &str) -> Option<&'static str> {
+    let light = || STAR_LIGHT.iter().find(|quantity| quantity.key == key).map(|quantity| quantity.name);
+    star_quantity(key).map(|quantity| quantity.name).or_else(light)
+}
+
+/// The name for people of any figure of a planet, those of its light included.
+#[must_use]
+pub fn planet_figure_name(key: &str) -> Option<&'static str> {
+    let light = || PLANET_LIGHT.iter().find(|quantity| quantity.key == key).map(|quantity| quantity.name);
+    planet_quantity(key).map(|quantity| quantity.name).or_else(light)
+}
+
+/// Key and name of every figure that a method gives.
+pub fn figures_of(method: &'static str) -> impl Iterator<Item = (&'static str, &'static str)> {
+    let star = STAR.iter().map(|row| (row.method, row.key, row.name));
+    let star_light = STAR_LIGHT.iter().map(|row| (row.method, row.key, row.name));
+    let planet = PLANET.iter().map(|row| (row.method, row.key, row.name));
+    let planet_light = PLANET_LIGHT.iter().map(|row| (row.method, row.key, row.name));
+    let all = star.chain(star_light).chain(planet).chain(planet_light);
+    all.filter(move |(of, _, _)| *of == method).map(|(_, key, name)| (key, name))
 }
 
 #[cfg(test)]
