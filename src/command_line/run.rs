@@ -9,7 +9,7 @@ use super::outcome::{DONE, Outcome, WRONG_USAGE};
 use super::scenario_source::{ScenarioSource, find_demo};
 use super::streams::Streams;
 use super::trouble::Trouble;
-use crate::document::{Scenario, built_in};
+use crate::document::{LifeStore, Scenario, built_in};
 use crate::handover;
 use crate::system::{History, StarSpecification, System};
 use crate::units::number_text::machine;
@@ -217,7 +217,7 @@ fn computed(scenario: Scenario, streams: &mut Streams<'_>) -> Result<(String, Hi
 fn history_of(system: System, streams: &mut Streams<'_>) -> Result<History, Trouble> {
     let begun = Instant::now();
     let mut shown = None;
-    let computed = History::compute_with(system, &mut |share| {
+    let computed = LifeStore::of_user().history(system, &mut |share| {
         let percent = (0..=100).take_while(|percent| f64::from(*percent) <= 100.0 * share).last();
         if percent != shown && begun.elapsed() > WORTH_SHOWING {
             shown = percent;

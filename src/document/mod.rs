@@ -1,9 +1,11 @@
-//! Documents: scenarios, their file form, undo, sessions, safe files, recovery after a crash, settings.
+//! Documents: scenarios, their file form, undo, sessions, safe files, recovery after a crash, settings, kept lives.
 
 pub mod built_in;
 mod edited_field;
 mod files;
 mod history;
+mod life_form;
+mod life_store;
 mod likeness;
 mod problem;
 mod record_reading;
@@ -21,9 +23,10 @@ pub use files::{
     scenario_from_bytes, sound_text, write_atomically, write_scenario,
 };
 pub use history::{History, MOST_STEPS};
+pub use life_store::LifeStore;
 pub use problem::{Fault, Place, Problem, Subject};
 pub use scenario::{LONGEST_ABOUT, LONGEST_TITLE, Scenario};
 pub use scenario_form::{CURRENT_VERSION, ScenarioText, parse_scenario, parse_scenario_text, scenario_text};
 pub use session::{SaveError, Session};
 pub use settings::{Settings, Theme};
-pub use user_folders::{CONFIG_VARIABLE, STATE_VARIABLE, config_folder, state_folder};
+pub use user_folders::{CACHE_VARIABLE, CONFIG_VARIABLE, STATE_VARIABLE, cache_folder, config_folder, state_folder};

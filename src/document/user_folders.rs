@@ -1,4 +1,4 @@
-//! Where a user's settings and unsaved work are kept.
+//! Where a user's settings, unsaved work and lives computed before are kept.
 
 use directories::ProjectDirs;
 use std::env;
@@ -8,6 +8,8 @@ use std::path::PathBuf;
 pub const CONFIG_VARIABLE: &str = "LONGEMBER_CONFIG_DIR";
 /// Environment variable that names another folder for recovery copies.
 pub const STATE_VARIABLE: &str = "LONGEMBER_STATE_DIR";
+/// Environment variable that names another folder for lives computed before.
+pub const CACHE_VARIABLE: &str = "LONGEMBER_CACHE_DIR";
 
 /// The folder of the settings; none on a machine without a home folder.
 #[must_use]
@@ -20,6 +22,12 @@ pub fn config_folder() -> Option<PathBuf> {
 pub fn state_folder() -> Option<PathBuf> {
     named_by(STATE_VARIABLE)
         .or_else(|| project().map(|project| project.state_dir().unwrap_or_else(|| project.data_local_dir()).to_owned()))
+}
+
+/// The folder of what can be computed again; none on a machine without a home folder.
+#[must_use]
+pub fn cache_folder() -> Option<PathBuf> {
+    named_by(CACHE_VARIABLE).or_else(|| project().map(|project| project.cache_dir().to_owned()))
 }
 
 fn named_by(variable: &str) -> Option<PathBuf> {

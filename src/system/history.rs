@@ -81,6 +81,15 @@ impl History {
         Self::of_life(system, life, progress)
     }
 
+    /// A first look within milliseconds at a system whose exact history takes seconds, from lives computed in advance.
+    ///
+    /// Nothing for other systems, or outside those lives; [`WholeLife::is_quick_look`] tells it from an exact history.
+    #[must_use]
+    pub fn quick_look(system: System) -> Option<Self> {
+        let life = WholeLife::quick_look(checked_input(&system).ok()?, life_options(&system))?;
+        Self::of_life(system, life, &mut |_| ControlFlow::Continue(())).ok()
+    }
+
     /// Carries the planets along a life of the star that is known already.
     ///
     /// # Errors

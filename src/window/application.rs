@@ -3,11 +3,12 @@
 use super::background::Keeper;
 use super::command::{self, Command};
 use super::dialogs::{self, Answer, Dialog};
+use super::jobs::HistoryJob;
 use super::theme::{self, GRID};
 use super::workspace::Workspace;
 use super::{fonts, life_strip, menu_bar, moment_panel, pages, system_panel};
 use crate::document::recovery::Recovered;
-use crate::document::{Scenario, Session, Settings};
+use crate::document::{LifeStore, Scenario, Session, Settings};
 use crate::system::{History, HistoryError};
 use egui::{CentralPanel, Context, Frame, Margin, Panel, Ui, ViewportCommand};
 use std::sync::Arc;
@@ -34,9 +35,14 @@ impl Longember {
     /// # Errors
     /// [`HistoryError`] when the scenario has no history to show.
     pub fn new(context: &Context, session: Session, settings: Settings, keeper: Keeper) -> Result<Self, HistoryError> {
-        let history = History::compute(session.scenario().system.clone())?;
+        let system = session.scenario().system.clone();
+        let history = History::quick_look(system.clone()).map_or_else(|| History::compute(system.clone()), Ok)?;
         fonts::install(context);
-        let workspace = Workspace::new(session, settings, Arc::new(history));
+        let mut workspace = Workspace::new(session, settings, Arc::new(history));
+        workspace.job = HistoryJob::new(if keeper.is_real() { LifeStore::of_user() } else { LifeStore::default() });
+        if workspace.history.life().is_quick_look() {
+            workspace.job.start(system, context);
+        }
         theme::apply(context, workspace.theme());
         context.set_zoom_factor(workspace.settings.text_scale as f32);
         Ok(Self {

@@ -1,5 +1,6 @@
 //! Work off the drawing thread: one history at a time, the newest request wins.
 
+use crate::document::LifeStore;
 use crate::system::{History, HistoryError, System};
 use std::ops::ControlFlow;
 use std::sync::Arc;
@@ -17,6 +18,7 @@ const SHORT_WAIT: Duration = Duration::from_millis(6);
 /// The history being computed in the background.
 #[derive(Debug, Default)]
 pub(crate) struct HistoryJob {
+    store: LifeStore,
     running: Option<Running>,
 }
 
@@ -35,14 +37,26 @@ struct Shared {
 }
 
 impl HistoryJob {
+    /// Jobs that take lives of red dwarfs from a store, and keep them there.
+    #[must_use]
+    pub(crate) fn new(store: LifeStore) -> Self {
+        Self { store, running: None }
+    }
+
     /// Starts computing. What was being computed is stopped: its thread ends at its next step.
+    ///
+    /// Where the exact history takes seconds, a quick look comes first.
     pub(crate) fn start(&mut self, system: System, context: &egui::Context) {
         self.cancel();
         let (sender, results) = channel();
         let shared = Arc::new(Shared::default());
-        let (context, its) = (context.clone(), Arc::clone(&shared));
+        let (context, its, store) = (context.clone(), Arc::clone(&shared), self.store.clone());
         let spawned = thread::Builder::new().name("history".to_owned()).spawn(move || {
-            let computed = History::compute_with(system, &mut |share| its.tell(share));
+            if let Some(look) = History::quick_look(system.clone()) {
+                let _ = sender.send(Ok(Arc::new(look)));
+                context.request_repaint();
+            }
+            let computed = store.history(system, &mut |share| its.tell(share));
             // The window may have asked for something newer and stopped listening: nothing is lost then.
             let _ = sender.send(computed.map(Arc::new));
             context.request_repaint();
@@ -69,12 +83,14 @@ impl HistoryJob {
         }
     }
 
-    /// The result, once it is there.
+    /// The result, once it is there; a quick look before it.
     pub(crate) fn poll(&mut self) -> Option<Computed> {
         let found = self.running.as_ref()?.results.recv_timeout(SHORT_WAIT);
         match found {
             Ok(computed) => {
-                self.running = None;
+                if !computed.as_ref().is_ok_and(|history| history.life().is_quick_look()) {
+                    self.running = None;
+                }
                 Some(computed)
             }
             Err(RecvTimeoutError::Timeout) => None,

@@ -113,7 +113,7 @@ impl Workspace {
     /// Whether the history shown belongs to an earlier state of the scenario.
     #[must_use]
     pub fn is_stale(&self) -> bool {
-        self.job.is_running() || *self.history.system() != self.scenario().system
+        *self.history.system() != self.scenario().system
     }
 
     /// Everything at the moment.

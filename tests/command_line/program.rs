@@ -5,6 +5,7 @@ use std::ffi::OsStr;
 use std::io::Write;
 use std::path::Path;
 use std::process::{Command, Stdio};
+use std::sync::LazyLock;
 
 /// The scenario most tests look at.
 pub(crate) const DEMO: &str = "demo:sunlike_five_worlds";
@@ -17,10 +18,16 @@ pub(crate) struct Finished {
     pub(crate) messages: String,
 }
 
+/// A folder for lives computed before, shared by the tests of one run and empty at its start.
+fn cache_folder() -> &'static Path {
+    static FOLDER: LazyLock<tempfile::TempDir> = LazyLock::new(|| tempfile::tempdir().expect("a folder"));
+    FOLDER.path()
+}
+
 /// The command with nothing inherited from whoever runs the tests.
 pub(crate) fn command() -> Command {
     let mut command = Command::new(env!("CARGO_BIN_EXE_longember"));
-    command.env_clear();
+    command.env_clear().env("LONGEMBER_CACHE_DIR", cache_folder());
     command
 }
 

@@ -27,6 +27,13 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
         ui.label(time);
         ui.label(RichText::new(moment.star.phase.name()).color(palette.dim));
         ui.label(RichText::new(beside_now(workspace, &moment)).font(small()).color(palette.dim));
+        if workspace.history.life().is_quick_look() {
+            let words = workspace.job.percent().map_or_else(
+                || "quick look; the exact life is not computed".to_owned(),
+                |percent| format!("quick look; exact life {percent} % computed"),
+            );
+            ui.label(RichText::new(words).font(small()).color(palette.accent));
+        }
         ui.add_space(GRID);
         disc::show(ui, workspace, &moment);
         section(ui, palette, &workspace.scenario().system.star.name);

@@ -4,6 +4,7 @@ use super::blend;
 use super::computed::Computed;
 use super::fitted::Fitted;
 use super::interior::Interior;
+use super::quick_look::quick_look;
 use super::told::Told;
 use crate::physics::star::caution::StarCaution;
 use crate::physics::star::convective::{
@@ -139,6 +140,29 @@ impl WholeLife {
             computed.told()
         };
         Ok(Self { input, course: Course::Told(Box::new(told)) })
+    }
+
+    /// A first look at the life of a red dwarf within milliseconds, marked as such by its cautions.
+    ///
+    /// Nothing for other stars, which need none, and outside the grid of lives computed in advance.
+    #[must_use]
+    pub fn quick_look(input: StarInput, options: LifeOptions) -> Option<Self> {
+        let StarInput { mass_msun, metallicity_dex } = input.checked().ok()?;
+        if !Self::needs_structure(mass_msun) {
+            return None;
+        }
+        let life = quick_look(ConvectiveInput { mass_msun, metallicity_dex }, options.surface)?;
+        let mut whole = Self::of_structure(input, options, &life).ok()?;
+        if let Course::Told(told) = &mut whole.course {
+            told.cautions.insert(0, StarCaution::QuickLook);
+        }
+        Some(whole)
+    }
+
+    /// Whether this is only a first look, interpolated between lives computed in advance.
+    #[must_use]
+    pub fn is_quick_look(&self) -> bool {
+        matches!(&self.course, Course::Told(told) if told.cautions.contains(&StarCaution::QuickLook))
     }
 
     fn fitted(input: StarInput) -> Result<Self, StarError> {
