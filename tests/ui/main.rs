@@ -1,0 +1,20 @@
+//! The whole window, driven without a display by pointer, keys and names.
+
+#![expect(clippy::expect_used, reason = "a test that cannot go on has failed")]
+
+mod curves;
+mod dialogs;
+mod driver;
+mod editing;
+mod files;
+mod glyphs;
+mod layout;
+mod looks;
+mod opening;
+mod pages;
+mod planets;
+mod playing;
+mod time;
+mod typed_moment;
+mod undo;
+mod unsaved;
