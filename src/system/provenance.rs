@@ -62,8 +62,8 @@ pub const METHODS: &[Method] = &[
     Method {
         key: "core_hydrogen",
         name: "Hydrogen left in the core",
-        relation: "The initial share of hydrogen falls in step with the energy radiated so far, to zero at the end of the main sequence.",
-        source: "Own choice, by energy conservation: the fits carry no composition",
+        relation: "From 0.4 M☉ up the fits carry no composition: the share of hydrogen is taken to fall evenly with time, from its value at birth to zero when the core is spent. Red dwarfs have it from the structure calculation.",
+        source: "Own choice, held to the present Sun (0.35 at its centre); red dwarfs as the life of the star",
         valid_for: "the main sequence",
         accuracy: "about 0.05 in the share of hydrogen at mid-life",
     },
