@@ -1,6 +1,6 @@
 //! Any size and scale: everything stays inside the window, nothing covers anything, everything has a name.
 
-use crate::driver::{Driver, USUAL, is_used, label};
+use crate::driver::{CHARTS, Driver, STRIP, USUAL, is_used, label};
 use egui::accesskit::Role;
 use egui::{Key, Modifiers, Rect, Vec2, pos2, vec2};
 use egui_kittest::kittest::NodeT;
@@ -46,8 +46,8 @@ fn every_panel_stays_inside_the_window() {
                 );
             }
         }
-        let strip = driver.the(crate::driver::STRIP).rect();
-        let charts = driver.the(crate::driver::CHARTS).rect();
+        let strip = driver.the(STRIP).rect();
+        let charts = driver.the(CHARTS).rect();
         assert!(window.contains_rect(strip) && strip.width() > 0.9 * size.x, "{strip:?} in {size:?}");
         assert!(charts.left() > 0.0 && charts.right() < size.x && charts.width() > 300.0, "{charts:?} in {size:?}");
     }
@@ -84,9 +84,27 @@ fn panels_keep_their_size_while_figures_change() {
     let before = fixed(&driver);
     for key in [Key::Home, Key::PageDown, Key::PageDown, Key::End, Key::N] {
         driver.press(Modifiers::NONE, key);
-        let charts = driver.the(crate::driver::CHARTS).rect();
+        let charts = driver.the(CHARTS).rect();
         assert_eq!(fixed(&driver), before, "{key:?}");
         assert_eq!((charts.left(), charts.right()), (264.0, 1017.0), "{key:?}");
+    }
+}
+
+#[test]
+fn the_script_for_the_real_window_knows_its_places() {
+    let script = include_str!("../real_window/drive.sh");
+    let place = |name: &str| {
+        let line = script.lines().find_map(|line| line.strip_prefix(&format!("{name}=\""))).expect("a place");
+        let (x, y) = line.trim_end_matches('"').split_once(' ').expect("two numbers");
+        pos2(x.parse().expect("a number"), y.parse().expect("a number"))
+    };
+    let driver = demo(USUAL, 1.0);
+    assert_eq!(place("WINDOW").to_vec2(), USUAL);
+    assert!(driver.the("Mass of Veldane").rect().shrink(4.0).contains(place("MASS_FIELD")));
+    let strip = driver.the(STRIP).rect();
+    assert!(strip.contains(place("STRIP_FROM")) && strip.contains(place("STRIP_TO")));
+    for name in driver.names().into_iter().filter(|name| name.contains(" · ")) {
+        assert!(!driver.the(&name).rect().contains(place("STRIP_FROM")), "{name}");
     }
 }
 
