@@ -1,5 +1,7 @@
 //! From an edit to redrawn curves, and one frame of the window's logic, both without a display.
 
+#![expect(clippy::expect_used, reason = "a measurement that cannot start has failed")]
+
 use criterion::{Criterion, criterion_group, criterion_main};
 use longember::document::built_in;
 use longember::figure::curves::Curve;

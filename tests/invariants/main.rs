@@ -7,4 +7,5 @@ mod light_sky;
 mod planet_formulas;
 mod planet_lives;
 mod planet_track;
+mod red_dwarf_lives;
 mod star_life;

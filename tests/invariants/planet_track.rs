@@ -20,7 +20,7 @@ fn point(age_yr: f64, mass_msun: f64, luminosity_lsun: f64, effective_temperatur
 ///
 /// The brightening on the main sequence is that of Gough 1981, extended; the giant's tip has 2730 L☉ and 256 R☉ at
 /// 0.668 M☉ (Schröder & Smith 2008).
-pub fn sun_like(nodes: u32) -> Vec<StarPoint> {
+pub(crate) fn sun_like(nodes: u32) -> Vec<StarPoint> {
     let each = (nodes / 5).max(8);
     let share = |i: u32| f64::from(i) / f64::from(each - 1);
     let mut track = Vec::new();
@@ -74,7 +74,7 @@ pub fn sun_like(nodes: u32) -> Vec<StarPoint> {
 }
 
 /// A red dwarf of 0.1 M☉: a billion years of contraction, then a very slow brightening.
-pub fn red_dwarf(nodes: u32) -> Vec<StarPoint> {
+pub(crate) fn red_dwarf(nodes: u32) -> Vec<StarPoint> {
     (0..nodes)
         .map(|i| {
             let x = f64::from(i) / f64::from(nodes - 1);
@@ -91,7 +91,7 @@ pub fn red_dwarf(nodes: u32) -> Vec<StarPoint> {
 }
 
 /// A star of 15 M☉ that explodes and leaves 1.4 M☉ at once.
-pub fn exploding(nodes: u32) -> Vec<StarPoint> {
+pub(crate) fn exploding(nodes: u32) -> Vec<StarPoint> {
     let mut track: Vec<StarPoint> = (0..nodes)
         .map(|i| {
             let x = f64::from(i) / f64::from(nodes - 1);

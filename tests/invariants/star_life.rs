@@ -147,7 +147,10 @@ fn events_come_in_the_order_of_a_life() {
         E::ThermalPulsesStart => Some(5),
         E::SupernovaCollapse | E::ThermonuclearDisruption => Some(6),
         E::WhiteDwarfBirth | E::NeutronStarBirth | E::BlackHoleBirth => Some(7),
+        E::BlackDwarfBirth => Some(8),
         E::EnvelopeLost | E::LargestRadius | E::HighestLuminosity => None,
+        // Red dwarfs are not made from these fits.
+        E::MixingEnds | E::BlueDwarfStart | E::HottestSurface => panic!("{kind:?} in the life of a heavier star"),
     };
     for input in grid() {
         let track = Track::compute(input).unwrap();

@@ -4,7 +4,7 @@
 //! chromaticities were confirmed with the general-purpose library colour-science 0.4.7.
 
 /// One temperature.
-pub struct Row {
+pub(crate) struct Row {
     pub temperature_k: f64,
     pub xy: [f64; 2],
     pub uv_prime: [f64; 2],
@@ -20,7 +20,7 @@ pub struct Row {
     pub luminance_cd_m2: f64,
 }
 
-pub const ROWS: [Row; 26] = [
+pub(crate) const ROWS: [Row; 26] = [
     Row {
         temperature_k: 300.0,
         xy: [0.734344, 0.265656],

@@ -2,7 +2,7 @@
 
 /// Temperature, K; B−V by Flower (1996)/Torres (2010) and by Ballesteros (2012); BC by Flower/Torres; B−V and BC
 /// of a blackbody through the passbands of Bessell (1990).
-pub const PHOTOMETRY: &[(f64, f64, f64, f64, f64, f64)] = &[
+pub(crate) const PHOTOMETRY: &[(f64, f64, f64, f64, f64, f64)] = &[
     (41500.0, -0.3219, -0.5412, -3.9237, -0.2664, -3.6375),
     (32500.0, -0.2962, -0.5002, -3.1289, -0.2349, -2.9488),
     (31500.0, -0.2927, -0.4941, -3.034, -0.2302, -2.863),
@@ -41,11 +41,11 @@ pub const PHOTOMETRY: &[(f64, f64, f64, f64, f64, f64)] = &[
 ];
 
 /// A row of [`COLOURS`].
-pub type ColourRow = (&'static str, f64, [f64; 2], &'static str, [f64; 2], f64, f64, f64);
+pub(crate) type ColourRow = (&'static str, f64, [f64; 2], &'static str, [f64; 2], f64, f64, f64);
 
 /// Type; temperature, K; x, y and sRGB of its spectrum (Pickles 1998, PASP 110, 863); x, y of the blackbody;
 /// CIEDE2000 between them; correlated temperature, K, and Duv of the spectrum.
-pub const COLOURS: &[ColourRow] = &[
+pub(crate) const COLOURS: &[ColourRow] = &[
     ("O5V", 41500.0, [0.2407, 0.2347], "#96b1ff", [0.2469, 0.2443], 1.3, 310910.0, -0.0003),
     ("B0V", 31500.0, [0.2429, 0.2387], "#98b4ff", [0.2495, 0.2480], 1.5, 87176.0, 0.0001),
     ("B8V", 12500.0, [0.2596, 0.2607], "#afc4ff", [0.2701, 0.2755], 2.9, 17768.0, -0.0006),

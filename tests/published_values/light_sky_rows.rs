@@ -4,7 +4,7 @@
 
 /// Temperature, K; altitude, degrees; ground albedo; dome x, y; whether by two streams (else all orders).
 #[expect(clippy::approx_constant, reason = "a chromaticity that happens to look like a constant")]
-pub const DOMES: &[(f64, f64, f64, [f64; 2], bool)] = &[
+pub(crate) const DOMES: &[(f64, f64, f64, [f64; 2], bool)] = &[
     (2600.0, 30.0, 0.0, [0.3804, 0.3857], false),
     (2600.0, 30.0, 0.0, [0.3800, 0.3854], true),
     (2600.0, 30.0, 0.2, [0.3819, 0.3867], false),
@@ -40,7 +40,7 @@ pub const DOMES: &[(f64, f64, f64, [f64; 2], bool)] = &[
 ];
 
 /// Temperature, K; altitude, degrees; zenith x, y by scattering once.
-pub const ZENITHS: &[(f64, f64, [f64; 2])] = &[
+pub(crate) const ZENITHS: &[(f64, f64, [f64; 2])] = &[
     (2600.0, 30.0, [0.3856, 0.3897]),
     (2600.0, 60.0, [0.3807, 0.3860]),
     (4000.0, 30.0, [0.2936, 0.3146]),
@@ -53,7 +53,7 @@ pub const ZENITHS: &[(f64, f64, [f64; 2])] = &[
 
 /// Temperature, K; air masses; disc x, y; nearest sRGB.
 #[expect(clippy::approx_constant, reason = "a chromaticity that happens to look like a constant")]
-pub const DISCS: &[(f64, f64, [f64; 2], &str)] = &[
+pub(crate) const DISCS: &[(f64, f64, [f64; 2], &str)] = &[
     (2600.0, 1.0, [0.4773, 0.4154], "#ffa548"),
     (2600.0, 2.0, [0.4858, 0.4178], "#ffa13f"),
     (2600.0, 3.0, [0.4939, 0.4195], "#ff9e36"),

@@ -29,17 +29,17 @@ lives! {
 }
 
 /// The star this many years after its birth.
-pub fn since_birth(life: &Life, years: f64) -> Node {
+pub(crate) fn since_birth(life: &Life, years: f64) -> Node {
     life.at_age(years - life.contraction_yr).expect("an age within the life")
 }
 
 /// The brightest moment after arrival on the main sequence.
-pub fn brightest(life: &Life) -> &Node {
+pub(crate) fn brightest(life: &Life) -> &Node {
     let grown = life.nodes.iter().filter(|node| node.age_yr >= 0.0);
     grown.max_by(|a, b| a.luminosity_lsun.total_cmp(&b.luminosity_lsun)).expect("nodes")
 }
 
 /// The hottest surface after arrival on the main sequence, K.
-pub fn hottest_k(life: &Life) -> f64 {
+pub(crate) fn hottest_k(life: &Life) -> f64 {
     life.nodes.iter().filter(|node| node.age_yr >= 0.0).map(|node| node.effective_temperature_k).fold(0.0, f64::max)
 }

@@ -2,7 +2,7 @@
 //! Han 1996, MNRAS 281, 257, evaluated outside this project in two independent programs that agree.
 
 /// Fixed points of one mass at one composition. Times are in Myr, the rest in solar units.
-pub struct Fixed {
+pub(crate) struct Fixed {
     pub heavy_elements: f64,
     /// Zero where the values are those of the composition alone.
     pub mass_msun: f64,
@@ -10,7 +10,7 @@ pub struct Fixed {
 }
 
 #[rustfmt::skip]
-pub const FIXED: &[Fixed] = &[
+pub(crate) const FIXED: &[Fixed] = &[
     Fixed { heavy_elements: 0.02, mass_msun: 0.3, values: &[
         ("L_ZAMS", 0.0130268), ("R_ZAMS", 0.30196), ("t_MS", 403716.0), ("t_hook", 212482.0), ("L_TMS", 0.036303),
         ("R_TMS", 0.467526), ("L_at_0.25_tMS", 0.0142167), ("R_at_0.25_tMS", 0.317494), ("L_at_0.5_tMS", 0.0156476),
@@ -264,13 +264,13 @@ pub const FIXED: &[Fixed] = &[
 ];
 
 /// A whole life with winds at Z = 0.02: extremes of each phase, times in Myr, the rest in solar units.
-pub struct Lived {
+pub(crate) struct Lived {
     pub mass_msun: f64,
     pub values: &'static [(&'static str, f64)],
 }
 
 #[rustfmt::skip]
-pub const LIVED: &[Lived] = &[
+pub(crate) const LIVED: &[Lived] = &[
     Lived { mass_msun: 0.5, values: &[
         ("Rmax_RGB", 55.665496), ("Lmax_RGB", 494.390222), ("t_end", 139468.095223), ("remnant_mass", 0.363099),
     ] },
