@@ -2,7 +2,7 @@
 
 use super::destination::Destination;
 use super::scenario_source::ScenarioSource;
-use crate::system::TimeScale;
+use crate::system::{EventGroup, TimeScale};
 use clap::builder::{OsStringValueParser, PossibleValue, TypedValueParser};
 use clap::{Args, Parser, Subcommand, ValueEnum};
 use std::sync::LazyLock;
@@ -127,6 +127,12 @@ pub(super) struct EventsArguments {
     /// A file, demo:NAME, or - for standard input
     #[arg(value_name = "SCENARIO", value_parser = source_parser())]
     pub(super) scenario: ScenarioSource,
+    /// Only the events of this body: star, or a planet's name
+    #[arg(long, value_name = "NAME")]
+    pub(super) body: Option<String>,
+    /// Only events of this kind; may be given several times
+    #[arg(long, value_enum)]
+    pub(super) kind: Vec<EventGroupArgument>,
     /// Form of the result; if left out, the extension of --out decides, else text
     #[arg(long, value_enum)]
     pub(super) format: Option<EventsFormat>,
@@ -197,6 +203,27 @@ impl ValueEnum for SpacingArgument {
 
     fn to_possible_value(&self) -> Option<PossibleValue> {
         Some(PossibleValue::new(self.0.key()))
+    }
+}
+
+/// A group of events as an argument.
+#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+pub(super) struct EventGroupArgument(pub(super) EventGroup);
+
+impl ValueEnum for EventGroupArgument {
+    fn value_variants<'a>() -> &'a [Self] {
+        &[
+            Self(EventGroup::Star),
+            Self(EventGroup::Colour),
+            Self(EventGroup::Zone),
+            Self(EventGroup::Climate),
+            Self(EventGroup::Orbit),
+            Self(EventGroup::Air),
+        ]
+    }
+
+    fn to_possible_value(&self) -> Option<PossibleValue> {
+        Some(PossibleValue::new(self.0.key()).help(self.0.name()))
     }
 }
 

@@ -14,7 +14,11 @@ const EVENT_PREFIX: &str = "event:";
 const DATE_DIGITS: usize = 6;
 
 /// Names by which an event is known besides its own, with its key.
-const ALSO_KNOWN: [(&str, &str); 1] = [("end of core hydrogen burning", "main_sequence_end")];
+const ALSO_KNOWN: [(&str, &str); 3] = [
+    ("end of core hydrogen burning", "main_sequence_end"),
+    ("swallowed by the star", "engulfed"),
+    ("set free from the star", "unbound"),
+];
 
 /// A moment asked for.
 #[derive(Clone, Debug, PartialEq)]
@@ -123,7 +127,7 @@ fn event_time_yr(history: &History, name: &str) -> Result<f64, MomentProblem> {
 fn is_named(history: &History, event: &Event, name: &str) -> bool {
     let wanted = folded(name);
     let key = event.kind.key();
-    let mut words = vec![folded(event.kind.name()), folded(key)];
+    let mut words = vec![folded(&event.kind.name()), folded(key)];
     words.extend(ALSO_KNOWN.iter().filter(|(_, of)| *of == key).map(|(known, _)| (*known).to_owned()));
     if words.contains(&wanted) {
         return true;

@@ -11,7 +11,7 @@ use super::streams::Streams;
 use super::trouble::Trouble;
 use crate::document::{LifeStore, Scenario, built_in};
 use crate::handover;
-use crate::system::{History, StarSpecification, System};
+use crate::system::{Body, EventFilter, EventGroup, History, StarSpecification, System};
 use crate::units::number_text::machine;
 use clap::Parser;
 use std::ffi::OsString;
@@ -171,17 +171,37 @@ fn events(arguments: &EventsArguments, streams: &mut Streams<'_>) -> Result<(), 
     arguments.destination.check()?;
     let scenario = arguments.scenario.load(streams)?;
     let (title, history) = computed(scenario, streams)?;
+    let filter = event_filter(arguments, &history)?;
     let by_extension = || match arguments.destination.extension().as_deref() {
         Some("json") => EventsFormat::Json,
         Some("csv") => EventsFormat::Csv,
         _ => EventsFormat::Text,
     };
     let text = match arguments.format.unwrap_or_else(by_extension) {
-        EventsFormat::Text => handover::events_text(&history, &title),
-        EventsFormat::Csv => handover::events_csv(&history),
-        EventsFormat::Json => handover::events_json(&history),
+        EventsFormat::Text => handover::events_text(&history, &title, &filter),
+        EventsFormat::Csv => handover::events_csv(&history, &filter),
+        EventsFormat::Json => handover::events_json(&history, &filter),
     };
     arguments.destination.deliver(&text, streams)
+}
+
+/// The events that the arguments ask for.
+fn event_filter(arguments: &EventsArguments, history: &History) -> Result<EventFilter, Trouble> {
+    let planets = &history.system().planets;
+    let body = |name: &String| {
+        let planet = planets.iter().position(|planet| planet.name == *name).map(Body::Planet);
+        planet.or_else(|| (name == "star").then_some(Body::Star)).ok_or_else(|| Trouble::NoSuchBody {
+            name: name.clone(),
+            allowed: std::iter::once("star")
+                .chain(planets.iter().map(|planet| planet.name.as_str()))
+                .collect::<Vec<_>>()
+                .join(", "),
+        })
+    };
+    let body = arguments.body.as_ref().map(body).transpose()?;
+    let is_hidden =
+        |group: &EventGroup| !arguments.kind.is_empty() && !arguments.kind.iter().any(|wanted| wanted.0 == *group);
+    Ok(EventFilter { body, hidden: EventGroup::ALL.into_iter().filter(is_hidden).collect() })
 }
 
 fn demo(arguments: &DemoArguments, streams: &mut Streams<'_>) -> Result<(), Trouble> {

@@ -27,6 +27,14 @@ pub(super) enum Trouble {
         /// The name asked for.
         name: String,
     },
+    /// There is no body of that name in the scenario.
+    #[error("the body \"{name}\" does not exist, allowed {allowed}; name one of these")]
+    NoSuchBody {
+        /// The name asked for.
+        name: String,
+        /// The names there are.
+        allowed: String,
+    },
     /// Standard input can't be read.
     #[error("standard input can't be read: {0}; name a file instead")]
     StandardInput(io::Error),
@@ -95,6 +103,7 @@ impl Trouble {
             Self::Load(LoadError::Unsound { .. })
             | Self::BuiltIn { .. }
             | Self::NoSuchDemo { .. }
+            | Self::NoSuchBody { .. }
             | Self::History(_)
             | Self::Moment(_)
             | Self::TableEnd { .. }

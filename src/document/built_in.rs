@@ -24,6 +24,7 @@ static ALL: &[BuiltIn] = &[
     built_in!("red_dwarf_trillions_of_years"),
     built_in!("half_solar_mass_slow_star"),
     built_in!("metal_poor_elder"),
+    built_in!("frozen_worlds_and_the_giant"),
     built_in!("eccentric_orbit"),
     built_in!("f_star_in_a_hurry"),
     built_in!("two_solar_masses_survivors"),

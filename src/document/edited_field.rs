@@ -37,6 +37,10 @@ impl EditedField {
             "redistribution" => "Heat redistribution",
             "greenhouse" => "Greenhouse",
             "air" => "Air",
+            "climate" => "Climate",
+            "carbon_dioxide" => "Carbon dioxide",
+            "starts_frozen" => "Start",
+            "tides" => "Tides",
             key => limit.map_or(key, |limit| limit.name),
         }
     }

@@ -4,6 +4,7 @@ use super::cell::Cell;
 use super::light_figures::{planet_light_cells, planet_light_figures, star_light_cells, star_light_figures};
 use crate::physics::light::Swatch;
 use crate::physics::planet::habitable_zone::ZonePlace;
+use crate::physics::planet::tides::LockLevel;
 use crate::system::quantities::{PLANET, STAR};
 use crate::system::{PlanetLight, PlanetMoment, StarMoment, Starlight};
 use std::borrow::Cow;
@@ -37,6 +38,7 @@ const COLOURS: [Figure; 4] = [
 ];
 /// What a planet has besides its quantities.
 const ZONE: Figure = word("habitable_zone_place", "Place in the habitable zone");
+const LOCK: Figure = word("tidal_lock", "Whether it keeps one face to the star");
 const STATE: Figure = word("state", "State");
 
 /// The star's figures.
@@ -64,16 +66,18 @@ pub(super) fn star_cells(star: &StarMoment, light: Option<&Starlight>) -> impl I
 
 /// A planet's figures.
 pub(super) fn planet_figures() -> impl Iterator<Item = Figure> {
-    PLANET.iter().map(|quantity| number(quantity.key, quantity.name)).chain([ZONE, STATE]).chain(planet_light_figures())
+    let words = [ZONE, LOCK, STATE];
+    PLANET.iter().map(|quantity| number(quantity.key, quantity.name)).chain(words).chain(planet_light_figures())
 }
 
 /// A planet's values, in the order of [`planet_figures`].
 pub(super) fn planet_cells(planet: &PlanetMoment, light: Option<&PlanetLight>) -> impl Iterator<Item = Cell> {
-    PLANET
-        .iter()
-        .map(|quantity| Cell::number((quantity.value)(planet)))
-        .chain([Cell::word(planet.zone.map(ZonePlace::key)), Cell::word(Some(planet.state.key()))])
-        .chain(planet_light_cells(light))
+    let words = [
+        Cell::word(planet.zone.map(ZonePlace::key)),
+        Cell::word(planet.lock.map(LockLevel::key)),
+        Cell::word(Some(planet.state.key())),
+    ];
+    PLANET.iter().map(|quantity| Cell::number((quantity.value)(planet))).chain(words).chain(planet_light_cells(light))
 }
 
 /// The unit of a key by its suffix, spelled as readers of astronomical tables expect it; empty where there is none.
@@ -82,7 +86,7 @@ pub(super) fn planet_cells(planet: &PlanetMoment, light: Option<&PlanetLight>) -
 /// IVOA Recommendation "Units in the VO" 1.0 (2014), from memory.
 pub(super) fn unit_of(key: &str) -> &'static str {
     // Longer suffixes first: "_msun_yr" also ends in "_yr".
-    const UNITS: [(&str, &str); 16] = [
+    const UNITS: [(&str, &str); 17] = [
         ("_msun_yr", "solMass/yr"),
         ("_msun", "solMass"),
         ("_lsun", "solLum"),
@@ -99,6 +103,7 @@ pub(super) fn unit_of(key: &str) -> &'static str {
         ("_lm", "lm"),
         ("_lx", "lx"),
         ("_mag", "mag"),
+        ("_bar", "bar"),
     ];
     if key.ends_with("_k") {
         return "K";

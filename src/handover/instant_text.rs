@@ -106,9 +106,10 @@ fn push_planets(page: &mut String, planets: &[PlanetMoment], lights: &[Option<Pl
         .collect();
     let columns: Vec<Vec<String>> =
         planets.iter().zip(lights).map(|(planet, light)| planet_column(planet, light.as_ref())).collect();
+    let label_width = labels.iter().map(|label| width(label)).max().unwrap_or(0);
     let mut rest = columns.as_slice();
     while !rest.is_empty() {
-        let fitting = fitting_count(rest);
+        let fitting = fitting_count(rest, label_width);
         let (block, later) = rest.split_at(fitting);
         let rows: Vec<Vec<String>> = labels
             .iter()
@@ -116,7 +117,8 @@ fn push_planets(page: &mut String, planets: &[PlanetMoment], lights: &[Option<Pl
             .map(|(row, label)| {
                 std::iter::once(label.clone()).chain(block.iter().map(|column| column[row].clone())).collect()
             })
-            .filter(|row: &Vec<String>| row.iter().any(|cell| !cell.trim().is_empty()))
+            // What no planet of the block has takes no line; the notes say why.
+            .filter(|row: &Vec<String>| row.iter().skip(1).any(|cell| !cell.trim().is_empty() && cell != NONE))
             .collect();
         page.push('\n');
         push_columns(page, 0, &rows);
@@ -125,8 +127,8 @@ fn push_planets(page: &mut String, planets: &[PlanetMoment], lights: &[Option<Pl
 }
 
 /// How many of the columns fit beside the labels; at least one.
-fn fitting_count(columns: &[Vec<String>]) -> usize {
-    let mut used = LABEL_WIDTH + 2;
+fn fitting_count(columns: &[Vec<String>], label_width: usize) -> usize {
+    let mut used = label_width;
     let widths = columns.iter().map(|column| column.iter().map(|cell| width(cell)).max().unwrap_or(0));
     let fitting = widths
         .take_while(|column_width| {
@@ -249,9 +251,9 @@ mod tests {
     #[test]
     fn as_many_columns_as_fit_and_always_one() {
         let column = |cell_width: usize| vec!["x".repeat(cell_width)];
-        assert_eq!(fitting_count(&[column(16), column(16), column(16), column(16)]), 3);
-        assert_eq!(fitting_count(&[column(60), column(5)]), 1);
-        assert_eq!(fitting_count(&[column(5), column(60)]), 1);
+        assert_eq!(fitting_count(&[column(16), column(16), column(16), column(16)], 21), 3);
+        assert_eq!(fitting_count(&[column(60), column(5)], 21), 1);
+        assert_eq!(fitting_count(&[column(5), column(60)], 21), 1);
     }
 
     #[test]

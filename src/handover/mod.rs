@@ -21,7 +21,7 @@ mod source_list;
 mod table_ages;
 mod table_columns;
 
-pub use dated_events::{events_csv, events_json, events_text};
+pub use dated_events::{doubt, events_csv, events_json, events_text};
 pub use history_table::{table_csv, table_ecsv, table_json};
 pub use instant_json::instant_json;
 pub use instant_text::instant_text;

@@ -115,12 +115,30 @@ fn is_of_colour(key: &str) -> bool {
     key.starts_with("colour_") || key.starts_with("linear_") || key == "correlated_temperature_k"
 }
 
+/// Figures that only the climate model gives.
+const OF_THE_CLIMATE: [&str; 4] = ["ice_fraction", "ice_line_deg", "carbon_dioxide_bar", "water_oceans"];
+
 fn why_no_planet_figure(key: &str, planet: &PlanetMoment, light: Option<&PlanetLight>) -> String {
+    let is_of_the_climate = OF_THE_CLIMATE.contains(&key);
     match planet.state {
         PlanetState::Engulfed => "no value: the star has swallowed the planet",
+        PlanetState::TornApart => "no value: the star's tide has torn the planet apart",
         PlanetState::Unbound => "no value: the planet no longer orbits the star",
         PlanetState::Dark => "no value: the light of its star is not modelled",
-        PlanetState::Frozen | PlanetState::Temperate | PlanetState::TooHot => match light {
+        _ if key == "surface_hotter_than_k" => "no bound: the surface temperature itself is known",
+        _ if key == "surface_temperature_k" => "no value: only a bound is known, see surface_hotter_than_k",
+        _ if key == "high_energy_w_m2" => "no value: the high-energy light of giants and remnants is not known",
+        _ if is_of_the_climate && planet.water_oceans.is_none() => {
+            "no value: no climate with surface water is followed at this moment"
+        }
+        PlanetState::Runaway | PlanetState::Dry if is_of_the_climate => "no value: there is no open water",
+        _ if key == "ice_line_deg" => "no value: no single ice line on this planet",
+        PlanetState::Frozen
+        | PlanetState::Temperate
+        | PlanetState::Moist
+        | PlanetState::Runaway
+        | PlanetState::Dry
+        | PlanetState::TooHot => match light {
             Some(_) if key == "star_visual_mag" => "no value: the star is too cool for an estimate in V",
             Some(light) if light.sky.is_none() => "no value: the planet's gravity cannot hold air",
             Some(_) if key.starts_with("sky_") => "no value: the sky is black, for want of air or of light",

@@ -1,12 +1,13 @@
 //! Dated events of the star and its planets.
 
+use super::date_band::DateBand;
 use super::history::History;
-use super::moment::PlanetMoment;
-use super::planet_past::{BOILING_K, FREEZING_K};
+use super::planet_events;
 use super::specification::Body;
-use crate::physics::planet::OrbitEnd;
-use crate::physics::planet::habitable_zone::ZonePlace;
+use super::star_colours;
+use crate::physics::planet::{Caution, PlanetEventKind};
 use crate::physics::star::StarEventKind;
+use std::borrow::Cow;
 
 /// Something that happens at one time.
 #[derive(Clone, Copy, Debug, PartialEq)]
@@ -17,6 +18,10 @@ pub struct Event {
     pub body: Body,
     /// What.
     pub kind: EventKind,
+    /// How far the date can be trusted, where it is more than a plain result.
+    pub caution: Option<Caution>,
+    /// Between which dates it falls as far as its rule is known, where that can be said.
+    pub band: Option<DateBand>,
 }
 
 /// What can happen.
@@ -24,22 +29,87 @@ pub struct Event {
 pub enum EventKind {
     /// Something in the star's own life.
     Star(StarEventKind),
-    /// The star's surface reaches the planet's periastron.
-    Engulfed,
-    /// The planet is set free.
-    Unbound,
-    /// The mean surface temperature rises above the freezing point of water.
-    Thaws,
-    /// The mean surface temperature falls below the freezing point of water.
-    Freezes,
-    /// The mean surface temperature rises above the boiling point of water at 1 bar.
-    TooHot,
-    /// The mean surface temperature falls below the boiling point of water at 1 bar.
-    CoolsBelowBoiling,
-    /// The planet enters the conservative habitable zone.
-    EntersZone,
-    /// The planet leaves the conservative habitable zone.
-    LeavesZone,
+    /// The star's light takes on another colour word.
+    Colour(&'static str),
+    /// Something in a planet's own life.
+    Planet(PlanetEventKind),
+    /// The mean surface temperature under a held greenhouse rises above the freezing point of water.
+    RisesAboveFreezing,
+    /// The mean surface temperature under a held greenhouse falls below the freezing point of water.
+    FallsBelowFreezing,
+    /// The mean surface temperature under a held greenhouse rises above the boiling point of water at 1 bar.
+    RisesAboveBoiling,
+    /// The mean surface temperature under a held greenhouse falls below the boiling point of water at 1 bar.
+    FallsBelowBoiling,
+    /// The mean surface temperature under a held greenhouse is the highest of the planet's life.
+    HottestSurface,
+    /// The surface of the giant star comes nearest to the planet without reaching it.
+    GiantNearest,
+}
+
+/// Kinds of event that belong together.
+#[derive(Clone, Copy, Debug, PartialEq, Eq, Hash)]
+pub enum EventGroup {
+    /// Turning points in the star's life.
+    Star,
+    /// Changes of the star's colour word.
+    Colour,
+    /// Crossings of the habitable zone's limits.
+    Zone,
+    /// Ice, open water, steam, and crossings of freezing and boiling.
+    Climate,
+    /// Engulfment, disruption, escape, near misses.
+    Orbit,
+    /// Loss of air, locking of the day.
+    Air,
+}
+
+impl EventGroup {
+    /// Every group.
+    pub const ALL: [Self; 6] = [Self::Star, Self::Colour, Self::Zone, Self::Climate, Self::Orbit, Self::Air];
+
+    /// Stable machine name.
+    #[must_use]
+    pub fn key(self) -> &'static str {
+        match self {
+            Self::Star => "star",
+            Self::Colour => "colour",
+            Self::Zone => "zone",
+            Self::Climate => "climate",
+            Self::Orbit => "orbit",
+            Self::Air => "air",
+        }
+    }
+
+    /// The group in words for people.
+    #[must_use]
+    pub fn name(self) -> &'static str {
+        match self {
+            Self::Star => "life of the star",
+            Self::Colour => "colour of its light",
+            Self::Zone => "habitable zone",
+            Self::Climate => "climate",
+            Self::Orbit => "orbit and fate",
+            Self::Air => "air and rotation",
+        }
+    }
+}
+
+/// Which events are wanted.
+#[derive(Clone, Debug, Default, PartialEq, Eq)]
+pub struct EventFilter {
+    /// Only those of this body; of all where there is none.
+    pub body: Option<Body>,
+    /// Groups that are left out.
+    pub hidden: Vec<EventGroup>,
+}
+
+impl EventFilter {
+    /// Whether an event is wanted.
+    #[must_use]
+    pub fn shows(&self, event: &Event) -> bool {
+        self.body.is_none_or(|body| body == event.body) && !self.hidden.contains(&event.kind.group())
+    }
 }
 
 impl EventKind {
@@ -48,43 +118,102 @@ impl EventKind {
     pub fn key(self) -> &'static str {
         match self {
             Self::Star(kind) => kind.key(),
-            Self::Engulfed => "engulfed",
-            Self::Unbound => "unbound",
-            Self::Thaws => "thaws",
-            Self::Freezes => "freezes",
-            Self::TooHot => "too_hot",
-            Self::CoolsBelowBoiling => "cools_below_boiling",
-            Self::EntersZone => "enters_habitable_zone",
-            Self::LeavesZone => "leaves_habitable_zone",
+            Self::Colour(_) => "colour_changes",
+            Self::Planet(kind) => kind.key(),
+            Self::RisesAboveFreezing => "rises_above_freezing",
+            Self::FallsBelowFreezing => "falls_below_freezing",
+            Self::RisesAboveBoiling => "rises_above_boiling",
+            Self::FallsBelowBoiling => "falls_below_boiling",
+            Self::HottestSurface => "surface_hottest",
+            Self::GiantNearest => "giant_nearest",
         }
     }
 
     /// What happens, in words for people.
     #[must_use]
-    pub fn name(self) -> &'static str {
-        match self {
+    pub fn name(self) -> Cow<'static, str> {
+        Cow::Borrowed(match self {
             Self::Star(kind) => kind.name(),
-            Self::Engulfed => "swallowed by the star",
-            Self::Unbound => "set free from the star",
-            Self::Thaws => "surface rises above freezing",
-            Self::Freezes => "surface falls below freezing",
-            Self::TooHot => "surface rises above boiling",
-            Self::CoolsBelowBoiling => "surface falls below boiling",
-            Self::EntersZone => "enters the habitable zone",
-            Self::LeavesZone => "leaves the habitable zone",
+            Self::Colour("no visible glow") => return Cow::Borrowed("no visible glow any more"),
+            Self::Colour(word) => return Cow::Owned(format!("light turns {word}")),
+            Self::Planet(kind) => kind.name(),
+            Self::RisesAboveFreezing => "surface rises above freezing",
+            Self::FallsBelowFreezing => "surface falls below freezing",
+            Self::RisesAboveBoiling => "surface rises above boiling",
+            Self::FallsBelowBoiling => "surface falls below boiling",
+            Self::HottestSurface => "surface at its hottest",
+            Self::GiantNearest => "the giant's surface comes nearest",
+        })
+    }
+
+    /// The group it belongs to.
+    #[must_use]
+    pub fn group(self) -> EventGroup {
+        use PlanetEventKind as Planet;
+        match self {
+            Self::Star(_) => EventGroup::Star,
+            Self::Colour(_) => EventGroup::Colour,
+            Self::Planet(kind) => match kind {
+                Planet::EntersHabitableZone | Planet::TooMuchLight | Planet::TooLittleLight => EventGroup::Zone,
+                Planet::Freezes
+                | Planet::Thaws
+                | Planet::ThawsToSteam
+                | Planet::MoistGreenhouse
+                | Planet::MoistEnds
+                | Planet::RunawayGreenhouse
+                | Planet::Condenses
+                | Planet::WaterGone => EventGroup::Climate,
+                Planet::AtmosphereLost | Planet::ProbablyLocked | Planet::Locked => EventGroup::Air,
+                Planet::Engulfed | Planet::TornApart | Planet::Unbound => EventGroup::Orbit,
+            },
+            Self::RisesAboveFreezing
+            | Self::FallsBelowFreezing
+            | Self::RisesAboveBoiling
+            | Self::FallsBelowBoiling
+            | Self::HottestSurface => EventGroup::Climate,
+            Self::GiantNearest => EventGroup::Orbit,
+        }
+    }
+
+    /// The key of the method in [`METHODS`](super::provenance::METHODS) whose rule fires it.
+    #[must_use]
+    pub fn method(self) -> &'static str {
+        use PlanetEventKind as Planet;
+        match self {
+            Self::Star(_) => "star_life",
+            Self::Colour(_) => "blackbody",
+            Self::Planet(kind) => match kind {
+                Planet::EntersHabitableZone
+                | Planet::TooMuchLight
+                | Planet::TooLittleLight
+                | Planet::RunawayGreenhouse
+                | Planet::Condenses => "habitable_zone",
+                Planet::Freezes | Planet::Thaws | Planet::ThawsToSteam => "climate",
+                Planet::MoistGreenhouse | Planet::MoistEnds => "moist_greenhouse",
+                Planet::WaterGone => "water_loss",
+                Planet::AtmosphereLost => "shoreline",
+                Planet::ProbablyLocked | Planet::Locked => "tidal_lock",
+                Planet::Engulfed | Planet::TornApart | Planet::Unbound => "orbit",
+            },
+            Self::RisesAboveFreezing
+            | Self::FallsBelowFreezing
+            | Self::RisesAboveBoiling
+            | Self::FallsBelowBoiling
+            | Self::HottestSurface => "surface_temperature",
+            Self::GiantNearest => "orbit",
         }
     }
 }
 
 impl Event {
-    /// The event with its body: `Hearth: swallowed by the star`; a star's event stands alone.
+    /// The event with its body: `Hearth: engulfed by the star`; a star's event stands alone.
     #[must_use]
     pub fn label(&self, history: &History) -> String {
         match self.body {
-            Body::Star => self.kind.name().to_owned(),
+            Body::Star => self.kind.name().into_owned(),
             Body::Planet(index) => match history.system().planets.get(index) {
                 Some(planet) => format!("{}: {}", planet.name, self.kind.name()),
-                None => self.kind.name().to_owned(),
+                None => self.kind.name().into_owned(),
             },
         }
     }
@@ -96,87 +225,18 @@ pub(super) fn of(history: &History) -> Vec<Event> {
         .life()
         .events()
         .iter()
-        .map(|event| Event { time_yr: event.age_yr, body: Body::Star, kind: EventKind::Star(event.kind) })
+        .map(|event| Event {
+            time_yr: event.age_yr,
+            body: Body::Star,
+            kind: EventKind::Star(event.kind),
+            caution: None,
+            band: None,
+        })
         .collect();
+    events.extend(star_colours::changes(history));
     for index in 0..history.planets().len() {
-        planet_events(history, index, &mut events);
+        planet_events::push(history, index, &mut events);
     }
     events.sort_by(|first, second| first.time_yr.total_cmp(&second.time_yr));
     events
-}
-
-fn planet_events(history: &History, index: usize, events: &mut Vec<Event>) {
-    let body = Body::Planet(index);
-    let past = &history.planets()[index];
-    let end = past.end();
-    if let Some((time_yr, end)) = end {
-        let kind = if end == OrbitEnd::Unbound { EventKind::Unbound } else { EventKind::Engulfed };
-        events.push(Event { time_yr, body, kind });
-    }
-    let until_yr = end.map_or(history.shown_until_yr(), |(time_yr, _)| time_yr);
-    let reading = |time_yr: f64| Reading::of(&past.moment(time_yr, &history.star_at(time_yr)));
-    let ages: Vec<f64> = history.life().node_ages_yr().iter().copied().filter(|age_yr| *age_yr < until_yr).collect();
-    for pair in ages.windows(2) {
-        let (before, after) = (reading(pair[0]), reading(pair[1]));
-        for crossing in Crossing::ALL {
-            let (Some(was), Some(is)) = (crossing.side(&before), crossing.side(&after)) else { continue };
-            if was != is {
-                let time_yr = halve(pair[0], pair[1], |time_yr| crossing.side(&reading(time_yr)) == Some(was));
-                events.push(Event { time_yr, body, kind: crossing.event(is) });
-            }
-        }
-    }
-}
-
-/// What crossings are looked for in.
-struct Reading {
-    surface_temperature_k: Option<f64>,
-    zone: Option<ZonePlace>,
-}
-
-impl Reading {
-    fn of(moment: &PlanetMoment) -> Self {
-        Self { surface_temperature_k: moment.surface_temperature_k, zone: moment.zone }
-    }
-}
-
-/// A line a planet can cross both ways.
-#[derive(Clone, Copy)]
-enum Crossing {
-    Freezing,
-    Boiling,
-    Zone,
-}
-
-impl Crossing {
-    const ALL: [Self; 3] = [Self::Freezing, Self::Boiling, Self::Zone];
-
-    /// On which side the planet is: above, or inside the zone.
-    fn side(self, reading: &Reading) -> Option<bool> {
-        match self {
-            Self::Freezing => reading.surface_temperature_k.map(|surface_k| surface_k >= FREEZING_K),
-            Self::Boiling => reading.surface_temperature_k.map(|surface_k| surface_k > BOILING_K),
-            Self::Zone => reading.zone.map(|zone| zone == ZonePlace::Conservative),
-        }
-    }
-
-    fn event(self, is_above: bool) -> EventKind {
-        match (self, is_above) {
-            (Self::Freezing, true) => EventKind::Thaws,
-            (Self::Freezing, false) => EventKind::Freezes,
-            (Self::Boiling, true) => EventKind::TooHot,
-            (Self::Boiling, false) => EventKind::CoolsBelowBoiling,
-            (Self::Zone, true) => EventKind::EntersZone,
-            (Self::Zone, false) => EventKind::LeavesZone,
-        }
-    }
-}
-
-/// The time at which a condition that holds at the start stops holding, by halving.
-fn halve(mut start_yr: f64, mut end_yr: f64, holds: impl Fn(f64) -> bool) -> f64 {
-    for _ in 0..48 {
-        let middle_yr = 0.5 * (start_yr + end_yr);
-        if holds(middle_yr) { start_yr = middle_yr } else { end_yr = middle_yr }
-    }
-    end_yr
 }

@@ -6,7 +6,7 @@ use super::notes::{self, Note};
 use super::planet_past::PlanetPast;
 use super::specification::{Body, System, SystemProblem};
 use crate::physics::light::DRAPER_POINT_K;
-use crate::physics::planet::StarPoint;
+use crate::physics::planet::{OutOfRange, StarPoint};
 use crate::physics::star::{END_YR, LifeOptions, PhaseSpan, StarError, StarInput, StarState, WholeLife};
 use std::ops::ControlFlow;
 use thiserror::Error;
@@ -20,6 +20,14 @@ pub enum HistoryError {
     /// The star is outside what can be computed.
     #[error("{0}")]
     Star(StarError),
+    /// A planet cannot be carried along its star's life.
+    #[error("planet \"{name}\": {refusal}")]
+    Planet {
+        /// Its name.
+        name: String,
+        /// What was refused.
+        refusal: OutOfRange,
+    },
     /// The computation was asked to stop.
     #[error("the computation was cancelled")]
     Cancelled,
@@ -104,7 +112,8 @@ impl History {
         let count = system.planets.len();
         let mut planets: Vec<PlanetPast> = Vec::with_capacity(count);
         for planet in &system.planets {
-            planets.push(PlanetPast::walk(planet.clone(), &points));
+            let walked = PlanetPast::walk(planet.clone(), &points);
+            planets.push(walked.map_err(|refusal| HistoryError::Planet { name: planet.name.clone(), refusal })?);
             let share = planets.len() as f64 / count as f64;
             if progress(STAR_SHARE + (1.0 - STAR_SHARE) * share).is_break() {
                 return Err(HistoryError::Cancelled);
@@ -241,7 +250,8 @@ fn star_points(life: &WholeLife) -> Vec<StarPoint> {
     points
 }
 
-fn star_point(state: &StarState, lost_mass_suddenly: bool) -> StarPoint {
+/// The star as planets feel it.
+pub(super) fn star_point(state: &StarState, lost_mass_suddenly: bool) -> StarPoint {
     StarPoint {
         age_yr: state.age_yr,
         mass_msun: state.mass_msun,

@@ -57,7 +57,11 @@ impl Limit {
 
 /// A bound as a person would write it: no trailing zeros.
 fn bound(value: f64) -> String {
-    if value != 0.0 && !(1e-4..1e6).contains(&value.abs()) { number(value, 1) } else { format!("{value}").replace('-', "−") }
+    if value != 0.0 && !(1e-4..1e6).contains(&value.abs()) {
+        number(value, 1)
+    } else {
+        format!("{value}").replace('-', "−")
+    }
 }
 
 /// Mass of the star at birth.
@@ -170,8 +174,63 @@ pub const SURFACE_PRESSURE: Limit = Limit {
     meaning: "Pressure of the air at the ground, held fixed; it makes the sky.",
 };
 
+/// Mean temperature that rocks and volcanoes hold.
+pub const REGULATED_MEAN: Limit = Limit {
+    key: "mean_k",
+    name: "Held mean",
+    lowest: 275.0,
+    highest: 310.0,
+    entry: EntryKind::TemperatureK,
+    meaning: "Mean surface temperature that weathering and volcanoes hold by adjusting carbon dioxide, as long as they can.",
+};
+/// Partial pressure of carbon dioxide.
+pub const CARBON_DIOXIDE: Limit = Limit {
+    key: "carbon_dioxide_bar",
+    name: "CO₂",
+    lowest: 1e-4,
+    highest: 3.0,
+    entry: EntryKind::PressureBar,
+    meaning: "Partial pressure of carbon dioxide, held fixed; 0.00028 bar on the Earth before industry.",
+};
+/// Water of a planet.
+pub const WATER: Limit = Limit {
+    key: "water_oceans",
+    name: "Water, oceans",
+    lowest: 1e-3,
+    highest: 1000.0,
+    entry: EntryKind::Plain,
+    meaning: "Water at the start, in oceans of the Earth (1.4 × 10²¹ kg).",
+};
+/// Tilt of a planet's axis.
+pub const OBLIQUITY: Limit = Limit {
+    key: "obliquity_deg",
+    name: "Axial tilt",
+    lowest: 0.0,
+    highest: 90.0,
+    entry: EntryKind::AngleDeg,
+    meaning: "Tilt of the axis against the orbit.",
+};
+/// Heat transport between latitudes.
+pub const HEAT_TRANSPORT: Limit = Limit {
+    key: "heat_transport_w_m2_k",
+    name: "Heat transport",
+    lowest: 0.3,
+    highest: 3.0,
+    entry: EntryKind::Plain,
+    meaning: "Heat that air and sea carry between latitudes, W m⁻² K⁻¹; 0.565 on the Earth, more under denser air or a longer day.",
+};
+/// Age at which a planet has its ocean.
+pub const OCEAN_AFTER: Limit = Limit {
+    key: "ocean_after_yr",
+    name: "Ocean after",
+    lowest: 0.0,
+    highest: 1e12,
+    entry: EntryKind::SpanYr,
+    meaning: "Age of the star when the planet has its ocean; climate and loss of water begin then.",
+};
+
 /// Every limit, for tables in documents and tests.
-pub const ALL: [&Limit; 12] = [
+pub const ALL: [&Limit; 18] = [
     &STAR_MASS,
     &METALLICITY,
     &PRESENT_AGE,
@@ -184,6 +243,12 @@ pub const ALL: [&Limit; 12] = [
     &GREENHOUSE_INCREMENT,
     &OPTICAL_DEPTH,
     &SURFACE_PRESSURE,
+    &REGULATED_MEAN,
+    &CARBON_DIOXIDE,
+    &WATER,
+    &OBLIQUITY,
+    &HEAT_TRANSPORT,
+    &OCEAN_AFTER,
 ];
 
 /// Most planets a system may hold.

@@ -4,30 +4,37 @@
 //! Nothing here knows a file, a screen or a clock.
 
 pub mod air;
+pub mod date_band;
 pub mod events;
 pub mod history;
 mod light_notes;
 pub mod light_quantities;
 pub mod limits;
+pub mod mild_spans;
 pub mod moment;
 pub mod moment_light;
 pub mod notes;
 pub mod pacing;
+pub mod planet_choices;
+mod planet_events;
 pub mod planet_light;
 pub mod planet_past;
 pub mod provenance;
 pub mod quantities;
 pub mod specification;
+mod star_colours;
 pub mod starlight;
 pub mod ticks;
 
 pub use air::Air;
-pub use events::{Event, EventKind};
+pub use date_band::DateBand;
+pub use events::{Event, EventFilter, EventGroup, EventKind};
 pub use history::{History, HistoryError};
 pub use moment::{Moment, PlanetMoment, PlanetState, StarMoment};
 pub use moment_light::{LightReader, MomentLight};
 pub use notes::{Note, NoteKind};
 pub use pacing::{TimeAxis, TimeScale};
+pub use planet_choices::{Carbon, TidesChoice, Water};
 pub use planet_light::PlanetLight;
 pub use specification::{Body, Fault, PlanetSpecification, StarSpecification, System, SystemProblem};
 pub use starlight::{StarColour, Starlight};

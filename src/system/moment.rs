@@ -2,7 +2,9 @@
 
 use super::notes::Note;
 use crate::physics::light::{Swatch, blackbody_swatch, colour_words};
+use crate::physics::planet::Caution;
 use crate::physics::planet::habitable_zone::{ZoneLimit, ZonePlace, limit_flux};
+use crate::physics::planet::tides::LockLevel;
 use crate::physics::star::{Phase, StarState};
 use crate::units::constants::WIEN_M_K;
 
@@ -89,12 +91,20 @@ fn zone_au(state: &StarState) -> Option<[f64; 2]> {
 /// What a planet is like, in one word.
 #[derive(Clone, Copy, Debug, PartialEq, Eq, Hash, PartialOrd, Ord)]
 pub enum PlanetState {
-    /// The mean surface temperature is below the freezing point of water.
+    /// Ice from pole to pole; without a climate model, a mean surface temperature below the freezing point of water.
     Frozen,
-    /// The mean surface temperature lies between the freezing and boiling points of water at 1 bar.
+    /// Open water; without a climate model, a mean surface temperature between freezing and boiling at 1 bar.
     Temperate,
-    /// The mean surface temperature is above the boiling point of water at 1 bar.
+    /// Open water under a wet upper air, from which hydrogen leaks away.
+    Moist,
+    /// The oceans are steam.
+    Runaway,
+    /// The water is gone for good.
+    Dry,
+    /// Without a climate model: the mean surface temperature is above the boiling point of water at 1 bar.
     TooHot,
+    /// The star's tide tore the planet apart.
+    TornApart,
     /// The star swallowed the planet.
     Engulfed,
     /// The planet left the star.
@@ -105,8 +115,18 @@ pub enum PlanetState {
 
 impl PlanetState {
     /// Every state.
-    pub const ALL: [Self; 6] =
-        [Self::Frozen, Self::Temperate, Self::TooHot, Self::Engulfed, Self::Unbound, Self::Dark];
+    pub const ALL: [Self; 10] = [
+        Self::Frozen,
+        Self::Temperate,
+        Self::Moist,
+        Self::Runaway,
+        Self::Dry,
+        Self::TooHot,
+        Self::TornApart,
+        Self::Engulfed,
+        Self::Unbound,
+        Self::Dark,
+    ];
 
     /// Stable machine name.
     #[must_use]
@@ -114,7 +134,11 @@ impl PlanetState {
         match self {
             Self::Frozen => "frozen",
             Self::Temperate => "temperate",
+            Self::Moist => "moist",
+            Self::Runaway => "runaway",
+            Self::Dry => "dry",
             Self::TooHot => "too_hot",
+            Self::TornApart => "torn_apart",
             Self::Engulfed => "engulfed",
             Self::Unbound => "unbound",
             Self::Dark => "dark",
@@ -127,7 +151,11 @@ impl PlanetState {
         match self {
             Self::Frozen => "frozen",
             Self::Temperate => "temperate",
+            Self::Moist => "moist",
+            Self::Runaway => "runaway",
+            Self::Dry => "dry",
             Self::TooHot => "too hot",
+            Self::TornApart => "torn apart",
             Self::Engulfed => "engulfed",
             Self::Unbound => "unbound",
             Self::Dark => "dark",
@@ -137,7 +165,7 @@ impl PlanetState {
     /// Whether the planet still exists and orbits the star.
     #[must_use]
     pub fn orbits(self) -> bool {
-        !matches!(self, Self::Engulfed | Self::Unbound)
+        !matches!(self, Self::Engulfed | Self::TornApart | Self::Unbound)
     }
 }
 
@@ -158,10 +186,62 @@ pub struct PlanetMoment {
     pub insolation_earth: Option<f64>,
     /// Equilibrium temperature, K.
     pub equilibrium_temperature_k: Option<f64>,
-    /// Surface temperature with greenhouse, inner heat and cosmic background, K.
+    /// Mean surface temperature, K; `None` where only a bound is known.
     pub surface_temperature_k: Option<f64>,
+    /// The mean surface temperature is above this, K, and by how much is not known.
+    pub surface_hotter_than_k: Option<f64>,
+    /// How far the surface temperature can be trusted.
+    pub surface_caution: Option<Caution>,
+    /// Share of the surface under ice.
+    pub ice_fraction: Option<f64>,
+    /// Latitude of the ice line, degrees.
+    pub ice_line_deg: Option<f64>,
+    /// Surface temperature at the equator and at the poles, K.
+    pub equator_pole_k: Option<(f64, f64)>,
+    /// Partial pressure of carbon dioxide, bar.
+    pub carbon_dioxide_bar: Option<f64>,
+    /// Water left, oceans of the Earth.
+    pub water_oceans: Option<f64>,
+    /// High-energy light received, W m⁻².
+    pub high_energy_w_m2: Option<f64>,
+    /// Place against the shoreline of air, 1 for the Earth today.
+    pub shoreline_ratio: Option<f64>,
+    /// Whether the planet keeps one face to the star.
+    pub lock: Option<LockLevel>,
+    /// How far the orbit's fate can be trusted.
+    pub orbit_caution: Option<Caution>,
     /// Angle that the star's disc fills in the planet's sky at mean distance, degrees.
     pub star_angular_diameter_deg: Option<f64>,
     /// Place in the habitable zone.
     pub zone: Option<ZonePlace>,
+}
+
+impl PlanetMoment {
+    /// A planet of which nothing can be said.
+    #[must_use]
+    pub(super) fn nothing(name: String) -> Self {
+        Self {
+            name,
+            state: PlanetState::Dark,
+            semi_major_axis_au: None,
+            eccentricity: None,
+            period_yr: None,
+            insolation_earth: None,
+            equilibrium_temperature_k: None,
+            surface_temperature_k: None,
+            surface_hotter_than_k: None,
+            surface_caution: None,
+            ice_fraction: None,
+            ice_line_deg: None,
+            equator_pole_k: None,
+            carbon_dioxide_bar: None,
+            water_oceans: None,
+            high_energy_w_m2: None,
+            shoreline_ratio: None,
+            lock: None,
+            orbit_caution: None,
+            star_angular_diameter_deg: None,
+            zone: None,
+        }
+    }
 }

@@ -2,8 +2,9 @@
 
 use super::moment::{PlanetMoment, PlanetState};
 use super::specification::{Body, PlanetSpecification};
-use crate::physics::planet::Greenhouse;
 use crate::physics::planet::habitable_zone::{ZoneLimit, limit_flux};
+use crate::physics::planet::tides::LockLevel;
+use crate::physics::planet::{Caution, Greenhouse};
 use crate::physics::star::{StarCaution, StarState, WholeLife};
 
 /// A remark about one quantity of one body.
@@ -145,12 +146,68 @@ pub(super) fn of_planet(
             NoteKind::OrderOfMagnitude,
             format!("{name}: away from its star only inner heat like the Earth's and the cosmic background warm it"),
         );
-    } else if moment.surface_temperature_k.is_some() && specification.greenhouse != Greenhouse::None {
+    } else if moment.surface_caution == Some(Caution::HeldByUser) && specification.greenhouse != Greenhouse::None {
         note(
             "surface_temperature_k",
             NoteKind::HeldFixed,
             format!("{name}: the greenhouse effect is held fixed; it knows nothing of ice, lost air or boiling seas"),
         );
+    }
+    match moment.surface_caution {
+        Some(Caution::Extrapolated) => note(
+            "surface_temperature_k",
+            NoteKind::Extrapolated,
+            format!("{name}: its climate was computed for stars of 2600 to 7200 K; the nearest of these is used"),
+        ),
+        Some(Caution::OrderOfMagnitude) => note(
+            "surface_temperature_k",
+            NoteKind::OrderOfMagnitude,
+            format!("{name}: it keeps one face to its star, so bands of latitude stand in for day and night"),
+        ),
+        _ => {}
+    }
+    if moment.surface_hotter_than_k.is_some() {
+        note(
+            "surface_temperature_k",
+            NoteKind::NotModelled,
+            format!("{name}: under steam only a bound of the surface temperature is known"),
+        );
+    }
+    if moment.state == PlanetState::Frozen && moment.water_oceans.is_some() {
+        note(
+            "ice_fraction",
+            NoteKind::Limited,
+            format!("{name}: the starlight that thaws it is known to 20 %, since the albedo of its ice decides"),
+        );
+    }
+    if moment.shoreline_ratio.is_some() {
+        note(
+            "shoreline_ratio",
+            NoteKind::OrderOfMagnitude,
+            format!("{name}: what high-energy light has done to its air and water is known to an order of magnitude"),
+        );
+    }
+    if moment.lock.is_some_and(|lock| lock != LockLevel::Free) {
+        note(
+            "tidal_lock",
+            NoteKind::OrderOfMagnitude,
+            format!("{name}: how fast tides brake its turning is known to an order of magnitude"),
+        );
+    }
+    match moment.orbit_caution {
+        Some(Caution::Undecided) => note(
+            "semi_major_axis_au",
+            NoteKind::Limited,
+            format!(
+                "{name}: its fate is undecided, for forms of the tide disagree or the giant misses it by under 15 %"
+            ),
+        ),
+        Some(Caution::NotApplicable) => note(
+            "semi_major_axis_au",
+            NoteKind::OrderOfMagnitude,
+            format!("{name}: at times its star loses mass faster than it goes round, which the orbit does not follow"),
+        ),
+        _ => {}
     }
     notes
 }

@@ -1,10 +1,15 @@
 //! One planet carried along its star's life.
 
+use super::history::star_point;
 use super::moment::{PlanetMoment, PlanetState};
 use super::specification::PlanetSpecification;
 use crate::physics::planet::deep_time::InnerHeat;
-use crate::physics::planet::habitable_zone::zone_place;
-use crate::physics::planet::{OrbitEnd, OrbitHistory, OrbitInput, StarPoint, irradiation, orbit, transit};
+use crate::physics::planet::history::SurfaceTemperature;
+use crate::physics::planet::tides::Spin;
+use crate::physics::planet::{
+    ClimateState, OrbitEnd, OrbitInput, OutOfRange, PlanetHistory, PlanetInput, PlanetMoment as Reading, StarPoint,
+    escape, irradiation, transit,
+};
 use crate::physics::star::StarState;
 use crate::units::constants::SOLAR_CONSTANT_W_M2;
 
@@ -13,25 +18,21 @@ pub const FREEZING_K: f64 = 273.15;
 /// Boiling point of water at 1 bar, K. Common practice.
 pub const BOILING_K: f64 = 373.15;
 
-/// A planet with its whole orbit history.
+/// A planet with its whole history: orbit, climate, water, rotation, air.
 #[derive(Debug)]
 pub struct PlanetPast {
     specification: PlanetSpecification,
-    /// `None` only when the walk refused its input, which checked systems never cause.
-    orbit: Option<OrbitHistory>,
+    history: PlanetHistory,
 }
 
 impl PlanetPast {
     /// Carries a planet along the star's nodes.
-    #[must_use]
-    pub fn walk(specification: PlanetSpecification, points: &[StarPoint]) -> Self {
-        let input = OrbitInput {
-            semi_major_axis_au: specification.semi_major_axis_au,
-            eccentricity: specification.eccentricity,
-            mass_mearth: specification.mass_mearth,
-            radius_rearth: specification.radius_rearth,
-        };
-        Self { orbit: OrbitHistory::walk(&input, points).ok(), specification }
+    ///
+    /// # Errors
+    /// [`OutOfRange`] for a planet outside what can be walked, which the limits of a checked system exclude.
+    pub fn walk(specification: PlanetSpecification, points: &[StarPoint]) -> Result<Self, OutOfRange> {
+        let history = PlanetHistory::walk(&input(&specification), points)?;
+        Ok(Self { specification, history })
     }
 
     /// The planet's inputs.
@@ -40,74 +41,137 @@ impl PlanetPast {
         &self.specification
     }
 
+    /// Everything that has memory, as it was walked.
+    #[must_use]
+    pub fn history(&self) -> &PlanetHistory {
+        &self.history
+    }
+
     /// When and how the orbit ends, if it does.
     #[must_use]
     pub fn end(&self) -> Option<(f64, OrbitEnd)> {
-        self.orbit.as_ref().and_then(OrbitHistory::end)
+        self.history.orbit().end()
+    }
+
+    /// The mean surface temperature under the greenhouse that the user holds, K, for a star at an age: what a planet
+    /// without a climate of its own has. `None` after the end of the orbit and beside a star whose light is not known.
+    #[must_use]
+    pub fn held_surface_k(&self, star: &StarState) -> Option<f64> {
+        let place = self.history.orbit().at(star.age_yr).filter(|_| !star.phase.is_dark())?;
+        let planet = &self.specification;
+        let insolation = irradiation::orbit_mean_insolation_earth(
+            star.luminosity_lsun,
+            place.semi_major_axis_au,
+            place.eccentricity,
+        )
+        .ok()?;
+        let from_star_k = irradiation::equilibrium_temperature_k(
+            insolation * SOLAR_CONSTANT_W_M2,
+            planet.bond_albedo,
+            planet.redistribution.factor(),
+            planet.emissivity,
+        );
+        let equilibrium_k = floor_k(from_star_k.ok()?, star.age_yr)?;
+        planet.greenhouse.surface_temperature_k(equilibrium_k).ok()
+    }
+
+    /// Whether the surface at an age answers to the climate model rather than to a greenhouse that is held.
+    #[must_use]
+    pub fn has_climate_at(&self, age_yr: f64) -> bool {
+        self.history.climate_state_at(age_yr).is_some_and(|state| state != ClimateState::Dry)
+    }
+
+    /// The orbit under every assumption on tides at an age: least and greatest semi-major axis, au, of those that
+    /// still have the planet on an orbit.
+    #[must_use]
+    pub fn orbit_range_au(&self, age_yr: f64) -> Option<[f64; 2]> {
+        let histories =
+            [self.history.orbit(), self.history.orbit_without_tides(), self.history.orbit_by_second_opinion()];
+        histories.into_iter().filter_map(|orbit| orbit.semi_major_axis_au_at(age_yr)).fold(None, |range, axis_au| {
+            let [low, high] = range.unwrap_or([axis_au, axis_au]);
+            Some([low.min(axis_au), high.max(axis_au)])
+        })
     }
 
     /// The planet's state at an age for the star's state at that age.
     #[must_use]
     pub fn moment(&self, time_yr: f64, star: &StarState) -> PlanetMoment {
-        let axis_au = self.orbit.as_ref().and_then(|orbit| orbit.semi_major_axis_au_at(time_yr));
-        let eccentricity = self.orbit.as_ref().and_then(|orbit| orbit.eccentricity_at(time_yr));
-        let mut moment = PlanetMoment {
-            name: self.specification.name.clone(),
-            state: PlanetState::Dark,
-            semi_major_axis_au: axis_au,
-            eccentricity,
-            period_yr: axis_au.and_then(|axis_au| {
-                orbit::period_yr(axis_au, star.mass_msun, self.specification.mass_mearth).ok()
-            }),
-            insolation_earth: None,
-            equilibrium_temperature_k: None,
-            surface_temperature_k: None,
-            star_angular_diameter_deg: None,
-            zone: None,
-        };
-        match (axis_au, eccentricity, self.end()) {
-            (Some(axis_au), Some(eccentricity), _) => self.light_the_planet(&mut moment, axis_au, eccentricity, star),
-            (_, _, Some((_, OrbitEnd::Unbound))) => {
+        let mut moment = PlanetMoment::nothing(self.specification.name.clone());
+        // The walk has accepted every node, so a star between two of them is accepted too.
+        match (self.history.at(&star_point(star, false)).ok().flatten(), self.end()) {
+            (Some(reading), _) => self.fill(&mut moment, &reading, star),
+            (None, Some((_, OrbitEnd::Unbound))) => {
                 moment.state = PlanetState::Unbound;
                 moment.equilibrium_temperature_k = Some(0.0);
                 moment.surface_temperature_k = floor_k(0.0, time_yr);
                 moment.insolation_earth = Some(0.0);
             }
-            _ => moment.state = PlanetState::Engulfed,
+            (None, Some((_, OrbitEnd::TornApart))) => moment.state = PlanetState::TornApart,
+            (None, Some((_, OrbitEnd::Engulfed))) => moment.state = PlanetState::Engulfed,
+            (None, None) => {}
         }
         moment
     }
 
-    fn light_the_planet(&self, moment: &mut PlanetMoment, axis_au: f64, eccentricity: f64, star: &StarState) {
-        moment.star_angular_diameter_deg = transit::angular_diameter_deg(star.radius_rsun, axis_au).ok();
+    fn fill(&self, moment: &mut PlanetMoment, reading: &Reading, star: &StarState) {
+        moment.semi_major_axis_au = Some(reading.semi_major_axis_au);
+        moment.eccentricity = Some(reading.eccentricity);
+        moment.period_yr = Some(reading.period_yr);
+        moment.star_angular_diameter_deg =
+            transit::angular_diameter_deg(star.radius_rsun, reading.semi_major_axis_au).ok();
+        moment.lock = Some(reading.lock);
+        moment.orbit_caution = self.history.orbit_caution();
         if star.phase.is_dark() {
             return;
         }
-        let planet = &self.specification;
-        let insolation = irradiation::orbit_mean_insolation_earth(star.luminosity_lsun, axis_au, eccentricity).ok();
-        moment.insolation_earth = insolation;
-        moment.equilibrium_temperature_k = insolation.and_then(|insolation| {
-            irradiation::equilibrium_temperature_k(
-                insolation * SOLAR_CONSTANT_W_M2,
-                planet.bond_albedo,
-                planet.redistribution.factor(),
-                planet.emissivity,
-            )
-            .ok()
-        });
-        moment.surface_temperature_k = moment
-            .equilibrium_temperature_k
-            .and_then(|equilibrium_k| planet.greenhouse.surface_temperature_k(equilibrium_k).ok())
-            .and_then(|surface_k| floor_k(surface_k, star.age_yr));
-        moment.zone = insolation.and_then(|insolation| {
-            zone_place(insolation, star.effective_temperature_k, planet.mass_mearth).ok()
-        });
-        moment.state = match moment.surface_temperature_k {
-            Some(surface_k) if surface_k < FREEZING_K => PlanetState::Frozen,
-            Some(surface_k) if surface_k <= BOILING_K => PlanetState::Temperate,
-            Some(_) => PlanetState::TooHot,
-            None => PlanetState::Dark,
+        moment.insolation_earth = Some(reading.mean_insolation_earth);
+        moment.equilibrium_temperature_k = Some(reading.equilibrium_temperature_k);
+        moment.zone = Some(reading.zone);
+        moment.high_energy_w_m2 = reading.high_energy_w_m2;
+        moment.shoreline_ratio = Some(reading.shoreline_ratio);
+        moment.surface_caution = reading.surface_caution;
+        match reading.surface {
+            SurfaceTemperature::Known(surface_k) => moment.surface_temperature_k = Some(surface_k),
+            SurfaceTemperature::HotterThan(bound_k) => moment.surface_hotter_than_k = Some(bound_k),
+        }
+        if let Some(climate) = &reading.climate {
+            moment.water_oceans = Some(climate.water_oceans);
+            moment.ice_fraction = climate.ice_fraction;
+            moment.ice_line_deg = climate.ice_line_deg;
+            moment.equator_pole_k = climate.equator_pole_k;
+            moment.carbon_dioxide_bar = climate.carbon_dioxide_bar;
+        }
+        moment.state = match (reading.climate.as_ref().map(|climate| climate.state), reading.surface.value_k()) {
+            (Some(ClimateState::Frozen), _) => PlanetState::Frozen,
+            (Some(ClimateState::Temperate), _) => PlanetState::Temperate,
+            (Some(ClimateState::Moist), _) => PlanetState::Moist,
+            (Some(ClimateState::Runaway), _) => PlanetState::Runaway,
+            (Some(ClimateState::Dry), _) => PlanetState::Dry,
+            (None, surface_k) if surface_k < FREEZING_K => PlanetState::Frozen,
+            (None, surface_k) if surface_k <= BOILING_K => PlanetState::Temperate,
+            (None, _) => PlanetState::TooHot,
         };
+    }
+}
+
+/// The planet as physics takes it: what nobody is asked about has its usual value.
+fn input(planet: &PlanetSpecification) -> PlanetInput {
+    PlanetInput {
+        orbit: OrbitInput {
+            semi_major_axis_au: planet.semi_major_axis_au,
+            eccentricity: planet.eccentricity,
+            mass_mearth: planet.mass_mearth,
+            radius_rearth: planet.radius_rearth,
+        },
+        bond_albedo: planet.bond_albedo,
+        emissivity: planet.emissivity,
+        redistribution: planet.redistribution,
+        greenhouse: planet.greenhouse,
+        inner_heat: InnerHeat::default(),
+        water: planet.water.map(|water| water.world()),
+        spin: Spin::usual(planet.mass_mearth),
+        tides: planet.tides.tides(planet.mass_mearth),
+        escape_efficiency: escape::USUAL_EFFICIENCY,
     }
 }
 

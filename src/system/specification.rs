@@ -2,6 +2,7 @@
 
 use super::air::Air;
 use super::limits::{self, Limit, OutOfLimit};
+use super::planet_choices::{TidesChoice, Water};
 use crate::physics::planet::{Greenhouse, Redistribution};
 use thiserror::Error;
 
@@ -46,10 +47,14 @@ pub struct PlanetSpecification {
     pub redistribution: Redistribution,
     /// Infrared emissivity, dimensionless.
     pub emissivity: f64,
-    /// Greenhouse effect, held fixed.
+    /// Greenhouse effect, held fixed; of a planet with a climate, the one it has when its water is gone.
     pub greenhouse: Greenhouse,
     /// Clear air that makes the sky, held fixed.
     pub air: Air,
+    /// Surface water whose climate answers to the star; `None` where the greenhouse effect alone counts.
+    pub water: Option<Water>,
+    /// Whether tides change the orbit.
+    pub tides: TidesChoice,
 }
 
 /// Where in a system a problem sits.
@@ -82,7 +87,10 @@ pub enum Fault {
     #[error("name is empty, allowed 1 to {} characters", limits::LONGEST_NAME)]
     NoName,
     /// A name too long or with a control character in it.
-    #[error("name is {length} characters long or holds control characters, allowed 1 to {} printable characters", limits::LONGEST_NAME)]
+    #[error(
+        "name is {length} characters long or holds control characters, allowed 1 to {} printable characters",
+        limits::LONGEST_NAME
+    )]
     BadName {
         /// Its length in characters.
         length: usize,
@@ -172,7 +180,7 @@ impl Default for StarSpecification {
 }
 
 impl PlanetSpecification {
-    /// Every number of the planet with its limit; those of greenhouse and air only where there is one.
+    /// Every number of the planet with its limit; those of greenhouse, air and water only where there is one.
     #[must_use]
     pub fn inputs(&self) -> Vec<(&'static Limit, f64)> {
         let mut inputs = vec![
@@ -189,6 +197,7 @@ impl PlanetSpecification {
             Greenhouse::Grey { optical_depth } => inputs.push((&limits::OPTICAL_DEPTH, optical_depth)),
         }
         inputs.extend(self.air.surface_pressure_bar().map(|pressure_bar| (&limits::SURFACE_PRESSURE, pressure_bar)));
+        inputs.extend(self.water.iter().flat_map(Water::inputs));
         inputs
     }
 }
@@ -206,6 +215,8 @@ impl Default for PlanetSpecification {
             emissivity: 1.0,
             greenhouse: Greenhouse::None,
             air: Air::default(),
+            water: None,
+            tides: TidesChoice::On,
         }
     }
 }

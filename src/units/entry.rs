@@ -8,6 +8,9 @@ use super::number_text::{machine, parse_number};
 use super::time_words::parse_span;
 use thiserror::Error;
 
+/// Zero degrees Celsius, K. Exact by definition (SI brochure).
+const CELSIUS_ZERO_K: f64 = 273.15;
+
 /// What a field holds, which decides the units it understands and the unit it is kept in.
 #[derive(Clone, Copy, Debug, PartialEq, Eq, Hash)]
 pub enum EntryKind {
@@ -21,6 +24,8 @@ pub enum EntryKind {
     RadiusRearth,
     /// A difference of temperature, kept in kelvin.
     TemperatureDifferenceK,
+    /// A temperature, kept in kelvin; degrees Celsius are understood.
+    TemperatureK,
     /// A span of time, kept in years.
     SpanYr,
     /// A pressure, kept in bar.
@@ -42,7 +47,7 @@ impl EntryKind {
             Self::MassMearth => "M⊕",
             Self::DistanceAu => "au",
             Self::RadiusRearth => "R⊕",
-            Self::TemperatureDifferenceK => "K",
+            Self::TemperatureDifferenceK | Self::TemperatureK => "K",
             Self::SpanYr => "yr",
             Self::PressureBar => "bar",
             Self::AngleDeg => "°",
@@ -96,6 +101,7 @@ impl EntryKind {
             Self::DistanceAu => DISTANCE_AU,
             Self::RadiusRearth => RADIUS_REARTH,
             Self::TemperatureDifferenceK => &[("°C", 1.0), ("K", 1.0), ("C", 1.0)],
+            Self::TemperatureK => &[("K", 1.0)],
             Self::SpanYr => &[],
             Self::PressureBar => PRESSURE_BAR,
             Self::AngleDeg => &[("degrees", 1.0), ("deg", 1.0), ("°", 1.0)],
@@ -143,6 +149,12 @@ pub fn parse_entry(text: &str, kind: EntryKind) -> Result<f64, EntryProblem> {
     if let Some(value) = parse_number(trimmed) {
         return Ok(value);
     }
+    if kind == EntryKind::TemperatureK {
+        let celsius = ["°C", "C"].iter().find_map(|unit| trimmed.strip_suffix(unit));
+        if let Some(value) = celsius.and_then(|number| parse_number(number.trim_end())) {
+            return Ok(value + CELSIUS_ZERO_K);
+        }
+    }
     for (unit, factor) in kind.units() {
         let cut = trimmed.len().saturating_sub(unit.len());
         if trimmed.is_char_boundary(cut)
@@ -182,6 +194,7 @@ pub fn write_entry(value: f64, kind: EntryKind) -> String {
 fn not_understood(text: &str, kind: EntryKind) -> EntryProblem {
     let known: Vec<&str> = match kind {
         EntryKind::SpanYr => vec!["Gyr", "trillion years", "yr"],
+        EntryKind::TemperatureK => vec!["K", "°C"],
         other => other.units().iter().map(|(unit, _)| *unit).take(4).collect(),
     };
     let examples = if known.is_empty() { String::new() } else { format!(", optionally with {}", known.join(", ")) };
@@ -204,6 +217,9 @@ mod tests {
         close("30 %", EntryKind::Plain, 0.3);
         close("400 mbar", EntryKind::PressureBar, 0.4);
         close("7.6 Gyr", EntryKind::SpanYr, 7.6e9);
+        close("15 °C", EntryKind::TemperatureK, 288.15);
+        close("-20C", EntryKind::TemperatureK, 253.15);
+        close("288 K", EntryKind::TemperatureK, 288.0);
     }
 
     #[test]

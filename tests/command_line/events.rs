@@ -7,7 +7,8 @@ fn three_forms_tell_the_same_events() {
     let list = json(["events", DEMO, "--format", "json"]);
     let list = list["events"].as_array().expect("events");
     let (header, rows) = records(&result(["events", DEMO, "--format", "csv"]));
-    assert_eq!(header, ["time_yr", "body", "planet_index", "event", "description"]);
+    assert_eq!(header[..5], ["time_yr", "body", "planet_index", "event", "description"]);
+    assert_eq!(header[5..], ["group", "earliest_yr", "latest_yr", "caution", "method"]);
     assert_eq!(rows.len(), list.len());
     let page = result(["events", DEMO]);
     let mut before_yr = 0.0;
@@ -22,6 +23,25 @@ fn three_forms_tell_the_same_events() {
     assert!(page.lines().all(|line| line.chars().count() <= 80));
     let keys: Vec<&str> = rows.iter().map(|row| row[3].as_str()).collect();
     assert!(keys.contains(&"main_sequence_end") && keys.contains(&"engulfed"), "{keys:?}");
+}
+
+#[test]
+fn events_can_be_chosen_by_body_and_kind() {
+    let list = json(["events", DEMO, "--format", "json", "--body", "Talune", "--kind", "zone", "--kind", "climate"]);
+    let list = list["events"].as_array().expect("events").clone();
+    assert!(!list.is_empty());
+    for event in &list {
+        assert_eq!(event["body"], "Talune");
+        assert!(event["group"] == "zone" || event["group"] == "climate", "{event}");
+        let (time, earliest, latest) =
+            (event["time_yr"].as_f64(), event["earliest_yr"].as_f64(), event["latest_yr"].as_f64());
+        assert!(earliest.is_none() || earliest <= time, "{event}");
+        assert!(latest.is_none() || latest >= time, "{event}");
+    }
+    assert!(list.iter().any(|event| event["group"] == "zone" && event["earliest_yr"].is_number()));
+    let refused = run_with_input(["events", DEMO, "--body", "Talun"], b"");
+    assert_eq!(refused.code, 3);
+    assert!(refused.messages.contains("Talune") && refused.messages.contains("star"), "{}", refused.messages);
 }
 
 #[test]

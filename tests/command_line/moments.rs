@@ -45,7 +45,7 @@ fn a_bare_star_has_events_but_no_present() {
 fn an_event_that_does_not_happen_brings_the_list_of_those_that_do() {
     let message = refusal(["state", DEMO, "--at", "event:\"core collapse, supernova\""], 3);
     assert!(message.contains("core collapse, supernova") && message.contains("\"largest radius\" at "), "{message}");
-    assert!(message.contains("\"Cindrel: swallowed by the star\" at "), "{message}");
+    assert!(message.contains("\"Cindrel: engulfed by the star\" at "), "{message}");
 }
 
 #[test]

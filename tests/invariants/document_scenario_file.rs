@@ -3,9 +3,9 @@
 
 use longember::document::{LoadError, Problem, Scenario, built_in, parse_scenario, scenario_from_bytes, scenario_text};
 use longember::physics::planet::{Greenhouse, Redistribution};
-use longember::system::Air;
 use longember::system::limits::{self, Limit};
 use longember::system::specification::{PlanetSpecification, StarSpecification, System};
+use longember::system::{Air, Carbon, TidesChoice, Water};
 use proptest::prelude::*;
 use proptest::sample::Index;
 use proptest::test_runner::TestCaseResult;
@@ -48,6 +48,8 @@ mod oracle {
         pub(super) emissivity: f64,
         pub(super) greenhouse: Greenhouse,
         pub(super) air: Air,
+        pub(super) climate: Climate,
+        pub(super) tides: Tides,
     }
 
     impl Default for Planet {
@@ -63,6 +65,8 @@ mod oracle {
                 emissivity: 1.0,
                 greenhouse: Greenhouse::None,
                 air: Air::EarthLike { surface_pressure_bar: 1.0 },
+                climate: Climate::None,
+                tides: Tides::On,
             }
         }
     }
@@ -89,6 +93,59 @@ mod oracle {
         Airless,
         EarthLike { surface_pressure_bar: f64 },
         CarbonDioxide { surface_pressure_bar: f64 },
+    }
+
+    #[derive(Deserialize)]
+    #[serde(deny_unknown_fields)]
+    pub(super) enum Climate {
+        None,
+        WaterWorld {
+            #[serde(default = "usual_carbon")]
+            carbon_dioxide: Carbon,
+            #[serde(default = "one")]
+            water_oceans: f64,
+            #[serde(default = "usual_obliquity")]
+            obliquity_deg: f64,
+            #[serde(default = "usual_transport")]
+            heat_transport_w_m2_k: f64,
+            #[serde(default)]
+            starts_frozen: bool,
+            #[serde(default = "usual_ocean")]
+            ocean_after_yr: f64,
+        },
+    }
+
+    #[derive(Deserialize)]
+    #[serde(deny_unknown_fields)]
+    pub(super) enum Carbon {
+        Regulated { mean_k: f64 },
+        Held { carbon_dioxide_bar: f64 },
+    }
+
+    #[derive(Deserialize)]
+    pub(super) enum Tides {
+        On,
+        Off,
+    }
+
+    fn usual_carbon() -> Carbon {
+        Carbon::Regulated { mean_k: 288.0 }
+    }
+
+    fn one() -> f64 {
+        1.0
+    }
+
+    fn usual_obliquity() -> f64 {
+        23.44
+    }
+
+    fn usual_transport() -> f64 {
+        0.56464
+    }
+
+    fn usual_ocean() -> f64 {
+        3e7
     }
 }
 
@@ -123,6 +180,31 @@ fn read_by_oracle(text: &str, ours: &Scenario) -> Result<Scenario, String> {
             oracle::Air::Airless => Air::None,
             oracle::Air::EarthLike { surface_pressure_bar } => Air::EarthLike { surface_pressure_bar },
             oracle::Air::CarbonDioxide { surface_pressure_bar } => Air::CarbonDioxide { surface_pressure_bar },
+        },
+        water: match planet.climate {
+            oracle::Climate::None => None,
+            oracle::Climate::WaterWorld {
+                carbon_dioxide,
+                water_oceans,
+                obliquity_deg,
+                heat_transport_w_m2_k,
+                starts_frozen,
+                ocean_after_yr,
+            } => Some(Water {
+                carbon: match carbon_dioxide {
+                    oracle::Carbon::Regulated { mean_k } => Carbon::Regulated { mean_k },
+                    oracle::Carbon::Held { carbon_dioxide_bar } => Carbon::Held { carbon_dioxide_bar },
+                },
+                water_oceans,
+                obliquity_deg,
+                heat_transport_w_m2_k,
+                starts_frozen,
+                ocean_after_yr,
+            }),
+        },
+        tides: match planet.tides {
+            oracle::Tides::On => TidesChoice::On,
+            oracle::Tides::Off => TidesChoice::Off,
         },
     });
     let star = StarSpecification {
@@ -165,6 +247,19 @@ fn air() -> impl Strategy<Value = Air> {
         .prop_map(|(kind, pressure_bar)| Air::KINDS[kind].at_pressure(pressure_bar))
 }
 
+fn water() -> impl Strategy<Value = Option<Water>> {
+    let carbon = prop_oneof![
+        value(&limits::REGULATED_MEAN).prop_map(|mean_k| Carbon::Regulated { mean_k }),
+        value(&limits::CARBON_DIOXIDE).prop_map(|carbon_dioxide_bar| Carbon::Held { carbon_dioxide_bar }),
+    ];
+    let numbers =
+        (value(&limits::WATER), value(&limits::OBLIQUITY), value(&limits::HEAT_TRANSPORT), value(&limits::OCEAN_AFTER));
+    prop::option::of((carbon, numbers, any::<bool>()).prop_map(|(carbon, numbers, starts_frozen)| {
+        let (water_oceans, obliquity_deg, heat_transport_w_m2_k, ocean_after_yr) = numbers;
+        Water { carbon, water_oceans, obliquity_deg, heat_transport_w_m2_k, starts_frozen, ocean_after_yr }
+    }))
+}
+
 fn planet() -> impl Strategy<Value = PlanetSpecification> {
     let numbers = (
         value(&limits::SEMI_MAJOR_AXIS),
@@ -174,7 +269,9 @@ fn planet() -> impl Strategy<Value = PlanetSpecification> {
         value(&limits::BOND_ALBEDO),
         value(&limits::EMISSIVITY),
     );
-    (name(), numbers, 0..4_usize, greenhouse(), air()).prop_map(|(name, numbers, redistribution, greenhouse, air)| {
+    let choices = (0..4_usize, greenhouse(), air(), water(), 0..2_usize);
+    (name(), numbers, choices).prop_map(|(name, numbers, choices)| {
+        let (redistribution, greenhouse, air, water, tides) = choices;
         let (semi_major_axis_au, eccentricity, mass_mearth, radius_rearth, bond_albedo, emissivity) = numbers;
         PlanetSpecification {
             name,
@@ -187,6 +284,8 @@ fn planet() -> impl Strategy<Value = PlanetSpecification> {
             emissivity,
             greenhouse,
             air,
+            water,
+            tides: TidesChoice::ALL[tides],
         }
     })
 }
@@ -396,6 +495,20 @@ fn each_kind_of_problem_reads_as_a_sentence() {
         (
             format!("(version: 1, title: \"T\", {star}, planets: [({ember}, redistribution: Dayside)])"),
             "planet 1 \"Ember\": redistribution is Dayside, allowed WholePlanet, DaySide, DaySideFullPhase, SubStellar; did you mean DaySide? (a.ron:1:182)",
+        ),
+        (
+            format!(
+                "(version: 1, title: \"T\", {star}, planets: [({ember}, climate: WaterWorld(carbon_dioxide: Held(carbon_dioxide_bar: 100)))])"
+            ),
+            "planet 1 \"Ember\": carbon_dioxide_bar is 100, allowed 0.0001 to 3 bar (a.ron:1:227)",
+        ),
+        (
+            format!("(version: 1, title: \"T\", {star}, planets: [({ember}, climate: WaterWorld(starts_frozen: 1))])"),
+            "planet 1 \"Ember\": starts_frozen is 1, allowed true, false (a.ron:1:201)",
+        ),
+        (
+            format!("(version: 1, title: \"T\", {star}, planets: [({ember}, climate: Waterworld)])"),
+            "planet 1 \"Ember\": climate is Waterworld, allowed None, WaterWorld; did you mean WaterWorld? (a.ron:1:175)",
         ),
         (
             format!("(version: 1, title: \"T\", {star}, planets: [({ember}, air: EarthLike)])"),

@@ -21,6 +21,8 @@ pub(super) const PLANET_KEYS: &[&str] = &[
     "emissivity",
     "greenhouse",
     "air",
+    "climate",
+    "tides",
 ];
 pub(super) const GREENHOUSES: &[&str] = &["None", "FixedIncrement", "Grey"];
 pub(super) const FIXED_INCREMENT_KEYS: &[&str] = &["increment_k"];
@@ -28,5 +30,15 @@ pub(super) const GREY_KEYS: &[&str] = &["optical_depth"];
 /// In the order of `Air::KINDS`.
 pub(super) const AIRS: &[&str] = &["Airless", "EarthLike", "CarbonDioxide"];
 pub(super) const AIR_KEYS: &[&str] = &["surface_pressure_bar"];
+pub(super) const CLIMATES: &[&str] = &["None", WATER_WORLD];
+pub(super) const WATER_WORLD: &str = "WaterWorld";
+pub(super) const WATER_KEYS: &[&str] =
+    &["carbon_dioxide", "water_oceans", "obliquity_deg", "heat_transport_w_m2_k", "starts_frozen", "ocean_after_yr"];
+/// In the order of `Carbon::KINDS`.
+pub(super) const CARBONS: &[&str] = &["Regulated", "Held"];
+pub(super) const REGULATED_KEYS: &[&str] = &["mean_k"];
+pub(super) const HELD_KEYS: &[&str] = &["carbon_dioxide_bar"];
+/// In the order of `TidesChoice::ALL`.
+pub(super) const TIDES: &[&str] = &["On", "Off"];
 /// In the order of `Redistribution::ALL`.
 pub(super) const REDISTRIBUTIONS: &[&str] = &["WholePlanet", "DaySide", "DaySideFullPhase", "SubStellar"];

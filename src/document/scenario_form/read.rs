@@ -1,8 +1,8 @@
 //! Text to scenario.
 
 use super::keys::{
-    AIR_KEYS, AIRS, CURRENT_VERSION, FIXED_INCREMENT_KEYS, GREENHOUSES, GREY_KEYS, PLANET_KEYS, REDISTRIBUTIONS,
-    SCENARIO, SCENARIO_KEYS, STAR_KEYS,
+    AIR_KEYS, AIRS, CARBONS, CLIMATES, CURRENT_VERSION, FIXED_INCREMENT_KEYS, GREENHOUSES, GREY_KEYS, HELD_KEYS,
+    PLANET_KEYS, REDISTRIBUTIONS, REGULATED_KEYS, SCENARIO, SCENARIO_KEYS, STAR_KEYS, TIDES, WATER_KEYS, WATER_WORLD,
 };
 use crate::document::problem::{Fault, Problem, Subject};
 use crate::document::record_reading::{Fields, Reading};
@@ -10,9 +10,9 @@ use crate::document::ron_text::{Node, Value, number_text};
 use crate::document::scenario::Scenario;
 use crate::physics::planet::bulk::default_radius_rearth;
 use crate::physics::planet::{Greenhouse, Redistribution};
-use crate::system::Air;
 use crate::system::limits::{self, Limit};
 use crate::system::specification::{self, Body, PlanetSpecification, StarSpecification, System};
+use crate::system::{Air, Carbon, TidesChoice, Water};
 use std::collections::HashMap;
 
 /// A scenario with what its text held besides.
@@ -187,6 +187,8 @@ fn read_planet(
         emissivity: body.optional_number(&limits::EMISSIVITY).unwrap_or(usual.emissivity),
         greenhouse: body.greenhouse().unwrap_or(usual.greenhouse),
         air: body.air().unwrap_or(usual.air),
+        water: body.climate(),
+        tides: body.tides().unwrap_or(usual.tides),
     })
 }
 
@@ -282,6 +284,62 @@ impl BodyReading<'_, '_, '_> {
                 None
             }
         }
+    }
+
+    fn tides(&mut self) -> Option<TidesChoice> {
+        let node = self.fields.given("tides")?;
+        if !matches!(node.value, Value::Name(_)) {
+            self.reading.wrong_kind(node, &self.fields.subject, "tides", TIDES.join(", "));
+            return None;
+        }
+        let index = self.reading.choice(node, &self.fields.subject, "tides", TIDES)?;
+        TidesChoice::ALL.get(index).copied()
+    }
+
+    fn climate(&mut self) -> Option<Water> {
+        let node = self.fields.given("climate")?;
+        self.reading.choice(node, &self.fields.subject, "climate", CLIMATES)?;
+        let subject = self.fields.subject.clone();
+        let mut inner = self.reading.fields(node, WATER_WORLD, "climate", WATER_KEYS, subject)?;
+        let usual = Water::default();
+        let mut water = BodyReading { reading: self.reading, fields: &mut inner, body: self.body, places: self.places };
+        Some(Water {
+            carbon: water.carbon().unwrap_or(usual.carbon),
+            water_oceans: water.optional_number(&limits::WATER).unwrap_or(usual.water_oceans),
+            obliquity_deg: water.optional_number(&limits::OBLIQUITY).unwrap_or(usual.obliquity_deg),
+            heat_transport_w_m2_k: water
+                .optional_number(&limits::HEAT_TRANSPORT)
+                .unwrap_or(usual.heat_transport_w_m2_k),
+            starts_frozen: water.truth("starts_frozen").unwrap_or(usual.starts_frozen),
+            ocean_after_yr: water.optional_number(&limits::OCEAN_AFTER).unwrap_or(usual.ocean_after_yr),
+        })
+    }
+
+    fn carbon(&mut self) -> Option<Carbon> {
+        let node = self.fields.given("carbon_dioxide")?;
+        let kind = self.reading.choice(node, &self.fields.subject, "carbon_dioxide", CARBONS)?;
+        if !matches!(node.value, Value::Record(_)) {
+            let allowed = "Regulated(mean_k: …), Held(carbon_dioxide_bar: …)".to_owned();
+            self.reading.wrong_kind(node, &self.fields.subject, "carbon_dioxide", allowed);
+            return None;
+        }
+        if kind == 0 {
+            let mean_k =
+                self.parameter(node, ("carbon_dioxide", CARBONS[0], REGULATED_KEYS), &limits::REGULATED_MEAN)?;
+            return Some(Carbon::Regulated { mean_k });
+        }
+        let carbon_dioxide_bar =
+            self.parameter(node, ("carbon_dioxide", CARBONS[1], HELD_KEYS), &limits::CARBON_DIOXIDE)?;
+        Some(Carbon::Held { carbon_dioxide_bar })
+    }
+
+    fn truth(&mut self, key: &'static str) -> Option<bool> {
+        let node = self.fields.given(key)?;
+        if let Value::Truth(truth) = node.value {
+            return Some(truth);
+        }
+        self.reading.wrong_kind(node, &self.fields.subject, key, "true, false".to_owned());
+        None
     }
 
     /// The one number in the brackets of a choice: `of` is the key of the choice, its name, and the key in the brackets.

@@ -1,11 +1,11 @@
 //! Scenario to text.
 
-use super::keys::{AIRS, CURRENT_VERSION, REDISTRIBUTIONS, SCENARIO};
+use super::keys::{AIRS, CARBONS, CURRENT_VERSION, REDISTRIBUTIONS, SCENARIO, TIDES, WATER_WORLD};
 use crate::document::ron_text::{Writer, number_text};
 use crate::document::scenario::Scenario;
 use crate::physics::planet::{Greenhouse, Redistribution};
-use crate::system::Air;
 use crate::system::specification::{PlanetSpecification, StarSpecification};
+use crate::system::{Air, Carbon, TidesChoice, Water};
 
 /// Writes a scenario in its file form, every key in a fixed order, one a line.
 ///
@@ -53,7 +53,39 @@ fn write_planet(writer: &mut Writer, planet: &PlanetSpecification) {
     writer.number("emissivity", planet.emissivity);
     writer.field("greenhouse", &greenhouse_text(planet.greenhouse));
     writer.field("air", &air_text(planet.air));
+    match &planet.water {
+        None => writer.field("climate", "None"),
+        Some(water) => write_water(writer, water),
+    }
+    writer.field("tides", tides_text(planet.tides));
     writer.close(')');
+}
+
+fn write_water(writer: &mut Writer, water: &Water) {
+    writer.open("climate", WATER_WORLD, '(');
+    writer.field("carbon_dioxide", &carbon_text(water.carbon));
+    writer.number("water_oceans", water.water_oceans);
+    writer.number("obliquity_deg", water.obliquity_deg);
+    writer.number("heat_transport_w_m2_k", water.heat_transport_w_m2_k);
+    writer.field("starts_frozen", if water.starts_frozen { "true" } else { "false" });
+    writer.number("ocean_after_yr", water.ocean_after_yr);
+    writer.close(')');
+}
+
+fn carbon_text(carbon: Carbon) -> String {
+    match carbon {
+        Carbon::Regulated { mean_k } => format!("{}(mean_k: {})", CARBONS[0], number_text(mean_k)),
+        Carbon::Held { carbon_dioxide_bar } => {
+            format!("{}(carbon_dioxide_bar: {})", CARBONS[1], number_text(carbon_dioxide_bar))
+        }
+    }
+}
+
+fn tides_text(tides: TidesChoice) -> &'static str {
+    match tides {
+        TidesChoice::On => TIDES[0],
+        TidesChoice::Off => TIDES[1],
+    }
 }
 
 fn redistribution_text(redistribution: Redistribution) -> &'static str {

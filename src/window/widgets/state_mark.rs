@@ -19,6 +19,30 @@ pub(crate) fn draw(painter: &Painter, centre: Pos2, state: PlanetState, ink: Col
         PlanetState::Temperate => {
             painter.circle_filled(centre, 5.0, ink);
         }
+        // A disc under its own cloud line.
+        PlanetState::Moist => {
+            painter.circle_filled(centre, 3.6, ink);
+            painter.line_segment([at(-6.0, -5.5), at(6.0, -5.5)], stroke);
+        }
+        // Three plumes of steam.
+        PlanetState::Runaway => {
+            for x in [-4.0, 0.0, 4.0] {
+                painter.line_segment([at(x - 1.0, 5.0), at(x + 1.0, 0.0)], stroke);
+                painter.line_segment([at(x + 1.0, 0.0), at(x - 1.0, -5.0)], stroke);
+            }
+        }
+        // A cracked square.
+        PlanetState::Dry => {
+            painter.add(Shape::closed_line(vec![at(-4.5, -4.5), at(4.5, -4.5), at(4.5, 4.5), at(-4.5, 4.5)], stroke));
+            painter.line_segment([at(-1.5, -4.5), at(1.5, 4.5)], stroke);
+        }
+        // Two halves drifting apart.
+        PlanetState::TornApart => {
+            painter.line_segment([at(-1.5, -5.0), at(-5.0, 0.0)], stroke);
+            painter.line_segment([at(-5.0, 0.0), at(-1.5, 5.0)], stroke);
+            painter.line_segment([at(1.5, -5.0), at(5.0, 0.0)], stroke);
+            painter.line_segment([at(5.0, 0.0), at(1.5, 5.0)], stroke);
+        }
         PlanetState::TooHot => {
             painter.add(Shape::closed_line(vec![at(0.0, -5.5), at(5.5, 4.5), at(-5.5, 4.5)], stroke));
         }
