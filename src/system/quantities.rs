@@ -46,13 +46,25 @@ pub struct PlanetQuantity {
 /// (Hurley, Pols & Tout 2000, section 5). White dwarfs and dark remnants have no such figure.
 const FIT_SPREAD: f64 = 0.05;
 
-fn fit_spread(star: &StarMoment) -> Option<f64> {
-    (!star.phase.is_remnant()).then_some(FIT_SPREAD)
+/// Agreement of computed red dwarfs with Baraffe et al. 2015 (A&A 577, A42) at 5 Gyr: luminosity, radius, temperature.
+const RED_DWARF_SPREADS: [f64; 3] = [0.06, 0.02, 0.02];
+
+fn spread(star: &StarMoment, of_fits: f64, of_red_dwarfs: f64) -> Option<f64> {
+    let spread = if star.interior.is_some() { of_red_dwarfs } else { of_fits };
+    (!star.phase.is_remnant()).then_some(spread)
+}
+
+fn luminosity_spread(star: &StarMoment) -> Option<f64> {
+    spread(star, FIT_SPREAD, RED_DWARF_SPREADS[0])
+}
+
+fn radius_spread(star: &StarMoment) -> Option<f64> {
+    spread(star, FIT_SPREAD, RED_DWARF_SPREADS[1])
 }
 
 /// T goes as L^¼ R^−½, so two independent spreads of 5 % make 2.8 %.
 fn temperature_spread(star: &StarMoment) -> Option<f64> {
-    fit_spread(star).map(|spread| spread * (1.0_f64 / 16.0 + 1.0 / 4.0).sqrt())
+    spread(star, FIT_SPREAD * (1.0_f64 / 16.0 + 1.0 / 4.0).sqrt(), RED_DWARF_SPREADS[2])
 }
 
 fn no_spread(_: &StarMoment) -> Option<f64> {
@@ -68,7 +80,7 @@ pub const STAR: &[StarQuantity] = &[
         digits: 4,
         method: "star_life",
         value: |star| star.luminosity_lsun,
-        spread: fit_spread,
+        spread: luminosity_spread,
     },
     StarQuantity {
         key: "radius_rsun",
@@ -77,7 +89,7 @@ pub const STAR: &[StarQuantity] = &[
         digits: 4,
         method: "star_life",
         value: |star| star.radius_rsun,
-        spread: fit_spread,
+        spread: radius_spread,
     },
     StarQuantity {
         key: "effective_temperature_k",
@@ -113,6 +125,51 @@ pub const STAR: &[StarQuantity] = &[
         digits: 3,
         method: "core_hydrogen",
         value: |star| star.core_hydrogen_fraction,
+        spread: no_spread,
+    },
+    StarQuantity {
+        key: "mean_hydrogen_fraction",
+        name: "Mean hydrogen",
+        symbol: "",
+        digits: 3,
+        method: "red_dwarf",
+        value: |star| star.interior.map(|interior| interior.mean_hydrogen_fraction),
+        spread: no_spread,
+    },
+    StarQuantity {
+        key: "core_helium3_fraction",
+        name: "Core helium-3",
+        symbol: "",
+        digits: 2,
+        method: "red_dwarf",
+        value: |star| star.interior.map(|interior| interior.core_helium3_fraction),
+        spread: no_spread,
+    },
+    StarQuantity {
+        key: "core_temperature_k",
+        name: "Core temp.",
+        symbol: "K",
+        digits: 3,
+        method: "red_dwarf",
+        value: |star| star.interior.map(|interior| interior.core_temperature_k),
+        spread: no_spread,
+    },
+    StarQuantity {
+        key: "core_density_g_cm3",
+        name: "Core density",
+        symbol: "g/cm³",
+        digits: 3,
+        method: "red_dwarf",
+        value: |star| star.interior.map(|interior| interior.core_density_g_cm3),
+        spread: no_spread,
+    },
+    StarQuantity {
+        key: "mixed_mass_fraction",
+        name: "Mixed share",
+        symbol: "",
+        digits: 2,
+        method: "red_dwarf",
+        value: |star| star.interior.map(|interior| interior.mixed_mass_fraction),
         spread: no_spread,
     },
     StarQuantity {
@@ -204,6 +261,46 @@ pub const PLANET: &[PlanetQuantity] = &[
         value: |planet| planet.water_oceans,
     },
     PlanetQuantity {
+        key: "surface_hotter_than_k",
+        name: "Surface above",
+        symbol: "K",
+        digits: 4,
+        method: "steam",
+        value: |planet| planet.surface_hotter_than_k,
+    },
+    PlanetQuantity {
+        key: "ice_fraction",
+        name: "Ice cover",
+        symbol: "",
+        digits: 2,
+        method: "climate",
+        value: |planet| planet.ice_fraction,
+    },
+    PlanetQuantity {
+        key: "ice_line_deg",
+        name: "Ice line",
+        symbol: "°",
+        digits: 3,
+        method: "climate",
+        value: |planet| planet.ice_line_deg,
+    },
+    PlanetQuantity {
+        key: "carbon_dioxide_bar",
+        name: "Carbon dioxide",
+        symbol: "bar",
+        digits: 2,
+        method: "carbon_dioxide",
+        value: |planet| planet.carbon_dioxide_bar,
+    },
+    PlanetQuantity {
+        key: "water_oceans",
+        name: "Water, oceans",
+        symbol: "",
+        digits: 2,
+        method: "water_loss",
+        value: |planet| planet.water_oceans,
+    },
+    PlanetQuantity {
         key: "equilibrium_temperature_k",
         name: "Equilibrium",
         symbol: "K",
@@ -250,6 +347,22 @@ pub const PLANET: &[PlanetQuantity] = &[
         digits: 3,
         method: "angular_diameter",
         value: |planet| planet.star_angular_diameter_deg,
+    },
+    PlanetQuantity {
+        key: "high_energy_w_m2",
+        name: "X-ray and EUV",
+        symbol: "W/m²",
+        digits: 2,
+        method: "high_energy",
+        value: |planet| planet.high_energy_w_m2,
+    },
+    PlanetQuantity {
+        key: "shoreline_ratio",
+        name: "Air shoreline",
+        symbol: "",
+        digits: 2,
+        method: "shoreline",
+        value: |planet| planet.shoreline_ratio,
     },
     PlanetQuantity {
         key: "high_energy_w_m2",

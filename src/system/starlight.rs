@@ -163,6 +163,7 @@ mod tests {
             core_mass_msun: None,
             mass_loss_msun_yr: 0.0,
             core_hydrogen_fraction: None,
+            interior: None,
             peak_wavelength_nm: None,
             swatch: Some(blackbody_swatch(temperature_k)),
             colour: colour_words(temperature_k),
