@@ -5,9 +5,13 @@ pub mod curves;
 pub mod distance;
 pub mod ribbon;
 pub mod samples;
+pub mod sky_picture;
+pub mod spectrum;
 pub mod value_axis;
 
 pub use chart::{Band, Chart, Level, Owner, Run, Series};
 pub use ribbon::Ribbon;
 pub use samples::Samples;
+pub use sky_picture::{SkyPicture, SkyView};
+pub use spectrum::{Spectrum, SpectrumView};
 pub use value_axis::{ValueAxis, ValueTick};

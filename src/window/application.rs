@@ -83,6 +83,7 @@ impl Longember {
         let context = ui.ctx().clone();
         self.receive(&context);
         self.play(&context);
+        self.workspace.follow_colour();
         let mut commands = if self.workspace.dialog.is_none() { command::from_keys(&context) } else { Vec::new() };
         commands.extend(dropped_files(&context));
         commands.extend(self.draw(ui));

@@ -5,6 +5,7 @@
 use super::pages::Page;
 use crate::document::{Scenario, Theme};
 use crate::figure::curves::Curve;
+use crate::figure::{SkyView, SpectrumView};
 use crate::system::{Body, TimeScale};
 use crate::units::time_words::SpanStyle;
 use egui::{Key, KeyboardShortcut, Modifiers};
@@ -56,6 +57,10 @@ pub enum Command {
     ShowPage(Page),
     /// Show or hide a chart.
     ToggleCurve(Curve),
+    /// Look at the spectrum in another way.
+    SetSpectrumView(SpectrumView),
+    /// Look at the sky in another way.
+    SetSkyView(SkyView),
     /// Choose a look.
     SetTheme(Theme),
     /// Write spans of time with symbols or in words.

@@ -98,6 +98,8 @@ impl Longember {
             }
             Command::Select(body) => workspace.selected = body,
             Command::ShowPage(page) => workspace.page = page,
+            Command::SetSpectrumView(view) => workspace.spectrum_view = view,
+            Command::SetSkyView(view) => workspace.sky_view = view,
             Command::ToggleCurve(curve) => {
                 if workspace.curves.contains(&curve) {
                     workspace.curves.retain(|shown| *shown != curve);

@@ -9,6 +9,8 @@ use super::theme::{self, Palette};
 use super::view::{View, WHOLE};
 use crate::document::{Scenario, Session, Settings, Theme};
 use crate::figure::curves::Curve;
+use crate::figure::{SkyView, SpectrumView};
+use crate::physics::light::steady_colour_words;
 use crate::system::{Body, History, Moment, TimeScale};
 use crate::units::number_text::USUAL_DIGITS;
 use crate::units::time_words::span;
@@ -39,6 +41,12 @@ pub struct Workspace {
     pub page: Page,
     /// Charts on the curves page.
     pub curves: Vec<Curve>,
+    /// How the spectrum is looked at.
+    pub spectrum_view: SpectrumView,
+    /// How the sky is looked at.
+    pub sky_view: SkyView,
+    /// The star's colour in words as it was last shown: it follows with a little delay, so as not to flicker.
+    pub(super) colour_words: &'static str,
     /// Playing.
     pub playback: Playback,
     /// Axis, samples, charts and ribbon for the history and view.
@@ -83,6 +91,9 @@ impl Workspace {
             selected: Body::Star,
             page: Page::Curves,
             curves,
+            spectrum_view: SpectrumView::default(),
+            sky_view: SkyView::default(),
+            colour_words: "",
             playback: Playback::default(),
             derived,
             dialog: None,
@@ -120,6 +131,16 @@ impl Workspace {
     #[must_use]
     pub fn moment(&self) -> Moment {
         self.history.moment(self.moment_yr)
+    }
+
+    /// Brings the words for the star's colour up to the moment.
+    pub(super) fn follow_colour(&mut self) {
+        let star = self.history.star_at(self.moment_yr);
+        self.colour_words = if star.phase.is_dark() {
+            "no light modelled"
+        } else {
+            steady_colour_words(Some(self.colour_words), star.effective_temperature_k)
+        };
     }
 
     /// Place of the moment in the view; outside 0 to 1 when it is not in view.

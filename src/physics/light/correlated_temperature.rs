@@ -107,7 +107,9 @@ pub fn correlated_temperature(colour: Chromaticity) -> Result<CorrelatedTemperat
         (nearest - 1, nearest)
     };
     let foot = foot_between(uv, LOCUS[hot], LOCUS[cool]);
-    let duv = distance(uv, foot.uv).copysign(uv[1] - foot.uv[1]);
+    // A blackbody's own colour lies on the locus; what is left there is rounding.
+    let apart = distance(uv, foot.uv);
+    let duv = if apart > 1e-12 { apart.copysign(uv[1] - foot.uv[1]) } else { 0.0 };
     if duv.abs() > LARGEST_DUV {
         return Err(NoCorrelatedTemperature::TooFarFromLocus { duv });
     }

@@ -66,8 +66,9 @@ pub use photons::{
     photosynthetic_light, ultraviolet_light,
 };
 pub use planck::{
-    FIRST_RADIATION_W_M2, SECOND_RADIATION_M_K, photon_energy_j, photon_radiance_per_s_m2_sr_nm, sampled_radiance,
-    spectral_exitance_w_m2_nm, spectral_radiance_w_m2_sr_nm, total_exitance_w_m2, wien_peak_nm, wien_peak_thz,
+    FIRST_RADIATION_W_M2, SECOND_RADIATION_M_K, photon_energy_j, photon_peak_nm, photon_radiance_per_s_m2_sr_nm,
+    sampled_radiance, spectral_exitance_w_m2_nm, spectral_radiance_w_m2_sr_nm, total_exitance_w_m2, wien_peak_nm,
+    wien_peak_thz,
 };
 pub use range::OutOfRange;
 pub use rayleigh::{Atmosphere, Gas, rayleigh_cross_section_m2};

@@ -95,6 +95,17 @@ pub fn wien_peak_thz(temperature_k: f64) -> Result<f64, OutOfRange> {
     Ok(WIEN_HZ_K * temperature(temperature_k)? * 1e-12)
 }
 
+/// Wavelength of the peak of the photon spectrum per unit wavelength, nm: c₂/(xT) with x = 4 (1 − e⁻ˣ).
+///
+/// # Source
+/// Maximum of the photon radiance, whose condition has the root x = 3.920 690 394 872 886.
+///
+/// # Errors
+/// [`OutOfRange`] for a temperature outside 1 to 10⁹ K.
+pub fn photon_peak_nm(temperature_k: f64) -> Result<f64, OutOfRange> {
+    Ok(SECOND_RADIATION_M_K / (3.920_690_394_872_886 * temperature(temperature_k)?) * 1e9)
+}
+
 /// Exitance of a blackbody over all wavelengths, W m⁻²: σT⁴.
 ///
 /// # Source
@@ -154,6 +165,13 @@ mod tests {
             let at = |wavelength_nm| spectral_radiance_w_m2_sr_nm(wavelength_nm, temperature_k).expect("in range");
             assert!(at(peak_nm) > at(peak_nm * 0.999) && at(peak_nm) > at(peak_nm * 1.001));
         }
+    }
+
+    #[test]
+    fn the_peak_of_photons_stands_where_they_are_most() {
+        let at = |wavelength_nm| photon_radiance_per_s_m2_sr_nm(wavelength_nm, 5772.0).expect("in range");
+        let peak_nm = photon_peak_nm(5772.0).expect("in range");
+        assert!(at(peak_nm) > at(peak_nm * 0.999) && at(peak_nm) > at(peak_nm * 1.001));
     }
 
     #[test]

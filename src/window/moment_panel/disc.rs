@@ -15,7 +15,7 @@ const SMALLEST: f32 = 1.5;
 pub(super) fn show(ui: &mut Ui, workspace: &Workspace, moment: &Moment) {
     let palette = workspace.palette();
     let (rect, response) = ui.allocate_exact_size(vec2(ui.available_width(), 112.0), Sense::hover());
-    response.widget_info(|| WidgetInfo::labeled(Role::Image, true, description(moment)));
+    response.widget_info(|| WidgetInfo::labeled(Role::Image, true, description(workspace, moment)));
     ui.painter().rect_filled(rect, 4.0, palette.bed);
     let painter = ui.painter().with_clip_rect(rect);
     let radius_rsun = moment.star.radius_rsun.unwrap_or(0.0) as f32;
@@ -61,20 +61,20 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace, moment: &Moment) {
         );
     }
     ui.add_space(0.5 * GRID);
-    ui.label(RichText::new(colour_line(moment)).font(small()).color(palette.dim));
+    ui.label(RichText::new(colour_line(workspace, moment)).font(small()).color(palette.dim));
 }
 
-fn colour_line(moment: &Moment) -> String {
+fn colour_line(workspace: &Workspace, moment: &Moment) -> String {
     match moment.star.swatch.as_ref().filter(|swatch| swatch.chromaticity.is_some()) {
-        Some(swatch) => format!("{}, {} · blackbody on a D65 screen", moment.star.colour, swatch.hex()),
-        None => moment.star.colour.to_owned(),
+        Some(swatch) => format!("{}, {} · blackbody on a D65 screen", workspace.colour_words, swatch.hex()),
+        None => workspace.colour_words.to_owned(),
     }
 }
 
-fn description(moment: &Moment) -> String {
+fn description(workspace: &Workspace, moment: &Moment) -> String {
     let size = moment
         .star
         .radius_rsun
         .map_or_else(|| "no size".to_owned(), |radius| format!("{} solar radii", number(radius, 3)));
-    format!("Disc of the star: {}, {size}", colour_line(moment))
+    format!("Disc of the star: {}, {size}", colour_line(workspace, moment))
 }

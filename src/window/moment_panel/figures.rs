@@ -5,18 +5,9 @@ use crate::system::{Moment, PlanetMoment};
 use crate::units::number_text::number;
 use crate::units::time_words::short_span;
 use crate::window::command::Command;
-use crate::window::theme::{Palette, ROW, small, usual};
+use crate::window::theme::{Palette, ROW, usual};
+use crate::window::widgets::figure_row::{FigureRow, UNIT_AND_SPREAD, figure_row};
 use egui::{Align2, Rect, Role, Sense, Ui, WidgetInfo, pos2, vec2};
-
-/// One row to draw.
-struct Row {
-    name: &'static str,
-    value: Option<f64>,
-    text: String,
-    symbol: &'static str,
-    spread: Option<f64>,
-    method: &'static str,
-}
 
 /// The star's figures.
 pub(super) fn star(ui: &mut Ui, palette: &Palette, moment: &Moment) -> Vec<Command> {
@@ -29,15 +20,16 @@ pub(super) fn star(ui: &mut Ui, palette: &Palette, moment: &Moment) -> Vec<Comma
         if value.is_none() && !is_main || is_wind && value == Some(0.0) {
             continue;
         }
-        let row = Row {
+        let row = FigureRow {
             name: quantity.name,
             value,
             text: value.map_or_else(|| "not modelled".to_owned(), |value| number(value, quantity.digits)),
             symbol: if value.is_some() { quantity.symbol } else { "" },
-            spread: (quantity.spread)(&moment.star),
+            spread: (quantity.spread)(&moment.star).map(|spread| format!("± {} %", number(100.0 * spread, 2))),
             method: quantity.method,
+            unit_room: UNIT_AND_SPREAD,
         };
-        commands.extend(figure(ui, palette, &row));
+        commands.extend(figure_row(ui, palette, &row));
     }
     commands
 }
@@ -53,47 +45,21 @@ pub(super) fn planet(ui: &mut Ui, palette: &Palette, planet: &PlanetMoment) -> V
         } else {
             (number(value, quantity.digits), quantity.symbol)
         };
-        let row = Row { name: quantity.name, value: Some(value), text, symbol, spread: None, method: quantity.method };
-        commands.extend(figure(ui, palette, &row));
+        let row = FigureRow {
+            name: quantity.name,
+            value: Some(value),
+            text,
+            symbol,
+            spread: None,
+            method: quantity.method,
+            unit_room: UNIT_AND_SPREAD,
+        };
+        commands.extend(figure_row(ui, palette, &row));
     }
     if let Some(zone) = planet.zone {
         word_row(ui, palette, "Zone", zone.name());
     }
     commands
-}
-
-fn figure(ui: &mut Ui, palette: &Palette, row: &Row) -> Option<Command> {
-    let (rect, response) = ui.allocate_exact_size(vec2(ui.available_width(), ROW), Sense::click());
-    let full = row.value.map_or_else(|| row.text.clone(), |value| format!("{} {}", number(value, 10), row.symbol));
-    response
-        .widget_info(|| WidgetInfo::labeled(Role::Button, true, format!("{}: {} {}", row.name, row.text, row.symbol)));
-    if response.hovered() || response.has_focus() {
-        ui.painter().rect_filled(rect.expand2(vec2(4.0, 0.0)), 3.0, palette.chosen);
-    }
-    let y = rect.center().y;
-    // Three columns: value right-aligned on its unit, unit, spread.
-    let value_right = rect.right() - 84.0;
-    let painter = ui.painter();
-    painter.text(pos2(rect.left(), y), Align2::LEFT_CENTER, row.name, usual(), palette.dim);
-    painter.text(pos2(value_right, y), Align2::RIGHT_CENTER, &row.text, usual(), palette.text);
-    painter.text(pos2(value_right + 6.0, y), Align2::LEFT_CENTER, row.symbol, small(), palette.dim);
-    if let Some(spread) = row.spread {
-        let text = format!("± {} %", number(100.0 * spread, 2));
-        painter.text(pos2(rect.right(), y), Align2::RIGHT_CENTER, text, small(), palette.dim);
-    }
-    let mut command = response.clicked().then_some(Command::ShowSource(row.method));
-    response.context_menu(|ui| {
-        if ui.button("Copy value").clicked() {
-            command = Some(Command::Copy(full.trim().to_owned()));
-            ui.close();
-        }
-        if ui.button("Show source").clicked() {
-            command = Some(Command::ShowSource(row.method));
-            ui.close();
-        }
-    });
-    response.on_hover_text(format!("{}: {}\nClick for method and source.", row.name, full.trim()));
-    command
 }
 
 fn word_row(ui: &mut Ui, palette: &Palette, name: &str, word: &str) {

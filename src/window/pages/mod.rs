@@ -4,7 +4,12 @@ mod chart_view;
 mod chronicle;
 mod curves;
 mod introduction;
+mod light_columns;
+mod sky;
+mod sky_scene;
 mod sources;
+mod spectrum;
+mod spectrum_plot;
 
 use super::command::Command;
 use super::theme::GRID;
@@ -18,6 +23,10 @@ pub enum Page {
     /// Strip charts over one shared time axis.
     #[default]
     Curves,
+    /// The star's spectrum, brightness and colour in numbers.
+    Spectrum,
+    /// What stands in a planet's sky.
+    Sky,
     /// Every dated event.
     Chronicle,
     /// What the scenario is about.
@@ -28,13 +37,16 @@ pub enum Page {
 
 impl Page {
     /// Every page, in order.
-    pub const ALL: [Self; 4] = [Self::Curves, Self::Chronicle, Self::Introduction, Self::Sources];
+    pub const ALL: [Self; 6] =
+        [Self::Curves, Self::Spectrum, Self::Sky, Self::Chronicle, Self::Introduction, Self::Sources];
 
     /// Name on its tab.
     #[must_use]
     pub fn name(self) -> &'static str {
         match self {
             Self::Curves => "Curves",
+            Self::Spectrum => "Spectrum",
+            Self::Sky => "Sky",
             Self::Chronicle => "Chronicle",
             Self::Introduction => "What to look for",
             Self::Sources => "Sources",
@@ -58,6 +70,8 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
     workspace.chart_line_foot = None;
     commands.extend(match workspace.page {
         Page::Curves => curves::show(ui, workspace),
+        Page::Spectrum => spectrum::show(ui, workspace),
+        Page::Sky => sky::show(ui, workspace),
         Page::Chronicle => chronicle::show(ui, workspace),
         Page::Introduction => introduction::show(ui, workspace),
         Page::Sources => sources::show(ui, workspace),

@@ -2,6 +2,7 @@
 
 pub(crate) mod choice;
 pub(crate) mod draft;
+pub(crate) mod figure_row;
 pub(crate) mod heading;
 pub(crate) mod icon;
 pub(crate) mod state_mark;

@@ -1,0 +1,108 @@
+//! One figure: name, value, unit, spread. A click on it shows the source.
+
+use crate::units::number_text::number;
+use crate::window::command::Command;
+use crate::window::theme::{Palette, ROW, small, usual};
+use egui::{Align2, Color32, Rect, Response, Role, Sense, Ui, WidgetInfo, pos2, vec2};
+
+/// Room right of the values for unit and spread, points.
+pub(crate) const UNIT_AND_SPREAD: f32 = 84.0;
+/// Room right of the values for the unit alone, points.
+pub(crate) const UNIT: f32 = 66.0;
+
+/// One row to draw.
+pub(crate) struct FigureRow<'a> {
+    /// Name for people.
+    pub name: &'a str,
+    /// The value in full; `None` where there is none.
+    pub value: Option<f64>,
+    /// The value as it is shown.
+    pub text: String,
+    /// Unit symbol.
+    pub symbol: &'a str,
+    /// What stands at the right end.
+    pub spread: Option<String>,
+    /// Key of its method.
+    pub method: &'static str,
+    /// Room right of the value.
+    pub unit_room: f32,
+}
+
+/// Draws a figure and returns what it was told.
+pub(crate) fn figure_row(ui: &mut Ui, palette: &Palette, row: &FigureRow<'_>) -> Option<Command> {
+    let full = row.value.map_or_else(|| row.text.clone(), |value| format!("{} {}", number(value, 10), row.symbol));
+    let words = format!("{}: {} {}", row.name, row.text, row.symbol);
+    let (rect, response) = row_ground(ui, palette, &words);
+    let y = rect.center().y;
+    // Three columns: value right-aligned on its unit, unit, spread.
+    let value_right = rect.right() - row.unit_room;
+    let painter = ui.painter();
+    painter.text(pos2(rect.left(), y), Align2::LEFT_CENTER, row.name, usual(), palette.dim);
+    painter.text(pos2(value_right, y), Align2::RIGHT_CENTER, &row.text, usual(), palette.text);
+    painter.text(pos2(value_right + 6.0, y), Align2::LEFT_CENTER, row.symbol, small(), palette.dim);
+    if let Some(spread) = &row.spread {
+        painter.text(pos2(rect.right(), y), Align2::RIGHT_CENTER, spread, small(), palette.dim);
+    }
+    to_source(response, row.name, full.trim(), row.method)
+}
+
+/// A row of words in place of a figure, with a colour of its own where it has one. A click on it shows the source.
+pub(crate) fn word_row(
+    ui: &mut Ui,
+    palette: &Palette,
+    (name, words): (&str, &str),
+    swatch: Option<[u8; 3]>,
+    method: &'static str,
+) -> Option<Command> {
+    let (rect, response) = row_ground(ui, palette, &format!("{name}: {words}"));
+    let y = rect.center().y;
+    let name_rect = ui.painter().text(pos2(rect.left(), y), Align2::LEFT_CENTER, name, usual(), palette.dim);
+    let mut right = rect.right();
+    if let Some([red, green, blue]) = swatch {
+        let patch = Rect::from_min_max(pos2(right - 30.0, rect.top() + 3.0), pos2(right, rect.bottom() - 3.0));
+        // Colour is data: it stands on neutral grey with a neutral casing.
+        ui.painter().rect_filled(patch, 3.0, palette.bed);
+        ui.painter().rect(
+            patch.shrink(2.0),
+            2.0,
+            Color32::from_rgb(red, green, blue),
+            egui::Stroke::new(1.0, palette.casing),
+            egui::StrokeKind::Inside,
+        );
+        right = patch.left() - 6.0;
+    }
+    let room = Rect::from_min_max(pos2(name_rect.right() + 8.0, rect.top()), pos2(right, rect.bottom()));
+    ui.painter().with_clip_rect(room.intersect(ui.clip_rect())).text(
+        pos2(right, y),
+        Align2::RIGHT_CENTER,
+        words,
+        usual(),
+        palette.text,
+    );
+    to_source(response, name, words, method)
+}
+
+fn row_ground(ui: &mut Ui, palette: &Palette, words: &str) -> (Rect, Response) {
+    let (rect, response) = ui.allocate_exact_size(vec2(ui.available_width(), ROW), Sense::click());
+    response.widget_info(|| WidgetInfo::labeled(Role::Button, true, words));
+    if response.hovered() || response.has_focus() {
+        ui.painter().rect_filled(rect.expand2(vec2(4.0, 0.0)), 3.0, palette.chosen);
+    }
+    (rect, response)
+}
+
+fn to_source(response: Response, name: &str, full: &str, method: &'static str) -> Option<Command> {
+    let mut command = response.clicked().then_some(Command::ShowSource(method));
+    response.context_menu(|ui| {
+        if ui.button("Copy value").clicked() {
+            command = Some(Command::Copy(full.to_owned()));
+            ui.close();
+        }
+        if ui.button("Show source").clicked() {
+            command = Some(Command::ShowSource(method));
+            ui.close();
+        }
+    });
+    response.on_hover_text(format!("{name}: {full}\nClick for method and source."));
+    command
+}
