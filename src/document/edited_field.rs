@@ -34,6 +34,7 @@ impl EditedField {
             "name" => "Name",
             "title" => "Title",
             "about" => "Description",
+            "red_dwarf_surface" => "Red-dwarf surface",
             "redistribution" => "Heat redistribution",
             "greenhouse" => "Greenhouse",
             "air" => "Air",

@@ -86,7 +86,7 @@ pub(super) fn planet_cells(planet: &PlanetMoment, light: Option<&PlanetLight>) -
 /// IVOA Recommendation "Units in the VO" 1.0 (2014), from memory.
 pub(super) fn unit_of(key: &str) -> &'static str {
     // Longer suffixes first: "_msun_yr" also ends in "_yr".
-    const UNITS: [(&str, &str); 17] = [
+    const UNITS: [(&str, &str); 18] = [
         ("_msun_yr", "solMass/yr"),
         ("_msun", "solMass"),
         ("_lsun", "solLum"),
@@ -98,6 +98,7 @@ pub(super) fn unit_of(key: &str) -> &'static str {
         ("_thz", "THz"),
         ("_umol_m2_s", "umol/(m2 s)"),
         ("_cd_m2", "cd/m2"),
+        ("_g_cm3", "g/cm3"),
         ("_lm_w", "lm/W"),
         ("_w_m2", "W/m2"),
         ("_lm", "lm"),

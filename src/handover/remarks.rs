@@ -94,6 +94,11 @@ fn why_no_star_figure(key: &str, star: &StarMoment, light: Option<&Starlight>) -
     match key {
         "core_mass_msun" => "no value: the star has no core of spent hydrogen yet".to_owned(),
         "core_hydrogen_fraction" => format!("no value: none is computed in the phase \"{phase}\""),
+        "mean_hydrogen_fraction"
+        | "core_helium3_fraction"
+        | "core_temperature_k"
+        | "core_density_g_cm3"
+        | "mixed_mass_fraction" => "no value: the inside is computed of red dwarfs only".to_owned(),
         _ if key.starts_with("dwarf_") && !is_dwarf(star.phase) => {
             "no value: measured colours are known of main-sequence dwarfs only".to_owned()
         }

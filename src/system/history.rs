@@ -181,7 +181,7 @@ impl History {
             notes.extend(notes::of_planet(index, past.specification(), &planet, &state));
             planets.push(planet);
         }
-        Moment { time_yr, star: StarMoment::new(&state), planets, notes }
+        Moment { time_yr, star: self.star_moment(&state), planets, notes }
     }
 
     /// The figures of star and planets at an age without the notes: what plots and tables read in bulk.
@@ -189,7 +189,11 @@ impl History {
     pub fn figures_at(&self, age_yr: f64) -> (StarMoment, Vec<PlanetMoment>) {
         let time_yr = held(age_yr);
         let state = self.life.state_at(time_yr);
-        (StarMoment::new(&state), self.planets.iter().map(|past| past.moment(time_yr, &state)).collect())
+        (self.star_moment(&state), self.planets.iter().map(|past| past.moment(time_yr, &state)).collect())
+    }
+
+    fn star_moment(&self, state: &StarState) -> StarMoment {
+        StarMoment::new(state, self.life.interior_at(state.age_yr))
     }
 
     /// One planet at one moment.
@@ -226,8 +230,8 @@ pub fn star_input(system: &System) -> StarInput {
 
 /// The user's choices of how the life of the star is computed.
 #[must_use]
-pub fn life_options(_system: &System) -> LifeOptions {
-    LifeOptions::default()
+pub fn life_options(system: &System) -> LifeOptions {
+    LifeOptions { surface: system.star.red_dwarf_surface }
 }
 
 /// The star's nodes as planets feel them.

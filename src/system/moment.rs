@@ -5,7 +5,7 @@ use crate::physics::light::{Swatch, blackbody_swatch, colour_words};
 use crate::physics::planet::Caution;
 use crate::physics::planet::habitable_zone::{ZoneLimit, ZonePlace, limit_flux};
 use crate::physics::planet::tides::LockLevel;
-use crate::physics::star::{Phase, StarState};
+use crate::physics::star::{Interior, Phase, StarState};
 use crate::units::constants::WIEN_M_K;
 
 /// The state of a system at one instant.
@@ -40,6 +40,8 @@ pub struct StarMoment {
     pub mass_loss_msun_yr: f64,
     /// Share of hydrogen by mass at the centre, on the main sequence.
     pub core_hydrogen_fraction: Option<f64>,
+    /// The inside of a red dwarf, whose structure is computed.
+    pub interior: Option<Interior>,
     /// Wavelength of the strongest spectral radiance, nm.
     pub peak_wavelength_nm: Option<f64>,
     /// True colour of the light.
@@ -53,7 +55,7 @@ pub struct StarMoment {
 impl StarMoment {
     /// What the state of a star means to the eye and to planets.
     #[must_use]
-    pub fn new(state: &StarState) -> Self {
+    pub fn new(state: &StarState, interior: Option<Interior>) -> Self {
         let shines = !state.phase.is_dark();
         let temperature_k = shines.then_some(state.effective_temperature_k);
         let swatch = temperature_k.map(blackbody_swatch);
@@ -66,6 +68,7 @@ impl StarMoment {
             core_mass_msun: (!state.phase.is_dark()).then_some(state.core_mass_msun),
             mass_loss_msun_yr: state.mass_loss_msun_yr,
             core_hydrogen_fraction: state.core_hydrogen_fraction,
+            interior,
             peak_wavelength_nm: temperature_k.map(|temperature_k| WIEN_M_K / temperature_k * 1e9),
             swatch,
             colour: temperature_k.map_or("no light modelled", colour_words),

@@ -4,6 +4,7 @@ use super::air::Air;
 use super::limits::{self, Limit, OutOfLimit};
 use super::planet_choices::{TidesChoice, Water};
 use crate::physics::planet::{Greenhouse, Redistribution};
+use crate::physics::star::convective::SurfaceOpacity;
 use thiserror::Error;
 
 /// A star with its planets, as the user describes them at the star's arrival on the main sequence.
@@ -26,6 +27,20 @@ pub struct StarSpecification {
     pub metallicity_dex: f64,
     /// Age at the moment called now, yr since arrival on the main sequence.
     pub present_age_yr: f64,
+    /// How opaque the surface is, if the star is a red dwarf.
+    pub red_dwarf_surface: SurfaceOpacity,
+}
+
+/// Every surface a red dwarf can be given, in the order they are offered.
+pub const RED_DWARF_SURFACES: [SurfaceOpacity; 2] = [SurfaceOpacity::Modern, SurfaceOpacity::Of1997];
+
+/// A surface in words for people.
+#[must_use]
+pub fn surface_name(surface: SurfaceOpacity) -> &'static str {
+    match surface {
+        SurfaceOpacity::Modern => "modern",
+        SurfaceOpacity::Of1997 => "as in 1997",
+    }
 }
 
 /// The inputs of a planet.
@@ -175,7 +190,13 @@ impl StarSpecification {
 
 impl Default for StarSpecification {
     fn default() -> Self {
-        Self { name: "Star".to_owned(), mass_msun: 1.0, metallicity_dex: 0.0, present_age_yr: 4.57e9 }
+        Self {
+            name: "Star".to_owned(),
+            mass_msun: 1.0,
+            metallicity_dex: 0.0,
+            present_age_yr: 4.57e9,
+            red_dwarf_surface: SurfaceOpacity::Modern,
+        }
     }
 }
 

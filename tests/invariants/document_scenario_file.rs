@@ -3,8 +3,9 @@
 
 use longember::document::{LoadError, Problem, Scenario, built_in, parse_scenario, scenario_from_bytes, scenario_text};
 use longember::physics::planet::{Greenhouse, Redistribution};
+use longember::physics::star::convective::SurfaceOpacity;
 use longember::system::limits::{self, Limit};
-use longember::system::specification::{PlanetSpecification, StarSpecification, System};
+use longember::system::specification::{PlanetSpecification, RED_DWARF_SURFACES, StarSpecification, System};
 use longember::system::{Air, Carbon, TidesChoice, Water};
 use proptest::prelude::*;
 use proptest::sample::Index;
@@ -33,6 +34,15 @@ mod oracle {
         pub(super) mass_msun: f64,
         pub(super) metallicity_dex: f64,
         pub(super) present_age_yr: f64,
+        #[serde(default)]
+        pub(super) red_dwarf_surface: Surface,
+    }
+
+    #[derive(Clone, Copy, Default, Deserialize)]
+    pub(super) enum Surface {
+        #[default]
+        Modern,
+        Of1997,
     }
 
     #[derive(Deserialize)]
@@ -212,6 +222,10 @@ fn read_by_oracle(text: &str, ours: &Scenario) -> Result<Scenario, String> {
         mass_msun: read.star.mass_msun,
         metallicity_dex: read.star.metallicity_dex,
         present_age_yr: read.star.present_age_yr,
+        red_dwarf_surface: match read.star.red_dwarf_surface {
+            oracle::Surface::Modern => SurfaceOpacity::Modern,
+            oracle::Surface::Of1997 => SurfaceOpacity::Of1997,
+        },
     };
     let system = System { star, planets: planets.collect() };
     Ok(Scenario { title: read.title, about: read.about.replace("\r\n", "\n"), system })
@@ -291,14 +305,16 @@ fn planet() -> impl Strategy<Value = PlanetSpecification> {
 }
 
 fn scenario() -> impl Strategy<Value = Scenario> {
-    let star = (name(), value(&limits::STAR_MASS), value(&limits::METALLICITY), value(&limits::PRESENT_AGE));
+    let star =
+        (name(), value(&limits::STAR_MASS), value(&limits::METALLICITY), value(&limits::PRESENT_AGE), 0..2_usize);
     let about = "([a-zA-Z\"\\\\é☉,.]{0,12}[ \n]{1,3}){0,60}";
     (name(), about, star, prop::collection::vec(planet(), 0..6)).prop_map(|(title, about, star, mut planets)| {
         for (index, planet) in planets.iter_mut().enumerate() {
             planet.name.push_str(&index.to_string());
         }
-        let (name, mass_msun, metallicity_dex, present_age_yr) = star;
-        let star = StarSpecification { name, mass_msun, metallicity_dex, present_age_yr };
+        let (name, mass_msun, metallicity_dex, present_age_yr, surface) = star;
+        let red_dwarf_surface = RED_DWARF_SURFACES[surface];
+        let star = StarSpecification { name, mass_msun, metallicity_dex, present_age_yr, red_dwarf_surface };
         Scenario { title, about, system: System { star, planets } }
     })
 }

@@ -9,7 +9,9 @@ pub const CURRENT_VERSION: u32 = 1;
 /// The name of the outermost struct.
 pub(super) const SCENARIO: &str = "Longember";
 pub(super) const SCENARIO_KEYS: &[&str] = &["version", "title", "about", "star", "planets"];
-pub(super) const STAR_KEYS: &[&str] = &["name", "mass_msun", "metallicity_dex", "present_age_yr"];
+pub(super) const STAR_KEYS: &[&str] = &["name", "mass_msun", "metallicity_dex", "present_age_yr", "red_dwarf_surface"];
+/// In the order of `specification::RED_DWARF_SURFACES`.
+pub(super) const SURFACES: &[&str] = &["Modern", "Of1997"];
 pub(super) const PLANET_KEYS: &[&str] = &[
     "name",
     "semi_major_axis_au",

@@ -2,7 +2,8 @@
 
 use super::keys::{
     AIR_KEYS, AIRS, CARBONS, CLIMATES, CURRENT_VERSION, FIXED_INCREMENT_KEYS, GREENHOUSES, GREY_KEYS, HELD_KEYS,
-    PLANET_KEYS, REDISTRIBUTIONS, REGULATED_KEYS, SCENARIO, SCENARIO_KEYS, STAR_KEYS, TIDES, WATER_KEYS, WATER_WORLD,
+    PLANET_KEYS, REDISTRIBUTIONS, REGULATED_KEYS, SCENARIO, SCENARIO_KEYS, STAR_KEYS, SURFACES, TIDES, WATER_KEYS,
+    WATER_WORLD,
 };
 use crate::document::problem::{Fault, Problem, Subject};
 use crate::document::record_reading::{Fields, Reading};
@@ -10,6 +11,7 @@ use crate::document::ron_text::{Node, Value, number_text};
 use crate::document::scenario::Scenario;
 use crate::physics::planet::bulk::default_radius_rearth;
 use crate::physics::planet::{Greenhouse, Redistribution};
+use crate::physics::star::convective::SurfaceOpacity;
 use crate::system::limits::{self, Limit};
 use crate::system::specification::{self, Body, PlanetSpecification, StarSpecification, System};
 use crate::system::{Air, Carbon, TidesChoice, Water};
@@ -136,6 +138,7 @@ fn read_star(reading: &mut Reading<'_>, node: &Node, places: &mut Places) -> Opt
         mass_msun: body.required_number(&limits::STAR_MASS).unwrap_or(usual.mass_msun),
         metallicity_dex: body.required_number(&limits::METALLICITY).unwrap_or(usual.metallicity_dex),
         present_age_yr: body.required_number(&limits::PRESENT_AGE).unwrap_or(usual.present_age_yr),
+        red_dwarf_surface: body.red_dwarf_surface().unwrap_or(usual.red_dwarf_surface),
     })
 }
 
@@ -232,6 +235,17 @@ impl BodyReading<'_, '_, '_> {
         let number = self.reading.number(node, &self.fields.subject, limit.key, &limit.allowed())?;
         self.places.insert((Some(self.body), limit.key), node.span.start);
         Some(number)
+    }
+
+    fn red_dwarf_surface(&mut self) -> Option<SurfaceOpacity> {
+        let node = self.fields.given("red_dwarf_surface")?;
+        let subject = &self.fields.subject;
+        if !matches!(node.value, Value::Name(_)) {
+            self.reading.wrong_kind(node, subject, "red_dwarf_surface", SURFACES.join(", "));
+            return None;
+        }
+        let index = self.reading.choice(node, subject, "red_dwarf_surface", SURFACES)?;
+        specification::RED_DWARF_SURFACES.get(index).copied()
     }
 
     fn redistribution(&mut self) -> Option<Redistribution> {

@@ -1,9 +1,10 @@
 //! Scenario to text.
 
-use super::keys::{AIRS, CARBONS, CURRENT_VERSION, REDISTRIBUTIONS, SCENARIO, TIDES, WATER_WORLD};
+use super::keys::{AIRS, CARBONS, CURRENT_VERSION, REDISTRIBUTIONS, SCENARIO, SURFACES, TIDES, WATER_WORLD};
 use crate::document::ron_text::{Writer, number_text};
 use crate::document::scenario::Scenario;
 use crate::physics::planet::{Greenhouse, Redistribution};
+use crate::physics::star::convective::SurfaceOpacity;
 use crate::system::specification::{PlanetSpecification, StarSpecification};
 use crate::system::{Air, Carbon, TidesChoice, Water};
 
@@ -38,6 +39,7 @@ fn write_star(writer: &mut Writer, star: &StarSpecification) {
     writer.number("mass_msun", star.mass_msun);
     writer.number("metallicity_dex", star.metallicity_dex);
     writer.number("present_age_yr", star.present_age_yr);
+    writer.field("red_dwarf_surface", surface_text(star.red_dwarf_surface));
     writer.close(')');
 }
 
@@ -70,6 +72,13 @@ fn write_water(writer: &mut Writer, water: &Water) {
     writer.field("starts_frozen", if water.starts_frozen { "true" } else { "false" });
     writer.number("ocean_after_yr", water.ocean_after_yr);
     writer.close(')');
+}
+
+fn surface_text(surface: SurfaceOpacity) -> &'static str {
+    match surface {
+        SurfaceOpacity::Modern => SURFACES[0],
+        SurfaceOpacity::Of1997 => SURFACES[1],
+    }
 }
 
 fn carbon_text(carbon: Carbon) -> String {

@@ -242,7 +242,8 @@ fn choice(
     chosen
 }
 
-fn choice_row(
+/// A name with a choice beside it.
+pub(super) fn choice_row(
     ui: &mut Ui,
     workspace: &Workspace,
     name: &str,
