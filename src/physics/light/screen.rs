@@ -39,7 +39,7 @@ pub struct WideColour {
 /// The colour of a light on a Display P3 screen, or `None` where there is none.
 ///
 /// # Source
-/// Linear P3-D65 (SMPTE EG 432-1), largest channel set to one, mapped by [`into_p3_gamut`](super::into_p3_gamut) and
+/// Linear P3-D65 (SMPTE EG 432-1), largest channel set to one, mapped by [`into_p3_gamut`] and
 /// encoded with the sRGB curve, as W3C CSS Color 4 defines `display-p3`.
 #[must_use]
 pub fn wide_colour(light: Tristimulus) -> Option<WideColour> {

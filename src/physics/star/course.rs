@@ -63,7 +63,7 @@ impl Settling {
     }
 }
 
-/// Luminosity, radius, mass, core mass and mass loss in the units of [`StarState`].
+/// Luminosity, radius, mass, core mass and mass loss in the units of [`StarState`](super::StarState).
 pub(super) struct Figures {
     pub(super) log_luminosity: f64,
     pub(super) log_radius: f64,
