@@ -1,5 +1,7 @@
 //! What must hold for every input: finite and in range, continuous, in order, the same after writing and reading.
 
+#![expect(clippy::expect_used, reason = "a test that cannot go on has failed")]
+
 mod document_scenario_file;
 mod document_settings;
 mod light_colour;

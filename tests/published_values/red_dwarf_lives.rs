@@ -14,7 +14,7 @@ fn life(mass_msun: f64, metallicity_dex: f64, resolution: Resolution, surface: S
 
 macro_rules! lives {
     ($($name:ident: $mass:expr, $metallicity:expr, $resolution:ident, $surface:ident;)*) => {
-        $(pub static $name: LazyLock<Life> = LazyLock::new(|| life($mass, $metallicity, Resolution::$resolution, SurfaceOpacity::$surface));)*
+        $(pub(crate) static $name: LazyLock<Life> = LazyLock::new(|| life($mass, $metallicity, Resolution::$resolution, SurfaceOpacity::$surface));)*
     };
 }
 

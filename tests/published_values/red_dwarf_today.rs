@@ -5,7 +5,7 @@
 use crate::red_dwarf_lives::{M008, M010, M015, M020, M030, since_birth};
 use longember::physics::star::convective::Life;
 
-/// Mass; log₁₀ L, R, T_eff, log₁₀ T_c, log₁₀ ρ_c at 5 Gyr.
+/// Mass; log₁₀ L, R, `T_eff`, log₁₀ `T_c`, log₁₀ `ρ_c` at 5 Gyr.
 fn rows() -> [(&'static Life, [f64; 5]); 5] {
     [
         (&M008, [-3.5770, 0.0990, 2343.0, 6.557, 2.8047]),
