@@ -7,8 +7,11 @@ use crate::system::PlanetLight;
 use crate::system::planet_light::{REFERENCE_DISC_DEG, USUAL_ALTITUDE_DEG};
 use std::f64::consts::PI;
 
-/// The picture is exposed so that ground of this albedo, lit by star and sky, would be as bright as the screen's white.
+/// The picture is exposed so that ground of this albedo, lit by star and sky, would be as bright as the screen's white,
+/// or less where the sky would be brighter than that.
 const WHITE_ALBEDO: f64 = 0.5;
+/// Brightest that a sky is drawn, against the screen's white.
+const BRIGHTEST_SKY: f64 = 0.85;
 /// Albedo of the ground that is drawn.
 const GROUND_ALBEDO: f64 = 0.2;
 /// The picture is not exposed for less than this, cd m⁻²: what is darker than moonlit ground is drawn dark.
@@ -16,6 +19,8 @@ const DIMMEST_WHITE_CD_M2: f64 = 0.02;
 /// Luminance below which the eye sees no colour at all, cd m⁻²: lower end of the mesopic range, CIE 191:2010.
 const NO_COLOUR_BELOW_CD_M2: f64 = 0.005;
 
+/// Least contrast that the eye makes out, as a share of the background: Weber's fraction in daylight, about 2 %.
+const LEAST_CONTRAST: f64 = 0.02;
 /// Share of the picture's height below the horizon.
 const GROUND_SHARE: f64 = 0.16;
 /// Radius of a disc below which a magnified pair is drawn as well, points.
@@ -96,8 +101,9 @@ impl SkyPicture {
     pub fn new(light: &PlanetLight, view: SkyView) -> Option<Self> {
         let sky = light.sky.as_ref()?;
         let disc = light.disc?;
-        let white_cd_m2 = (sky.total_lx() / PI * WHITE_ALBEDO).max(DIMMEST_WHITE_CD_M2);
         let dome = sky.dome.scaled(1.0 / PI);
+        let for_ground_cd_m2 = sky.total_lx() / PI * WHITE_ALBEDO;
+        let white_cd_m2 = for_ground_cd_m2.max(dome.y / BRIGHTEST_SKY).max(DIMMEST_WHITE_CD_M2);
         let surface = sky.disc.scaled(1.0 / disc.solid_angle_sr).plus(dome);
         let exposed = |light| exposed(light, sky, view.viewing, white_cd_m2);
         let seen = |light| seen(light, sky.star_above_air, view.viewing);
@@ -109,7 +115,7 @@ impl SkyPicture {
             sky: seen(sky.dome),
             disc: seen(sky.disc),
             daylight: seen(sky.daylight()),
-            disc_is_seen: sky_srgb != disc_srgb,
+            disc_is_seen: surface.y - dome.y > LEAST_CONTRAST * dome.y && surface.y > 0.0,
             vision: vision(sky.total_lx() / PI * GROUND_ALBEDO),
             sky_srgb,
             disc_srgb,

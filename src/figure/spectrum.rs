@@ -117,8 +117,10 @@ pub struct VisiblePoint {
     pub place: f64,
     /// Height of the star's curve; zero without a star.
     pub height: f64,
-    /// Nearest screen colour of the wavelength, fading where the eye sees little.
+    /// Nearest screen colour of the wavelength.
     pub colour_srgb: [u8; 3],
+    /// How much of it the eye sees, 0 to 1: less than one at either end of the band.
+    pub visibility: f64,
 }
 
 /// One of the three bands with its share.
@@ -274,7 +276,8 @@ fn visible(temperature_k: Option<f64>, view: SpectrumView) -> Vec<VisiblePoint> 
             Some(VisiblePoint {
                 place: place_of(wavelength_nm),
                 height: height.unwrap_or(0.0),
-                colour_srgb: colour.screen.dimmed(colour.relative_brightness / FADES_BELOW),
+                colour_srgb: colour.screen.srgb,
+                visibility: (colour.relative_brightness / FADES_BELOW).clamp(0.0, 1.0),
             })
         })
         .collect()
@@ -355,6 +358,8 @@ mod tests {
     fn the_visible_band_runs_from_blue_to_red() {
         let visible = Spectrum::new(None, SpectrumView::default()).visible;
         assert!(visible.windows(2).all(|pair| pair[0].place < pair[1].place));
+        assert!(visible.iter().all(|point| (0.0..=1.0).contains(&point.visibility)));
+        assert!(visible[0].visibility < 0.01 && visible[visible.len() / 2].visibility == 1.0);
         let at = |share: f64| visible[(share * (visible.len() - 1) as f64) as usize].colour_srgb;
         let ([_, _, blue], [red, ..]) = (at(0.18), at(0.65));
         assert!(blue > 200 && red > 200, "{:?} {:?}", at(0.18), at(0.65));

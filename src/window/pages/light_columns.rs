@@ -57,7 +57,7 @@ pub(super) fn figure<T>(
         name,
         value,
         text: value.map_or_else(|| "–".to_owned(), |value| number(value, quantity.digits)),
-        symbol: quantity.symbol,
+        symbol: if value.is_some() { quantity.symbol } else { "" },
         spread: None,
         method: quantity.method,
         unit_room: UNIT,

@@ -7,16 +7,19 @@ use crate::physics::light::{SeenLight, Viewing, VisibleSpectrum, seen};
 use crate::system::light_quantities::PLANET_LIGHT;
 use crate::system::planet_light::clear_air;
 use crate::system::{Air, Body, Moment, PlanetLight, PlanetSpecification, PlanetState, Starlight};
-use crate::units::entry::{EntryKind, parse_entry};
+use crate::units::entry::{EntryKind, parse_entry, write_entry};
 use crate::units::number_text::{fixed, number};
 use crate::window::command::Command;
 use crate::window::theme::{GRID, Palette, small};
-use crate::window::widgets::choice::word;
+use crate::window::widgets::choice::{caption, word};
 use crate::window::widgets::draft::keep_draft;
 use crate::window::widgets::figure_row::{FigureRow, UNIT, figure_row, word_row};
 use crate::window::widgets::heading::section;
 use crate::window::workspace::Workspace;
-use egui::{Id, Key, Rect, RichText, Role, ScrollArea, Sense, Slider, TextEdit, Ui, WidgetInfo, vec2};
+use egui::{
+    EventFilter, Id, InputState, Key, Modifiers, Rect, Response, RichText, Role, ScrollArea, Sense, Slider, TextEdit,
+    Ui, WidgetInfo, vec2,
+};
 
 /// Least and largest height of the picture, points.
 const PICTURE_HEIGHT: [f32; 2] = [150.0, 440.0];
@@ -82,7 +85,7 @@ fn chooser(ui: &mut Ui, workspace: &Workspace, chosen: usize) -> Vec<Command> {
     let mut commands = Vec::new();
     ui.horizontal_wrapped(|ui| {
         ui.spacing_mut().item_spacing.x = 3.0 * GRID;
-        ui.label(RichText::new("Sky of").font(small()).color(palette.dim));
+        caption(ui, palette, "Sky of");
         for (index, planet) in workspace.history.system().planets.iter().enumerate() {
             if word(ui, palette, &planet.name, index == chosen).clicked() {
                 commands.push(Command::Select(Body::Planet(index)));
@@ -98,12 +101,11 @@ fn switches(ui: &mut Ui, workspace: &Workspace, planet: &PlanetSpecification) ->
     let mut commands = Vec::new();
     let mut set = |view| commands.push(Command::SetSkyView(view));
     ui.horizontal_wrapped(|ui| {
-        ui.spacing_mut().item_spacing.x = 3.0 * GRID;
-        ui.label(RichText::new("Star at").font(small()).color(palette.dim));
+        ui.spacing_mut().item_spacing.x = 2.5 * GRID;
+        caption(ui, palette, "Star at");
         if let Some(altitude_deg) = altitude(ui, palette, view.altitude_deg) {
             set(SkyView { altitude_deg, ..view });
         }
-        ui.add_space(GRID);
         let has_air = planet.air != Air::None;
         for (with_air, words) in [(true, "air"), (false, "no air")] {
             let is_chosen = if has_air { view.with_air == with_air } else { !with_air };
@@ -117,7 +119,6 @@ fn switches(ui: &mut Ui, workspace: &Workspace, planet: &PlanetSpecification) ->
                 set(SkyView { with_air, ..view });
             }
         }
-        ui.add_space(GRID);
         for (viewing, words, hint) in [
             (Viewing::Camera, "as emitted", "As a camera balanced for daylight (D65) takes it"),
             (
@@ -137,23 +138,46 @@ fn switches(ui: &mut Ui, workspace: &Workspace, planet: &PlanetSpecification) ->
 /// The star's altitude: a slider to drag and a field to type into.
 fn altitude(ui: &mut Ui, palette: &Palette, altitude_deg: f64) -> Option<f64> {
     let mut dragged = altitude_deg;
-    ui.spacing_mut().slider_width = 110.0;
-    let slider = Slider::new(&mut dragged, 0.0..=90.0).show_value(false).step_by(0.5);
-    let slider = ui.add(slider).accessible_name("Altitude of the star, degrees");
+    let slider = ui
+        .scope(|ui| {
+            ui.spacing_mut().slider_width = 64.0;
+            // A rail of the colour of fields could not be seen on a light ground.
+            ui.visuals_mut().widgets.inactive.bg_fill = palette.hairline;
+            let slider = Slider::new(&mut dragged, 0.0..=90.0).show_value(false).step_by(0.5);
+            ui.add(slider).accessible_name("Altitude of the star, degrees")
+        })
+        .inner;
+    let is_dragged = slider.changed();
+    let stepped = stepped(ui, &slider, altitude_deg);
+    slider.on_hover_text("Drag it, or press arrow up and down");
     let id = Id::unique("altitude_of_the_star");
     let draft = ui.data(|data| data.get_temp::<String>(id));
-    let mut text = draft.unwrap_or_else(|| format!("{}°", number(altitude_deg, 3)));
+    let mut text = draft.unwrap_or_else(|| format!("{}°", write_entry(altitude_deg, EntryKind::AngleDeg)));
     let judged = |text: &str| parse_entry(text, EntryKind::AngleDeg).ok().filter(|angle| (0.0..=90.0).contains(angle));
     let is_understood = judged(&text).is_some();
     let ink = if is_understood { palette.text } else { palette.error };
-    let field = TextEdit::singleline(&mut text).id(id.with("field")).desired_width(44.0).text_color(ink);
+    let field = TextEdit::singleline(&mut text).id(id.with("field")).desired_width(46.0).text_color(ink);
     let field = ui.add(field).accessible_name("Altitude of the star, typed");
     let given_up = ui.input(|input| input.key_pressed(Key::Escape));
     let entered = if field.lost_focus() && !given_up { judged(&text) } else { None };
     let keeps = (field.has_focus() || field.lost_focus() && entered.is_none()) && !given_up;
     keep_draft(ui, id, keeps.then_some(text));
     field.on_hover_text("0° is the horizon, 90° overhead");
-    entered.or_else(|| slider.changed().then_some(dragged)).filter(|chosen| *chosen != altitude_deg)
+    entered.or(stepped).or_else(|| is_dragged.then_some(dragged)).filter(|chosen| *chosen != altitude_deg)
+}
+
+/// The altitude a degree on by arrow up or down; arrows to the side move the moment everywhere.
+fn stepped(ui: &Ui, slider: &Response, altitude_deg: f64) -> Option<f64> {
+    if !slider.has_focus() {
+        return None;
+    }
+    let own_arrows = EventFilter { vertical_arrows: true, ..EventFilter::default() };
+    ui.memory_mut(|memory| memory.set_focus_lock_filter(slider.id, own_arrows));
+    let steps = ui.input_mut(|input| {
+        let presses = |input: &mut InputState, key| input.count_and_consume_key(Modifiers::NONE, key) as f64;
+        presses(input, Key::ArrowUp) - presses(input, Key::ArrowDown)
+    });
+    (steps != 0.0).then(|| (altitude_deg + steps).clamp(0.0, 90.0))
 }
 
 fn description(picture: &SkyPicture, planet: &PlanetSpecification, view: SkyView) -> String {
@@ -278,6 +302,7 @@ fn star(ui: &mut Ui, palette: &Palette, light: Option<&PlanetLight>) -> Vec<Comm
     ];
     for (name, value, digits, symbol, method) in rows {
         let text = value.map_or_else(|| "–".to_owned(), |value| number(value, digits));
+        let symbol = if value.is_some() { symbol } else { "" };
         let row = FigureRow { name, value, text, symbol, spread: None, method, unit_room: UNIT };
         commands.extend(figure_row(ui, palette, &row));
     }

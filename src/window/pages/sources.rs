@@ -1,8 +1,9 @@
 //! For every figure: relation, paper, range, accuracy.
 
-use crate::system::Moment;
+use crate::system::planet_light::USUAL_ALTITUDE_DEG;
 use crate::system::provenance::{METHODS, Method};
-use crate::system::quantities::{PLANET, STAR};
+use crate::system::quantities::figures_of;
+use crate::system::{LightReader, Note};
 use crate::window::command::Command;
 use crate::window::fonts::BOLD;
 use crate::window::theme::{GRID, Palette, TEXT_SIZE, small};
@@ -13,6 +14,8 @@ use egui::{Align, FontFamily, FontId, RichText, ScrollArea, Ui};
 pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
     let palette = workspace.palette();
     let moment = workspace.moment();
+    let light = LightReader::new(&workspace.history, USUAL_ALTITUDE_DEG).at(&moment);
+    let notes: Vec<Note> = moment.notes.into_iter().chain(light.notes).collect();
     let wanted = workspace.wanted_source.take();
     ScrollArea::vertical().auto_shrink(false).show(ui, |ui| {
         ui.set_max_width(ui.available_width().min(680.0));
@@ -28,7 +31,7 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
             row(ui, palette, "Source", method.source);
             row(ui, palette, "Valid for", method.valid_for);
             row(ui, palette, "Accuracy", method.accuracy);
-            for note in notes_about(method, &moment) {
+            for note in notes_about(method, &notes) {
                 row(ui, palette, "Now", &note);
             }
             ui.add_space(3.0 * GRID);
@@ -50,16 +53,13 @@ fn row(ui: &mut Ui, palette: &Palette, name: &str, text: &str) {
 }
 
 /// Remarks of this moment about figures that the method makes.
-fn notes_about(method: &Method, moment: &Moment) -> Vec<String> {
-    let keys: Vec<&str> = STAR
-        .iter()
-        .filter(|quantity| quantity.method == method.key)
-        .map(|quantity| quantity.key)
-        .chain(PLANET.iter().filter(|quantity| quantity.method == method.key).map(|quantity| quantity.key))
+fn notes_about(method: &Method, notes: &[Note]) -> Vec<String> {
+    let keys: Vec<&str> = figures_of(method.key)
+        .map(|(key, _)| key)
         .chain((method.key == "habitable_zone").then_some("habitable_zone_au"))
+        .chain((method.key == "blackbody").then_some("colour_srgb_hex"))
         .collect();
-    moment
-        .notes
+    notes
         .iter()
         .filter(|note| keys.contains(&note.about))
         .map(|note| format!("{}: {}", note.kind.name(), note.text))

@@ -10,7 +10,7 @@ use crate::system::{Body, LightReader, MomentLight, Starlight};
 use crate::units::number_text::{fixed, number};
 use crate::window::command::Command;
 use crate::window::theme::{GRID, Palette, small};
-use crate::window::widgets::choice::word;
+use crate::window::widgets::choice::{caption, word};
 use crate::window::widgets::figure_row::{FigureRow, UNIT, figure_row, word_row};
 use crate::window::widgets::heading::section;
 use crate::window::workspace::Workspace;
@@ -53,14 +53,14 @@ fn switches(ui: &mut Ui, palette: &Palette, view: SpectrumView) -> Vec<Command> 
     let mut commands = Vec::new();
     ui.horizontal_wrapped(|ui| {
         ui.spacing_mut().item_spacing.x = 3.0 * GRID;
-        ui.label(RichText::new("Count").font(small()).color(palette.dim));
+        caption(ui, palette, "Count");
         for counted in Counted::ALL {
             if word(ui, palette, counted.name(), view.counted == counted).clicked() {
                 commands.push(Command::SetSpectrumView(SpectrumView { counted, ..view }));
             }
         }
         ui.add_space(2.0 * GRID);
-        ui.label(RichText::new("Height").font(small()).color(palette.dim));
+        caption(ui, palette, "Height");
         for scaling in Scaling::ALL {
             if word(ui, palette, scaling.name(), view.scaling == scaling).clicked() {
                 commands.push(Command::SetSpectrumView(SpectrumView { scaling, ..view }));
@@ -124,6 +124,7 @@ fn plain<'n>(
     method: &'static str,
 ) -> FigureRow<'n> {
     let text = value.map_or_else(|| "–".to_owned(), |value| number(value, digits));
+    let symbol = if value.is_some() { symbol } else { "" };
     FigureRow { name, value, text, symbol, spread: None, method, unit_room: UNIT }
 }
 
@@ -184,16 +185,8 @@ fn magnitudes(ui: &mut Ui, workspace: &Workspace, star: Option<&Starlight>) -> V
     section(ui, palette, "Magnitudes");
     let mut commands = Vec::new();
     let known = star.and_then(|star| star.magnitudes.as_ref());
-    let uncertainty = known.map(|known| format!("± {}", number(known.photometry.uncertainty_mag, 2)));
-    for key in ["b_minus_v_mag", "bolometric_correction_mag"] {
-        let Some(quantity) = STAR_LIGHT.iter().find(|quantity| quantity.key == key) else { continue };
-        let value = star.and_then(quantity.value);
-        let row = FigureRow {
-            spread: value.and(uncertainty.clone()),
-            ..plain(quantity.name, value, quantity.digits, "mag", quantity.method)
-        };
-        commands.extend(figure_row(ui, palette, &row));
-    }
+    let keys = ["b_minus_v_mag", "bolometric_correction_mag", "magnitude_uncertainty_mag"];
+    commands.extend(figures(ui, palette, STAR_LIGHT, &keys, star));
     if let Some(quantity) = STAR_LIGHT.iter().find(|quantity| quantity.key == "absolute_visual_mag") {
         commands.extend(figure(ui, palette, quantity, "V, absolute", star));
     }
@@ -201,7 +194,7 @@ fn magnitudes(ui: &mut Ui, workspace: &Workspace, star: Option<&Starlight>) -> V
     let name = format!("V from {} pc", number(view.distance_pc, 1));
     commands.extend(figure_row(ui, palette, &plain(&name, seen, 4, "mag", "magnitudes")));
     ui.horizontal_wrapped(|ui| {
-        ui.label(RichText::new("Seen from").font(small()).color(palette.dim));
+        caption(ui, palette, "Seen from");
         for distance_pc in DISTANCES_PC {
             let words = format!("{} pc", number(distance_pc, 1));
             if word(ui, palette, &words, view.distance_pc == distance_pc).clicked() {

@@ -1,7 +1,7 @@
 //! Inks a spectrum: the data come ready made, nothing is computed here but places on the screen.
 
 use crate::figure::Spectrum;
-use crate::figure::spectrum::{REFERENCE_K, SpectrumCurve, TICKS, place_of};
+use crate::figure::spectrum::{REFERENCE_K, SpectrumCurve, TICKS, VisiblePoint, place_of};
 use crate::units::number_text::{fixed, number};
 use crate::window::theme::{Palette, small};
 use egui::epaint::{Mesh, Vertex, WHITE_UV};
@@ -66,7 +66,7 @@ fn fills(painter: &Painter, place: &Places<'_>, palette: &Palette) {
     if let Some(star) = &spectrum.star {
         let grey = star.points.iter().map(|[at, height]| (*at, *height, palette.spread));
         painter.add(Shape::mesh(under_curve(place, grey)));
-        let colours = spectrum.visible.iter().map(|point| (point.place, point.height, ink(point.colour_srgb)));
+        let colours = spectrum.visible.iter().map(|point| (point.place, point.height, ink(point, palette.spread)));
         painter.add(Shape::mesh(under_curve(place, colours)));
     }
 }
@@ -87,7 +87,7 @@ fn under_curve(place: &Places<'_>, points: impl Iterator<Item = (f64, f64, Color
 
 fn heights(painter: &Painter, place: &Places<'_>, palette: &Palette) {
     let rect = place.rect;
-    for tick in place.spectrum.axis.ticks((rect.height() / 26.0).max(2.0) as usize) {
+    for tick in place.spectrum.axis.ticks((rect.height() / 36.0).max(2.0) as usize) {
         let y = rect.bottom() - tick.height as f32 * rect.height();
         painter.hline(rect.x_range(), y, Stroke::new(1.0, palette.hairline.gamma_multiply(0.75)));
         painter.text(pos2(rect.left() - 6.0, y), Align2::RIGHT_CENTER, tick.label, small(), palette.dim);
@@ -123,7 +123,7 @@ fn wavelengths(painter: &Painter, place: &Places<'_>, palette: &Palette) {
         let first = mesh.vertices.len() as u32;
         for y in [top, bottom] {
             let pos = pos2(place.x(point.place), y);
-            mesh.vertices.push(Vertex { pos, uv: WHITE_UV, color: ink(point.colour_srgb) });
+            mesh.vertices.push(Vertex { pos, uv: WHITE_UV, color: ink(point, palette.ground) });
         }
         if first >= 2 {
             mesh.indices.extend([first - 2, first - 1, first, first - 1, first + 1, first]);
@@ -201,6 +201,8 @@ pub(super) fn wavelength_text(wavelength_nm: f64) -> String {
     }
 }
 
-fn ink([red, green, blue]: [u8; 3]) -> Color32 {
-    Color32::from_rgb(red, green, blue)
+/// The colour of a wavelength, fading into the ground where the eye sees little.
+fn ink(point: &VisiblePoint, ground: Color32) -> Color32 {
+    let [red, green, blue] = point.colour_srgb;
+    ground.lerp_to_gamma(Color32::from_rgb(red, green, blue), point.visibility as f32)
 }

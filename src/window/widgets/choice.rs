@@ -1,7 +1,15 @@
 //! A row of words of which one is chosen: pages, scales, looks.
 
-use crate::window::theme::{Palette, usual};
+use crate::window::theme::{Palette, small, usual};
 use egui::{Align2, Response, Role, Sense, Stroke, Ui, WidgetInfo, pos2, vec2};
+
+/// A small caption before a row of words, on one line with them.
+pub(crate) fn caption(ui: &mut Ui, palette: &Palette, text: &str) {
+    let galley = ui.painter().layout_no_wrap(text.to_owned(), small(), palette.dim);
+    let (rect, response) = ui.allocate_exact_size(vec2(galley.size().x, 24.0), Sense::hover());
+    response.widget_info(|| WidgetInfo::labeled(Role::Label, true, text));
+    ui.painter().text(rect.left_center(), Align2::LEFT_CENTER, text, small(), palette.dim);
+}
 
 /// One word of the row; the chosen one is underlined, not only coloured.
 pub(crate) fn word(ui: &mut Ui, palette: &Palette, text: &str, is_chosen: bool) -> Response {
