@@ -1,6 +1,7 @@
 //! One strip chart: values against the shared time axis.
 
 use super::value_axis::ValueAxis;
+use crate::system::PlanetState;
 
 /// Whose curve it is: decides colour and dash pattern.
 #[derive(Clone, Copy, Debug, PartialEq, Eq, Hash)]
@@ -55,6 +56,8 @@ pub enum BandMeaning {
     StarBody,
     /// The spread of a curve.
     Spread,
+    /// Nobody can say on which side of a border a planet ends.
+    Undecided,
 }
 
 /// A value that matters, drawn across the chart.
@@ -64,6 +67,17 @@ pub struct Level {
     pub name: String,
     /// The value.
     pub value: f64,
+}
+
+/// The states of a planet's climate through time.
+#[derive(Clone, Debug, PartialEq)]
+pub struct Lane {
+    /// The planet's name.
+    pub name: String,
+    /// Index of the planet in the system.
+    pub planet: usize,
+    /// Stretches of one state each, from left to right: start, end, state.
+    pub spans: Vec<(f64, f64, PlanetState)>,
 }
 
 /// A chart against time.
@@ -83,6 +97,8 @@ pub struct Chart {
     pub bands: Vec<Band>,
     /// Levels worth a line.
     pub levels: Vec<Level>,
+    /// Climates, drawn at the foot.
+    pub lanes: Vec<Lane>,
 }
 
 impl Chart {
@@ -158,6 +174,7 @@ mod tests {
             series: Vec::new(),
             bands: Vec::new(),
             levels: Vec::new(),
+            lanes: Vec::new(),
         };
         assert!((chart.value_at(&series, 0.25).expect("inside") - 10.0).abs() < 1e-9);
         assert_eq!(chart.value_at(&series, 0.65), None);

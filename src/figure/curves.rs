@@ -1,13 +1,17 @@
 //! The strip charts of the star's figures and of the planets' temperatures.
 
-use super::chart::{Band, BandMeaning, Chart, Level, Owner, Run, Series, runs};
+use super::chart::{Band, BandMeaning, Chart, Lane, Level, Owner, Run, Series, runs};
 use super::samples::{Sample, Samples};
 use super::value_axis::ValueAxis;
+use crate::system::PlanetState;
 use crate::system::planet_past::{BOILING_K, FREEZING_K};
 use crate::system::quantities::{StarQuantity, star_quantity};
 
 /// Decades shown below the largest value: a cold remnant's last decades would flatten all the rest.
 const MOST_DECADES: f64 = 11.0;
+
+/// Share of the height of a chart that one lane of climates takes.
+const LANE_SHARE: f64 = 0.15;
 
 /// The charts that can be shown, in their usual order.
 #[derive(Clone, Copy, Debug, PartialEq, Eq, Hash)]
@@ -85,6 +89,7 @@ fn star_chart(samples: &Samples, curve: Curve, quantity: &str, title: &str, is_l
         series: vec![star_series(samples, quantity, curve == Curve::Temperature)],
         bands: vec![spread_band(samples, quantity)],
         levels: Vec::new(),
+        lanes: Vec::new(),
     }
 }
 
@@ -97,6 +102,7 @@ fn empty(curve: Curve, title: &str) -> Chart {
         series: Vec::new(),
         bands: Vec::new(),
         levels: Vec::new(),
+        lanes: Vec::new(),
     }
 }
 
@@ -133,7 +139,11 @@ fn planet_temperatures(samples: &Samples) -> Chart {
     let count = samples.planet_names.len();
     let all = samples.all.iter().flat_map(|sample| (0..count).filter_map(move |index| temperature_k(sample, index)));
     // The giant's glare would flatten the range in which life has a say, so the axis is logarithmic.
-    let axis = ValueAxis::log(all.chain([FREEZING_K, BOILING_K]), 3.0);
+    let mut axis = ValueAxis::log(all.chain([FREEZING_K, BOILING_K]), 3.0);
+    let lanes: Vec<Lane> = (0..count).filter_map(|index| lane(samples, index)).collect();
+    // Room at the foot, so that lanes cover no curve.
+    let share = (LANE_SHARE * lanes.len() as f64).min(0.45);
+    axis.lowest *= (axis.lowest / axis.highest).powf(share / (1.0 - share));
     let series = (0..count).map(|index| planet_series(samples, index, |sample| temperature_k(sample, index))).collect();
     let edge = |fraction: f64| [fraction, FREEZING_K, BOILING_K];
     let ends = [samples.all.first(), samples.all.last()];
@@ -153,7 +163,32 @@ fn planet_temperatures(samples: &Samples) -> Chart {
             Level { name: "freezing".to_owned(), value: FREEZING_K },
             Level { name: "boiling".to_owned(), value: BOILING_K },
         ],
+        lanes,
     }
+}
+
+/// The climate of a planet that has one, as stretches of one state each.
+fn lane(samples: &Samples, index: usize) -> Option<Lane> {
+    let mut spans: Vec<(f64, f64, PlanetState)> = Vec::new();
+    let mut last: Option<f64> = None;
+    for sample in &samples.all {
+        let state = sample.planets.get(index).filter(|planet| planet.water_oceans.is_some()).map(|planet| planet.state);
+        let starts = last.unwrap_or(sample.fraction);
+        last = Some(sample.fraction);
+        let Some(state) = state else { continue };
+        match spans.last_mut() {
+            Some(span) if span.2 == state && span.1 >= starts => span.1 = sample.fraction,
+            Some(span) if span.1 >= starts => {
+                // The change lies between two samples: their middle is as good as any.
+                let middle = 0.5 * (starts + sample.fraction);
+                span.1 = middle;
+                spans.push((middle, sample.fraction, state));
+            }
+            _ => spans.push((sample.fraction, sample.fraction, state)),
+        }
+    }
+    let name = samples.planet_names.get(index).cloned().unwrap_or_default();
+    (!spans.is_empty()).then_some(Lane { name, planet: index, spans })
 }
 
 /// A planet's curve from what a closure reads at every sample.

@@ -3,6 +3,7 @@
 pub mod chart;
 pub mod curves;
 pub mod distance;
+pub mod orbit_plan;
 pub mod ribbon;
 pub mod samples;
 pub mod sky_picture;
@@ -10,6 +11,7 @@ pub mod spectrum;
 pub mod value_axis;
 
 pub use chart::{Band, Chart, Level, Owner, Run, Series};
+pub use orbit_plan::OrbitPlan;
 pub use ribbon::Ribbon;
 pub use samples::Samples;
 pub use sky_picture::{SkyPicture, SkyView};

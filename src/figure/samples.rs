@@ -13,6 +13,8 @@ pub struct Sample {
     pub star: StarMoment,
     /// The planets there.
     pub planets: Vec<PlanetMoment>,
+    /// Each planet's orbit under every assumption on tides: least and greatest semi-major axis, au.
+    pub orbit_ranges_au: Vec<Option<[f64; 2]>>,
 }
 
 /// Samples of a part of a time axis, from left to right.
@@ -49,7 +51,8 @@ impl Samples {
             .into_iter()
             .map(|(fraction, age_yr)| {
                 let (star, planets) = history.figures_at(age_yr);
-                Sample { fraction, age_yr, star, planets }
+                let orbit_ranges_au = history.planets().iter().map(|past| past.orbit_range_au(age_yr)).collect();
+                Sample { fraction, age_yr, star, planets, orbit_ranges_au }
             })
             .collect();
         let planet_names = history.system().planets.iter().map(|planet| planet.name.clone()).collect();

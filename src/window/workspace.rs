@@ -9,9 +9,10 @@ use super::theme::{self, Palette};
 use super::view::{View, WHOLE};
 use crate::document::{Scenario, Session, Settings, Theme};
 use crate::figure::curves::Curve;
+use crate::figure::orbit_plan::PlanScale;
 use crate::figure::{SkyView, SpectrumView};
 use crate::physics::light::steady_colour_words;
-use crate::system::{Body, History, Moment, TimeScale};
+use crate::system::{Body, EventGroup, History, Moment, TimeScale};
 use crate::units::number_text::USUAL_DIGITS;
 use crate::units::time_words::span;
 use std::sync::Arc;
@@ -47,6 +48,12 @@ pub struct Workspace {
     pub sky_view: SkyView,
     /// The star's colour in words as it was last shown: it follows with a little delay, so as not to flicker.
     pub(super) colour_words: &'static str,
+    /// How distances are laid out on the plan of the orbits.
+    pub plan_scale: PlanScale,
+    /// How far the plan of the orbits reaches, au; the whole system where nothing is said.
+    pub plan_rim_au: Option<f64>,
+    /// Groups of events that the chronicle leaves out.
+    pub hidden_events: Vec<EventGroup>,
     /// Playing.
     pub playback: Playback,
     /// Axis, samples, charts and ribbon for the history and view.
@@ -94,6 +101,9 @@ impl Workspace {
             spectrum_view: SpectrumView::default(),
             sky_view: SkyView::default(),
             colour_words: "",
+            plan_scale: PlanScale::default(),
+            plan_rim_au: None,
+            hidden_events: Vec::new(),
             playback: Playback::default(),
             derived,
             dialog: None,

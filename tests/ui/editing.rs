@@ -42,30 +42,30 @@ fn values_are_taken_with_their_units() {
 #[test]
 fn a_new_albedo_changes_the_planet_s_temperature() {
     let mut driver = Driver::demo();
-    driver.click("Talune, temperate");
-    assert_eq!(driver.workspace().selected, Body::Planet(2));
+    driver.click("Ostavar, frozen");
+    assert_eq!(driver.workspace().selected, Body::Planet(3));
     let temperature_k =
-        |driver: &Driver| driver.workspace().moment().planets[2].surface_temperature_k.expect("it orbits");
+        |driver: &Driver| driver.workspace().moment().planets[3].surface_temperature_k.expect("it orbits");
     let before_k = temperature_k(&driver);
     let row = driver.name_of("Surface: ");
-    driver.enter("Bond albedo of Talune", "0.9");
-    assert_eq!(driver.workspace().scenario().system.planets[2].bond_albedo, 0.9);
+    driver.enter("Bond albedo of Ostavar", "0.9");
+    assert_eq!(driver.workspace().scenario().system.planets[3].bond_albedo, 0.9);
     assert!(temperature_k(&driver) < before_k - 50.0, "{} from {before_k}", temperature_k(&driver));
     assert_ne!(driver.name_of("Surface: "), row);
-    driver.name_of("Talune, frozen");
+    driver.name_of("Ostavar, frozen");
 }
 
 #[test]
 fn what_is_out_of_range_stays_with_the_reason_and_the_model_keeps_its_value() {
     let mut driver = Driver::demo();
-    driver.click("Talune, temperate");
+    driver.click("Ostavar, frozen");
     for (field, text, reason) in [
-        ("Bond albedo of Talune", "1.4", "allowed: 0 to 1"),
-        ("Eccentricity of Talune", "1", "allowed: 0 to 0.99"),
+        ("Bond albedo of Ostavar", "1.4", "allowed: 0 to 1"),
+        ("Eccentricity of Ostavar", "1", "allowed: 0 to 0.99"),
         ("Mass of Veldane", "1000", "allowed: "),
         ("Mass of Veldane", "heavy", "is not understood"),
-        ("Semi-major axis of Talune", "", "type a number"),
-        ("Radius of Talune", "nan", "is not understood"),
+        ("Semi-major axis of Ostavar", "", "type a number"),
+        ("Radius of Ostavar", "nan", "is not understood"),
     ] {
         let scenario = driver.workspace().scenario().clone();
         let value = driver.text_in(field);
@@ -116,17 +116,18 @@ fn names_and_title_can_be_changed() {
 #[test]
 fn greenhouse_and_redistribution_are_chosen_from_lists() {
     let mut driver = Driver::demo();
-    driver.click("Talune, temperate");
-    let planet = |driver: &Driver| driver.workspace().scenario().system.planets[2].clone();
+    driver.click("Ostavar, frozen");
+    let planet = |driver: &Driver| driver.workspace().scenario().system.planets[3].clone();
     driver.click("Greenhouse");
     driver.click(Greenhouse::Grey { optical_depth: 1.0 }.name());
     assert!(matches!(planet(&driver).greenhouse, Greenhouse::Grey { .. }));
-    driver.enter("Optical depth of Talune", "3");
+    driver.enter("Optical depth of Ostavar", "3");
     assert_eq!(planet(&driver).greenhouse, Greenhouse::Grey { optical_depth: 3.0 });
     driver.click("Greenhouse");
     driver.click(Greenhouse::None.name());
     assert_eq!(planet(&driver).greenhouse, Greenhouse::None);
-    assert!(!driver.has("Optical depth of Talune"));
+    assert!(!driver.has("Optical depth of Ostavar"));
+    driver.click("More");
     driver.click("Redistribution");
     driver.click(Redistribution::SubStellar.name());
     assert_eq!(planet(&driver).redistribution, Redistribution::SubStellar);

@@ -2,8 +2,8 @@
 
 use crate::driver::Driver;
 use egui_kittest::kittest::NodeT;
-use longember::system::Body;
 use longember::system::limits::MOST_PLANETS;
+use longember::system::{Body, Carbon, EventGroup, Water};
 
 fn names(driver: &Driver) -> Vec<String> {
     driver.workspace().scenario().system.planets.iter().map(|planet| planet.name.clone()).collect()
@@ -70,8 +70,77 @@ fn a_second_click_on_a_row_turns_back_to_the_star() {
     let mut driver = Driver::demo();
     driver.click("Talune, temperate");
     assert_eq!(driver.workspace().selected, Body::Planet(2));
-    assert!(driver.has("Bond albedo of Talune"));
+    assert!(driver.has("Semi-major axis of Talune"));
     driver.click("Talune, temperate");
     assert_eq!(driver.workspace().selected, Body::Star);
-    assert!(!driver.has("Bond albedo of Talune"));
+    assert!(!driver.has("Semi-major axis of Talune"));
+}
+
+#[test]
+fn seas_are_chosen_and_answer_to_the_star() {
+    let mut driver = Driver::demo();
+    driver.click("Ostavar, frozen");
+    let water = |driver: &Driver| driver.workspace().scenario().system.planets[3].water;
+    assert_eq!(water(&driver), None);
+    driver.click("Surface");
+    driver.click("seas answer to star");
+    assert_eq!(water(&driver), Some(Water::default()));
+    driver.enter("Held mean of Ostavar", "15 °C");
+    assert_eq!(water(&driver).map(|water| water.carbon), Some(Carbon::Regulated { mean_k: 288.15 }));
+    driver.click("CO₂ is set by");
+    driver.click("held fixed");
+    driver.enter("CO₂ of Ostavar", "300 mbar");
+    let held = water(&driver).map(|water| water.carbon);
+    assert!(matches!(held, Some(Carbon::Held { carbon_dioxide_bar }) if (carbon_dioxide_bar - 0.3).abs() < 1e-12));
+    driver.enter("CO₂ of Ostavar", "100");
+    assert!(driver.shows("allowed: 0.0001 to 3 bar"), "100 bar is refused with the range");
+    assert_eq!(water(&driver).map(|water| water.carbon), held);
+    driver.click("More");
+    driver.enter("Axial tilt of Ostavar", "60");
+    assert_eq!(water(&driver).map(|water| water.obliquity_deg), Some(60.0));
+    let history = std::sync::Arc::clone(&driver.workspace().history);
+    assert_eq!(*history.system(), driver.workspace().scenario().system);
+    assert!(history.planet_at(3, 1e9).is_some_and(|planet| planet.ice_fraction == Some(1.0)));
+    driver.name_of("Ice cover: ");
+    driver.assert_one_instant();
+}
+
+#[test]
+fn the_chronicle_is_filtered_by_kind_and_tells_mild_windows() {
+    let mut driver = Driver::demo();
+    driver.click("Chronicle");
+    let rows = |driver: &Driver, of: &str| {
+        driver.names().into_iter().filter(|name| !name.contains(" · ") && name.contains(of)).count()
+    };
+    let all = rows(&driver, "leaves the habitable zone");
+    assert!(all > 0);
+    driver.click("habitable zone");
+    assert_eq!(driver.workspace().hidden_events, [EventGroup::Zone]);
+    assert_eq!(rows(&driver, "leaves the habitable zone"), 0);
+    assert!(rows(&driver, "runaway greenhouse begins") > 0);
+    driver.click("habitable zone");
+    assert_eq!(rows(&driver, "leaves the habitable zone"), all);
+    let thaw = driver.names().into_iter().find(|name| !name.contains(" · ") && name.ends_with("Frimholt: thaws"));
+    assert!(thaw.as_ref().is_some_and(|name| name.contains("between ")), "never one bare date: {thaw:?}");
+    assert!(driver.shows("Windows of mild climate") && driver.shows("Talune: "));
+}
+
+fn plan_in_words(driver: &Driver) -> String {
+    let everything = driver.everything();
+    everything.lines().find(|line| line.contains("Plan of the orbits. ")).map(str::to_owned).expect("it is described")
+}
+
+#[test]
+fn the_plan_of_orbits_shows_each_planet_and_what_became_of_the_lost() {
+    let mut driver = Driver::demo();
+    driver.click("Orbits");
+    let plan = plan_in_words(&driver);
+    for name in names(&driver) {
+        assert!(plan.contains(&name), "{plan}");
+    }
+    driver.click("logarithmic");
+    driver.press(egui::Modifiers::NONE, egui::Key::End);
+    let plan = plan_in_words(&driver);
+    assert!(plan.contains("Cindrel: engulfed") && plan.contains("Ostavar: frozen"), "{plan}");
+    driver.assert_one_instant();
 }

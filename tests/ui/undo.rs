@@ -40,12 +40,12 @@ fn the_button_says_what_it_will_take_back() {
 #[test]
 fn the_menu_does_the_same() {
     let mut driver = Driver::demo();
-    driver.click("Talune, temperate");
-    driver.enter("Bond albedo of Talune", "0.5");
+    driver.click("Ostavar, frozen");
+    driver.enter("Bond albedo of Ostavar", "0.5");
     driver.click("Edit");
     let items = driver.names();
     assert_eq!(
-        items.iter().filter(|name| name.starts_with("Undo: Change Bond albedo of Talune")).count(),
+        items.iter().filter(|name| name.starts_with("Undo: Change Bond albedo of Ostavar")).count(),
         2,
         "{items:?}"
     );
@@ -53,7 +53,7 @@ fn the_menu_does_the_same() {
     let item =
         items.into_iter().find(|name| name.starts_with("Undo: ") && name.contains("Ctrl+Z")).expect("in the menu");
     driver.click(&item);
-    assert_eq!(driver.workspace().scenario().system.planets[2].bond_albedo, 0.3);
+    assert_eq!(driver.workspace().scenario().system.planets[3].bond_albedo, 0.27);
 }
 
 #[test]

@@ -2,8 +2,10 @@
 
 use crate::figure::chart::BandMeaning;
 use crate::figure::{Chart, Owner, Run, Series};
+use crate::system::PlanetState;
 use crate::units::number_text::number;
 use crate::window::theme::{Palette, small};
+use crate::window::widgets::state_mark;
 use crate::window::workspace::Workspace;
 use egui::epaint::{Mesh, Vertex, WHITE_UV};
 use egui::{Align2, Color32, Painter, Pos2, Rect, Shape, Stroke, Ui, pos2};
@@ -48,6 +50,7 @@ pub(super) fn draw(ui: &Ui, frame: &Frame, chart: &Chart, workspace: &Workspace)
     for series in &chart.series {
         draw_series(&inside, &place, series, palette);
     }
+    lanes(&inside, &place, palette);
     band_labels(&inside, &place, palette);
     direct_labels(&inside, &place, palette);
     moment_line(painter, &place, palette);
@@ -88,6 +91,7 @@ fn band_ink(palette: &Palette, meaning: BandMeaning) -> Color32 {
         BandMeaning::HabitableZone => palette.zone,
         BandMeaning::StarBody => palette.star_body,
         BandMeaning::Spread => palette.spread,
+        BandMeaning::Undecided => palette.casing.gamma_multiply(0.55),
     }
 }
 
@@ -183,6 +187,46 @@ fn pieces(points: &[Pos2], dashes: &[f32], gaps: &[f32]) -> Vec<Vec<Pos2>> {
         found.push(piece);
     }
     found
+}
+
+/// Height of a lane of climate states, points.
+const LANE: f32 = 13.0;
+
+/// Climates of planets at the foot of the chart: shade, mark and, where there is room, the word.
+fn lanes(painter: &Painter, place: &Places<'_>, palette: &Palette) {
+    let room = ((place.rect.height() * 0.5) / LANE).floor().max(0.0) as usize;
+    for (row, lane) in place.chart.lanes.iter().take(room).enumerate() {
+        let bottom = place.rect.bottom() - LANE * row as f32;
+        let ink = planet_ink(palette, lane.planet);
+        for (from, to, state) in &lane.spans {
+            let (left, right) = (place.x(*from).max(place.rect.left()), place.x(*to).min(place.rect.right()));
+            if right <= left {
+                continue;
+            }
+            let rect = Rect::from_min_max(pos2(left, bottom - LANE + 2.0), pos2(right, bottom - 1.0));
+            painter.rect_filled(rect, 0.0, palette.ground);
+            painter.rect_filled(rect, 0.0, ink.gamma_multiply(lane_shade(*state)));
+            painter.vline(left, rect.y_range(), Stroke::new(1.0, palette.ground));
+            let galley = painter.layout_no_wrap(state.name().to_owned(), small(), palette.text);
+            if rect.width() > galley.size().x + 26.0 {
+                state_mark::draw(painter, pos2(left + 9.0, rect.center().y), *state, palette.text);
+                painter.galley(pos2(left + 19.0, rect.center().y - 0.5 * galley.size().y), galley, palette.text);
+            } else if rect.width() > 16.0 {
+                state_mark::draw(painter, rect.center(), *state, palette.text);
+            }
+        }
+    }
+}
+
+/// How strongly a state is shaded: open water most.
+fn lane_shade(state: PlanetState) -> f32 {
+    match state {
+        PlanetState::Temperate => 0.55,
+        PlanetState::Moist => 0.4,
+        PlanetState::Runaway => 0.28,
+        PlanetState::Frozen => 0.18,
+        _ => 0.08,
+    }
 }
 
 /// Names of bands of constant height, above their left end, where curves of the present rarely run.

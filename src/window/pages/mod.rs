@@ -5,6 +5,7 @@ mod chronicle;
 mod curves;
 mod introduction;
 mod light_columns;
+mod orbits;
 mod sky;
 mod sky_scene;
 mod sources;
@@ -27,6 +28,8 @@ pub enum Page {
     Spectrum,
     /// What stands in a planet's sky.
     Sky,
+    /// The system from above.
+    Orbits,
     /// Every dated event.
     Chronicle,
     /// What the scenario is about.
@@ -37,8 +40,15 @@ pub enum Page {
 
 impl Page {
     /// Every page, in order.
-    pub const ALL: [Self; 6] =
-        [Self::Curves, Self::Spectrum, Self::Sky, Self::Chronicle, Self::Introduction, Self::Sources];
+    pub const ALL: [Self; 7] = [
+        Self::Curves,
+        Self::Spectrum,
+        Self::Orbits,
+        Self::Sky,
+        Self::Chronicle,
+        Self::Introduction,
+        Self::Sources,
+    ];
 
     /// Name on its tab.
     #[must_use]
@@ -47,6 +57,7 @@ impl Page {
             Self::Curves => "Curves",
             Self::Spectrum => "Spectrum",
             Self::Sky => "Sky",
+            Self::Orbits => "Orbits",
             Self::Chronicle => "Chronicle",
             Self::Introduction => "What to look for",
             Self::Sources => "Sources",
@@ -72,6 +83,7 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
         Page::Curves => curves::show(ui, workspace),
         Page::Spectrum => spectrum::show(ui, workspace),
         Page::Sky => sky::show(ui, workspace),
+        Page::Orbits => orbits::show(ui, workspace),
         Page::Chronicle => chronicle::show(ui, workspace),
         Page::Introduction => introduction::show(ui, workspace),
         Page::Sources => sources::show(ui, workspace),
