@@ -246,7 +246,7 @@ pub const PLANET: &[PlanetQuantity] = &[
     },
     PlanetQuantity {
         key: "carbon_dioxide_bar",
-        name: "Carbon dioxide",
+        name: "CO₂",
         symbol: "bar",
         digits: 2,
         method: "carbon_dioxide",
