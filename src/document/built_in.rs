@@ -22,6 +22,9 @@ macro_rules! built_in {
 static ALL: &[BuiltIn] = &[
     built_in!("sunlike_five_worlds"),
     built_in!("red_dwarf_trillions_of_years"),
+    built_in!("tenth_of_a_sun_close_worlds"),
+    built_in!("late_spring_of_outer_worlds"),
+    built_in!("red_dwarf_that_becomes_a_giant"),
     built_in!("half_solar_mass_slow_star"),
     built_in!("metal_poor_elder"),
     built_in!("frozen_worlds_and_the_giant"),

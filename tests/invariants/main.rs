@@ -11,3 +11,4 @@ mod planet_lives;
 mod planet_track;
 mod red_dwarf_lives;
 mod star_life;
+mod star_whole_life;

@@ -16,6 +16,7 @@ mod planet_fates;
 mod planet_light_and_temperature;
 mod red_dwarf_lives;
 mod red_dwarf_today;
+mod red_dwarf_trade;
 mod red_dwarf_trillions;
 mod star_ends;
 mod star_fit;

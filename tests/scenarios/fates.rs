@@ -8,7 +8,8 @@ use longember::system::{Body, Carbon, Event, EventKind, History, PlanetState};
 
 fn history(name: &str) -> Option<History> {
     let scenario = built_in::find(name)?.scenario().ok()?;
-    History::compute(scenario.system).ok()
+    // Red dwarfs take seconds; what their descriptions promise is held to the exact lives in a file of its own.
+    History::quick_look(scenario.system.clone()).or_else(|| History::compute(scenario.system).ok())
 }
 
 /// The planets that the star takes or lets go, and those that still orbit at the end, by name.

@@ -1,6 +1,7 @@
 //! Every scenario that comes with the program: sound, in the form that saving gives it, and listed.
 
 mod fates;
+mod red_dwarfs;
 
 use longember::document::{built_in, parse_scenario_text, scenario_text, sound_text};
 use std::collections::HashSet;

@@ -95,7 +95,7 @@ impl Phase {
         match self {
             Self::FullyMixedMainSequence => "fully mixed main sequence",
             Self::MainSequence => "main sequence",
-            Self::RadiativeCore => "main sequence with radiative core",
+            Self::RadiativeCore => "radiative core",
             Self::BlueDwarf => "blue dwarf",
             Self::HertzsprungGap => "Hertzsprung gap (subgiant)",
             Self::FirstGiantBranch => "first giant branch",

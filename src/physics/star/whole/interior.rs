@@ -22,7 +22,7 @@ impl Interior {
     pub(super) fn of(node: &Node) -> Self {
         Self {
             mean_hydrogen_fraction: node.mean_hydrogen_fraction,
-            core_helium3_fraction: node.core_helium3_fraction,
+            core_helium3_fraction: traceless(node.core_helium3_fraction),
             core_temperature_k: node.core_temperature_k,
             core_density_g_cm3: node.core_density_g_cm3,
             mixed_mass_fraction: 1.0 - node.still_core_mass_fraction,
@@ -41,4 +41,10 @@ impl Interior {
             mixed_mass_fraction: even(self.mixed_mass_fraction, later.mixed_mass_fraction),
         }
     }
+}
+
+/// A mass fraction without the traces that a computation never quite burns away.
+pub(super) fn traceless(fraction: f64) -> f64 {
+    const TRACE: f64 = 1e-6;
+    if fraction < TRACE { 0.0 } else { fraction }
 }

@@ -1,6 +1,6 @@
 //! One moment of a life that is told node by node.
 
-use super::interior::Interior;
+use super::interior::{Interior, traceless};
 use crate::physics::star::convective::Node;
 
 /// The star at one node.
@@ -33,7 +33,7 @@ impl Moment {
             log_radius: node.radius_rsun.ln(),
             mass_msun: node.mass_msun,
             core_mass_msun: node.helium_core_mass_msun.min(node.mass_msun),
-            core_hydrogen_fraction: node.core_hydrogen_fraction,
+            core_hydrogen_fraction: traceless(node.core_hydrogen_fraction),
             interior: Interior::of(node),
         }
     }

@@ -1,6 +1,6 @@
 //! A life between those of the grid.
 
-use super::sample::{COLUMNS, COUNT, POINTS, Sampled, node};
+use super::sample::{COLUMNS, CORE_MASS, COUNT, MASS, POINTS, Sampled, node};
 use super::table::{Entry, read};
 use crate::physics::star::convective::{Caution, ConvectiveInput, Ending, Life, Node, Stage, SurfaceOpacity};
 use std::sync::LazyLock;
@@ -25,12 +25,18 @@ pub fn quick_look(input: ConvectiveInput, surface: SurfaceOpacity) -> Option<Lif
     rows.dedup();
     let (poorer, richer, share) = around(&rows, metallicity_dex)?;
     let of_poorer = along_masses(input.mass_msun, rows[poorer], surface)?;
-    let sampled = if share > 0.0 {
+    let mut sampled = if share > 0.0 {
         let of_richer = along_masses(input.mass_msun, rows[richer], surface)?;
         between(&of_poorer, &of_richer, share)
     } else {
         of_poorer
     };
+    // Between two lives, and in sixteen bits, the mass at birth is not quite the one asked for.
+    let factor = input.mass_msun / sampled.points[0][MASS];
+    for point in &mut sampled.points {
+        point[MASS] *= factor;
+        point[CORE_MASS] *= factor;
+    }
     let mut life = life(&sampled);
     if surface == SurfaceOpacity::Of1997 {
         life.cautions.push(Caution::OutdatedSurface);

@@ -8,6 +8,10 @@ pub(super) const POINTS: [usize; 5] = [14, 12, 64, 32, 6];
 pub(super) const COUNT: usize = 1 + POINTS[0] + POINTS[1] + POINTS[2] + POINTS[3] + POINTS[4];
 /// Columns of a point: see [`columns`].
 pub(super) const COLUMNS: usize = 13;
+/// Column of the mass.
+pub(super) const MASS: usize = 0;
+/// Column of the mass of the helium core.
+pub(super) const CORE_MASS: usize = 11;
 
 /// Hydrogen at the centre below which it counts as spent, mass fraction.
 const SPENT: f64 = 0.01;
