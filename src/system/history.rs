@@ -2,6 +2,7 @@
 
 use super::events::{self, Event};
 use super::moment::{Moment, PlanetMoment, StarMoment};
+use super::neighbour_notes;
 use super::notes::{self, Note};
 use super::planet_past::PlanetPast;
 use super::specification::{Body, System, SystemProblem};
@@ -181,6 +182,7 @@ impl History {
             notes.extend(notes::of_planet(index, past.specification(), &planet, &state));
             planets.push(planet);
         }
+        notes.extend(neighbour_notes::of_neighbours(&self.planets, &planets, state.mass_msun));
         Moment { time_yr, star: self.star_moment(&state), planets, notes }
     }
 

@@ -13,6 +13,7 @@ pub mod limits;
 pub mod mild_spans;
 pub mod moment;
 pub mod moment_light;
+mod neighbour_notes;
 pub mod notes;
 pub mod pacing;
 pub mod planet_choices;

@@ -6,7 +6,7 @@ use criterion::{Criterion, criterion_group, criterion_main};
 use longember::document::built_in;
 use longember::figure::curves::Curve;
 use longember::figure::{Samples, ribbon::LightRange, ribbon::Ribbon};
-use longember::system::{History, TimeAxis, TimeScale};
+use longember::system::{History, PlanetSpecification, TimeAxis, TimeScale, Water};
 use longember::window::Longember;
 use std::hint::black_box;
 
@@ -25,6 +25,22 @@ fn edit_to_curves(criterion: &mut Criterion) {
             let charts: Vec<_> = Curve::ALL.iter().map(|curve| curve.chart(&samples)).collect();
             (ribbon, charts)
         });
+    });
+    let many = {
+        let mut system = scenario.system.clone();
+        let pattern = system.planets.clone();
+        system.planets = (0..20)
+            .map(|index| PlanetSpecification {
+                name: format!("Planet {index}"),
+                semi_major_axis_au: 0.3 * 1.25_f64.powi(index),
+                water: Some(Water::default()),
+                ..pattern[2].clone()
+            })
+            .collect();
+        system
+    };
+    criterion.bench_function("whole history, twenty planets with seas", |bencher| {
+        bencher.iter(|| History::compute(black_box(many.clone())));
     });
     criterion.bench_function("whole history, five planets", |bencher| {
         bencher.iter(|| History::compute(black_box(scenario.system.clone())));

@@ -8,6 +8,7 @@ mod light_colour;
 mod light_sky;
 mod planet_formulas;
 mod planet_lives;
+mod planet_systems;
 mod planet_track;
 mod red_dwarf_lives;
 mod star_life;

@@ -50,7 +50,7 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace, index: usize) -> Option<C
     if let Some(name) = text_entry(ui, palette, "Name of the planet", &planet.name, LONGEST_NAME, width) {
         let is_taken = scenario.system.planets.iter().any(|other| other.name == name);
         let name = if is_taken { scenario.system.free_planet_name(&name) } else { name };
-        changed = said("name", move |planet| planet.name.clone_from(&name));
+        changed = Some(said("name", move |planet| planet.name.clone_from(&name)));
     }
     ui.add_space(GRID);
     for field in BODY {
@@ -70,24 +70,24 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace, index: usize) -> Option<C
     })
 }
 
-fn said(what: &str, change: impl Fn(&mut PlanetSpecification) + 'static) -> Option<Change> {
-    Some((what.to_owned(), Box::new(change)))
+fn said(what: &str, change: impl Fn(&mut PlanetSpecification) + 'static) -> Change {
+    (what.to_owned(), Box::new(change))
 }
 
 fn number(ui: &mut Ui, workspace: &Workspace, planet: &PlanetSpecification, field: Field) -> Option<Change> {
     let (limit, read, write) = field;
     let value = value_entry(ui, workspace.palette(), &planet.name, limit, read(planet))?;
-    said(limit.name, move |planet| write(planet, value))
+    Some(said(limit.name, move |planet| write(planet, value)))
 }
 
 fn water_number(ui: &mut Ui, workspace: &Workspace, planet: &str, water: Water, field: WaterField) -> Option<Change> {
     let (limit, read, write) = field;
     let value = value_entry(ui, workspace.palette(), planet, limit, read(&water))?;
-    said(limit.name, move |planet| {
+    Some(said(limit.name, move |planet| {
         let mut water = water;
         write(&mut water, value);
         planet.water = Some(water);
-    })
+    }))
 }
 
 /// Either a greenhouse that is held, or seas that answer to the star.
@@ -99,7 +99,7 @@ fn climate(ui: &mut Ui, workspace: &Workspace, planet: &PlanetSpecification) -> 
     let mut changed = None;
     if let Some(chosen) = choice(ui, workspace, "Surface", hint, &words, current) {
         let water = (chosen == 1).then(Water::default);
-        changed = said("climate", move |planet| planet.water = water);
+        changed = Some(said("climate", move |planet| planet.water = water));
     }
     let Some(water) = planet.water else {
         changed = number(ui, workspace, planet, ALBEDO).or(changed);
@@ -112,7 +112,7 @@ fn climate(ui: &mut Ui, workspace: &Workspace, planet: &PlanetSpecification) -> 
     let starts = ["with open water", "frozen over"];
     if let Some(chosen) = choice(ui, workspace, "Starts", hint, &starts, usize::from(water.starts_frozen)) {
         let water = Water { starts_frozen: chosen == 1, ..water };
-        changed = said("start", move |planet| planet.water = Some(water));
+        changed = Some(said("start", move |planet| planet.water = Some(water)));
     }
     let inside = folded(ui, &planet.name, |ui| {
         let mut changed = None;
@@ -140,7 +140,7 @@ fn seldom_light(ui: &mut Ui, workspace: &Workspace, planet: &PlanetSpecification
     let hint = "How absorbed light spreads over the globe.";
     let mut changed = number(ui, workspace, planet, RADIATES);
     if let Some(chosen) = choice(ui, workspace, "Redistribution", hint, &words, current) {
-        changed = said("redistribution", move |planet| planet.redistribution = Redistribution::ALL[chosen]);
+        changed = Some(said("redistribution", move |planet| planet.redistribution = Redistribution::ALL[chosen]));
     }
     changed
 }
@@ -155,20 +155,20 @@ fn greenhouse(ui: &mut Ui, workspace: &Workspace, planet: &PlanetSpecification) 
     let current = GREENHOUSES.iter().position(|option| option.key() == planet.greenhouse.key()).unwrap_or(0);
     let mut changed = None;
     if let Some(chosen) = choice(ui, workspace, "Greenhouse", "Warming by the air, held fixed.", &words, current) {
-        changed = said("greenhouse", move |planet| planet.greenhouse = GREENHOUSES[chosen]);
+        changed = Some(said("greenhouse", move |planet| planet.greenhouse = GREENHOUSES[chosen]));
     }
     match planet.greenhouse {
         Greenhouse::None => {}
         Greenhouse::FixedIncrement { increment_k } => {
             if let Some(increment_k) = value_entry(ui, palette, &planet.name, &GREENHOUSE_INCREMENT, increment_k) {
                 let greenhouse = Greenhouse::FixedIncrement { increment_k };
-                changed = said("greenhouse increment", move |planet| planet.greenhouse = greenhouse);
+                changed = Some(said("greenhouse increment", move |planet| planet.greenhouse = greenhouse));
             }
         }
         Greenhouse::Grey { optical_depth } => {
             if let Some(optical_depth) = value_entry(ui, palette, &planet.name, &OPTICAL_DEPTH, optical_depth) {
                 let greenhouse = Greenhouse::Grey { optical_depth };
-                changed = said("optical depth", move |planet| planet.greenhouse = greenhouse);
+                changed = Some(said("optical depth", move |planet| planet.greenhouse = greenhouse));
             }
         }
     }
@@ -191,7 +191,7 @@ fn carbon(ui: &mut Ui, workspace: &Workspace, name: &str, water: Water) -> Optio
             carbon = entered.map(|carbon_dioxide_bar| Carbon::Held { carbon_dioxide_bar }).or(carbon);
         }
     }
-    carbon.and_then(|carbon| said("carbon dioxide", move |planet| planet.water = Some(Water { carbon, ..water })))
+    carbon.and_then(|carbon| Some(said("carbon dioxide", move |planet| planet.water = Some(Water { carbon, ..water }))))
 }
 
 fn tides_row(ui: &mut Ui, workspace: &Workspace, current: TidesChoice) -> Option<Change> {
@@ -199,7 +199,7 @@ fn tides_row(ui: &mut Ui, workspace: &Workspace, current: TidesChoice) -> Option
     let current = TidesChoice::ALL.iter().position(|option| *option == current).unwrap_or(0);
     let hint = "Tides on planet and star, and the drag of a giant's envelope, with usual strength for the mass.";
     choice(ui, workspace, "Tides", hint, &words, current)
-        .and_then(|chosen| said("tides", move |planet| planet.tides = TidesChoice::ALL[chosen]))
+        .and_then(|chosen| Some(said("tides", move |planet| planet.tides = TidesChoice::ALL[chosen])))
 }
 
 /// The pressure is kept when only the gas changes.
@@ -211,12 +211,12 @@ fn air(ui: &mut Ui, workspace: &Workspace, planet: &PlanetSpecification) -> Opti
     let mut changed = choice(ui, workspace, "Air", hint, &words, current).and_then(|chosen| {
         let kind = Air::KINDS[chosen];
         let air = pressure_bar.map_or(kind, |pressure_bar| kind.at_pressure(pressure_bar));
-        said("air", move |planet| planet.air = air)
+        Some(said("air", move |planet| planet.air = air))
     });
     if let Some(current_bar) = pressure_bar
         && let Some(value) = value_entry(ui, workspace.palette(), &planet.name, &SURFACE_PRESSURE, current_bar)
     {
-        changed = said("pressure of the air", move |planet| planet.air = planet.air.at_pressure(value));
+        changed = Some(said("pressure of the air", move |planet| planet.air = planet.air.at_pressure(value)));
     }
     changed
 }
