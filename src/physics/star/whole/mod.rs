@@ -13,10 +13,8 @@ mod life;
 mod moment;
 pub mod quick_look;
 mod told;
-
-/// Number of the structure calculation: raised with every change after which computed lives differ, so that lives kept
-/// from before are not taken for new ones.
-pub const STRUCTURE_VERSION: u32 = 1;
+mod version;
 
 pub use interior::Interior;
 pub use life::{COMPUTED_BELOW_MSUN, FITTED_FROM_MSUN, LifeOptions, WholeLife};
+pub use version::STRUCTURE_VERSION;
