@@ -29,14 +29,14 @@ const CAUTIONS: [Caution; 7] = [
 /// Form, sum over the rest, contraction time, ending, cautions, nodes.
 pub(super) fn encoded(life: &Life) -> Vec<u8> {
     let mut body = life.contraction_yr.to_le_bytes().to_vec();
-    body.push(place(&ENDINGS, life.ending));
+    body.push(place(&ENDINGS, &life.ending));
     body.push(u8::try_from(life.cautions.len()).unwrap_or(u8::MAX));
-    body.extend(life.cautions.iter().take(usize::from(u8::MAX)).map(|caution| place(&CAUTIONS, *caution)));
+    body.extend(life.cautions.iter().take(usize::from(u8::MAX)).map(|caution| place(&CAUTIONS, caution)));
     for node in &life.nodes {
         for number in numbers(node) {
             body.extend(number.to_le_bytes());
         }
-        body.push(place(&STAGES, node.stage));
+        body.push(place(&STAGES, &node.stage));
     }
     let mut bytes = MAGIC.to_vec();
     bytes.extend(sum(&body).to_le_bytes());
@@ -131,8 +131,8 @@ fn numbers(node: &Node) -> [f64; NUMBERS] {
 }
 
 /// The place of a value in its list; one past the end for what is not listed, which does not decode.
-fn place<T: PartialEq>(list: &[T], value: T) -> u8 {
-    let place = list.iter().position(|listed| *listed == value).unwrap_or(list.len());
+fn place<T: PartialEq>(list: &[T], value: &T) -> u8 {
+    let place = list.iter().position(|listed| listed == value).unwrap_or(list.len());
     u8::try_from(place).unwrap_or(u8::MAX)
 }
 

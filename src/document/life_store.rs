@@ -48,13 +48,12 @@ impl LifeStore {
         if !WholeLife::needs_structure(input.mass_msun) || !system.problems().is_empty() {
             return History::compute_with(system, progress);
         }
-        let life = match self.find(input, options) {
-            Some(life) => life,
-            None => {
-                let life = WholeLife::structure(input, options, &mut |share| progress(0.98 * share))?;
-                self.keep(input, options, &life);
-                life
-            }
+        let life = if let Some(life) = self.find(input, options) {
+            life
+        } else {
+            let life = WholeLife::structure(input, options, &mut |share| progress(0.98 * share))?;
+            self.keep(input, options, &life);
+            life
         };
         History::of_life(system, WholeLife::of_structure(input, options, &life)?, progress)
     }

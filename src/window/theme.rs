@@ -211,8 +211,7 @@ fn paint_visuals(visuals: &mut egui::Visuals, palette: &Palette) {
 #[must_use]
 pub fn contrast(first: Color32, second: Color32) -> f32 {
     let luminance = |color: Color32| {
-        let [r, g, b] =
-            [color.r(), color.g(), color.b()].map(egui::ecolor::linear_f32_from_gamma_u8);
+        let [r, g, b] = [color.r(), color.g(), color.b()].map(egui::ecolor::linear_f32_from_gamma_u8);
         0.2126 * r + 0.7152 * g + 0.0722 * b
     };
     let (light, dark) = (luminance(first).max(luminance(second)), luminance(first).min(luminance(second)));

@@ -191,7 +191,7 @@ fn carbon(ui: &mut Ui, workspace: &Workspace, name: &str, water: Water) -> Optio
             carbon = entered.map(|carbon_dioxide_bar| Carbon::Held { carbon_dioxide_bar }).or(carbon);
         }
     }
-    carbon.and_then(|carbon| Some(said("carbon dioxide", move |planet| planet.water = Some(Water { carbon, ..water }))))
+    carbon.map(|carbon| said("carbon dioxide", move |planet| planet.water = Some(Water { carbon, ..water })))
 }
 
 fn tides_row(ui: &mut Ui, workspace: &Workspace, current: TidesChoice) -> Option<Change> {
@@ -199,7 +199,7 @@ fn tides_row(ui: &mut Ui, workspace: &Workspace, current: TidesChoice) -> Option
     let current = TidesChoice::ALL.iter().position(|option| *option == current).unwrap_or(0);
     let hint = "Tides on planet and star, and the drag of a giant's envelope, with usual strength for the mass.";
     choice(ui, workspace, "Tides", hint, &words, current)
-        .and_then(|chosen| Some(said("tides", move |planet| planet.tides = TidesChoice::ALL[chosen])))
+        .map(|chosen| said("tides", move |planet| planet.tides = TidesChoice::ALL[chosen]))
 }
 
 /// The pressure is kept when only the gas changes.
@@ -208,10 +208,10 @@ fn air(ui: &mut Ui, workspace: &Workspace, planet: &PlanetSpecification) -> Opti
     let current = Air::KINDS.iter().position(|kind| kind.key() == planet.air.key()).unwrap_or(0);
     let pressure_bar = planet.air.surface_pressure_bar();
     let hint = "Clear air that makes the sky; it does not warm the ground.";
-    let mut changed = choice(ui, workspace, "Air", hint, &words, current).and_then(|chosen| {
+    let mut changed = choice(ui, workspace, "Air", hint, &words, current).map(|chosen| {
         let kind = Air::KINDS[chosen];
         let air = pressure_bar.map_or(kind, |pressure_bar| kind.at_pressure(pressure_bar));
-        Some(said("air", move |planet| planet.air = air))
+        said("air", move |planet| planet.air = air)
     });
     if let Some(current_bar) = pressure_bar
         && let Some(value) = value_entry(ui, workspace.palette(), &planet.name, &SURFACE_PRESSURE, current_bar)

@@ -65,7 +65,7 @@ impl Computed {
             node.still_core_mass_fraction <= 0.0 && node.surface_hydrogen_fraction - node.core_hydrogen_fraction < MIXED
         };
         let mixing_ends_yr = nodes.iter().find(|node| !mixed(node)).map(|node| node.age_yr);
-        let mut cautions: Vec<StarCaution> = life.cautions.iter().filter_map(|caution| caution_of(*caution)).collect();
+        let mut cautions: Vec<StarCaution> = life.cautions.iter().map(|caution| caution_of(*caution)).collect();
         if surface == SurfaceOpacity::Modern {
             cautions.push(StarCaution::LifetimesDiffer);
         }
@@ -146,14 +146,14 @@ fn cool_the_core(moments: &mut Vec<Moment>) {
     }
 }
 
-fn caution_of(caution: Caution) -> Option<StarCaution> {
+fn caution_of(caution: Caution) -> StarCaution {
     match caution {
-        Caution::OutsideCalibratedMasses => Some(StarCaution::LightRedDwarf),
-        Caution::OutsideCalibratedMetallicity => Some(StarCaution::UnusualMetals),
-        Caution::OutdatedSurface => Some(StarCaution::OldSurface),
-        Caution::ShellFlashes => Some(StarCaution::ShellFlashes),
-        Caution::GiantWind => Some(StarCaution::SmallGiantWind),
-        Caution::OpacityOfMoreMetals => Some(StarCaution::MetalPoorOpacity),
-        Caution::EarlyCrystal => Some(StarCaution::EarlyCrystal),
+        Caution::OutsideCalibratedMasses => StarCaution::LightRedDwarf,
+        Caution::OutsideCalibratedMetallicity => StarCaution::UnusualMetals,
+        Caution::OutdatedSurface => StarCaution::OldSurface,
+        Caution::ShellFlashes => StarCaution::ShellFlashes,
+        Caution::GiantWind => StarCaution::SmallGiantWind,
+        Caution::OpacityOfMoreMetals => StarCaution::MetalPoorOpacity,
+        Caution::EarlyCrystal => StarCaution::EarlyCrystal,
     }
 }
