@@ -69,7 +69,7 @@ title() { xdotool getwindowname "$window"; }
 is_unsaved() { [[ $(title) == *" *"* ]]; }
 is_saved() { ! is_unsaved; }
 is_painted() { shoot "$pictures/first.png" 2>/dev/null && [ "$(colours "$pictures/first.png")" -gt 200 ]; }
-has_moved() { shoot "$pictures/moved.png" && differ "$pictures/before.png" "$pictures/moved.png"; }
+changes() { shoot "$2" && differ "$1" "$2"; }
 file_holds() { grep -qE "^ *mass_msun: $1,\$" "$file"; }
 is_gone() { ! kill -0 "$program_pid" 2>/dev/null; }
 
@@ -104,23 +104,22 @@ is_saved || fail "a file that was just opened counts as changed: $(title)"
 
 # Two pictures with nothing done between them are the same, so that a difference later means something.
 xdotool mousemove --window "$window" $NOWHERE
-settled() { shoot "$pictures/before.png" && sleep 0.3 && shoot "$pictures/again.png" && ! differ "$pictures/before.png" "$pictures/again.png"; }
-until_true "a window at rest" settled
+settled() { shoot "$1" && sleep 0.3 && shoot "$work/again.png" && ! differ "$1" "$work/again.png"; }
+until_true "a window at rest" settled "$pictures/before.png"
 
-# Drag along the strip: every view moves.
-xdotool mousemove --window "$window" $STRIP_FROM mousedown 1
-read -r x y <<<"$STRIP_FROM"
-read -r to_x to_y <<<"$STRIP_TO"
-while [ "$x" -lt "$to_x" ]; do
-    x=$((x + 40 > to_x ? to_x : x + 40))
-    xdotool mousemove --window "$window" "$x" "$to_y"
-done
+# Drag along the strip: every view moves. Each step waits for the picture, as a hand waits for the eye.
+xdotool mousemove --window "$window" $STRIP_FROM mousedown 1 mousemove_relative 20 0
+until_true "a picture of the first moment of the drag" changes "$pictures/before.png" "$pictures/first.png"
+xdotool mousemove --window "$window" $STRIP_TO
+until_true "a picture of the last moment of the drag" changes "$pictures/first.png" "$pictures/moved.png"
 xdotool mouseup 1 mousemove --window "$window" $NOWHERE
-until_true "a picture of another moment" has_moved
+until_true "a window at rest after the drag" settled "$pictures/moved.png"
+differ "$pictures/before.png" "$pictures/moved.png" || fail "the drag moved nothing"
 is_saved || fail "moving through time counts as a change of the scenario"
 
-# Edit the star's mass.
+# Edit the star's mass. The field must have the focus before anything is typed.
 xdotool mousemove --window "$window" $MASS_FIELD click 1
+until_true "a field that has the focus" changes "$pictures/moved.png" "$pictures/focus.png"
 xdotool key --clearmodifiers ctrl+a
 xdotool type --delay 30 "1.2"
 xdotool key Return
@@ -132,8 +131,8 @@ xdotool key --clearmodifiers ctrl+s
 until_true "the edit in the file" file_holds 1.2
 until_true "a title without the mark" is_saved
 xdotool mousemove --window "$window" $NOWHERE
-after() { shoot "$pictures/after.png" && differ "$pictures/moved.png" "$pictures/after.png"; }
-until_true "a picture with the new mass" after
+until_true "a window at rest with the new mass" settled "$pictures/after.png"
+differ "$pictures/moved.png" "$pictures/after.png" || fail "the new mass is not to be seen"
 for picture in before moved after; do
     [ "$(colours "$pictures/$picture.png")" -gt 200 ] || fail "$picture.png has only $(colours "$pictures/$picture.png") colours"
 done
