@@ -270,7 +270,8 @@ mod tests {
 
     #[test]
     fn air_can_be_too_thick_for_the_disc() {
-        let thick = picture(5772.0, 90.0, Viewing::Camera);
+        assert!(picture(5772.0, 20.0, Viewing::Camera).disc_is_seen);
+        let thick = picture(5772.0, 500.0, Viewing::Camera);
         assert!(!thick.disc_is_seen && thick.sky.is_some());
     }
 

@@ -7,6 +7,7 @@ mod demos;
 mod events;
 mod files;
 mod help;
+mod light;
 mod moments;
 mod program;
 mod states;

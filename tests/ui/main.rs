@@ -9,6 +9,7 @@ mod editing;
 mod files;
 mod glyphs;
 mod layout;
+mod light_pages;
 mod looks;
 mod opening;
 mod pages;

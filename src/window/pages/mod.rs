@@ -7,6 +7,7 @@ mod introduction;
 mod light_columns;
 mod orbits;
 mod sky;
+mod sky_altitude;
 mod sky_scene;
 mod sources;
 mod spectrum;
@@ -40,15 +41,8 @@ pub enum Page {
 
 impl Page {
     /// Every page, in order.
-    pub const ALL: [Self; 7] = [
-        Self::Curves,
-        Self::Spectrum,
-        Self::Orbits,
-        Self::Sky,
-        Self::Chronicle,
-        Self::Introduction,
-        Self::Sources,
-    ];
+    pub const ALL: [Self; 7] =
+        [Self::Curves, Self::Spectrum, Self::Orbits, Self::Sky, Self::Chronicle, Self::Introduction, Self::Sources];
 
     /// Name on its tab.
     #[must_use]

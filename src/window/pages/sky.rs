@@ -1,25 +1,20 @@
 //! What stands in a planet's sky: the star to scale, the colour of clear air, and how bright it all is.
 
 use super::light_columns::{columns, figure, figures};
-use super::sky_scene;
+use super::{sky_altitude, sky_scene};
 use crate::figure::{SkyPicture, SkyView};
 use crate::physics::light::{SeenLight, Viewing, VisibleSpectrum, seen};
 use crate::system::light_quantities::PLANET_LIGHT;
 use crate::system::planet_light::clear_air;
 use crate::system::{Air, Body, Moment, PlanetLight, PlanetSpecification, PlanetState, Starlight};
-use crate::units::entry::{EntryKind, parse_entry, write_entry};
 use crate::units::number_text::{fixed, number};
 use crate::window::command::Command;
 use crate::window::theme::{GRID, Palette, small};
 use crate::window::widgets::choice::{caption, word};
-use crate::window::widgets::draft::keep_draft;
-use crate::window::widgets::figure_row::{FigureRow, UNIT, figure_row, word_row};
+use crate::window::widgets::figure_row::{FigureRow, UNIT, WordRow, figure_row, word_row};
 use crate::window::widgets::heading::section;
 use crate::window::workspace::Workspace;
-use egui::{
-    EventFilter, Id, InputState, Key, Modifiers, Rect, Response, RichText, Role, ScrollArea, Sense, Slider, TextEdit,
-    Ui, WidgetInfo, vec2,
-};
+use egui::{Rect, RichText, Role, ScrollArea, Sense, Ui, WidgetInfo, vec2};
 
 /// Least and largest height of the picture, points.
 const PICTURE_HEIGHT: [f32; 2] = [150.0, 440.0];
@@ -103,7 +98,7 @@ fn switches(ui: &mut Ui, workspace: &Workspace, planet: &PlanetSpecification) ->
     ui.horizontal_wrapped(|ui| {
         ui.spacing_mut().item_spacing.x = 2.5 * GRID;
         caption(ui, palette, "Star at");
-        if let Some(altitude_deg) = altitude(ui, palette, view.altitude_deg) {
+        if let Some(altitude_deg) = sky_altitude::show(ui, palette, view.altitude_deg) {
             set(SkyView { altitude_deg, ..view });
         }
         let has_air = planet.air != Air::None;
@@ -133,51 +128,6 @@ fn switches(ui: &mut Ui, workspace: &Workspace, planet: &PlanetSpecification) ->
         }
     });
     commands
-}
-
-/// The star's altitude: a slider to drag and a field to type into.
-fn altitude(ui: &mut Ui, palette: &Palette, altitude_deg: f64) -> Option<f64> {
-    let mut dragged = altitude_deg;
-    let slider = ui
-        .scope(|ui| {
-            ui.spacing_mut().slider_width = 64.0;
-            // A rail of the colour of fields could not be seen on a light ground.
-            ui.visuals_mut().widgets.inactive.bg_fill = palette.hairline;
-            let slider = Slider::new(&mut dragged, 0.0..=90.0).show_value(false).step_by(0.5);
-            ui.add(slider).accessible_name("Altitude of the star, degrees")
-        })
-        .inner;
-    let is_dragged = slider.changed();
-    let stepped = stepped(ui, &slider, altitude_deg);
-    slider.on_hover_text("Drag it, or press arrow up and down");
-    let id = Id::unique("altitude_of_the_star");
-    let draft = ui.data(|data| data.get_temp::<String>(id));
-    let mut text = draft.unwrap_or_else(|| format!("{}°", write_entry(altitude_deg, EntryKind::AngleDeg)));
-    let judged = |text: &str| parse_entry(text, EntryKind::AngleDeg).ok().filter(|angle| (0.0..=90.0).contains(angle));
-    let is_understood = judged(&text).is_some();
-    let ink = if is_understood { palette.text } else { palette.error };
-    let field = TextEdit::singleline(&mut text).id(id.with("field")).desired_width(46.0).text_color(ink);
-    let field = ui.add(field).accessible_name("Altitude of the star, typed");
-    let given_up = ui.input(|input| input.key_pressed(Key::Escape));
-    let entered = if field.lost_focus() && !given_up { judged(&text) } else { None };
-    let keeps = (field.has_focus() || field.lost_focus() && entered.is_none()) && !given_up;
-    keep_draft(ui, id, keeps.then_some(text));
-    field.on_hover_text("0° is the horizon, 90° overhead");
-    entered.or(stepped).or_else(|| is_dragged.then_some(dragged)).filter(|chosen| *chosen != altitude_deg)
-}
-
-/// The altitude a degree on by arrow up or down; arrows to the side move the moment everywhere.
-fn stepped(ui: &Ui, slider: &Response, altitude_deg: f64) -> Option<f64> {
-    if !slider.has_focus() {
-        return None;
-    }
-    let own_arrows = EventFilter { vertical_arrows: true, ..EventFilter::default() };
-    ui.memory_mut(|memory| memory.set_focus_lock_filter(slider.id, own_arrows));
-    let steps = ui.input_mut(|input| {
-        let presses = |input: &mut InputState, key| input.count_and_consume_key(Modifiers::NONE, key) as f64;
-        presses(input, Key::ArrowUp) - presses(input, Key::ArrowDown)
-    });
-    (steps != 0.0).then(|| (altitude_deg + steps).clamp(0.0, 90.0))
 }
 
 fn description(picture: &SkyPicture, planet: &PlanetSpecification, view: SkyView) -> String {
@@ -264,9 +214,9 @@ impl Group {
 fn colours(ui: &mut Ui, palette: &Palette, light: Option<&PlanetLight>) -> Vec<Command> {
     let mut commands = Vec::new();
     let sky = light.and_then(|light| light.sky.as_ref());
-    for (heading, viewing, method) in [
-        ("As emitted, D65 screen", Viewing::Camera, "clear_sky"),
-        ("As an adapted eye sees it", Viewing::AdaptedEye, "adapted_eye"),
+    for (heading, short, viewing, method) in [
+        ("As emitted, D65 screen", "as emitted", Viewing::Camera, "clear_sky"),
+        ("As an adapted eye sees it", "to an adapted eye", Viewing::AdaptedEye, "adapted_eye"),
     ] {
         section(ui, palette, heading);
         for (name, of) in [("Sky", 0), ("Disc", 1), ("Daylight", 2)] {
@@ -277,7 +227,9 @@ fn colours(ui: &mut Ui, palette: &Palette, light: Option<&PlanetLight>) -> Vec<C
             let none = if sky.is_some() { "black" } else { "–" };
             let words = seen.map_or_else(|| none.to_owned(), |light| light.name.to_string());
             let swatch = seen.map(|light| light.screen.srgb);
-            commands.extend(word_row(ui, palette, (name, &words), swatch, method));
+            let full_name = format!("{name} {short}");
+            let row = WordRow { full_name: &full_name, swatch, ..WordRow::new(name, &words, method) };
+            commands.extend(word_row(ui, palette, &row));
         }
         let xy = sky.and_then(|sky| seen(sky.dome, sky.star_above_air, viewing)).map_or_else(
             || "–".to_owned(),
@@ -286,7 +238,9 @@ fn colours(ui: &mut Ui, palette: &Palette, light: Option<&PlanetLight>) -> Vec<C
                 format!("{}, {}, {}", fixed(x, 4), fixed(y, 4), light.screen.hex())
             },
         );
-        commands.extend(word_row(ui, palette, ("Sky x, y", &xy), None, method));
+        let full_name = format!("Sky x, y {short}");
+        let row = WordRow { full_name: &full_name, ..WordRow::new("Sky x, y", &xy, method) };
+        commands.extend(word_row(ui, palette, &row));
     }
     commands
 }

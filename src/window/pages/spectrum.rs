@@ -11,7 +11,7 @@ use crate::units::number_text::{fixed, number};
 use crate::window::command::Command;
 use crate::window::theme::{GRID, Palette, small};
 use crate::window::widgets::choice::{caption, word};
-use crate::window::widgets::figure_row::{FigureRow, UNIT, figure_row, word_row};
+use crate::window::widgets::figure_row::{FigureRow, UNIT, WordRow, figure_row, word_row};
 use crate::window::widgets::heading::section;
 use crate::window::workspace::Workspace;
 use egui::{RichText, Role, ScrollArea, Sense, Ui, WidgetInfo, vec2};
@@ -134,11 +134,15 @@ fn colour(ui: &mut Ui, workspace: &Workspace, star: Option<&Starlight>) -> Vec<C
     let colour = star.and_then(|star| star.colour.as_ref());
     let shown = colour.map(|colour| colour.screen.srgb);
     let mut commands = Vec::new();
-    commands.extend(word_row(ui, palette, ("Blackbody", workspace.colour_words), shown, "blackbody"));
+    commands.extend(word_row(
+        ui,
+        palette,
+        &WordRow { swatch: shown, ..WordRow::new("Blackbody", workspace.colour_words, "blackbody") },
+    ));
     let xy = colour.map_or_else(|| "–".to_owned(), |colour| pair(colour.chromaticity.xy()));
-    commands.extend(word_row(ui, palette, ("x, y (CIE 1931)", &xy), None, "blackbody"));
+    commands.extend(word_row(ui, palette, &WordRow::new("x, y (CIE 1931)", &xy, "blackbody")));
     let uv = colour.map_or_else(|| "–".to_owned(), |colour| pair(colour.u_v_prime));
-    commands.extend(word_row(ui, palette, ("u', v' (CIE 1976)", &uv), None, "colour_numbers"));
+    commands.extend(word_row(ui, palette, &WordRow::new("u', v' (CIE 1976)", &uv, "colour_numbers")));
     commands.extend(figures(ui, palette, STAR_LIGHT, &["correlated_temperature_k", "colour_duv"], star));
     commands
 }
@@ -150,14 +154,14 @@ fn screens(ui: &mut Ui, palette: &Palette, star: Option<&Starlight>) -> Vec<Comm
     for (index, space) in RgbSpace::ALL.into_iter().enumerate() {
         let channels = colour.map_or_else(|| "–".to_owned(), |colour| triple(colour.linear_rgb[index]));
         let name = format!("{} linear", space.name());
-        commands.extend(word_row(ui, palette, (&name, &channels), None, "colour_numbers"));
+        commands.extend(word_row(ui, palette, &WordRow::new(&name, &channels, "colour_numbers")));
     }
     let outside = |is_inside: bool| if is_inside { "" } else { ", nearest" };
     let srgb = colour.map(|colour| format!("{}{}", colour.screen.hex(), outside(colour.screen.in_srgb_gamut)));
     let p3 = colour.map(|colour| format!("{}{}", hex(colour.wide.display_p3), outside(colour.wide.in_gamut)));
     let dash = || "–".to_owned();
-    commands.extend(word_row(ui, palette, ("sRGB", &srgb.unwrap_or_else(dash)), None, "colour_numbers"));
-    commands.extend(word_row(ui, palette, ("Display P3", &p3.unwrap_or_else(dash)), None, "colour_numbers"));
+    commands.extend(word_row(ui, palette, &WordRow::new("sRGB", &srgb.unwrap_or_else(dash), "colour_numbers")));
+    commands.extend(word_row(ui, palette, &WordRow::new("Display P3", &p3.unwrap_or_else(dash), "colour_numbers")));
     commands
 }
 
@@ -170,12 +174,20 @@ fn dwarfs(ui: &mut Ui, palette: &Palette, star: Option<&Starlight>) -> Vec<Comma
         |dwarf| format!("{}, like {}", dwarf.screen.hex(), dwarf.nearest_type),
     );
     let shown = dwarf.map(|dwarf| dwarf.screen.srgb);
-    commands.extend(word_row(ui, palette, ("Measured", &words), shown, "measured_dwarfs"));
+    commands.extend(word_row(
+        ui,
+        palette,
+        &WordRow { swatch: shown, ..WordRow::new("Measured", &words, "measured_dwarfs") },
+    ));
     let xy = dwarf.map_or_else(|| "–".to_owned(), |dwarf| pair(dwarf.chromaticity.xy()));
-    commands.extend(word_row(ui, palette, ("x, y (CIE 1931)", &xy), None, "measured_dwarfs"));
+    commands.extend(word_row(
+        ui,
+        palette,
+        &WordRow { full_name: "Measured dwarfs x, y", ..WordRow::new("x, y (CIE 1931)", &xy, "measured_dwarfs") },
+    ));
     let difference = dwarf
         .map_or_else(|| "–".to_owned(), |dwarf| format!("{} just noticeable steps", fixed(dwarf.difference_de00, 1)));
-    commands.extend(word_row(ui, palette, ("From the blackbody", &difference), None, "measured_dwarfs"));
+    commands.extend(word_row(ui, palette, &WordRow::new("From the blackbody", &difference, "measured_dwarfs")));
     commands
 }
 

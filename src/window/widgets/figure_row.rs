@@ -46,15 +46,31 @@ pub(crate) fn figure_row(ui: &mut Ui, palette: &Palette, row: &FigureRow<'_>) ->
     to_source(response, row.name, full.trim(), row.method)
 }
 
-/// A row of words in place of a figure, with a colour of its own where it has one. A click on it shows the source.
-pub(crate) fn word_row(
-    ui: &mut Ui,
-    palette: &Palette,
-    (name, words): (&str, &str),
-    swatch: Option<[u8; 3]>,
-    method: &'static str,
-) -> Option<Command> {
-    let (rect, response) = row_ground(ui, palette, &format!("{name}: {words}"));
+/// A row of words in place of a figure.
+pub(crate) struct WordRow<'a> {
+    /// Name as it is shown.
+    pub name: &'a str,
+    /// Name as it is told and copied, where what is shown stands under a heading that says the rest.
+    pub full_name: &'a str,
+    /// The words.
+    pub words: &'a str,
+    /// A colour of its own.
+    pub swatch: Option<[u8; 3]>,
+    /// Key of its method.
+    pub method: &'static str,
+}
+
+impl<'a> WordRow<'a> {
+    /// Words without a colour, told by the name they are shown with.
+    pub(crate) fn new(name: &'a str, words: &'a str, method: &'static str) -> Self {
+        Self { name, full_name: name, words, swatch: None, method }
+    }
+}
+
+/// Draws a row of words and returns what it was told.
+pub(crate) fn word_row(ui: &mut Ui, palette: &Palette, row: &WordRow<'_>) -> Option<Command> {
+    let WordRow { name, full_name, words, swatch, method } = *row;
+    let (rect, response) = row_ground(ui, palette, &format!("{full_name}: {words}"));
     let y = rect.center().y;
     let name_rect = ui.painter().text(pos2(rect.left(), y), Align2::LEFT_CENTER, name, usual(), palette.dim);
     let mut right = rect.right();
@@ -79,12 +95,12 @@ pub(crate) fn word_row(
         usual(),
         palette.text,
     );
-    to_source(response, name, words, method)
+    to_source(response, full_name, words, method)
 }
 
 fn row_ground(ui: &mut Ui, palette: &Palette, words: &str) -> (Rect, Response) {
     let (rect, response) = ui.allocate_exact_size(vec2(ui.available_width(), ROW), Sense::click());
-    response.widget_info(|| WidgetInfo::labeled(Role::Button, true, words));
+    response.widget_info(|| WidgetInfo::labeled(Role::Button, true, words.trim()));
     if response.hovered() || response.has_focus() {
         ui.painter().rect_filled(rect.expand2(vec2(4.0, 0.0)), 3.0, palette.chosen);
     }
