@@ -145,7 +145,7 @@ mod tests {
         let axis = ValueAxis::log([1e-6, 3000.0].into_iter(), 12.0);
         let ticks = axis.ticks(5);
         assert!((3..=6).contains(&ticks.len()), "{ticks:?}");
-        assert!(ticks.iter().any(|tick| tick.label == "10⁻⁴" || tick.label == "0.01"), "{ticks:?}");
+        assert!(ticks.iter().any(|tick| tick.label == "0.001"), "{ticks:?}");
         let axis = ValueAxis::linear([3.0, 412.0].into_iter());
         assert!(axis.ticks(5).iter().any(|tick| tick.label == "200"));
     }

@@ -108,7 +108,7 @@ static DOME: Palette = Palette {
     chosen: rgb(0x1E1100),
     hairline: rgb(0x2C1A04),
     text: rgb(0xC4873C),
-    dim: rgb(0xA06D30),
+    dim: rgb(0xAE7936),
     accent: rgb(0xE0A050),
     error: rgb(0xE06A3C),
     bed: rgb(0x2A2A2A),
