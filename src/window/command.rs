@@ -138,10 +138,11 @@ pub fn key_bindings() -> Vec<KeyBinding> {
     let step = |steps| Command::Time(TimeCommand::Step { steps });
     let time = Command::Time;
     let rows = [
-        (none, Key::ArrowRight, step(1.0), "step forward", false),
-        (none, Key::ArrowLeft, step(-1.0), "step back", false),
+        // The keys with more modifiers come first: a plain key also answers when Shift is held.
         (shift, Key::ArrowRight, step(0.1), "step forward finely", false),
         (shift, Key::ArrowLeft, step(-0.1), "step back finely", false),
+        (none, Key::ArrowRight, step(1.0), "step forward", false),
+        (none, Key::ArrowLeft, step(-1.0), "step back", false),
         (none, Key::PageDown, time(TimeCommand::NextEvent), "next event", false),
         (none, Key::PageUp, time(TimeCommand::PreviousEvent), "previous event", false),
         (none, Key::Home, time(TimeCommand::Birth), "birth of the star", false),

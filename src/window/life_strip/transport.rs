@@ -10,7 +10,7 @@ use crate::window::theme::{GRID, small, usual};
 use crate::window::widgets::choice::word;
 use crate::window::widgets::draft::keep_draft;
 use crate::window::workspace::Workspace;
-use egui::{Align, Color32, ComboBox, Id, Layout, RichText, TextEdit, Ui};
+use egui::{Align, Color32, ComboBox, Id, Layout, RichText, Stroke, StrokeKind, TextEdit, Ui};
 
 /// The row under the ribbon.
 pub(super) fn show(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
@@ -108,6 +108,8 @@ fn typed_moment(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
     keep_draft(ui, id, keeps_draft.then(|| text.clone()));
     match judged(&text) {
         Err(reason) if keeps_draft && !response.has_focus() => {
+            let outline = Stroke::new(1.5, palette.error);
+            ui.painter().rect_stroke(response.rect.expand(1.0), 4.0, outline, StrokeKind::Outside);
             ui.label(RichText::new(reason).font(small()).color(palette.error));
         }
         _ => {
