@@ -31,6 +31,9 @@ pub fn events_text(history: &History, title: &str, filter: &EventFilter) -> Stri
     push_columns(&mut page, 0, &rows);
     page.push('\n');
     push_wrapped(&mut page, "", "Times are counted from the star's arrival on the main sequence.");
+    if let Some(remark) = history.dates_remark() {
+        push_wrapped(&mut page, "", remark);
+    }
     page
 }
 

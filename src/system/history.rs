@@ -8,7 +8,8 @@ use super::planet_past::PlanetPast;
 use super::specification::{Body, System, SystemProblem};
 use crate::physics::light::DRAPER_POINT_K;
 use crate::physics::planet::{OutOfRange, StarPoint};
-use crate::physics::star::{END_YR, LifeOptions, PhaseSpan, StarError, StarInput, StarState, WholeLife};
+use crate::physics::star::convective::SurfaceOpacity;
+use crate::physics::star::{END_YR, LifeOptions, PhaseSpan, StarCaution, StarError, StarInput, StarState, WholeLife};
 use std::ops::ControlFlow;
 use thiserror::Error;
 
@@ -162,6 +163,16 @@ impl History {
     #[must_use]
     pub fn shown_until_yr(&self) -> f64 {
         self.shown_until_yr
+    }
+
+    /// What to know about every date of this history, one sentence: published lifetimes of red dwarfs differ.
+    #[must_use]
+    pub fn dates_remark(&self) -> Option<&'static str> {
+        let star = &self.system.star;
+        WholeLife::needs_structure(star.mass_msun).then(|| match star.red_dwarf_surface {
+            SurfaceOpacity::Modern => StarCaution::LifetimesDiffer.text(),
+            SurfaceOpacity::Of1997 => StarCaution::OldSurface.text(),
+        })
     }
 
     /// The star alone at an age, yr (held within 0 to [`END_YR`]).

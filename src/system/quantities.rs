@@ -138,7 +138,7 @@ pub const STAR: &[StarQuantity] = &[
     },
     StarQuantity {
         key: "core_helium3_fraction",
-        name: "Core helium-3",
+        name: "Core He-3",
         symbol: "",
         digits: 2,
         method: "red_dwarf",

@@ -32,6 +32,9 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
             commands.push(Command::Copy(lines.join("\n")));
         }
     });
+    if let Some(remark) = workspace.history.dates_remark() {
+        ui.label(RichText::new(remark).font(small()).color(palette.dim));
+    }
     ui.add_space(GRID);
     ScrollArea::vertical().auto_shrink(false).show(ui, |ui| {
         if events.is_empty() {
