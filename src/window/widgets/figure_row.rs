@@ -87,7 +87,8 @@ pub(crate) fn word_row(ui: &mut Ui, palette: &Palette, row: &WordRow<'_>) -> Opt
         );
         right = patch.left() - 6.0;
     }
-    let room = Rect::from_min_max(pos2(name_rect.right() + 8.0, rect.top()), pos2(right, rect.bottom()));
+    // Some letters reach a little beyond their own width.
+    let room = Rect::from_min_max(pos2(name_rect.right() + 8.0, rect.top()), pos2(right + 3.0, rect.bottom()));
     ui.painter().with_clip_rect(room.intersect(ui.clip_rect())).text(
         pos2(right, y),
         Align2::RIGHT_CENTER,
