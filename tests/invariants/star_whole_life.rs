@@ -91,11 +91,11 @@ fn the_quick_look_is_close_to_the_exact_life() {
 
 #[test]
 fn phases_are_those_of_the_mass() {
-    let phases = |mass| life(mass, 0.0).spans().iter().map(|span| span.phase).collect::<Vec<_>>();
     use Phase::{
         BlackDwarf, BlueDwarf, FirstGiantBranch, FullyMixedMainSequence, HeliumWhiteDwarf, HertzsprungGap,
         MainSequence, RadiativeCore,
     };
+    let phases = |mass| life(mass, 0.0).spans().iter().map(|span| span.phase).collect::<Vec<_>>();
     assert_eq!(phases(0.12), [FullyMixedMainSequence, RadiativeCore, BlueDwarf, HeliumWhiteDwarf, BlackDwarf]);
     let giant = [FullyMixedMainSequence, RadiativeCore, HertzsprungGap, FirstGiantBranch, HeliumWhiteDwarf, BlackDwarf];
     assert_eq!(phases(0.25), giant);
