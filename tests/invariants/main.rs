@@ -5,6 +5,7 @@
 mod document_scenario_file;
 mod document_settings;
 mod light_colour;
+mod light_scrubbing;
 mod light_sky;
 mod planet_formulas;
 mod planet_lives;

@@ -1,5 +1,7 @@
 //! Every scenario that comes with the program: sound, in the form that saving gives it, and listed.
 
+#![expect(clippy::expect_used, reason = "a test that cannot go on has failed")]
+
 mod fates;
 mod red_dwarfs;
 
