@@ -236,7 +236,9 @@ proptest! {
         for kind in [PlanetEventKind::RunawayGreenhouse, PlanetEventKind::TooMuchLight] {
             match (date(400, kind), date(1600, kind)) {
                 (Some(coarse), Some(fine)) => prop_assert!((coarse / fine - 1.0).abs() < 0.02, "{kind:?} {coarse} {fine}"),
-                (coarse, fine) => prop_assert_eq!(coarse.is_some(), fine.is_some()),
+                // A date close to the first billion years may fall on either side of it.
+                (Some(one), None) | (None, Some(one)) => prop_assert!((one / 1e9 - 1.0).abs() < 0.02, "{kind:?} {one}"),
+                (None, None) => {}
             }
         }
     }
