@@ -61,9 +61,7 @@ impl Computed {
             .clone()
             .find(|moment| moment.core_mass_msun > CORE_AT_GIANT_BASE * birth_msun)
             .map_or(largest_yr, |moment| moment.age_yr.min(largest_yr));
-        let mixed = |node: &Node| {
-            node.still_core_mass_fraction <= 0.0 && node.surface_hydrogen_fraction - node.core_hydrogen_fraction < MIXED
-        };
+        let mixed = |node: &Node| node.surface_hydrogen_fraction - node.core_hydrogen_fraction < MIXED;
         let mixing_ends_yr = nodes.iter().find(|node| !mixed(node)).map(|node| node.age_yr);
         let mut cautions: Vec<StarCaution> = life.cautions.iter().map(|caution| caution_of(*caution)).collect();
         if surface == SurfaceOpacity::Modern {

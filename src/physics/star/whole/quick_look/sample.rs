@@ -15,6 +15,10 @@ pub(super) const CORE_MASS: usize = 11;
 
 /// Hydrogen at the centre below which it counts as spent, mass fraction.
 const SPENT: f64 = 0.01;
+/// Difference of hydrogen between surface and centre up to which the star is mixed throughout, mass fraction.
+const MIXED: f64 = 0.01;
+/// A core at rest this early, as a share of the time to the spent core, is a passing one of the arrival.
+const PASSING: f64 = 1e-3;
 /// Surface of a white dwarf that is called black, K.
 const BLACK_K: f64 = 1000.0;
 /// Changes of log luminosity and log temperature below which a turn of the path is noise of the computation.
@@ -45,8 +49,11 @@ impl Sampled {
         if life.ending != Ending::BlackDwarf {
             return None;
         }
-        let rest_yr = first(&|node| node.stage >= Stage::RadiativeCore)?;
         let spent_yr = first(&|node| node.core_hydrogen_fraction < SPENT)?;
+        let mut rest_yr = first(&|node| node.stage >= Stage::RadiativeCore)?;
+        if rest_yr < PASSING * spent_yr {
+            rest_yr = first(&|node| node.surface_hydrogen_fraction - node.core_hydrogen_fraction > MIXED)?;
+        }
         let dwarf_yr = first(&|node| node.stage >= Stage::HeliumWhiteDwarf)?;
         let black_yr = first(&|node| node.age_yr > dwarf_yr && node.effective_temperature_k < BLACK_K)?;
         let ends = [0.0, rest_yr, spent_yr, dwarf_yr, black_yr, nodes.last()?.age_yr];
