@@ -4,9 +4,9 @@
 //! cargo run --release --example red_dwarf_grid -- assets/tables/red_dwarf_grid.bin
 //! ```
 //!
-//! Some 180 lives, about twenty minutes of one core. The same source on the same machine gives the same bytes; on another
-//! machine ages and luminosities agree within a thousandth. Run it after every change of the structure calculation,
-//! together with a new `STRUCTURE_VERSION`.
+//! Some 180 lives, about twenty minutes of one core. Nothing in it is random; on another machine the last digits may
+//! differ, far within the tolerances that the quick look states and a test holds. Run it after every change of the
+//! structure calculation, together with a new `STRUCTURE_VERSION`.
 
 use longember::physics::star::convective::{
     ConvectiveError, ConvectiveInput, Options, Resolution, SurfaceOpacity, compute_with,
