@@ -5,7 +5,6 @@
 
 mod arguments;
 mod destination;
-mod moment_request;
 mod outcome;
 mod run;
 mod scenario_source;

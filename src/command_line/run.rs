@@ -4,14 +4,13 @@ use super::arguments::{
     Arguments, Command, DemoArguments, EventsArguments, EventsFormat, PageFormat, SourcesArguments, StarArguments,
     StateArguments, TableArguments, TableFormat,
 };
-use super::moment_request::{MomentProblem, MomentRequest};
 use super::outcome::{DONE, Outcome, WRONG_USAGE};
 use super::scenario_source::{ScenarioSource, find_demo};
 use super::streams::Streams;
 use super::trouble::Trouble;
 use crate::document::{LifeStore, Scenario, built_in};
 use crate::handover;
-use crate::system::{Body, EventFilter, EventGroup, History, StarSpecification, System};
+use crate::system::{Body, EventFilter, EventGroup, History, MomentProblem, MomentRequest, StarSpecification, System};
 use crate::units::number_text::machine;
 use clap::Parser;
 use std::ffi::OsString;

@@ -1,10 +1,9 @@
 //! Everything that can end a command early, with its sentence and its exit code.
 
-use super::moment_request::MomentProblem;
 use super::outcome::{BAD_VALUE, SYSTEM_TROUBLE, WRONG_USAGE};
 use crate::document::{LoadError, Problem, WriteError, built_in};
 use crate::handover::TableAgesProblem;
-use crate::system::HistoryError;
+use crate::system::{HistoryError, MomentProblem};
 use std::io;
 use std::path::PathBuf;
 use thiserror::Error;

@@ -25,7 +25,7 @@ pub use files::{
 pub use history::{History, MOST_STEPS};
 pub use life_store::LifeStore;
 pub use problem::{Fault, Place, Problem, Subject};
-pub use scenario::{LONGEST_ABOUT, LONGEST_TITLE, Scenario};
+pub use scenario::{LONGEST_ABOUT, LONGEST_NOTE, LONGEST_TITLE, Scenario};
 pub use scenario_form::{CURRENT_VERSION, ScenarioText, parse_scenario, parse_scenario_text, scenario_text};
 pub use session::{SaveError, Session};
 pub use settings::{Settings, Theme};

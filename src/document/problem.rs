@@ -1,6 +1,7 @@
 //! What can be wrong with a document: what, value, allowed, remedy, place, in that order.
 
 use super::ron_text::SyntaxFault;
+use crate::system::MomentProblem;
 use crate::system::specification;
 use std::fmt;
 use thiserror::Error;
@@ -39,6 +40,11 @@ pub enum Subject {
         /// Its name, empty if it has none.
         name: String,
     },
+    /// A cue of the show.
+    Cue {
+        /// Its index, counted from 0.
+        index: usize,
+    },
 }
 
 /// A place in a file, counted from 1 as editors do.
@@ -58,6 +64,29 @@ pub enum Fault {
     /// The form of the text.
     #[error(transparent)]
     Syntax(#[from] SyntaxFault),
+    /// The moment of a cue.
+    #[error(transparent)]
+    Moment(#[from] MomentProblem),
+    /// A number outside its range.
+    #[error("{key} is {value}, allowed {allowed}")]
+    OutOfRange {
+        /// The key.
+        key: &'static str,
+        /// The value as given.
+        value: f64,
+        /// The permitted range in words.
+        allowed: String,
+    },
+    /// A list that is too long.
+    #[error("{key} holds {count} rows, allowed at most {most}")]
+    TooMany {
+        /// The key of the list.
+        key: &'static str,
+        /// How many there are.
+        count: usize,
+        /// How many there may be.
+        most: usize,
+    },
     /// An input of the system.
     #[error(transparent)]
     Input(#[from] specification::Fault),
@@ -161,6 +190,7 @@ impl fmt::Display for Subject {
             Self::Whole => return Ok(()),
             Self::Star { name } => ("star".to_owned(), name),
             Self::Planet { index, name } => (format!("planet {}", index + 1), name),
+            Self::Cue { index } => return write!(formatter, "cue {}: ", index + 1),
         };
         if name.is_empty() {
             write!(formatter, "{kind}: ")

@@ -1,12 +1,15 @@
 //! A scenario: what is saved, undone and handed on.
 
 use super::problem::{Fault, Problem, Subject};
+use crate::system::cues::{Cue, LONGEST_SHOW_S, MOST_CUES};
 use crate::system::specification::{Body, PlanetSpecification, StarSpecification, System};
 
 /// Longest title, in characters.
 pub const LONGEST_TITLE: usize = 120;
 /// Longest description, in characters.
 pub const LONGEST_ABOUT: usize = 4000;
+/// Longest note of a statement or a cue, in characters.
+pub const LONGEST_NOTE: usize = 1000;
 
 /// A system with the words that go with it.
 #[derive(Clone, Debug, PartialEq)]
@@ -17,6 +20,8 @@ pub struct Scenario {
     pub about: String,
     /// The star and its planets.
     pub system: System,
+    /// The cues of a show, in the order of the rows.
+    pub cues: Vec<Cue>,
 }
 
 impl Scenario {
@@ -27,6 +32,7 @@ impl Scenario {
             title: "Untitled".to_owned(),
             about: String::new(),
             system: System { star: StarSpecification::default(), planets: vec![PlanetSpecification::default()] },
+            cues: Vec::new(),
         }
     }
 
@@ -42,7 +48,44 @@ impl Scenario {
             let subject = if problem.key == "planets" { Subject::Whole } else { self.subject(problem.body) };
             Problem { subject, key: Some(problem.key), fault: problem.fault.into(), place: None }
         });
-        texts.chain(inputs).collect()
+        texts.chain(inputs).chain(self.cue_problems()).collect()
+    }
+
+    fn cue_problems(&self) -> impl Iterator<Item = Problem> + '_ {
+        let count = self.cues.len();
+        let too_many = (count > MOST_CUES).then(|| {
+            let fault = Fault::TooMany { key: "cues", count, most: MOST_CUES };
+            Problem { subject: Subject::Whole, key: Some("cues"), fault, place: None }
+        });
+        let rows = self.cues.iter().enumerate().flat_map(|(index, cue)| {
+            let show_time = (!(0.0..=LONGEST_SHOW_S).contains(&cue.show_time_s)).then(|| {
+                let fault = Fault::OutOfRange {
+                    key: "show_time_s",
+                    value: cue.show_time_s,
+                    allowed: format!("0 to {LONGEST_SHOW_S} s"),
+                };
+                ("show_time_s", fault)
+            });
+            let faults = show_time.into_iter().chain(note_fault(&cue.note).map(|fault| ("note", fault)));
+            faults.map(move |(key, fault)| Problem {
+                subject: Subject::Cue { index },
+                key: Some(key),
+                fault,
+                place: None,
+            })
+        });
+        too_many.into_iter().chain(rows)
+    }
+
+    /// Gives a planet another name, and everything that calls it by its name.
+    pub fn rename_planet(&mut self, index: usize, name: &str) {
+        let Some(planet) = self.system.planets.get_mut(index) else { return };
+        let before = std::mem::replace(&mut planet.name, name.to_owned());
+        for cue in &mut self.cues {
+            if let Some(moment) = cue.moment.renamed(&before, name) {
+                cue.moment = moment;
+            }
+        }
     }
 
     /// A body as problems name it.
@@ -71,6 +114,12 @@ fn title_fault(title: &str) -> Option<Fault> {
     }
     let bad = length > LONGEST_TITLE || title.chars().any(char::is_control);
     bad.then_some(Fault::BadText { key: "title", length, most: LONGEST_TITLE })
+}
+
+pub(super) fn note_fault(note: &str) -> Option<Fault> {
+    let length = note.chars().count();
+    let bad = length > LONGEST_NOTE || note.chars().any(char::is_control);
+    bad.then_some(Fault::BadText { key: "note", length, most: LONGEST_NOTE })
 }
 
 fn about_fault(about: &str) -> Option<Fault> {

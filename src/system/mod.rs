@@ -4,6 +4,7 @@
 //! Nothing here knows a file, a screen or a clock.
 
 pub mod air;
+pub mod cues;
 pub mod date_band;
 pub mod events;
 pub mod history;
@@ -13,6 +14,7 @@ pub mod limits;
 pub mod mild_spans;
 pub mod moment;
 pub mod moment_light;
+pub mod moment_request;
 mod neighbour_notes;
 pub mod notes;
 pub mod pacing;
@@ -33,6 +35,7 @@ pub use events::{Event, EventFilter, EventGroup, EventKind};
 pub use history::{History, HistoryError};
 pub use moment::{Moment, PlanetMoment, PlanetState, StarMoment};
 pub use moment_light::{LightReader, MomentLight};
+pub use moment_request::{MomentProblem, MomentRequest};
 pub use notes::{Note, NoteKind};
 pub use pacing::{TimeAxis, TimeScale};
 pub use planet_choices::{Carbon, TidesChoice, Water};

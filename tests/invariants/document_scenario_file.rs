@@ -4,9 +4,10 @@
 use longember::document::{LoadError, Problem, Scenario, built_in, parse_scenario, scenario_from_bytes, scenario_text};
 use longember::physics::planet::{Greenhouse, Redistribution};
 use longember::physics::star::convective::SurfaceOpacity;
+use longember::system::cues::{Cue, LONGEST_SHOW_S, Transition};
 use longember::system::limits::{self, Limit};
 use longember::system::specification::{PlanetSpecification, RED_DWARF_SURFACES, StarSpecification, System};
-use longember::system::{Air, Carbon, TidesChoice, Water};
+use longember::system::{Air, Carbon, MomentRequest, TidesChoice, Water};
 use proptest::prelude::*;
 use proptest::sample::Index;
 use proptest::test_runner::TestCaseResult;
@@ -25,6 +26,25 @@ mod oracle {
         pub(super) star: Star,
         #[serde(default)]
         pub(super) planets: Vec<Planet>,
+        #[serde(default)]
+        pub(super) cues: Vec<Cue>,
+    }
+
+    #[derive(Deserialize)]
+    #[serde(deny_unknown_fields)]
+    pub(super) struct Cue {
+        pub(super) show_time_s: f64,
+        pub(super) moment: String,
+        pub(super) transition: Transition,
+        pub(super) note: String,
+    }
+
+    #[derive(Clone, Copy, Deserialize)]
+    pub(super) enum Transition {
+        Cut,
+        Steady,
+        SteadyLog,
+        Paced,
     }
 
     #[derive(Deserialize)]
@@ -228,7 +248,19 @@ fn read_by_oracle(text: &str, ours: &Scenario) -> Result<Scenario, String> {
         },
     };
     let system = System { star, planets: planets.collect() };
-    Ok(Scenario { title: read.title, about: read.about.replace("\r\n", "\n"), system })
+    let cues = read.cues.into_iter().map(|cue| Cue {
+        show_time_s: cue.show_time_s,
+        moment: MomentRequest::parse(&cue.moment).expect("a moment"),
+        transition: match cue.transition {
+            oracle::Transition::Cut => Transition::Cut,
+            oracle::Transition::Steady => Transition::Steady,
+            oracle::Transition::SteadyLog => Transition::SteadyLog,
+            oracle::Transition::Paced => Transition::Paced,
+        },
+        note: cue.note,
+    });
+    let cues = cues.collect();
+    Ok(Scenario { title: read.title, about: read.about.replace("\r\n", "\n"), system, cues })
 }
 
 /// Values over the whole permitted range, its ends included, and over many powers of ten.
@@ -304,18 +336,39 @@ fn planet() -> impl Strategy<Value = PlanetSpecification> {
     })
 }
 
+fn moment() -> impl Strategy<Value = MomentRequest> {
+    prop_oneof![
+        value(&limits::PRESENT_AGE).prop_map(|time_yr| MomentRequest::Time(time_yr.abs())),
+        Just(MomentRequest::Now),
+        "[a-z:é'\"“”]([ -~é☉日]{0,20}[A-Za-z])?".prop_map(MomentRequest::Event),
+    ]
+}
+
+fn cue() -> impl Strategy<Value = Cue> {
+    ((0.0..=LONGEST_SHOW_S), moment(), 0..4_usize, "([a-z\"\\\\é☉ ]{0,9}[ -~]){0,9}").prop_map(
+        |(show_time_s, moment, transition, note)| Cue {
+            show_time_s,
+            moment,
+            transition: Transition::ALL[transition],
+            note,
+        },
+    )
+}
+
 fn scenario() -> impl Strategy<Value = Scenario> {
     let star =
         (name(), value(&limits::STAR_MASS), value(&limits::METALLICITY), value(&limits::PRESENT_AGE), 0..2_usize);
     let about = "([a-zA-Z\"\\\\é☉,.]{0,12}[ \n]{1,3}){0,60}";
-    (name(), about, star, prop::collection::vec(planet(), 0..6)).prop_map(|(title, about, star, mut planets)| {
+    let cues = prop::collection::vec(cue(), 0..5);
+    let planets = prop::collection::vec(planet(), 0..6);
+    (name(), about, star, planets, cues).prop_map(|(title, about, star, mut planets, cues)| {
         for (index, planet) in planets.iter_mut().enumerate() {
             planet.name.push_str(&index.to_string());
         }
         let (name, mass_msun, metallicity_dex, present_age_yr, surface) = star;
         let red_dwarf_surface = RED_DWARF_SURFACES[surface];
         let star = StarSpecification { name, mass_msun, metallicity_dex, present_age_yr, red_dwarf_surface };
-        Scenario { title, about, system: System { star, planets } }
+        Scenario { title, about, system: System { star, planets }, cues }
     })
 }
 

@@ -5,7 +5,9 @@
 //! `scenarios/README.md` is the reference for people.
 
 mod keys;
+mod places;
 pub(super) mod read;
+mod read_rows;
 pub(super) mod write;
 
 pub use keys::CURRENT_VERSION;

@@ -5,6 +5,8 @@ use super::keys::{
     PLANET_KEYS, REDISTRIBUTIONS, REGULATED_KEYS, SCENARIO, SCENARIO_KEYS, STAR_KEYS, SURFACES, TIDES, WATER_KEYS,
     WATER_WORLD,
 };
+use super::places::{Owner, Places};
+use super::read_rows::read_cues;
 use crate::document::problem::{Fault, Problem, Subject};
 use crate::document::record_reading::{Fields, Reading};
 use crate::document::ron_text::{Node, Value, number_text};
@@ -15,7 +17,6 @@ use crate::physics::star::convective::SurfaceOpacity;
 use crate::system::limits::{self, Limit};
 use crate::system::specification::{self, Body, PlanetSpecification, StarSpecification, System};
 use crate::system::{Air, Carbon, TidesChoice, Water};
-use std::collections::HashMap;
 
 /// A scenario with what its text held besides.
 #[derive(Clone, Debug, PartialEq)]
@@ -80,7 +81,7 @@ pub(in crate::document) fn read_scenario_node(
     let mut text_of = |reading: &mut Reading<'_>, key, node: Option<&Node>| {
         let node = node?;
         let text = reading.text(node, &Subject::Whole, key)?;
-        places.insert((None, key), node.span.start);
+        places.insert((Owner::Whole, key), node.span.start);
         // Editors on some systems end lines with two characters.
         Some(text.replace("\r\n", "\n"))
     };
@@ -93,24 +94,18 @@ pub(in crate::document) fn read_scenario_node(
         Some(node) => read_planets(reading, node, &mut places),
         None => Vec::new(),
     };
-    let scenario = Scenario { title, about, system: System { star, planets } };
+    let cues = fields.given("cues").map_or_else(Vec::new, |node| read_cues(reading, node, &mut places));
+    let scenario = Scenario { title, about, system: System { star, planets }, cues };
     for problem in scenario.problems() {
-        let body = match &problem.subject {
-            Subject::Whole => None,
-            Subject::Star { .. } => Some(Body::Star),
-            Subject::Planet { index, .. } => Some(Body::Planet(*index)),
-        };
+        let owner = Owner::from(&problem.subject);
         // Without a place it is about a placeholder, whose cause was reported already.
-        let place = problem.key.and_then(|key| places.get(&(body, key)));
+        let place = problem.key.and_then(|key| places.get(&(owner, key)));
         if let Some(offset) = place {
             reading.report(*offset, &problem.subject, problem.key, problem.fault);
         }
     }
     Ok(Some(scenario))
 }
-
-/// Where each value stands that was read.
-type Places = HashMap<(Option<Body>, &'static str), usize>;
 
 fn read_version(reading: &mut Reading<'_>, fields: &Fields<'_>) -> Result<(), Vec<Problem>> {
     let allowed = CURRENT_VERSION.to_string();
@@ -217,7 +212,7 @@ impl BodyReading<'_, '_, '_> {
     fn name(&mut self) -> Option<String> {
         let node = self.reading.required(self.fields, "name", "text in double quotes")?;
         let name = self.reading.text(node, &self.fields.subject, "name")?;
-        self.places.insert((Some(self.body), "name"), node.span.start);
+        self.places.insert((Owner::Body(self.body), "name"), node.span.start);
         Some(name.to_owned())
     }
 
@@ -233,7 +228,7 @@ impl BodyReading<'_, '_, '_> {
 
     fn number(&mut self, node: &Node, limit: &'static Limit) -> Option<f64> {
         let number = self.reading.number(node, &self.fields.subject, limit.key, &limit.allowed())?;
-        self.places.insert((Some(self.body), limit.key), node.span.start);
+        self.places.insert((Owner::Body(self.body), limit.key), node.span.start);
         Some(number)
     }
 

@@ -1,10 +1,13 @@
 //! Scenario to text.
 
-use super::keys::{AIRS, CARBONS, CURRENT_VERSION, REDISTRIBUTIONS, SCENARIO, SURFACES, TIDES, WATER_WORLD};
+use super::keys::{
+    AIRS, CARBONS, CURRENT_VERSION, REDISTRIBUTIONS, SCENARIO, SURFACES, TIDES, TRANSITIONS, WATER_WORLD,
+};
 use crate::document::ron_text::{Writer, number_text};
 use crate::document::scenario::Scenario;
 use crate::physics::planet::{Greenhouse, Redistribution};
 use crate::physics::star::convective::SurfaceOpacity;
+use crate::system::cues::{Cue, Transition};
 use crate::system::specification::{PlanetSpecification, StarSpecification};
 use crate::system::{Air, Carbon, TidesChoice, Water};
 
@@ -30,7 +33,34 @@ pub(in crate::document) fn write_scenario_member(writer: &mut Writer, key: &str,
         write_planet(writer, planet);
     }
     writer.close(']');
+    write_cues(writer, &scenario.cues);
     writer.close(')');
+}
+
+/// A show that has no cue yet takes no line.
+fn write_cues(writer: &mut Writer, cues: &[Cue]) {
+    if cues.is_empty() {
+        return;
+    }
+    writer.open("cues", "", '[');
+    for cue in cues {
+        writer.open("", "", '(');
+        writer.number("show_time_s", cue.show_time_s);
+        writer.string("moment", &cue.moment.text());
+        writer.field("transition", transition_text(cue.transition));
+        writer.paragraph("note", &cue.note);
+        writer.close(')');
+    }
+    writer.close(']');
+}
+
+fn transition_text(transition: Transition) -> &'static str {
+    match transition {
+        Transition::Cut => TRANSITIONS[0],
+        Transition::Steady => TRANSITIONS[1],
+        Transition::SteadyLog => TRANSITIONS[2],
+        Transition::Paced => TRANSITIONS[3],
+    }
 }
 
 fn write_star(writer: &mut Writer, star: &StarSpecification) {

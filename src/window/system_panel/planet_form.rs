@@ -46,11 +46,13 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace, index: usize) -> Option<C
     let planet = scenario.system.planets.get(index)?;
     section(ui, palette, &planet.name);
     let mut changed: Option<Change> = None;
+    let mut renamed = None;
     let width = ui.available_width() - 2.0 * GRID;
     if let Some(name) = text_entry(ui, palette, "Name of the planet", &planet.name, LONGEST_NAME, width) {
         let is_taken = scenario.system.planets.iter().any(|other| other.name == name);
         let name = if is_taken { scenario.system.free_planet_name(&name) } else { name };
-        changed = Some(said("name", move |planet| planet.name.clone_from(&name)));
+        let label = format!("Change name of {}", planet.name);
+        renamed = Some(edit(label, scenario, |scenario| scenario.rename_planet(index, &name)));
     }
     ui.add_space(GRID);
     for field in BODY {
@@ -61,11 +63,13 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace, index: usize) -> Option<C
     section(ui, palette, "Tides and air");
     changed = tides_row(ui, workspace, planet.tides).or(changed);
     changed = air(ui, workspace, planet).or(changed);
-    changed.map(|(what, change)| {
-        edit(format!("Change {what} of {}", planet.name), scenario, |scenario| {
-            if let Some(planet) = scenario.system.planets.get_mut(index) {
-                change(planet);
-            }
+    renamed.or_else(|| {
+        changed.map(|(what, change)| {
+            edit(format!("Change {what} of {}", planet.name), scenario, |scenario| {
+                if let Some(planet) = scenario.system.planets.get_mut(index) {
+                    change(planet);
+                }
+            })
         })
     })
 }

@@ -1,14 +1,19 @@
-//! A moment as the command line names it: a span of time, `now`, or an event.
+//! A moment as people name it: a span of time, `now`, or an event.
 
+use super::events::Event;
+use super::history::History;
+use super::specification::Body;
 use crate::physics::star::END_YR;
-use crate::system::specification::Body;
-use crate::system::{Event, History};
+use crate::units::entry::{EntryKind, write_entry};
 use crate::units::number_text::machine;
 use crate::units::time_words::{NotASpan, SpanStyle, parse_span, span};
 use thiserror::Error;
 
 /// What starts an event's name.
-const EVENT_PREFIX: &str = "event:";
+const EVENT_PREFIX: &str = "event";
+
+/// Quotation marks around a name, the ones that are written first.
+const QUOTES: [(char, char); 3] = [('\'', '\''), ('"', '"'), ('“', '”')];
 
 /// Digits of the times that tell events apart.
 const DATE_DIGITS: usize = 6;
@@ -22,7 +27,7 @@ const ALSO_KNOWN: [(&str, &str); 3] = [
 
 /// A moment asked for.
 #[derive(Clone, Debug, PartialEq)]
-pub(super) enum MomentRequest {
+pub enum MomentRequest {
     /// A time since the star's arrival on the main sequence, yr.
     Time(f64),
     /// The scenario's present age.
@@ -33,7 +38,7 @@ pub(super) enum MomentRequest {
 
 /// Why a text names no moment of a history.
 #[derive(Clone, Debug, Error, PartialEq)]
-pub(super) enum MomentProblem {
+pub enum MomentProblem {
     /// The text is no time at all.
     #[error("the time {0}, or say now or event:NAME")]
     NotASpan(#[from] NotASpan),
@@ -75,24 +80,59 @@ fn list(names: &[String]) -> String {
 }
 
 impl MomentRequest {
-    /// Reads the text of a moment.
-    pub(super) fn parse(text: &str) -> Result<Self, MomentProblem> {
+    /// Reads the text of a moment: `4.57 Gyr`, `now`, `event:"largest radius"`, `event 'largest radius'`.
+    ///
+    /// # Errors
+    /// [`MomentProblem`] when it is neither a time in the computed range nor the name of something.
+    pub fn parse(text: &str) -> Result<Self, MomentProblem> {
         let trimmed = text.trim();
         if trimmed.eq_ignore_ascii_case("now") {
             return Ok(Self::Now);
         }
-        if let Some(name) = strip_prefix_ignoring_case(trimmed, EVENT_PREFIX) {
+        if let Some(name) = event_name(trimmed) {
             return Ok(Self::Event(unquoted(name).to_owned()));
         }
         Ok(Self::Time(in_range(parse_span(trimmed)?)?))
     }
 
+    /// The moment as a text that [`MomentRequest::parse`] reads back to the same one.
+    #[must_use]
+    pub fn text(&self) -> String {
+        match self {
+            Self::Time(time_yr) => write_entry(*time_yr, EntryKind::SpanYr),
+            Self::Now => "now".to_owned(),
+            Self::Event(name) => format!("event {}", quoted(name)),
+        }
+    }
+
+    /// The moment under a planet's new name, where it is an event of that planet.
+    #[must_use]
+    pub fn renamed(&self, before: &str, after: &str) -> Option<Self> {
+        let Self::Event(name) = self else { return None };
+        let rest = strip_prefix_ignoring_case(name, before)?.trim_start().strip_prefix(':')?;
+        Some(Self::Event(format!("{after}:{rest}")))
+    }
+
+    /// The event it means in a history; `None` where it is no event.
+    ///
+    /// # Errors
+    /// [`MomentProblem`] when there is no such event or more than one.
+    pub fn event<'h>(&self, history: &'h History) -> Result<Option<&'h Event>, MomentProblem> {
+        match self {
+            Self::Time(_) | Self::Now => Ok(None),
+            Self::Event(name) => event_named(history, name).map(Some),
+        }
+    }
+
     /// The time it means in a history, yr. `present_age_yr` is what `now` means, if it means anything.
-    pub(super) fn time_yr(&self, history: &History, present_age_yr: Option<f64>) -> Result<f64, MomentProblem> {
+    ///
+    /// # Errors
+    /// [`MomentProblem`] when it means no moment of this history.
+    pub fn time_yr(&self, history: &History, present_age_yr: Option<f64>) -> Result<f64, MomentProblem> {
         match self {
             Self::Time(time_yr) => Ok(*time_yr),
             Self::Now => in_range(present_age_yr.ok_or(MomentProblem::NoPresent)?),
-            Self::Event(name) => event_time_yr(history, name),
+            Self::Event(name) => in_range(event_named(history, name)?.time_yr),
         }
     }
 }
@@ -105,13 +145,13 @@ fn in_range(time_yr: f64) -> Result<f64, MomentProblem> {
     Err(MomentProblem::OutOfRange { time_yr })
 }
 
-fn event_time_yr(history: &History, name: &str) -> Result<f64, MomentProblem> {
+fn event_named<'h>(history: &'h History, name: &str) -> Result<&'h Event, MomentProblem> {
     let described = |event: &Event| {
         format!("\"{}\" at {}", event.label(history), span(event.time_yr, DATE_DIGITS, SpanStyle::Symbols))
     };
     let matching: Vec<&Event> = history.events().iter().filter(|event| is_named(history, event, name)).collect();
     match matching.as_slice() {
-        [event] => in_range(event.time_yr),
+        [event] => Ok(*event),
         [] => Err(MomentProblem::NoSuchEvent {
             name: name.chars().take(80).collect(),
             available: history.events().iter().map(described).collect(),
@@ -144,6 +184,19 @@ fn folded(text: &str) -> String {
     text.split_whitespace().collect::<Vec<_>>().join(" ").to_lowercase()
 }
 
+/// What follows the word that starts an event: a colon, a space or a quotation mark has to come next.
+fn event_name(text: &str) -> Option<&str> {
+    let rest = strip_prefix_ignoring_case(text, EVENT_PREFIX)?;
+    let is_apart = rest.starts_with(|sign: char| sign == ':' || sign.is_whitespace() || QUOTES.contains(&(sign, sign)));
+    is_apart.then(|| rest.trim_start().trim_start_matches(':'))
+}
+
+/// A name in quotation marks that do not stand in it.
+fn quoted(name: &str) -> String {
+    let (open, close) = QUOTES.into_iter().find(|(_, close)| !name.contains(*close)).unwrap_or(QUOTES[0]);
+    format!("{open}{name}{close}")
+}
+
 fn strip_prefix_ignoring_case<'a>(text: &'a str, prefix: &str) -> Option<&'a str> {
     let start = text.get(..prefix.len())?;
     start.eq_ignore_ascii_case(prefix).then(|| &text[prefix.len()..])
@@ -152,11 +205,7 @@ fn strip_prefix_ignoring_case<'a>(text: &'a str, prefix: &str) -> Option<&'a str
 /// The text without one pair of quotation marks, which a shell may or may not have taken away.
 fn unquoted(text: &str) -> &str {
     let text = text.trim();
-    [('"', '"'), ('\'', '\''), ('“', '”')]
-        .into_iter()
-        .find_map(|(open, close)| text.strip_prefix(open)?.strip_suffix(close))
-        .unwrap_or(text)
-        .trim()
+    QUOTES.into_iter().find_map(|(open, close)| text.strip_prefix(open)?.strip_suffix(close)).unwrap_or(text).trim()
 }
 
 #[cfg(test)]
@@ -172,9 +221,14 @@ mod tests {
         assert_eq!(parse(" 1e14 yr "), MomentRequest::Time(1e14));
         assert_eq!(parse("0"), MomentRequest::Time(0.0));
         assert_eq!(parse("Now"), MomentRequest::Now);
-        for text in
-            ["event:\"largest radius\"", "event:largest radius", "EVENT: 'largest radius' ", "event:“largest radius”"]
-        {
+        for text in [
+            "event:\"largest radius\"",
+            "event:largest radius",
+            "EVENT: 'largest radius' ",
+            "event:“largest radius”",
+            "event 'largest radius'",
+            "event largest radius",
+        ] {
             assert_eq!(parse(text), MomentRequest::Event("largest radius".to_owned()));
         }
     }
