@@ -2,6 +2,7 @@
 
 pub mod command_line;
 pub mod document;
+pub mod drawing;
 pub mod figure;
 pub mod handover;
 pub mod physics;

@@ -6,15 +6,16 @@ use std::fs;
 use std::path::{Path, PathBuf};
 
 /// Each layer with the layers it may use.
-const LAYERS: [(&str, &[&str]); 8] = [
+const LAYERS: [(&str, &[&str]); 9] = [
     ("units", &[]),
     ("physics", &["units"]),
     ("system", &["physics", "units"]),
     ("figure", &["system", "physics", "units"]),
     ("document", &["system", "physics", "units"]),
-    ("handover", &["document", "figure", "system", "physics", "units"]),
-    ("command_line", &["handover", "document", "system", "physics", "units"]),
-    ("window", &["handover", "document", "figure", "system", "physics", "units"]),
+    ("drawing", &["figure", "system", "physics", "units"]),
+    ("handover", &["document", "drawing", "figure", "system", "physics", "units"]),
+    ("command_line", &["handover", "drawing", "document", "system", "physics", "units"]),
+    ("window", &["handover", "drawing", "document", "figure", "system", "physics", "units"]),
 ];
 /// Parts of physics that do not know each other.
 const BRANCHES: [&str; 3] = ["light", "planet", "star"];
@@ -45,7 +46,7 @@ const PURE_NAMES: &str = "x y z duv degree value lowest highest height ultraviol
     molecular_mass optical_depth optical_depth_550 heavy_elements envelope_measure relative_brightness most_decades text_scale \
     quality_high quality_low love_number place visibility";
 /// Where names of numbers are free: formulas in the letters of their paper, and places on a picture.
-const FREE_NAMES: [&str; 3] = ["physics/star/analytic/", "figure/sky_picture.rs", "window/"];
+const FREE_NAMES: [&str; 4] = ["physics/star/analytic/", "figure/sky_picture.rs", "drawing/", "window/"];
 /// Folders of the window whose `mod.rs` draws the frame around its parts.
 const DRAWING_MODULES: [&str; 5] = [
     "window/dialogs/mod.rs",

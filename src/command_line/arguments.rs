@@ -2,6 +2,7 @@
 
 use super::destination::Destination;
 use super::scenario_source::ScenarioSource;
+use crate::drawing::{Look, Plot};
 use crate::system::{EventGroup, TimeScale};
 use clap::builder::{OsStringValueParser, PossibleValue, TypedValueParser};
 use clap::{Args, Parser, Subcommand, ValueEnum};
@@ -56,6 +57,9 @@ pub(super) enum Command {
     /// The dated events of star and planets
     #[command(after_help = "Example:\n  longember events demo:sunlike_five_worlds")]
     Events(EventsArguments),
+    /// A figure in publication style: SVG, PDF or PNG
+    #[command(after_help = "Example:\n  longember figure demo:sunlike_five_worlds --plot distance")]
+    Figure(FigureArguments),
     /// List the built-in scenarios, or write one as a file to start from
     #[command(after_help = "Example:\n  longember demo sunlike_five_worlds")]
     Demo(DemoArguments),
@@ -139,6 +143,94 @@ pub(super) struct EventsArguments {
     /// Where the result goes.
     #[command(flatten)]
     pub(super) destination: Destination,
+}
+
+/// `figure`.
+#[derive(Args, Debug)]
+pub(super) struct FigureArguments {
+    /// A file, demo:NAME, or - for standard input
+    #[arg(value_name = "SCENARIO", value_parser = source_parser())]
+    pub(super) scenario: ScenarioSource,
+    /// What to draw
+    #[arg(long, value_enum, value_name = "NAME")]
+    pub(super) plot: PlotArgument,
+    /// The moment: 4.57Gyr, "3 trillion years", now, event:"largest radius"
+    #[arg(long, value_name = "TIME", default_value = "now", allow_hyphen_values = true)]
+    pub(super) at: String,
+    /// Whose sky to draw; the first with air if left out
+    #[arg(long, value_name = "NAME")]
+    pub(super) planet: Option<String>,
+    /// Scale of the time axis
+    #[arg(long, value_enum, default_value_t = SpacingArgument(TimeScale::Paced))]
+    pub(super) scale: SpacingArgument,
+    /// Width and height in pixels, such as 960x600; what suits the plot if left out
+    #[arg(long, value_name = "WxH", value_parser = sides)]
+    pub(super) size: Option<Sides>,
+    /// Dark ink on white, or light ink on near-black
+    #[arg(long, value_enum, default_value_t = LookArgument(Look::Light))]
+    pub(super) theme: LookArgument,
+    /// Form of the result; if left out, the extension of --out decides, else svg
+    #[arg(long, value_enum)]
+    pub(super) format: Option<FigureFormat>,
+    /// Where the result goes.
+    #[command(flatten)]
+    pub(super) destination: Destination,
+}
+
+/// Form of a figure.
+#[derive(Clone, Copy, Debug, PartialEq, Eq, ValueEnum)]
+pub(super) enum FigureFormat {
+    /// Lines and text, of any size.
+    Svg,
+    /// A page for print, its text as text.
+    Pdf,
+    /// Pixels.
+    Png,
+}
+
+/// A plot as an argument.
+#[derive(Clone, Debug, PartialEq, Eq)]
+pub(super) struct PlotArgument {
+    key: &'static str,
+    /// The plot.
+    pub(super) plot: Plot,
+}
+
+impl ValueEnum for PlotArgument {
+    fn value_variants<'a>() -> &'a [Self] {
+        static ALL: LazyLock<Vec<PlotArgument>> =
+            LazyLock::new(|| Plot::all().into_iter().map(|(key, plot)| PlotArgument { key, plot }).collect());
+        &ALL
+    }
+
+    fn to_possible_value(&self) -> Option<PossibleValue> {
+        Some(PossibleValue::new(self.key))
+    }
+}
+
+/// A look of figures as an argument.
+#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+pub(super) struct LookArgument(pub(super) Look);
+
+impl ValueEnum for LookArgument {
+    fn value_variants<'a>() -> &'a [Self] {
+        &[Self(Look::Light), Self(Look::Dark)]
+    }
+
+    fn to_possible_value(&self) -> Option<PossibleValue> {
+        Some(PossibleValue::new(self.0.key()))
+    }
+}
+
+/// Width and height as they were written.
+#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+pub(super) struct Sides(pub(super) [u32; 2]);
+
+/// Reads `960x600`.
+fn sides(text: &str) -> Result<Sides, String> {
+    let side = |digits: &str| digits.trim().parse::<u32>().ok();
+    let found = text.split_once(['x', 'X', '×']).and_then(|(width, height)| Some(Sides([side(width)?, side(height)?])));
+    found.ok_or_else(|| "write width and height in pixels, such as 960x600".to_owned())
 }
 
 /// `demo`.

@@ -31,10 +31,15 @@ impl Destination {
 
     /// Delivers a result.
     pub(super) fn deliver(&self, text: &str, streams: &mut Streams<'_>) -> Result<(), Trouble> {
+        self.deliver_bytes(text.as_bytes(), streams)
+    }
+
+    /// Delivers a result that is no text.
+    pub(super) fn deliver_bytes(&self, bytes: &[u8], streams: &mut Streams<'_>) -> Result<(), Trouble> {
         match &self.out {
-            None => streams.result(text).map_err(Trouble::StandardOutput),
-            Some(path) if self.force => Ok(write_atomically(path, text.as_bytes())?),
-            Some(path) => Ok(create_atomically(path, text.as_bytes())?),
+            None => streams.result_bytes(bytes).map_err(Trouble::StandardOutput),
+            Some(path) if self.force => Ok(write_atomically(path, bytes)?),
+            Some(path) => Ok(create_atomically(path, bytes)?),
         }
     }
 

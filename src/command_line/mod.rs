@@ -5,6 +5,7 @@
 
 mod arguments;
 mod destination;
+mod figure_run;
 mod outcome;
 mod run;
 mod scenario_source;

@@ -4,6 +4,7 @@ use super::arguments::{
     Arguments, Command, DemoArguments, EventsArguments, EventsFormat, PageFormat, SourcesArguments, StarArguments,
     StateArguments, TableArguments, TableFormat,
 };
+use super::figure_run;
 use super::outcome::{DONE, Outcome, WRONG_USAGE};
 use super::scenario_source::{ScenarioSource, find_demo};
 use super::streams::Streams;
@@ -92,6 +93,7 @@ fn carry_out(command: Command, streams: &mut Streams<'_>) -> Result<(), Trouble>
         Command::Star(arguments) => star(&arguments, streams),
         Command::Table(arguments) => table(&arguments, streams),
         Command::Events(arguments) => events(&arguments, streams),
+        Command::Figure(arguments) => figure_run::figure(&arguments, streams),
         Command::Demo(arguments) => demo(&arguments, streams),
         Command::Sources(arguments) => sources(&arguments, streams),
     }
@@ -228,7 +230,7 @@ fn sources(arguments: &SourcesArguments, streams: &mut Streams<'_>) -> Result<()
     streams.result(&text).map_err(Trouble::StandardOutput)
 }
 
-fn computed(scenario: Scenario, streams: &mut Streams<'_>) -> Result<(String, History), Trouble> {
+pub(super) fn computed(scenario: Scenario, streams: &mut Streams<'_>) -> Result<(String, History), Trouble> {
     Ok((scenario.title, history_of(scenario.system, streams)?))
 }
 

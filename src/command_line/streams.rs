@@ -19,7 +19,12 @@ impl Streams<'_> {
     ///
     /// A reader that stops listening, as `head` does, has what it wants: that is no error.
     pub(super) fn result(&mut self, text: &str) -> io::Result<()> {
-        match self.results.write_all(text.as_bytes()).and_then(|()| self.results.flush()) {
+        self.result_bytes(text.as_bytes())
+    }
+
+    /// Writes a result that is no text.
+    pub(super) fn result_bytes(&mut self, bytes: &[u8]) -> io::Result<()> {
+        match self.results.write_all(bytes).and_then(|()| self.results.flush()) {
             Err(error) if error.kind() == io::ErrorKind::BrokenPipe => Ok(()),
             written => written,
         }

@@ -2,6 +2,7 @@
 
 use super::outcome::{BAD_VALUE, SYSTEM_TROUBLE, WRONG_USAGE};
 use crate::document::{LoadError, Problem, WriteError, built_in};
+use crate::drawing::PictureProblem;
 use crate::handover::TableAgesProblem;
 use crate::system::{HistoryError, MomentProblem};
 use std::io;
@@ -63,6 +64,17 @@ pub(super) enum Trouble {
     /// No such table.
     #[error(transparent)]
     TableAges(#[from] TableAgesProblem),
+    /// No such picture.
+    #[error(transparent)]
+    Picture(#[from] PictureProblem),
+    /// The name of a result file names no format.
+    #[error("{} names no format by its end, allowed {allowed}; rename it or say --format", path.display())]
+    NoSuchFormat {
+        /// The file.
+        path: PathBuf,
+        /// The ends there are.
+        allowed: &'static str,
+    },
     /// A file is in the way.
     #[error("{} exists already; add --force to replace it, or choose another name", path.display())]
     FileExists {
@@ -98,7 +110,7 @@ impl Trouble {
     /// The exit code it ends the process with.
     pub(super) fn exit_code(&self) -> u8 {
         match self {
-            Self::OptionNeeds { .. } | Self::WindowFromStandardInput => WRONG_USAGE,
+            Self::OptionNeeds { .. } | Self::WindowFromStandardInput | Self::NoSuchFormat { .. } => WRONG_USAGE,
             Self::Load(LoadError::Unsound { .. })
             | Self::BuiltIn { .. }
             | Self::NoSuchDemo { .. }
@@ -107,6 +119,7 @@ impl Trouble {
             | Self::Moment(_)
             | Self::TableEnd { .. }
             | Self::TableAges(_)
+            | Self::Picture(_)
             | Self::Write(WriteError::Unsound { .. }) => BAD_VALUE,
             Self::Load(LoadError::Unreadable { .. })
             | Self::StandardInput(_)

@@ -5,6 +5,7 @@
 mod bad_input;
 mod demos;
 mod events;
+mod figures;
 mod files;
 mod help;
 mod light;

@@ -1,0 +1,134 @@
+//! Figures are held to their promises here: sound XML, text as text, pictures of the same SVG, nothing from outside.
+
+use super::picture::{Size, pdf, pixels, png};
+use super::plot::{Plot, Subject, figure_svg};
+use super::{Look, PictureProblem};
+use crate::system::{History, PlanetSpecification, StarSpecification, System};
+use resvg::usvg::roxmltree::Document;
+
+const HOSTILE: &str = "\"/><script>alert(1)</script>&amp;]]>\u{202e}<!--";
+
+fn history(star_name: &str, planet_name: &str) -> History {
+    let star = StarSpecification { name: star_name.to_owned(), ..StarSpecification::default() };
+    let planet = |name: String, semi_major_axis_au| PlanetSpecification {
+        name,
+        semi_major_axis_au,
+        ..PlanetSpecification::default()
+    };
+    let planets = vec![planet(planet_name.to_owned(), 0.4), planet(format!("{planet_name} 2"), 1.0)];
+    History::compute(System { star, planets }).expect("computed")
+}
+
+fn svg(history: &History, title: &str, plot: &Plot, moment_yr: f64, look: Look, size: Size) -> String {
+    figure_svg(&Subject::new(history, title, moment_yr), plot, size, look, "figure")
+}
+
+/// All text of an SVG, as a reader of XML finds it.
+fn texts(svg: &str) -> Vec<String> {
+    let document = Document::parse(svg).expect("well formed");
+    let texts = document.descendants().filter(|node| node.has_tag_name("text"));
+    texts.map(|node| node.text().unwrap_or_default().to_owned()).collect()
+}
+
+#[test]
+fn every_plot_is_sound_at_every_stage_of_a_life_in_each_look_and_shape() {
+    let history = history("Ember", "Kell");
+    let end_yr = history.shown_until_yr();
+    for (key, plot) in Plot::all() {
+        for moment_yr in [0.0, 4.57e9, 1.22e10, end_yr, 1e14] {
+            for (look, sides) in [(Look::Light, [960, 600]), (Look::Dark, [200, 200]), (Look::Light, [3000, 400])] {
+                let size = Size::new(sides[0], sides[1]).expect("allowed");
+                let svg = svg(&history, "A test", &plot, moment_yr, look, size);
+                let found = texts(&svg);
+                assert!(found.iter().any(|text| text.starts_with("A test · ")), "{key}: {found:?}");
+                assert!(found.iter().any(|text| text.starts_with("Longember ")), "{key}: {found:?}");
+                for foreign in ["NaN", "\"inf", " inf\"", "<script", "href", "<image", "<style"] {
+                    assert!(!svg.contains(foreign), "{key} at {moment_yr} holds {foreign}");
+                }
+            }
+        }
+    }
+}
+
+#[test]
+fn labels_stay_on_the_page() {
+    let history = history("Ember", "Kell");
+    for (key, plot) in Plot::all() {
+        let svg = svg(&history, "A test", &plot, 4.57e9, Look::Light, Size::default());
+        let document = Document::parse(&svg).expect("well formed");
+        for node in document.descendants().filter(|node| node.has_tag_name("text")) {
+            let number = |name| node.attribute(name).and_then(|text| text.parse::<f64>().ok()).expect("a number");
+            let words = node.text().unwrap_or_default();
+            if node.attribute("transform").is_some() {
+                continue;
+            }
+            let wide = super::fonts::width(words, number("font-size"), node.attribute("font-weight").is_some());
+            let left = match node.attribute("text-anchor") {
+                Some("middle") => number("x") - 0.5 * wide,
+                Some("end") => number("x") - wide,
+                _ => number("x"),
+            };
+            assert!(left >= 0.0 && left + wide <= 960.0, "{key}: {words} from {left} to {}", left + wide);
+            assert!((8.0..=600.0).contains(&number("y")), "{key}: {words}");
+        }
+    }
+}
+
+#[test]
+fn hostile_names_stay_text() {
+    let history = history(HOSTILE, HOSTILE);
+    for (key, plot) in Plot::all() {
+        let svg = svg(&history, HOSTILE, &plot, 4.57e9, Look::Light, Size::new(3000, 1200).expect("allowed"));
+        let document = Document::parse(&svg).expect("well formed");
+        assert!(document.descendants().all(|node| !node.has_tag_name("script") && !node.is_comment()), "{key}");
+        let shown = HOSTILE.replace('\u{202e}', "");
+        assert!(texts(&svg).iter().any(|text| text.contains(&shown)), "{key}");
+        assert!(pixels(&svg, Size::default()).is_ok(), "{key}");
+    }
+}
+
+#[test]
+fn signs_of_any_script_are_drawn_without_trouble() {
+    let history = history(&"😀".repeat(60), "星");
+    let svg = svg(&history, &"🪐".repeat(120), &Plot::LifeStrip, 4.57e9, Look::Dark, Size::default());
+    assert!(pixels(&svg, Size::default()).is_ok() && pdf(&svg).is_ok());
+}
+
+#[test]
+fn a_png_holds_what_is_drawn_of_the_svg_and_says_it_is_srgb() {
+    let history = history("Ember", "Kell");
+    let size = Size::new(700, 450).expect("allowed");
+    let svg = svg(&history, "A test", &Plot::Spectrum, 4.57e9, Look::Light, size);
+    let bytes = png(&svg, size).expect("drawn");
+    let mut reader = png::Decoder::new(std::io::Cursor::new(&bytes)).read_info().expect("a PNG");
+    assert!(reader.info().srgb.is_some());
+    let mut frame = vec![0; reader.output_buffer_size().expect("small")];
+    let info = reader.next_frame(&mut frame).expect("whole");
+    assert_eq!((info.width, info.height, info.color_type), (700, 450, png::ColorType::Rgb));
+    assert_eq!(frame, pixels(&svg, size).expect("drawn"));
+    // Something is drawn: white paper, dark text, and the colours of the visible band.
+    let has = |wanted: fn(&[u8]) -> bool| frame.chunks_exact(3).any(wanted);
+    assert!(has(|pixel| pixel == [255, 255, 255]) && has(|pixel| pixel.iter().all(|part| *part < 60)));
+    assert!(has(|pixel| pixel[2] > 200 && pixel[0] < 80) && has(|pixel| pixel[0] > 200 && pixel[2] < 40));
+}
+
+#[test]
+fn a_pdf_is_one_page_that_carries_its_fonts() {
+    let history = history("Ember", "Kell");
+    let svg = svg(&history, "A test", &Plot::Spectrum, 4.57e9, Look::Light, Size::default());
+    let bytes = pdf(&svg).expect("written");
+    assert!(bytes.starts_with(b"%PDF-1.") && bytes.trim_ascii_end().ends_with(b"%%EOF"));
+    let has = |name: &[u8]| bytes.windows(name.len()).any(|window| window == name);
+    // 960 and 600 pixels at 96 an inch are 720 and 450 points; a map to Unicode makes the text searchable.
+    assert!(has(b"/MediaBox [0 0 720 450]") && has(b"NotoSans-Regular") && has(b"/ToUnicode"));
+}
+
+#[test]
+fn sizes_beyond_what_can_be_drawn_are_refused_with_the_range() {
+    for sides in [[199, 600], [600, 0], [16_385, 600], [16_384, 16_384]] {
+        let problem = Size::new(sides[0], sides[1]).expect_err("refused");
+        assert!(matches!(problem, PictureProblem::Size { .. }));
+        assert!(problem.to_string().contains("allowed sides of 200 to 16384"), "{problem}");
+    }
+    assert!(Size::new(16_384, 6000).is_ok());
+}

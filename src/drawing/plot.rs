@@ -1,0 +1,264 @@
+//! Every plot by name, and its figure as SVG.
+
+use super::canvas::Canvas;
+use super::ink::Look;
+use super::page::{self, Words};
+use super::time_chart::{self, TimeView};
+use super::{legend, life_strip, orbits, picture::Size, sky, spectrum};
+use crate::figure::curves::Curve;
+use crate::figure::orbit_plan::PlanScale;
+use crate::figure::ribbon::LightRange;
+use crate::figure::{Chart, OrbitPlan, Ribbon, Samples, SkyPicture, SkyView, Spectrum, SpectrumView};
+use crate::physics::light::VisibleSpectrum;
+use crate::system::planet_light::clear_air;
+use crate::system::{History, Moment, PlanetLight, PlanetState, Starlight, TimeAxis, TimeScale};
+
+/// Places at which a part of a history is read for a chart.
+const SAMPLES: usize = 900;
+/// Places at which the whole life is read for the range of light.
+const COARSE_SAMPLES: usize = 240;
+/// The size in which text has its usual size; larger figures have larger text.
+const USUAL_SIZE: [f64; 2] = [960.0, 600.0];
+/// Least room that the words of a figure need, in units of its text; smaller figures have smaller text.
+const LEAST_ROOM: [f64; 2] = [560.0, 430.0];
+
+/// A plot.
+#[derive(Clone, Debug, PartialEq, Eq)]
+pub enum Plot {
+    /// Charts over one time axis, one below the other.
+    Curves(Vec<Curve>),
+    /// The ribbon of the whole life.
+    LifeStrip,
+    /// The star's spectrum.
+    Spectrum,
+    /// The system from above.
+    Orbits(PlanScale),
+    /// The sky of a planet.
+    Sky,
+}
+
+impl Plot {
+    /// Every plot with its stable machine name.
+    #[must_use]
+    pub fn all() -> Vec<(&'static str, Self)> {
+        let overview = [Curve::Luminosity, Curve::Temperature, Curve::PlanetTemperatures, Curve::Distance];
+        let mut plots = vec![("curves", Self::Curves(overview.to_vec()))];
+        plots.extend(Curve::ALL.into_iter().map(|curve| (curve.key(), Self::Curves(vec![curve]))));
+        plots.extend([
+            ("life_strip", Self::LifeStrip),
+            ("spectrum", Self::Spectrum),
+            ("orbits", Self::Orbits(PlanScale::Linear)),
+            ("orbits_log", Self::Orbits(PlanScale::Log)),
+            ("sky", Self::Sky),
+        ]);
+        plots
+    }
+
+    /// Finds a plot by its machine name.
+    #[must_use]
+    pub fn from_key(key: &str) -> Option<Self> {
+        Self::all().into_iter().find(|(name, _)| *name == key).map(|(_, plot)| plot)
+    }
+
+    /// The size that shows it well where none is asked for.
+    #[must_use]
+    pub fn usual_size(&self) -> Size {
+        match self {
+            Self::Curves(curves) if curves.len() > 2 => Size::usual([960, 840]),
+            Self::Orbits(_) => Size::usual([800, 840]),
+            _ => Size::default(),
+        }
+    }
+
+    /// Keys of the methods behind it; `star_life` stands for however the life of this star was computed.
+    pub(super) fn methods(&self) -> Vec<&'static str> {
+        match self {
+            Self::Curves(curves) => curves.iter().flat_map(|curve| methods_of(*curve)).copied().collect(),
+            Self::LifeStrip => vec!["star_life", "blackbody"],
+            Self::Spectrum => vec!["star_life", "effective_temperature", "spectrum"],
+            Self::Orbits(_) => vec!["star_life", "orbit", "habitable_zone"],
+            Self::Sky => vec!["star_life", "orbit", "clear_sky"],
+        }
+    }
+}
+
+fn methods_of(curve: Curve) -> &'static [&'static str] {
+    match curve {
+        Curve::Luminosity | Curve::Radius => &["star_life"],
+        Curve::Temperature => &["star_life", "effective_temperature", "blackbody"],
+        Curve::Mass => &["star_life", "star_winds"],
+        Curve::PlanetTemperatures => &["star_life", "orbit", "surface_temperature"],
+        Curve::Distance => &["star_life", "orbit", "habitable_zone"],
+    }
+}
+
+/// What a figure is drawn of.
+#[derive(Clone, Debug)]
+pub struct Subject<'a> {
+    /// The history.
+    pub history: &'a History,
+    /// The scenario's title.
+    pub title: &'a str,
+    /// The moment, yr.
+    pub moment_yr: f64,
+    /// Index of the planet whose sky is drawn.
+    pub planet: usize,
+    /// The scale of time.
+    pub scale: TimeScale,
+    /// The part of the time axis that is shown, as fractions of it.
+    pub shown_fractions: [f64; 2],
+    /// How the spectrum is looked at.
+    pub spectrum_view: SpectrumView,
+    /// How the sky is looked at.
+    pub sky_view: SkyView,
+}
+
+impl<'a> Subject<'a> {
+    /// A history at a moment, yr, looked at in the usual way.
+    #[must_use]
+    pub fn new(history: &'a History, title: &'a str, moment_yr: f64) -> Self {
+        Self {
+            history,
+            title,
+            moment_yr,
+            planet: 0,
+            scale: TimeScale::Paced,
+            shown_fractions: [0.0, 1.0],
+            spectrum_view: SpectrumView::default(),
+            sky_view: SkyView::default(),
+        }
+    }
+
+    pub(super) fn axis(&self) -> TimeAxis {
+        TimeAxis::new(self.history, self.scale)
+    }
+}
+
+/// Where and how a figure is drawn.
+struct Sheet {
+    canvas: Canvas,
+    /// Width and height in units of the text.
+    units: [f64; 2],
+    look: Look,
+}
+
+/// A plot as an SVG document in publication style. `name` begins every name within it: give figures that stand in one
+/// page different ones.
+#[must_use]
+pub fn figure_svg(subject: &Subject<'_>, plot: &Plot, size: Size, look: Look, name: &str) -> String {
+    let size_px = size.sides_px();
+    let [width, height] = size_px.map(f64::from);
+    let usual = (width / USUAL_SIZE[0]).min(height / USUAL_SIZE[1]);
+    let scale = usual.max(1.0).min(width / LEAST_ROOM[0]).min(height / LEAST_ROOM[1]);
+    let mut sheet = Sheet { canvas: Canvas::new(name), units: [width / scale, height / scale], look };
+    let words = match plot {
+        Plot::Curves(curves) => sheet.charts(subject, plot, curves),
+        Plot::LifeStrip => sheet.life(subject, plot),
+        Plot::Spectrum => sheet.spectrum(subject, plot),
+        Plot::Orbits(scale) => sheet.orbits(subject, plot, *scale),
+        Plot::Sky => sheet.sky(subject, plot),
+    };
+    let description = format!("{}. {}", words.subtitle, words.caption);
+    sheet.canvas.document(sheet.units, size_px, &words.title, &description)
+}
+
+impl Sheet {
+    fn frame(&mut self, words: &Words, entries: &[legend::Entry]) -> super::canvas::Area {
+        page::frame(&mut self.canvas, self.units, words, entries, self.look.palette())
+    }
+
+    fn charts(&mut self, subject: &Subject<'_>, plot: &Plot, curves: &[Curve]) -> Words {
+        let axis = subject.axis();
+        let [from_fraction, to_fraction] = subject.shown_fractions;
+        let samples = Samples::new(subject.history, &axis, from_fraction, to_fraction, SAMPLES);
+        let charts: Vec<Chart> = curves.iter().map(|curve| curve.chart(&samples)).collect();
+        let time = TimeView { axis: &axis, from_fraction, to_fraction, moment_yr: subject.moment_yr };
+        let words = subject.words_of_charts(plot, curves, &charts);
+        let palette = self.look.palette();
+        let area = self.frame(&words, &time_chart::entries(&charts, palette));
+        time_chart::draw(&mut self.canvas, area, &charts, &time, palette);
+        words
+    }
+
+    fn life(&mut self, subject: &Subject<'_>, plot: &Plot) -> Words {
+        let axis = subject.axis();
+        let [from_fraction, to_fraction] = subject.shown_fractions;
+        let light = LightRange::of(&Samples::new(subject.history, &axis, 0.0, 1.0, COARSE_SAMPLES));
+        let samples = Samples::new(subject.history, &axis, from_fraction, to_fraction, SAMPLES);
+        let ribbon = Ribbon::new(&samples, light);
+        let time = TimeView { axis: &axis, from_fraction, to_fraction, moment_yr: subject.moment_yr };
+        let words = subject.words_of_life(plot);
+        let entries = life_strip::entries(self.units[0], &ribbon, &time);
+        let area = self.frame(&words, &entries);
+        let ink = (self.look, self.look.palette());
+        life_strip::draw(&mut self.canvas, area, (&ribbon, &entries), subject.history, &time, ink);
+        words
+    }
+
+    fn spectrum(&mut self, subject: &Subject<'_>, plot: &Plot) -> Words {
+        let moment = subject.history.moment(subject.moment_yr);
+        let drawn = Spectrum::new(moment.star.effective_temperature_k, subject.spectrum_view);
+        let words = subject.words_of_spectrum(plot, &drawn);
+        let area = self.frame(&words, &spectrum::entries(&drawn));
+        spectrum::draw(&mut self.canvas, area, &drawn, self.look.palette());
+        words
+    }
+
+    fn orbits(&mut self, subject: &Subject<'_>, plot: &Plot, scale: PlanScale) -> Words {
+        let moment = subject.history.moment(subject.moment_yr);
+        let plan = OrbitPlan::new(&moment, scale, None);
+        let palette = self.look.palette();
+        let entries = orbits::entries(&plan, &moment, palette);
+        // The star's size on paper is known only once there is a frame; the caption's length hardly depends on it.
+        let room = self.frame_room(&subject.words_of_orbits(plot, scale, true), &entries);
+        let is_enlarged = orbits::draw(&mut Canvas::new("trial"), room, &plan, &moment, palette);
+        let words = subject.words_of_orbits(plot, scale, is_enlarged);
+        let area = self.frame(&words, &entries);
+        orbits::draw(&mut self.canvas, area, &plan, &moment, palette);
+        words
+    }
+
+    /// The room that a frame leaves, without drawing it.
+    fn frame_room(&self, words: &Words, entries: &[legend::Entry]) -> super::canvas::Area {
+        page::frame(&mut Canvas::new("trial"), self.units, words, entries, self.look.palette())
+    }
+
+    fn sky(&mut self, subject: &Subject<'_>, plot: &Plot) -> Words {
+        let moment = subject.history.moment(subject.moment_yr);
+        let light = light_on(subject.history, &moment, subject.planet, subject.sky_view);
+        let picture = light.as_ref().and_then(|light| SkyPicture::new(light, subject.sky_view));
+        let words = subject.words_of_sky(plot, subject.planet, picture.as_ref());
+        let area = self.frame(&words, &[]);
+        match &picture {
+            Some(picture) => sky::draw(&mut self.canvas, area, picture, self.look.palette()),
+            None => {
+                let reason = why_no_sky(&moment, subject.planet);
+                sky::draw_nothing(&mut self.canvas, area, &reason, self.look.palette());
+            }
+        }
+        words
+    }
+}
+
+/// The light on a planet at a moment, looked at as chosen; `None` without a star whose light is modelled.
+pub(super) fn light_on(history: &History, moment: &Moment, planet: usize, view: SkyView) -> Option<PlanetLight> {
+    let star = Starlight::of(&moment.star)?;
+    let spectrum = VisibleSpectrum::of_blackbody(star.temperature_k).ok()?;
+    let air = clear_air(history.system().planets.get(planet)?, view.altitude_deg, view.with_air);
+    PlanetLight::of(&moment.star, &star, &spectrum, moment.planets.get(planet)?, air.as_ref())
+}
+
+/// Why a planet's sky shows no star, in one sentence.
+fn why_no_sky(moment: &Moment, planet: usize) -> String {
+    let Some(planet) = moment.planets.get(planet) else {
+        return "There is no planet to stand on.".to_owned();
+    };
+    let name = &planet.name;
+    match planet.state {
+        PlanetState::Engulfed => format!("The star has swallowed {name}."),
+        PlanetState::TornApart => format!("The star's tide has torn {name} apart."),
+        PlanetState::Unbound => format!("{name} no longer orbits the star: no star stands in its sky."),
+        PlanetState::Dark => format!("No light is modelled of what {name} orbits now."),
+        _ => format!("No sky can be worked out for {name}: its gravity holds no air."),
+    }
+}
