@@ -82,18 +82,15 @@ impl Subject<'_> {
 
     /// The spectrum.
     pub(super) fn words_of_spectrum(&self, plot: &Plot, spectrum: &Spectrum) -> Words {
-        let caption = match &spectrum.star {
-            Some(star) => format!(
+        let caption = if let Some(star) = &spectrum.star {
+            format!(
                 "The star as a blackbody of {} K, with its peak at {} and the visible band in its colours; dashed, a blackbody of the Sun's temperature. Above, the share of each band.",
                 number(star.temperature_k, 4),
                 wavelength_text(star.peak.wavelength_nm)
-            ),
-            None => {
-                let phase = self.history.star_at(self.moment_yr).phase.name();
-                format!(
-                    "The star is a {phase}, whose light is not modelled; dashed, a blackbody of the Sun's temperature."
-                )
-            }
+            )
+        } else {
+            let phase = self.history.star_at(self.moment_yr).phase.name();
+            format!("The star is a {phase}, whose light is not modelled; dashed, a blackbody of the Sun's temperature.")
         };
         self.words(plot, format!("Spectrum of {}", self.star_name()), caption)
     }

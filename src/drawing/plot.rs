@@ -229,12 +229,11 @@ impl Sheet {
         let picture = light.as_ref().and_then(|light| SkyPicture::new(light, subject.sky_view));
         let words = subject.words_of_sky(plot, subject.planet, picture.as_ref());
         let area = self.frame(&words, &[]);
-        match &picture {
-            Some(picture) => sky::draw(&mut self.canvas, area, picture, self.look.palette()),
-            None => {
-                let reason = why_no_sky(&moment, subject.planet);
-                sky::draw_nothing(&mut self.canvas, area, &reason, self.look.palette());
-            }
+        if let Some(picture) = &picture {
+            sky::draw(&mut self.canvas, area, picture, self.look.palette());
+        } else {
+            let reason = why_no_sky(&moment, subject.planet);
+            sky::draw_nothing(&mut self.canvas, area, &reason, self.look.palette());
         }
         words
     }
