@@ -60,6 +60,9 @@ pub(super) enum Command {
     /// A figure in publication style: SVG, PDF or PNG
     #[command(after_help = "Example:\n  longember figure demo:sunlike_five_worlds --plot distance")]
     Figure(FigureArguments),
+    /// A fact sheet on one moment or several, every number with its source
+    #[command(after_help = "Example:\n  longember sheet demo:sunlike_five_worlds --at 4.57Gyr --at 7.6Gyr")]
+    Sheet(SheetArguments),
     /// List the built-in scenarios, or write one as a file to start from
     #[command(after_help = "Example:\n  longember demo sunlike_five_worlds")]
     Demo(DemoArguments),
@@ -175,6 +178,34 @@ pub(super) struct FigureArguments {
     /// Where the result goes.
     #[command(flatten)]
     pub(super) destination: Destination,
+}
+
+/// `sheet`.
+#[derive(Args, Debug)]
+pub(super) struct SheetArguments {
+    /// A file, demo:NAME, or - for standard input
+    #[arg(value_name = "SCENARIO", value_parser = source_parser())]
+    pub(super) scenario: ScenarioSource,
+    /// A moment: 4.57Gyr, now, event:"largest radius"; may be given several times
+    #[arg(long, value_name = "TIME", required = true, allow_hyphen_values = true)]
+    pub(super) at: Vec<String>,
+    /// Form of the result; if left out, the extension of --out decides, else markdown
+    #[arg(long, value_enum)]
+    pub(super) format: Option<SheetFormat>,
+    /// Where the result goes.
+    #[command(flatten)]
+    pub(super) destination: Destination,
+}
+
+/// Form of a fact sheet.
+#[derive(Clone, Copy, Debug, PartialEq, Eq, ValueEnum)]
+pub(super) enum SheetFormat {
+    /// A page with figures that needs nothing else and prints well.
+    Html,
+    /// Headings, tables and links.
+    Markdown,
+    /// Lines of at most 80 columns.
+    Text,
 }
 
 /// Form of a figure.

@@ -1,10 +1,11 @@
-//! `figure`: a plot as a file.
+//! `figure` and `sheet`: a plot and a page as files.
 
-use super::arguments::{FigureArguments, FigureFormat, Sides};
+use super::arguments::{FigureArguments, FigureFormat, SheetArguments, SheetFormat, Sides};
 use super::run::computed;
 use super::streams::Streams;
 use super::trouble::Trouble;
 use crate::drawing::{Size, Subject, figure_svg, pdf, png};
+use crate::handover;
 use crate::system::{Air, History, MomentRequest};
 
 /// Draws the figure asked for.
@@ -45,6 +46,41 @@ fn format_of(arguments: &FigureArguments) -> Result<FigureFormat, Trouble> {
             _ => Err(Trouble::NoSuchFormat { path: path.clone(), allowed: ".svg, .pdf and .png" }),
         },
     }
+}
+
+/// Most moments of one sheet.
+const MOST_MOMENTS: usize = 20;
+
+/// Writes the fact sheet asked for.
+pub(super) fn sheet(arguments: &SheetArguments, streams: &mut Streams<'_>) -> Result<(), Trouble> {
+    arguments.destination.check()?;
+    let format = match (arguments.format, &arguments.destination.out) {
+        (Some(format), _) => format,
+        (None, None) => SheetFormat::Markdown,
+        (None, Some(path)) => match arguments.destination.extension().as_deref() {
+            Some("html" | "htm") => SheetFormat::Html,
+            Some("md" | "markdown") => SheetFormat::Markdown,
+            Some("txt") => SheetFormat::Text,
+            _ => return Err(Trouble::NoSuchFormat { path: path.clone(), allowed: ".html, .md and .txt" }),
+        },
+    };
+    if arguments.at.len() > MOST_MOMENTS {
+        return Err(Trouble::TooManyMoments { count: arguments.at.len(), most: MOST_MOMENTS });
+    }
+    let requests = arguments.at.iter().map(|text| MomentRequest::parse(text)).collect::<Result<Vec<_>, _>>()?;
+    let scenario = arguments.scenario.load(streams)?;
+    let present_age_yr = scenario.system.star.present_age_yr;
+    let about = scenario.about.clone();
+    let (title, history) = computed(scenario, streams)?;
+    let moments = requests.iter().map(|request| request.time_yr(&history, Some(present_age_yr)));
+    let moments_yr = moments.collect::<Result<Vec<f64>, _>>()?;
+    let sheet = handover::fact_sheet(&history, &title, &about, &moments_yr, format == SheetFormat::Html);
+    let page = match format {
+        SheetFormat::Html => handover::sheet_html(&sheet),
+        SheetFormat::Markdown => handover::sheet_markdown(&sheet),
+        SheetFormat::Text => handover::sheet_text(&sheet),
+    };
+    arguments.destination.deliver(&page, streams)
 }
 
 /// Index of the planet named, or of the first with air, or of the first.

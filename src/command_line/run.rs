@@ -94,6 +94,7 @@ fn carry_out(command: Command, streams: &mut Streams<'_>) -> Result<(), Trouble>
         Command::Table(arguments) => table(&arguments, streams),
         Command::Events(arguments) => events(&arguments, streams),
         Command::Figure(arguments) => figure_run::figure(&arguments, streams),
+        Command::Sheet(arguments) => figure_run::sheet(&arguments, streams),
         Command::Demo(arguments) => demo(&arguments, streams),
         Command::Sources(arguments) => sources(&arguments, streams),
     }

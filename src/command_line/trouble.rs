@@ -67,6 +67,14 @@ pub(super) enum Trouble {
     /// No such picture.
     #[error(transparent)]
     Picture(#[from] PictureProblem),
+    /// More moments than a page holds.
+    #[error("--at is given {count} times, allowed 1 to {most}; make several sheets")]
+    TooManyMoments {
+        /// How many were given.
+        count: usize,
+        /// How many a sheet holds.
+        most: usize,
+    },
     /// The name of a result file names no format.
     #[error("{} names no format by its end, allowed {allowed}; rename it or say --format", path.display())]
     NoSuchFormat {
@@ -110,7 +118,10 @@ impl Trouble {
     /// The exit code it ends the process with.
     pub(super) fn exit_code(&self) -> u8 {
         match self {
-            Self::OptionNeeds { .. } | Self::WindowFromStandardInput | Self::NoSuchFormat { .. } => WRONG_USAGE,
+            Self::OptionNeeds { .. }
+            | Self::WindowFromStandardInput
+            | Self::NoSuchFormat { .. }
+            | Self::TooManyMoments { .. } => WRONG_USAGE,
             Self::Load(LoadError::Unsound { .. })
             | Self::BuiltIn { .. }
             | Self::NoSuchDemo { .. }

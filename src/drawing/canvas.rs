@@ -95,8 +95,8 @@ impl Canvas {
              <title id=\"{prefix}-title\">{}</title>\n<desc id=\"{prefix}-desc\">{}</desc>\n{}</svg>\n",
             short(units[0]),
             short(units[1]),
-            escaped(title),
-            escaped(description),
+            markup_text(title),
+            markup_text(description),
             self.body,
         )
     }
@@ -204,7 +204,7 @@ impl Canvas {
             short(place[1]),
             short(letters.size),
             letters.ink,
-            escaped(text)
+            markup_text(text)
         ));
     }
 
@@ -276,23 +276,29 @@ fn short(value: f64) -> String {
     if trimmed == "-0" { "0".to_owned() } else { trimmed.to_owned() }
 }
 
-/// A text that XML takes as nothing but text: signs that end it are written as entities, and what no page shows
+/// A text that XML and HTML take as nothing but text: signs that end it are written as entities, and what no page shows
 /// (control characters, turns of the reading direction, what XML forbids) is left out.
-pub(super) fn escaped(text: &str) -> String {
+#[must_use]
+pub fn markup_text(text: &str) -> String {
     let mut safe = String::with_capacity(text.len());
-    for sign in text.chars() {
+    for sign in line_of_text(text).chars() {
         match sign {
             '&' => safe.push_str("&amp;"),
             '<' => safe.push_str("&lt;"),
             '>' => safe.push_str("&gt;"),
             '"' => safe.push_str("&quot;"),
             '\'' => safe.push_str("&#39;"),
-            '\n' | '\t' | '\r' => safe.push(' '),
-            sign if is_unfit(sign) => {}
             sign => safe.push(sign),
         }
     }
     safe
+}
+
+/// A text as one line without signs that no page shows.
+#[must_use]
+pub fn line_of_text(text: &str) -> String {
+    let in_line = text.chars().map(|sign| if matches!(sign, '\n' | '\t' | '\r') { ' ' } else { sign });
+    in_line.filter(|sign| !is_unfit(*sign)).collect()
 }
 
 /// Whether a sign has no place in a line of text.
@@ -307,8 +313,11 @@ mod tests {
 
     #[test]
     fn hostile_text_stays_text() {
-        assert_eq!(escaped("<script>\"a\"&'b'</script>"), "&lt;script&gt;&quot;a&quot;&amp;&#39;b&#39;&lt;/script&gt;");
-        assert_eq!(escaped("a\nb\u{0}\u{202e}c\u{ffff}"), "a bc");
+        assert_eq!(
+            markup_text("<script>\"a\"&'b'</script>"),
+            "&lt;script&gt;&quot;a&quot;&amp;&#39;b&#39;&lt;/script&gt;"
+        );
+        assert_eq!(markup_text("a\nb\u{0}\u{202e}c\u{ffff}"), "a bc");
     }
 
     #[test]

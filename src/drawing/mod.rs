@@ -20,6 +20,7 @@ mod spectrum;
 mod state_mark;
 mod time_chart;
 
+pub use canvas::{line_of_text, markup_text};
 pub use ink::Look;
 pub use picture::{MOST_PIXELS, PictureProblem, SIDE_RANGE_PX, Size, pdf, pixels, png};
 pub use plot::{Plot, Subject, figure_svg};

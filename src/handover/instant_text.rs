@@ -186,10 +186,27 @@ fn with_unit(value: Option<f64>, digits: usize, symbol: &str) -> String {
     }
 }
 
-/// The notes: each sentence stands once, after everything it is about.
 fn push_notes(page: &mut String, history: &History, moment: &Moment, light: &MomentLight) {
+    let notes = gathered_notes(history, moment, light, true);
+    if notes.is_empty() {
+        return;
+    }
+    page.push_str("\nNotes\n");
+    for note in notes {
+        push_wrapped(page, "  - ", &note);
+    }
+}
+
+/// The notes on a moment: each sentence stands once, after everything it is about. What is missing may be left out.
+pub(super) fn gathered_notes(
+    history: &History,
+    moment: &Moment,
+    light: &MomentLight,
+    with_absences: bool,
+) -> Vec<String> {
     let mut gathered: Vec<(String, Vec<String>)> = Vec::new();
-    for remark in remarks(moment, light).iter().filter(|remark| remark.kind != SPREAD) {
+    let is_told = |remark: &&Remark| remark.kind != SPREAD && (with_absences || remark.kind != ABSENT);
+    for remark in remarks(moment, light).iter().filter(is_told) {
         let (about, sentence) = about_and_sentence(history, remark);
         match gathered.iter_mut().find(|(known, _)| *known == sentence) {
             Some((_, abouts)) if abouts.contains(&about) => {}
@@ -197,13 +214,7 @@ fn push_notes(page: &mut String, history: &History, moment: &Moment, light: &Mom
             None => gathered.push((sentence, vec![about])),
         }
     }
-    if gathered.is_empty() {
-        return;
-    }
-    page.push_str("\nNotes\n");
-    for (sentence, abouts) in gathered {
-        push_wrapped(page, "  - ", &format!("{}: {sentence}", abouts.join(", ")));
-    }
+    gathered.into_iter().map(|(sentence, abouts)| format!("{}: {sentence}", abouts.join(", "))).collect()
 }
 
 fn about_and_sentence(history: &History, remark: &Remark) -> (String, String) {

@@ -9,6 +9,7 @@ mod cell;
 mod comma_separated;
 mod dated_events;
 mod enhanced_table;
+mod fact_sheet;
 mod figures;
 mod history_table;
 mod instant_json;
@@ -22,6 +23,7 @@ mod table_ages;
 mod table_columns;
 
 pub use dated_events::{doubt, events_csv, events_json, events_text};
+pub use fact_sheet::{FactSheet, fact_sheet, sheet_html, sheet_markdown, sheet_text};
 pub use history_table::{table_csv, table_ecsv, table_json};
 pub use instant_json::instant_json;
 pub use instant_text::instant_text;

@@ -11,5 +11,6 @@ mod help;
 mod light;
 mod moments;
 mod program;
+mod sheets;
 mod states;
 mod tables;
