@@ -1,4 +1,4 @@
-//! The sheet as Markdown (CommonMark with tables).
+//! The sheet as Markdown (`CommonMark` with tables).
 
 use super::content::{FactSheet, Group, PLANETS_ACROSS, figure_names};
 use crate::drawing::line_of_text;
@@ -109,7 +109,7 @@ fn push_side_by_side(page: &mut String, groups: &[Group]) {
 /// A text that Markdown takes as nothing but text, in one line.
 ///
 /// # Source
-/// CommonMark 0.31: a backslash before ASCII punctuation makes it literal.
+/// `CommonMark` 0.31: a backslash before ASCII punctuation makes it literal.
 pub(super) fn literal(text: &str) -> String {
     let mut safe = String::with_capacity(text.len());
     // A leading sign or number would begin a list, a heading or a rule; a bare address would become a link.
