@@ -82,6 +82,7 @@ impl Longember {
     pub fn root_ui(&mut self, ui: &mut Ui) {
         let context = ui.ctx().clone();
         self.receive(&context);
+        self.receive_exports(&context);
         self.play(&context);
         self.workspace.follow_colour();
         let mut commands = if self.workspace.dialog.is_none() { command::from_keys(&context) } else { Vec::new() };

@@ -2,6 +2,7 @@
 //!
 //! Drawing returns commands; they are applied after the frame, in one place.
 
+use super::exports::Export;
 use super::pages::Page;
 use crate::document::{Scenario, Theme};
 use crate::figure::curves::Curve;
@@ -69,6 +70,12 @@ pub enum Command {
     ShowSource(&'static str),
     /// Put a text on the clipboard.
     Copy(String),
+    /// Ask for a file and hand something over in it.
+    AskExport(Export),
+    /// Hand something over in this file.
+    Export(Export, PathBuf),
+    /// Put the fact sheet of the moment on the clipboard.
+    CopySheet,
     /// Show every key.
     ShowKeys,
     /// Say what this program is.

@@ -1,6 +1,7 @@
 //! The system's own file dialog, on a thread of its own: it may be missing, hang, or never answer.
 
 use super::command::Command;
+use super::exports::Export;
 use std::path::PathBuf;
 use std::sync::mpsc::{Receiver, TryRecvError, channel};
 use std::thread;
@@ -12,6 +13,8 @@ pub(super) enum Purpose {
     Open,
     /// To save.
     Save,
+    /// To hand something over.
+    Export(Export),
 }
 
 /// A path that is being asked for.
@@ -69,6 +72,7 @@ impl Asked {
             Purpose::Open => Command::Open(path),
             Purpose::Save if path.extension().is_none() => Command::SaveAs(path.with_extension("ron")),
             Purpose::Save => Command::SaveAs(path),
+            Purpose::Export(export) => Command::Export(export, path),
         }
     }
 }
@@ -76,7 +80,11 @@ impl Asked {
 fn system_dialog(purpose: Purpose, typed: &str, context: &egui::Context) -> Option<Receiver<Option<PathBuf>>> {
     let (sender, receiver) = channel();
     let context = context.clone();
-    let mut dialog = rfd::FileDialog::new().add_filter("Longember scenario", &["ron"]);
+    let mut dialog = rfd::FileDialog::new();
+    dialog = match purpose {
+        Purpose::Open | Purpose::Save => dialog.add_filter("Longember scenario", &["ron"]),
+        Purpose::Export(export) => dialog.add_filter(export.name(), export.extensions()),
+    };
     let typed = PathBuf::from(typed);
     if let Some(name) = typed.file_name() {
         dialog = dialog.set_file_name(name.to_string_lossy());
@@ -87,7 +95,7 @@ fn system_dialog(purpose: Purpose, typed: &str, context: &egui::Context) -> Opti
     let spawned = thread::Builder::new().name("file dialog".to_owned()).spawn(move || {
         let path = match purpose {
             Purpose::Open => dialog.pick_file(),
-            Purpose::Save => dialog.save_file(),
+            Purpose::Save | Purpose::Export(_) => dialog.save_file(),
         };
         // Nobody listens any more when a typed path was quicker.
         let _ = sender.send(path);

@@ -1,11 +1,12 @@
-//! Work off the drawing thread: one history at a time, the newest request wins.
+//! Work off the drawing thread: one history at a time, the newest request wins; and what is handed over.
 
+use super::exports::{Exported, Work};
 use crate::document::LifeStore;
 use crate::system::{History, HistoryError, System};
 use std::ops::ControlFlow;
 use std::sync::Arc;
 use std::sync::atomic::{AtomicBool, AtomicU32, Ordering};
-use std::sync::mpsc::{Receiver, RecvTimeoutError, channel};
+use std::sync::mpsc::{Receiver, RecvTimeoutError, TryRecvError, channel};
 use std::thread;
 use std::time::Duration;
 
@@ -114,6 +115,50 @@ impl Shared {
         let whole = (0..=100).take_while(|percent| f64::from(*percent) <= 100.0 * share).last().unwrap_or(0);
         self.percent.store(whole, Ordering::Relaxed);
         if self.is_cancelled.load(Ordering::Relaxed) { ControlFlow::Break(()) } else { ControlFlow::Continue(()) }
+    }
+}
+
+/// What is being handed over in the background, each on a thread of its own.
+#[derive(Debug, Default)]
+pub(crate) struct ExportJobs {
+    waiting: Vec<Receiver<Exported>>,
+}
+
+impl ExportJobs {
+    /// Starts work; what came of it is there at a later [`ExportJobs::poll`].
+    pub(crate) fn start(&mut self, work: Work, context: &egui::Context) {
+        let (sender, receiver) = channel();
+        let context = context.clone();
+        let spawned = thread::Builder::new().name("export".to_owned()).spawn(move || {
+            // The window may have closed: then nobody asks any more.
+            let _ = sender.send(work());
+            context.request_repaint();
+        });
+        if spawned.is_ok() {
+            self.waiting.push(receiver);
+        }
+    }
+
+    /// Whether something is still being handed over.
+    pub(crate) fn is_running(&self) -> bool {
+        !self.waiting.is_empty()
+    }
+
+    /// Everything that is done.
+    pub(crate) fn poll(&mut self) -> Vec<Exported> {
+        let mut done = Vec::new();
+        self.waiting.retain(|receiver| match receiver.try_recv() {
+            Ok(exported) => {
+                done.push(exported);
+                false
+            }
+            Err(TryRecvError::Empty) => true,
+            Err(TryRecvError::Disconnected) => {
+                done.push(Exported::Refused("The export stopped before it was done; please report it".to_owned()));
+                false
+            }
+        });
+        done
     }
 }
 

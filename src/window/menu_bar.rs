@@ -1,6 +1,7 @@
 //! Title, menus, undo and redo along the top.
 
 use super::command::{Command, shortcut_of};
+use super::exports::Export;
 use super::fonts::BOLD;
 use super::theme::{GRID, TEXT_SIZE, small};
 use super::widgets::icon::{Icon, icon_button};
@@ -100,6 +101,11 @@ fn scenario_menu(ui: &mut Ui, workspace: &Workspace, commands: &mut Vec<Command>
         ui.separator();
         item(ui, "Save", Command::Save, true, commands);
         item(ui, "Save as …", Command::AskSaveAs, true, commands);
+        ui.separator();
+        item(ui, "Export figure …", Command::AskExport(Export::Figure), true, commands);
+        item(ui, "Export fact sheet …", Command::AskExport(Export::Sheet), true, commands);
+        item(ui, "Export table …", Command::AskExport(Export::Table), true, commands);
+        item(ui, "Copy fact sheet", Command::CopySheet, true, commands);
         ui.separator();
         item(ui, "Quit", Command::Quit, true, commands);
     });

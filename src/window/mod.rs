@@ -5,6 +5,7 @@ mod background;
 mod command;
 mod derived;
 mod dialogs;
+mod exports;
 mod file_dialogs;
 mod fonts;
 mod jobs;
@@ -24,6 +25,7 @@ mod workspace;
 
 pub use application::Longember;
 pub use command::{Command, Edit, TimeCommand, key_bindings};
+pub use exports::Export;
 pub use fonts::{SPECIAL_CHARACTERS, definitions as font_definitions};
 pub use pages::Page;
 pub use start::{NoWindow, Opening, run};

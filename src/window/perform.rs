@@ -3,6 +3,7 @@
 use super::application::Longember;
 use super::command::{Command, STEP, TimeCommand};
 use super::dialogs::{Dialog, Reply};
+use super::exports::{self, Exported};
 use super::file_dialogs::{Asked, Purpose};
 use super::pages::Page;
 use super::theme;
@@ -58,6 +59,11 @@ impl Longember {
                 workspace.say(format!("Copied: {}", text.lines().next().unwrap_or_default()));
                 context.copy_text(text);
             }
+            Command::AskExport(export) => self.ask(context, Purpose::Export(export), None),
+            Command::Export(export, path) => {
+                workspace.exports.start(export.work(workspace, &path), context);
+            }
+            Command::CopySheet => workspace.exports.start(exports::sheet_for_clipboard(workspace), context),
             Command::SetTheme(theme) => {
                 workspace.settings.theme = theme;
                 theme::apply(context, theme);
@@ -207,6 +213,11 @@ impl Longember {
     fn ask(&mut self, context: &Context, purpose: Purpose, then: Option<Command>) {
         let typed = match (purpose, self.workspace.session.path()) {
             (Purpose::Save, Some(path)) => path.to_string_lossy().into_owned(),
+            (Purpose::Export(export), _) => {
+                let name = export.file_name(&self.workspace);
+                let folder = self.workspace.settings.folder.as_ref();
+                folder.map_or_else(|| name.clone(), |folder| folder.join(&name).to_string_lossy().into_owned())
+            }
             // A folder with a separator at its end: the name is yet to be typed.
             _ => self
                 .workspace
@@ -269,6 +280,20 @@ impl Longember {
             self.workspace.say(format!("Saved {}", path.display()));
             self.workspace.settings.remember_file(&path);
             self.keep_settings();
+        }
+    }
+
+    /// Takes over what was handed over in the background.
+    pub(super) fn receive_exports(&mut self, context: &Context) {
+        for exported in self.workspace.exports.poll() {
+            match exported {
+                Exported::Written(path) => self.workspace.say(format!("Exported {}", path.display())),
+                Exported::Text(text) => {
+                    self.workspace.say("Copied the fact sheet");
+                    context.copy_text(text);
+                }
+                Exported::Refused(sentence) => self.workspace.say_error(sentence),
+            }
         }
     }
 

@@ -2,7 +2,7 @@
 
 use super::derived::Derived;
 use super::dialogs::Dialog;
-use super::jobs::HistoryJob;
+use super::jobs::{ExportJobs, HistoryJob};
 use super::pages::Page;
 use super::playback::Playback;
 use super::theme::{self, Palette};
@@ -28,6 +28,8 @@ pub struct Workspace {
     pub history: Arc<History>,
     /// What is being computed.
     pub(super) job: HistoryJob,
+    /// What is being handed over.
+    pub(super) exports: ExportJobs,
     /// Why the scenario as it stands has no history, in one sentence.
     pub trouble: Option<String>,
     /// The instant that everything shows, yr.
@@ -91,6 +93,7 @@ impl Workspace {
             settings,
             history,
             job: HistoryJob::default(),
+            exports: ExportJobs::default(),
             trouble: None,
             moment_yr,
             scale,
@@ -135,6 +138,12 @@ impl Workspace {
     #[must_use]
     pub fn is_stale(&self) -> bool {
         *self.history.system() != self.scenario().system
+    }
+
+    /// Whether something is still being handed over.
+    #[must_use]
+    pub fn is_exporting(&self) -> bool {
+        self.exports.is_running()
     }
 
     /// Everything at the moment.

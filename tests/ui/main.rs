@@ -6,6 +6,7 @@ mod curves;
 mod dialogs;
 mod driver;
 mod editing;
+mod exports;
 mod files;
 mod glyphs;
 mod layout;

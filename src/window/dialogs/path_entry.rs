@@ -11,8 +11,9 @@ use std::path::PathBuf;
 pub(super) fn show(ui: &mut Ui, workspace: &Workspace, asked: &mut Asked) -> Answer {
     let palette = workspace.palette();
     let (heading, verb) = match asked.purpose {
-        Purpose::Open => ("Open a scenario", "Open"),
-        Purpose::Save => ("Save the scenario as", "Save"),
+        Purpose::Open => ("Open a scenario".to_owned(), "Open"),
+        Purpose::Save => ("Save the scenario as".to_owned(), "Save"),
+        Purpose::Export(export) => (format!("Export the {} as", export.name()), "Export"),
     };
     ui.label(RichText::new(heading).heading());
     match asked.poll() {
@@ -23,7 +24,13 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace, asked: &mut Asked) -> Ans
             );
         }
         Chosen::None => {
-            ui.label(RichText::new("Type a path; a scenario file ends in .ron.").color(palette.dim));
+            let words = match asked.purpose {
+                Purpose::Open | Purpose::Save => "Type a path; a scenario file ends in .ron.".to_owned(),
+                Purpose::Export(export) => {
+                    format!("Type a path; its end says the form: .{}.", export.extensions().join(", ."))
+                }
+            };
+            ui.label(RichText::new(words).color(palette.dim));
         }
     }
     let field = TextEdit::singleline(&mut asked.typed).desired_width(f32::INFINITY).hint_text("/home/me/ember.ron");
@@ -34,7 +41,7 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace, asked: &mut Asked) -> Ans
     }
     let enters = response.lost_focus() && ui.input(|input| input.key_pressed(Key::Enter));
     let path = PathBuf::from(asked.typed.trim());
-    if asked.purpose == Purpose::Save && path.is_file() {
+    if asked.purpose != Purpose::Open && path.is_file() {
         ui.label(RichText::new("This file exists and will be replaced.").font(small()).color(palette.error));
     }
     let choice = buttons(ui, &[verb, "Cancel"]);
