@@ -114,12 +114,16 @@ pub(super) struct TableArguments {
     /// Last moment; the end of what the window shows if left out
     #[arg(long, value_name = "TIME", allow_hyphen_values = true)]
     pub(super) to: Option<String>,
-    /// Number of rows, 2 to 100000
-    #[arg(long, value_name = "N", default_value_t = 400)]
-    pub(super) points: usize,
-    /// How the rows are spread over time; paced gives every visible change a similar share
-    #[arg(long, value_enum, default_value_t = SpacingArgument(TimeScale::Paced))]
-    pub(super) spacing: SpacingArgument,
+    /// Number of rows, 2 to 100000; 400 if left out
+    #[arg(long, value_name = "N")]
+    pub(super) points: Option<usize>,
+    /// How the rows are spread over time; paced gives every visible change a similar share, nodes are the moments the
+    /// life was computed at
+    #[arg(long, value_enum, default_value_t = RowsArgument(Some(TimeScale::Paced)))]
+    pub(super) spacing: RowsArgument,
+    /// Only these columns, in this order, parted by commas; all if left out
+    #[arg(long, value_name = "A,B,C", value_delimiter = ',')]
+    pub(super) columns: Vec<String>,
     /// Form of the result; if left out, the extension of --out decides, else csv
     #[arg(long, value_enum)]
     pub(super) format: Option<TableFormat>,
@@ -326,6 +330,20 @@ impl ValueEnum for SpacingArgument {
 
     fn to_possible_value(&self) -> Option<PossibleValue> {
         Some(PossibleValue::new(self.0.key()))
+    }
+}
+
+/// How the rows of a table are spread over time; nothing for the moments that the life was computed at.
+#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+pub(super) struct RowsArgument(pub(super) Option<TimeScale>);
+
+impl ValueEnum for RowsArgument {
+    fn value_variants<'a>() -> &'a [Self] {
+        &[Self(Some(TimeScale::Linear)), Self(Some(TimeScale::Log)), Self(Some(TimeScale::Paced)), Self(None)]
+    }
+
+    fn to_possible_value(&self) -> Option<PossibleValue> {
+        Some(PossibleValue::new(self.0.map_or("nodes", TimeScale::key)))
     }
 }
 

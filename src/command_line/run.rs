@@ -10,7 +10,7 @@ use super::scenario_source::{ScenarioSource, find_demo};
 use super::streams::Streams;
 use super::trouble::Trouble;
 use crate::document::{LifeStore, Scenario, built_in};
-use crate::handover;
+use crate::handover::{self, TableRequest};
 use crate::system::{Body, EventFilter, EventGroup, History, MomentProblem, MomentRequest, StarSpecification, System};
 use crate::units::number_text::machine;
 use clap::Parser;
@@ -18,6 +18,9 @@ use std::ffi::OsString;
 use std::io::{self, IsTerminal};
 use std::ops::ControlFlow;
 use std::time::{Duration, Instant};
+
+/// Rows of a table where nothing is said.
+const TABLE_POINTS: usize = 400;
 
 /// Computations shorter than this show no progress.
 const WORTH_SHOWING: Duration = Duration::from_millis(300);
@@ -141,6 +144,9 @@ fn show_moment(
 
 fn table(arguments: &TableArguments, streams: &mut Streams<'_>) -> Result<(), Trouble> {
     arguments.destination.check()?;
+    if arguments.spacing.0.is_none() && arguments.points.is_some() {
+        return Err(Trouble::OptionNeeds { option: "--points", needs: "a spacing other than nodes" });
+    }
     let end = |end, problem| Trouble::TableEnd { end, problem };
     let requested = |name, text: &Option<String>| {
         text.as_deref().map(MomentRequest::parse).transpose().map_err(|problem| end(name, problem))
@@ -155,16 +161,24 @@ fn table(arguments: &TableArguments, streams: &mut Streams<'_>) -> Result<(), Tr
         request.map(time_yr).transpose().map_err(|problem| end(name, problem))
     };
     let (from_yr, to_yr) = (resolved("from", from)?, resolved("to", to)?);
-    let ages_yr = handover::table_ages(&history, from_yr, to_yr, arguments.points, arguments.spacing.0)?;
+    let ages_yr = match arguments.spacing.0 {
+        Some(scale) => handover::table_ages(&history, from_yr, to_yr, arguments.points.unwrap_or(TABLE_POINTS), scale)?,
+        None => handover::node_ages(&history, from_yr, to_yr)?,
+    };
+    let chosen = match arguments.columns.as_slice() {
+        [] => None,
+        names => Some(handover::chosen_columns(history.system(), names)?),
+    };
     let by_extension = || match arguments.destination.extension().as_deref() {
         Some("json") => TableFormat::Json,
         Some("ecsv") => TableFormat::Ecsv,
         _ => TableFormat::Csv,
     };
+    let request = TableRequest { chosen, ..TableRequest::whole(&history, &title, &ages_yr) };
     let text = match arguments.format.unwrap_or_else(by_extension) {
-        TableFormat::Csv => handover::table_csv(&history, &ages_yr),
-        TableFormat::Ecsv => handover::table_ecsv(&history, &title, &ages_yr),
-        TableFormat::Json => handover::table_json(&history, &title, &ages_yr),
+        TableFormat::Csv => handover::table_csv(&request),
+        TableFormat::Ecsv => handover::table_ecsv(&request),
+        TableFormat::Json => handover::table_json(&request),
     };
     arguments.destination.deliver(&text, streams)
 }

@@ -3,7 +3,7 @@
 use super::outcome::{BAD_VALUE, SYSTEM_TROUBLE, WRONG_USAGE};
 use crate::document::{LoadError, Problem, WriteError, built_in};
 use crate::drawing::PictureProblem;
-use crate::handover::TableAgesProblem;
+use crate::handover::{ColumnsProblem, TableAgesProblem};
 use crate::system::{HistoryError, MomentProblem};
 use std::io;
 use std::path::PathBuf;
@@ -64,6 +64,9 @@ pub(super) enum Trouble {
     /// No such table.
     #[error(transparent)]
     TableAges(#[from] TableAgesProblem),
+    /// No such columns.
+    #[error(transparent)]
+    Columns(#[from] ColumnsProblem),
     /// No such picture.
     #[error(transparent)]
     Picture(#[from] PictureProblem),
@@ -131,6 +134,7 @@ impl Trouble {
             | Self::TableEnd { .. }
             | Self::TableAges(_)
             | Self::Picture(_)
+            | Self::Columns(_)
             | Self::Write(WriteError::Unsound { .. }) => BAD_VALUE,
             Self::Load(LoadError::Unreadable { .. })
             | Self::StandardInput(_)

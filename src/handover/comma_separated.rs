@@ -8,7 +8,7 @@ use std::fmt::Write;
 ///
 /// # Source
 /// RFC 4180, section 2, rules 5 to 7: a field with a comma, a quotation mark or a line break stands in quotation marks,
-/// and a quotation mark inside is doubled. Leading and trailing spaces are quoted too, for readers that trim.
+/// and a quotation mark inside is doubled. What a spreadsheet would run as a formula gets an apostrophe. Leading and trailing spaces are quoted too, for readers that trim.
 pub(super) fn push_record<T: AsRef<str>>(text: &mut String, fields: impl IntoIterator<Item = T>) {
     for (index, field) in fields.into_iter().enumerate() {
         if index > 0 {
@@ -19,14 +19,30 @@ pub(super) fn push_record<T: AsRef<str>>(text: &mut String, fields: impl IntoIte
     text.push('\n');
 }
 
+/// Signs that make a spreadsheet take a cell for a formula.
+const FORMULA_SIGNS: [char; 6] = ['=', '+', '-', '@', '\t', '\r'];
+
+/// Whether a spreadsheet would run a cell; numbers with a sign are none of these.
+fn is_formula(field: &str) -> bool {
+    field.trim_start_matches([' ', '\n']).starts_with(FORMULA_SIGNS) && field.parse::<f64>().is_err()
+}
+
 fn push_field(text: &mut String, field: &str) {
+    if is_formula(field) {
+        // The apostrophe says "text" to spreadsheets.
+        return push_quoted(text, &format!("'{field}"));
+    }
     let needs_quotes = field.contains([',', '"', '\n', '\r']) || field.trim() != field;
     if needs_quotes {
-        // Writing to a String cannot fail.
-        let _ = write!(text, "\"{}\"", field.replace('"', "\"\""));
+        push_quoted(text, field);
     } else {
         text.push_str(field);
     }
+}
+
+fn push_quoted(text: &mut String, field: &str) {
+    // Writing to a String cannot fail.
+    let _ = write!(text, "\"{}\"", field.replace('"', "\"\""));
 }
 
 #[cfg(test)]
@@ -41,8 +57,20 @@ mod tests {
     }
 
     #[test]
+    fn no_cell_is_a_formula_and_numbers_keep_their_sign() {
+        let mut text = String::new();
+        push_record(&mut text, ["=cmd|' /C calc'!A0", "+1+1", "-2+3", "@SUM(A1)", "\t=1", " =1", "-1.5e-3", "a=1"]);
+        let mut reader = csv::ReaderBuilder::new().has_headers(false).from_reader(text.as_bytes());
+        let record = reader.records().next().expect("one record").expect("well formed");
+        for field in record.iter().take(6) {
+            assert!(field.starts_with('\''), "{field}");
+        }
+        assert_eq!((&record[6], &record[7]), ("-1.5e-3", "a=1"));
+    }
+
+    #[test]
     fn a_csv_reader_gets_back_what_was_written() {
-        let fields = ["Ember, \"the hot one\"", "\r\n", "ü", ",", "\"", "", "x"];
+        let fields = ["Ember, \"the hot one\"", "a\r\nb", "ü", ",", "\"", "", "x"];
         let mut text = String::new();
         push_record(&mut text, fields);
         let mut reader = csv::ReaderBuilder::new().has_headers(false).from_reader(text.as_bytes());

@@ -24,11 +24,11 @@ mod table_columns;
 
 pub use dated_events::{doubt, events_csv, events_json, events_text};
 pub use fact_sheet::{FactSheet, fact_sheet, sheet_html, sheet_markdown, sheet_text};
-pub use history_table::{table_csv, table_ecsv, table_json};
+pub use history_table::{TableRequest, table_csv, table_ecsv, table_json};
 pub use instant_json::instant_json;
 pub use instant_text::instant_text;
 pub use named_list::named_list;
 pub use remarks::{Remark, remarks};
 pub use source_list::{sources_json, sources_text};
-pub use table_ages::{POINTS_RANGE, TableAgesProblem, table_ages};
-pub use table_columns::{Column, table_columns};
+pub use table_ages::{POINTS_RANGE, TableAgesProblem, node_ages, table_ages};
+pub use table_columns::{Column, ColumnsProblem, chosen_columns, table_columns};

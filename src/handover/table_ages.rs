@@ -43,6 +43,20 @@ fn plain(value_yr: f64) -> String {
     machine(value_yr).unwrap_or_else(|| "?".to_owned())
 }
 
+/// The ages at which a history was computed, between two ages, which are rows themselves: the table then holds the
+/// computed life and nothing in between.
+///
+/// # Errors
+/// [`TableAgesProblem`] when the span can't be had.
+pub fn node_ages(history: &History, from_yr: Option<f64>, to_yr: Option<f64>) -> Result<Vec<f64>, TableAgesProblem> {
+    let (from_yr, to_yr) = (from_yr.unwrap_or(0.0), to_yr.unwrap_or_else(|| history.shown_until_yr()));
+    if to_yr - from_yr < 1.0 {
+        return Err(TableAgesProblem::EmptySpan { from_yr, to_yr });
+    }
+    let inside = history.life().node_ages_yr().iter().copied().filter(|age_yr| *age_yr > from_yr && *age_yr < to_yr);
+    Ok(std::iter::once(from_yr).chain(inside).chain([to_yr]).collect())
+}
+
 /// The ages of a table's rows, rising, from the start to the end of the span, both included.
 ///
 /// Without a start the table begins at birth (with logarithmic spacing, five decades before its end); without an

@@ -6,7 +6,7 @@ use super::workspace::Workspace;
 use crate::document::write_atomically;
 use crate::drawing::{Look, Plot, Subject, figure_svg, pdf, png};
 use crate::handover::{
-    fact_sheet, sheet_html, sheet_markdown, sheet_text, table_ages, table_csv, table_ecsv, table_json,
+    TableRequest, fact_sheet, sheet_html, sheet_markdown, sheet_text, table_ages, table_csv, table_ecsv, table_json,
 };
 use crate::system::Body;
 use std::path::{Path, PathBuf};
@@ -175,10 +175,11 @@ fn table(workspace: &Workspace, extension: String) -> Make {
     let (title, scale) = (workspace.scenario().title.clone(), workspace.scale);
     Box::new(move || {
         let ages_yr = table_ages(&history, None, None, TABLE_POINTS, scale).map_err(|error| error.to_string())?;
+        let request = TableRequest::whole(&history, &title, &ages_yr);
         let text = match extension.as_str() {
-            "ecsv" => table_ecsv(&history, &title, &ages_yr),
-            "json" => table_json(&history, &title, &ages_yr),
-            _ => table_csv(&history, &ages_yr),
+            "ecsv" => table_ecsv(&request),
+            "json" => table_json(&request),
+            _ => table_csv(&request),
         };
         Ok(text.into_bytes())
     })

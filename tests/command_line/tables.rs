@@ -187,3 +187,60 @@ fn tables_that_cannot_be_are_refused_with_what_can() {
     ];
     assert!(refusal(dense, 3).contains("share a time"));
 }
+
+#[test]
+fn nodes_are_the_moments_that_the_life_was_computed_at() {
+    let words = ["table", DEMO, "--spacing", "nodes", "--from", "1 Gyr", "--to", "13 Gyr"];
+    let (_, rows) = records(&result(words));
+    let times: Vec<f64> = rows.iter().map(|row| row[0].parse().expect("a number")).collect();
+    assert!(times.len() > 50 && times.windows(2).all(|pair| pair[0] < pair[1]), "{}", times.len());
+    assert_eq!((times[0], times[times.len() - 1]), (1e9, 13e9));
+    // The end of the main sequence is a node of every life, to the last bit.
+    let events = json(["events", DEMO, "--format", "json"]);
+    let events = events["events"].as_array().expect("events");
+    let end = events.iter().find(|event| event["event"] == "main_sequence_end").expect("an end");
+    assert!(times.contains(&end["time_yr"].as_f64().expect("a number")));
+    assert!(refusal([&words[..], &["--points", "5"]].concat(), 2).contains("nodes"));
+}
+
+#[test]
+fn columns_are_chosen_in_the_order_asked_for() {
+    let words = ["table", DEMO, "--points", "3", "--columns", "talune_state,time_yr,notes"];
+    let (header, rows) = records(&result(words));
+    assert_eq!(header, ["talune_state", "time_yr", "notes"]);
+    assert!(rows.iter().all(|row| row.len() == 3 && !row[2].contains("cindrel")));
+    let whole = records(&result(["table", DEMO, "--points", "3"]));
+    let state = column(&whole.0, "talune_state");
+    assert!(rows.iter().zip(&whole.1).all(|(row, whole)| row[0] == whole[state] && row[1] == whole[0]));
+    let message = refusal(["table", DEMO, "--columns", "luminosity"], 3);
+    assert!(message.contains("luminosity_lsun"), "{message}");
+    assert!(refusal(["table", DEMO, "--columns", "time_yr,time_yr"], 3).contains("twice"));
+}
+
+#[test]
+fn headers_name_scenario_program_and_methods() {
+    let text = result(["table", DEMO, "--points", "2", "--format", "ecsv", "--columns", "time_yr,luminosity_lsun"]);
+    for words in ["Five worlds of a star like the Sun", "Longember ", "Hurley, Pols & Tout 2000", "Bédard"] {
+        assert!(text.lines().any(|line| line.starts_with("# ") && line.contains(words)), "{words}: {text}");
+    }
+    assert!(!text.contains("Bucholtz"), "no column of a sky, no method of skies");
+    let table = json(["table", DEMO, "--points", "2", "--format", "json"]);
+    assert!(table["program"].as_str().is_some_and(|program| program.starts_with("Longember ")));
+    assert!(table["methods"].as_array().is_some_and(|methods| methods.len() > 10));
+}
+
+#[test]
+fn no_name_becomes_a_formula_of_a_spreadsheet() {
+    for name in ["=cmd|' /C calc'!A0", "+1+1", "@SUM(A1)", "-2+3", "../../x", "a, b = c"] {
+        let scenario = edited_demo("\"Talune\"", &format!("{name:?}"));
+        for words in [&["table", "-", "--points", "2"][..], &["events", "-", "--format", "csv"]] {
+            let finished = run_with_input(words, scenario.as_bytes());
+            assert_eq!(finished.code, 0, "{}", finished.messages);
+            let (header, rows) = records(&finished.results);
+            for cell in header.iter().chain(rows.iter().flatten()) {
+                let is_number = cell.parse::<f64>().is_ok();
+                assert!(is_number || !cell.starts_with(['=', '+', '-', '@']), "{cell}");
+            }
+        }
+    }
+}
