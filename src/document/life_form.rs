@@ -1,10 +1,12 @@
 //! A computed life as bytes: to the last bit, with a sum that tells damage.
 
-use crate::physics::star::convective::{Caution, Ending, Life, Node, Stage};
+use crate::physics::star::convective::{Caution, Ending, Layer, Life, Node, Profile, Stage};
 
-const MAGIC: &[u8; 8] = b"LRDLIFE1";
+const MAGIC: &[u8; 8] = b"LRDLIFE2";
 const NUMBERS: usize = 14;
 const NODE: usize = 8 * NUMBERS + 1;
+const LAYER_NUMBERS: usize = 10;
+const LAYER: usize = 4 * LAYER_NUMBERS + 1;
 
 const STAGES: [Stage; 7] = [
     Stage::Contraction,
@@ -26,17 +28,29 @@ const CAUTIONS: [Caution; 7] = [
     Caution::EarlyCrystal,
 ];
 
-/// Form, sum over the rest, contraction time, ending, cautions, nodes.
+/// Form, sum over the rest, contraction time, ending, cautions, number of nodes, nodes, then for each profile its age, its
+/// number of layers and the layers, whose numbers have no more than seven digits.
 pub(super) fn encoded(life: &Life) -> Vec<u8> {
     let mut body = life.contraction_yr.to_le_bytes().to_vec();
     body.push(place(&ENDINGS, &life.ending));
     body.push(u8::try_from(life.cautions.len()).unwrap_or(u8::MAX));
     body.extend(life.cautions.iter().take(usize::from(u8::MAX)).map(|caution| place(&CAUTIONS, caution)));
+    body.extend(count(life.nodes.len()));
     for node in &life.nodes {
         for number in numbers(node) {
             body.extend(number.to_le_bytes());
         }
         body.push(place(&STAGES, &node.stage));
+    }
+    for profile in &life.profiles {
+        body.extend(profile.age_yr.to_le_bytes());
+        body.extend(count(profile.layers.len()));
+        for layer in &profile.layers {
+            for number in layer_numbers(layer) {
+                body.extend((number as f32).to_le_bytes());
+            }
+            body.push(u8::from(layer.is_convective));
+        }
     }
     let mut bytes = MAGIC.to_vec();
     bytes.extend(sum(&body).to_le_bytes());
@@ -59,12 +73,79 @@ pub(super) fn decoded(bytes: &[u8]) -> Option<Life> {
         let [caution] = take::<1>(&mut rest)?;
         cautions.push(*CAUTIONS.get(usize::from(caution))?);
     }
-    if rest.len() % NODE != 0 {
+    let nodes: Vec<Node> = items(&mut rest, NODE)?.map(node).collect::<Option<_>>()?;
+    let mut profiles: Vec<Profile> = Vec::new();
+    while !rest.is_empty() {
+        let age_yr = f64::from_le_bytes(take(&mut rest)?);
+        let layers = items(&mut rest, LAYER)?.map(layer).collect::<Option<_>>()?;
+        profiles.push(Profile { age_yr, layers });
+    }
+    let rises = nodes.windows(2).all(|pair| pair[0].age_yr < pair[1].age_yr)
+        && profiles.windows(2).all(|pair| pair[0].age_yr < pair[1].age_yr);
+    rises.then_some(Life { nodes, contraction_yr, ending, cautions, profiles })
+}
+
+fn count(items: usize) -> [u8; 4] {
+    u32::try_from(items).unwrap_or(u32::MAX).to_le_bytes()
+}
+
+/// Takes a count and that many items of a size in bytes.
+fn items<'a>(rest: &mut &'a [u8], size: usize) -> Option<std::slice::ChunksExact<'a, u8>> {
+    let count = u32::from_le_bytes(take(rest)?) as usize;
+    let (items, after) = rest.split_at_checked(count.checked_mul(size)?)?;
+    *rest = after;
+    Some(items.chunks_exact(size))
+}
+
+fn layer(mut bytes: &[u8]) -> Option<Layer> {
+    let mut numbers = [0.0; LAYER_NUMBERS];
+    for number in &mut numbers {
+        *number = f64::from(f32::from_le_bytes(take(&mut bytes)?));
+    }
+    if !numbers.iter().all(|number| number.is_finite()) {
         return None;
     }
-    let nodes: Vec<Node> = rest.chunks_exact(NODE).map(node).collect::<Option<_>>()?;
-    let rises = nodes.windows(2).all(|pair| pair[0].age_yr < pair[1].age_yr);
-    rises.then_some(Life { nodes, contraction_yr, ending, cautions })
+    let [convective] = take::<1>(&mut bytes)?;
+    let [
+        mass_above_fraction,
+        radius_fraction,
+        temperature_k,
+        density_g_cm3,
+        pressure_bar,
+        luminosity_fraction,
+        hydrogen_fraction,
+        helium3_fraction,
+        helium4_fraction,
+        degeneracy_ratio,
+    ] = numbers;
+    Some(Layer {
+        mass_above_fraction,
+        radius_fraction,
+        temperature_k,
+        density_g_cm3,
+        pressure_bar,
+        luminosity_fraction,
+        hydrogen_fraction,
+        helium3_fraction,
+        helium4_fraction,
+        degeneracy_ratio,
+        is_convective: convective == 1,
+    })
+}
+
+fn layer_numbers(layer: &Layer) -> [f64; LAYER_NUMBERS] {
+    [
+        layer.mass_above_fraction,
+        layer.radius_fraction,
+        layer.temperature_k,
+        layer.density_g_cm3,
+        layer.pressure_bar,
+        layer.luminosity_fraction,
+        layer.hydrogen_fraction,
+        layer.helium3_fraction,
+        layer.helium4_fraction,
+        layer.degeneracy_ratio,
+    ]
 }
 
 fn node(mut bytes: &[u8]) -> Option<Node> {
@@ -169,7 +250,22 @@ mod tests {
             helium_core_mass_msun: 0.0,
             stage,
         };
+        let layer = |mass_above_fraction: f64| Layer {
+            mass_above_fraction,
+            radius_fraction: f64::from((1.0 - mass_above_fraction).cbrt() as f32),
+            temperature_k: 4.5e6,
+            density_g_cm3: 400.0,
+            pressure_bar: f64::from(2.9e11_f32),
+            luminosity_fraction: 1.0 - mass_above_fraction,
+            hydrogen_fraction: 0.5,
+            helium3_fraction: 0.0625,
+            helium4_fraction: 0.25,
+            degeneracy_ratio: f64::from(3.3_f32),
+            is_convective: mass_above_fraction < 0.75,
+        };
+        let profile = |age_yr| Profile { age_yr, layers: [1.0, 0.5, 0.0].map(layer).to_vec() };
         Life {
+            profiles: vec![profile(-2.0), profile(1e12 / 3.0)],
             nodes: vec![
                 moment(-1e9, Stage::Contraction),
                 moment(0.0, Stage::MainSequence),

@@ -13,7 +13,7 @@ use std::path::PathBuf;
 use std::time::SystemTime;
 
 /// Most lives that are kept; the oldest make room.
-const MOST_LIVES: usize = 200;
+const MOST_LIVES: usize = 100;
 const EXTENSION: &str = "life";
 
 /// Where exact lives are kept. What cannot be read or written there is computed anew: nothing depends on it.

@@ -98,6 +98,8 @@ fn why_no_star_figure(key: &str, star: &StarMoment, light: Option<&Starlight>) -
         | "core_helium3_fraction"
         | "core_temperature_k"
         | "core_density_g_cm3"
+        | "core_degeneracy_ratio"
+        | "contraction_yr"
         | "mixed_mass_fraction" => "no value: the inside is computed of red dwarfs only".to_owned(),
         _ if key.starts_with("dwarf_") && !is_dwarf(star.phase) => {
             "no value: measured colours are known of main-sequence dwarfs only".to_owned()

@@ -7,7 +7,11 @@ use super::specification::Body;
 use super::star_colours;
 use crate::physics::planet::{Caution, PlanetEventKind};
 use crate::physics::star::StarEventKind;
+use crate::units::time_words::{SpanStyle, span};
 use std::borrow::Cow;
+
+/// Digits of the time that a young star contracted: more would mean nothing.
+const CONTRACTION_DIGITS: usize = 2;
 
 /// Something that happens at one time.
 #[derive(Clone, Copy, Debug, PartialEq)]
@@ -206,11 +210,18 @@ impl EventKind {
 }
 
 impl Event {
-    /// The event with its body: `Hearth: engulfed by the star`; a star's event stands alone.
+    /// The event with its body: `Hearth: engulfed by the star`; a star's event stands alone, and its start says how long a
+    /// red dwarf contracted before.
     #[must_use]
     pub fn label(&self, history: &History) -> String {
         match self.body {
-            Body::Star => self.kind.name().into_owned(),
+            Body::Star => match (self.kind, history.life().contraction_yr()) {
+                (EventKind::Star(StarEventKind::MainSequenceStart), Some(contraction_yr)) => {
+                    let contracted = span(contraction_yr, CONTRACTION_DIGITS, SpanStyle::Words);
+                    format!("{}, after {contracted} of contraction", self.kind.name())
+                }
+                _ => self.kind.name().into_owned(),
+            },
             Body::Planet(index) => match history.system().planets.get(index) {
                 Some(planet) => format!("{}: {}", planet.name, self.kind.name()),
                 None => self.kind.name().into_owned(),

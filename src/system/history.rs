@@ -206,7 +206,13 @@ impl History {
     }
 
     fn star_moment(&self, state: &StarState) -> StarMoment {
-        StarMoment::new(state, self.life.interior_at(state.age_yr))
+        let surface = self.system.star.red_dwarf_surface;
+        let interior = self.life.interior_at(state.age_yr);
+        StarMoment {
+            contraction_yr: self.life.contraction_yr(),
+            has_old_surface: interior.is_some() && surface == SurfaceOpacity::Of1997,
+            ..StarMoment::new(state, interior)
+        }
     }
 
     /// One planet at one moment.

@@ -42,6 +42,10 @@ pub struct StarMoment {
     pub core_hydrogen_fraction: Option<f64>,
     /// The inside of a red dwarf, whose structure is computed.
     pub interior: Option<Interior>,
+    /// How long a red dwarf contracted before its hydrogen burnt steadily, yr.
+    pub contraction_yr: Option<f64>,
+    /// Whether a red dwarf's surface was asked to be as opaque as in calculations of 1997.
+    pub has_old_surface: bool,
     /// Wavelength of the strongest spectral radiance, nm.
     pub peak_wavelength_nm: Option<f64>,
     /// True colour of the light.
@@ -69,6 +73,8 @@ impl StarMoment {
             mass_loss_msun_yr: state.mass_loss_msun_yr,
             core_hydrogen_fraction: state.core_hydrogen_fraction,
             interior,
+            contraction_yr: None,
+            has_old_surface: false,
             peak_wavelength_nm: temperature_k.map(|temperature_k| WIEN_M_K / temperature_k * 1e9),
             swatch,
             colour: temperature_k.map_or("no light modelled", colour_words),

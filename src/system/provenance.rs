@@ -36,6 +36,22 @@ pub const METHODS: &[Method] = &[
         accuracy: "today's stars: luminosity 6 %, radius and temperature 2 %; lifetimes 10 %, but the published schools differ: calculations of 1997 with more opaque surfaces give lives about 1.6 times as long; peak temperature of blue dwarfs 15 %, peak luminosity a factor of 2, cooling ages 25 %",
     },
     Method {
+        key: "degeneracy",
+        name: "Degeneracy of the centre",
+        relation: "Fermi energy of the electrons over kT: mc² (√(1 + x²) − 1) / kT with x = ħ (3π² n)^⅓ / mc. Below 1 the electrons are an ordinary gas; far above 1 they hold the star up even when it is cold. At the centre every nucleus has lost its electrons; in the layers of the Interior page the free ones count.",
+        source: "Chandrasekhar 1939, An Introduction to the Study of Stellar Structure, chapter X; checked against Chabrier & Baraffe 2000, ARA&A 38, 337",
+        valid_for: "computed red dwarfs and their white dwarfs",
+        accuracy: "exact for given density, temperature and composition, which follow from the structure",
+    },
+    Method {
+        key: "contraction",
+        name: "Contraction before arrival",
+        relation: "Time from the young star, some nine times its later size and mixed throughout, until 99 % of its light comes from burning hydrogen. Ages count from there.",
+        source: "As the life of red dwarfs; start without deuterium: own choice",
+        valid_for: "computed red dwarfs; the first few million years mean little",
+        accuracy: "luminosity 8 % and radius 4 % of Baraffe et al. 2015, A&A 577, A42, at 100 Myr for 0.1 and 0.2 M☉",
+    },
+    Method {
         key: "effective_temperature",
         name: "Effective temperature",
         relation: "T = 5772 K (L/R²)^¼ with L and R in solar units.",

@@ -49,22 +49,31 @@ const FIT_SPREAD: f64 = 0.05;
 /// Agreement of computed red dwarfs with Baraffe et al. 2015 (A&A 577, A42) at 5 Gyr: luminosity, radius, temperature.
 const RED_DWARF_SPREADS: [f64; 3] = [0.06, 0.02, 0.02];
 
-fn spread(star: &StarMoment, of_fits: f64, of_red_dwarfs: f64) -> Option<f64> {
-    let spread = if star.interior.is_some() { of_red_dwarfs } else { of_fits };
+/// The same where surfaces are as opaque as in 1997: how far Laughlin, Bodenheimer & Adams 1997 (Astrophys. J. 482, 420)
+/// are from Baraffe et al. 2015 for 0.10 solar masses: log L −3.38 and −3.06, temperature 2228 K and 2811 K.
+const OLD_SURFACE_SPREADS: [f64; 3] = [0.52, 0.11, 0.21];
+
+/// Spread of luminosity (0), radius (1) or temperature (2).
+fn spread(star: &StarMoment, of_fits: f64, figure: usize) -> Option<f64> {
+    let spread = match star.interior {
+        None => of_fits,
+        Some(_) if star.has_old_surface => OLD_SURFACE_SPREADS[figure],
+        Some(_) => RED_DWARF_SPREADS[figure],
+    };
     (!star.phase.is_remnant()).then_some(spread)
 }
 
 fn luminosity_spread(star: &StarMoment) -> Option<f64> {
-    spread(star, FIT_SPREAD, RED_DWARF_SPREADS[0])
+    spread(star, FIT_SPREAD, 0)
 }
 
 fn radius_spread(star: &StarMoment) -> Option<f64> {
-    spread(star, FIT_SPREAD, RED_DWARF_SPREADS[1])
+    spread(star, FIT_SPREAD, 1)
 }
 
 /// T goes as L^¼ R^−½, so two independent spreads of 5 % make 2.8 %.
 fn temperature_spread(star: &StarMoment) -> Option<f64> {
-    spread(star, FIT_SPREAD * (1.0_f64 / 16.0 + 1.0 / 4.0).sqrt(), RED_DWARF_SPREADS[2])
+    spread(star, FIT_SPREAD * (1.0_f64 / 16.0 + 1.0 / 4.0).sqrt(), 2)
 }
 
 fn no_spread(_: &StarMoment) -> Option<f64> {
@@ -164,12 +173,30 @@ pub const STAR: &[StarQuantity] = &[
         spread: no_spread,
     },
     StarQuantity {
+        key: "core_degeneracy_ratio",
+        name: "Degeneracy",
+        symbol: "",
+        digits: 3,
+        method: "degeneracy",
+        value: |star| star.interior.map(|interior| interior.core_degeneracy_ratio),
+        spread: no_spread,
+    },
+    StarQuantity {
         key: "mixed_mass_fraction",
         name: "Mixed share",
         symbol: "",
         digits: 2,
         method: "red_dwarf",
         value: |star| star.interior.map(|interior| interior.mixed_mass_fraction),
+        spread: no_spread,
+    },
+    StarQuantity {
+        key: "contraction_yr",
+        name: "Contracted for",
+        symbol: "yr",
+        digits: 2,
+        method: "contraction",
+        value: |star| star.contraction_yr,
         spread: no_spread,
     },
     StarQuantity {

@@ -164,6 +164,8 @@ mod tests {
             mass_loss_msun_yr: 0.0,
             core_hydrogen_fraction: None,
             interior: None,
+            contraction_yr: None,
+            has_old_surface: false,
             peak_wavelength_nm: None,
             swatch: Some(blackbody_swatch(temperature_k)),
             colour: colour_words(temperature_k),

@@ -6,6 +6,7 @@ use super::exports::Export;
 use super::pages::Page;
 use crate::document::{Scenario, Theme};
 use crate::figure::curves::Curve;
+use crate::figure::interior::LayerScale;
 use crate::figure::{SkyView, SpectrumView};
 use crate::system::{Body, TimeScale};
 use crate::units::time_words::SpanStyle;
@@ -62,6 +63,8 @@ pub enum Command {
     SetSpectrumView(SpectrumView),
     /// Look at the sky in another way.
     SetSkyView(SkyView),
+    /// Lay the star's layers out against mass or radius.
+    SetLayerScale(LayerScale),
     /// Choose a look.
     SetTheme(Theme),
     /// Write spans of time with symbols or in words.

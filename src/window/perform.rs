@@ -106,6 +106,7 @@ impl Longember {
             Command::ShowPage(page) => workspace.page = page,
             Command::SetSpectrumView(view) => workspace.spectrum_view = view,
             Command::SetSkyView(view) => workspace.sky_view = view,
+            Command::SetLayerScale(scale) => workspace.layer_scale = scale,
             Command::ToggleCurve(curve) => {
                 if workspace.curves.contains(&curve) {
                     workspace.curves.retain(|shown| *shown != curve);

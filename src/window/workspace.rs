@@ -9,6 +9,7 @@ use super::theme::{self, Palette};
 use super::view::{View, WHOLE};
 use crate::document::{Scenario, Session, Settings, Theme};
 use crate::figure::curves::Curve;
+use crate::figure::interior::LayerScale;
 use crate::figure::orbit_plan::PlanScale;
 use crate::figure::{SkyView, SpectrumView};
 use crate::physics::light::steady_colour_words;
@@ -48,6 +49,8 @@ pub struct Workspace {
     pub spectrum_view: SpectrumView,
     /// How the sky is looked at.
     pub sky_view: SkyView,
+    /// What the star's layers are laid out against.
+    pub layer_scale: LayerScale,
     /// The star's colour in words as it was last shown: it follows with a little delay, so as not to flicker.
     pub(super) colour_words: &'static str,
     /// How distances are laid out on the plan of the orbits.
@@ -103,6 +106,7 @@ impl Workspace {
             curves,
             spectrum_view: SpectrumView::default(),
             sky_view: SkyView::default(),
+            layer_scale: LayerScale::default(),
             colour_words: "",
             plan_scale: PlanScale::default(),
             plan_rim_au: None,

@@ -19,11 +19,12 @@ macro_rules! lives {
 }
 
 lives! {
-    M008: 0.08, 0.0, Coarse, Modern;
+    M008: 0.08, 0.0, Standard, Modern;
     M010: 0.10, 0.0, Standard, Modern;
     M015: 0.15, 0.0, Coarse, Modern;
     M020: 0.20, 0.0, Coarse, Modern;
-    M030: 0.30, 0.0, Coarse, Modern;
+    M030: 0.30, 0.0, Standard, Modern;
+    M040: 0.40, 0.0, Coarse, Modern;
     // log₁₀(0.02/0.0153): the metals of the 1997 calculations.
     M010_OF_1997: 0.10, 0.1163, Coarse, Of1997;
 }

@@ -2,17 +2,18 @@
 //!
 //! Source of every row: Baraffe, Homeier, Allard & Chabrier 2015, A&A 577, A42, tracks and structure tables.
 
-use crate::red_dwarf_lives::{M008, M010, M015, M020, M030, since_birth};
+use crate::red_dwarf_lives::{M008, M010, M015, M020, M030, M040, since_birth};
 use longember::physics::star::convective::Life;
 
 /// Mass; log₁₀ L, R, `T_eff`, log₁₀ `T_c`, log₁₀ `ρ_c` at 5 Gyr.
-fn rows() -> [(&'static Life, [f64; 5]); 5] {
+fn rows() -> [(&'static Life, [f64; 5]); 6] {
     [
         (&M008, [-3.5770, 0.0990, 2343.0, 6.557, 2.8047]),
         (&M010, [-3.0610, 0.1240, 2811.0, 6.661, 2.6031]),
         (&M015, [-2.5800, 0.1748, 3131.0, 6.761, 2.3428]),
         (&M020, [-2.3161, 0.2180, 3262.0, 6.813, 2.1841]),
         (&M030, [-1.9612, 0.2990, 3416.0, 6.8692, 1.9556]),
+        (&M040, [-1.7060, 0.3770, 3521.0, 6.8990, 1.8511]),
     ]
 }
 
@@ -23,9 +24,9 @@ fn luminosity_radius_and_temperature_at_five_billion_years() {
         let mass = star.mass_msun;
         let luminosity = star.luminosity_lsun / 10_f64.powf(log_luminosity);
         assert!((luminosity - 1.0).abs() < 0.07, "L of {mass}: {luminosity}");
-        assert!((star.radius_rsun / radius - 1.0).abs() < 0.02, "R of {mass}: {}", star.radius_rsun);
+        assert!((star.radius_rsun / radius - 1.0).abs() < 0.025, "R of {mass}: {}", star.radius_rsun);
         let t = star.effective_temperature_k;
-        assert!((t / temperature - 1.0).abs() < 0.02, "T of {mass}: {t}");
+        assert!((t / temperature - 1.0).abs() < 0.025, "T of {mass}: {t}");
     }
 }
 
@@ -34,9 +35,10 @@ fn centre_at_five_billion_years() {
     for (life, [.., log_temperature, log_density]) in rows() {
         let star = since_birth(life, 5e9);
         let mass = star.mass_msun;
-        let (t, rho) = (star.core_temperature_k.log10(), star.core_density_g_cm3.log10());
-        assert!((t - log_temperature).abs() < 0.02, "T_c of {mass}: {t}");
-        assert!((rho - log_density).abs() < 0.05, "rho_c of {mass}: {rho}");
+        let hotter = star.core_temperature_k / 10_f64.powf(log_temperature);
+        assert!((hotter - 1.0).abs() < 0.03, "T_c of {mass}: {hotter}");
+        let denser = star.core_density_g_cm3 / 10_f64.powf(log_density);
+        assert!((denser - 1.0).abs() < 0.08, "rho_c of {mass}: {denser}");
     }
 }
 

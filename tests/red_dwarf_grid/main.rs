@@ -4,12 +4,13 @@
 //! cargo run --release --example red_dwarf_grid -- assets/tables/red_dwarf_grid.bin
 //! ```
 //!
-//! Some 180 lives, about twenty minutes of one core. Nothing in it is random; on another machine the last digits may
-//! differ, far within the tolerances that the quick look states and a test holds. Run it after every change of the
-//! structure calculation, together with a new `STRUCTURE_VERSION`.
+//! Some 300 lives, about fifteen minutes of one core; a number after the name of the file says how many threads may
+//! work at once. Nothing in it is random; on another machine the last digits may differ, far within the tolerances that
+//! the quick look states and a test holds. Run it after every change of the structure calculation, together with a new
+//! `STRUCTURE_VERSION`. It fails if any life but a brown dwarf's could not be followed to its end.
 
 use longember::physics::star::convective::{
-    ConvectiveError, ConvectiveInput, Options, Resolution, SurfaceOpacity, compute_with,
+    ConvectiveError, ConvectiveInput, Ending, Options, Resolution, SurfaceOpacity, compute_with,
 };
 use longember::physics::star::quick_look::{GRID_MASSES_MSUN, GRID_METALLICITIES_DEX, GridLife, table_bytes};
 use std::io::Write;
@@ -19,14 +20,19 @@ use std::sync::atomic::{AtomicUsize, Ordering};
 use std::thread;
 
 fn main() -> ExitCode {
-    let Some(path) = std::env::args_os().nth(1) else {
+    let mut arguments = std::env::args_os().skip(1);
+    let Some(path) = arguments.next() else {
         say("name the file to write, such as assets/tables/red_dwarf_grid.bin");
         return ExitCode::from(2);
     };
-    let bytes = table_bytes(&lives());
-    say(&format!("{} bytes", bytes.len()));
+    let asked = arguments.next().and_then(|count| count.to_str()?.parse().ok());
+    let threads = asked.unwrap_or_else(|| thread::available_parallelism().map_or(1, usize::from));
+    let (lives, missing) = lives(threads);
+    let bytes = table_bytes(&lives);
+    say(&format!("{} lives, {} bytes, {missing} missing", lives.len(), bytes.len()));
     match std::fs::write(&path, bytes) {
-        Ok(()) => ExitCode::SUCCESS,
+        Ok(()) if missing == 0 => ExitCode::SUCCESS,
+        Ok(()) => ExitCode::FAILURE,
         Err(error) => {
             say(&error.to_string());
             ExitCode::from(4)
@@ -34,52 +40,68 @@ fn main() -> ExitCode {
     }
 }
 
-fn lives() -> Vec<GridLife> {
+/// Every life of the grid in order, and how many could not be followed.
+fn lives(threads: usize) -> (Vec<GridLife>, usize) {
     let mut wanted = Vec::new();
     for surface in [SurfaceOpacity::Modern, SurfaceOpacity::Of1997] {
         for metallicity_dex in GRID_METALLICITIES_DEX {
-            if surface == SurfaceOpacity::Modern || metallicity_dex == 0.0 {
-                wanted.extend(
-                    GRID_MASSES_MSUN.map(|mass_msun| (ConvectiveInput { mass_msun, metallicity_dex }, surface)),
-                );
-            }
+            wanted.extend(GRID_MASSES_MSUN.map(|mass_msun| (ConvectiveInput { mass_msun, metallicity_dex }, surface)));
         }
     }
     // Each thread takes the next star that nobody has begun; the order of the file is that of the list.
     let next = AtomicUsize::new(0);
     let work = || {
-        let mut done = Vec::new();
+        let (mut done, mut missing) = (Vec::new(), 0);
         loop {
             let place = next.fetch_add(1, Ordering::Relaxed);
-            let Some((input, surface)) = wanted.get(place) else { return done };
-            done.extend(life(*input, *surface).map(|life| (place, life)));
+            let Some((input, surface)) = wanted.get(place) else { return (done, missing) };
+            match life(*input, *surface) {
+                Computed::Whole(life) => done.push((place, life)),
+                Computed::BrownDwarf => {}
+                Computed::Lost => missing += 1,
+            }
         }
     };
-    let mut lives: Vec<(usize, GridLife)> = thread::scope(|scope| {
-        let count = thread::available_parallelism().map_or(1, usize::from);
-        let threads: Vec<_> = (0..count).map(|_| scope.spawn(work)).collect();
-        threads.into_iter().filter_map(|thread| thread.join().ok()).flatten().collect()
+    let parts: Vec<_> = thread::scope(|scope| {
+        let workers: Vec<_> = (0..threads.max(1)).map(|_| scope.spawn(work)).collect();
+        workers.into_iter().filter_map(|worker| worker.join().ok()).collect()
     });
+    let missing = parts.iter().map(|(_, missing)| missing).sum();
+    let mut lives: Vec<(usize, Box<GridLife>)> = parts.into_iter().flat_map(|(done, _)| done).collect();
     lives.sort_by_key(|(place, _)| *place);
-    lives.into_iter().map(|(_, life)| life).collect()
+    (lives.into_iter().map(|(_, life)| *life).collect(), missing)
 }
 
-fn life(input: ConvectiveInput, surface: SurfaceOpacity) -> Option<GridLife> {
+/// What came of one star.
+enum Computed {
+    /// A life to the black dwarf.
+    Whole(Box<GridLife>),
+    /// No star.
+    BrownDwarf,
+    /// The structure could not be followed to the end.
+    Lost,
+}
+
+fn life(input: ConvectiveInput, surface: SurfaceOpacity) -> Computed {
     let options = Options { resolution: Resolution::Standard, surface };
     let computed = compute_with(input, options, &mut |_| ControlFlow::Continue(()));
     let label = format!("{} solar masses, {} dex, {surface:?}", input.mass_msun, input.metallicity_dex);
     match computed {
+        Ok(life) if life.ending == Ending::BlackDwarf => {
+            say(&format!("{label}: {} moments", life.nodes.len()));
+            Computed::Whole(Box::new(GridLife { input, surface, life }))
+        }
         Ok(life) => {
-            say(&format!("{label}: {:?}", life.ending));
-            Some(GridLife { input, surface, life })
+            say(&format!("{label}: LOST after {} moments", life.nodes.len()));
+            Computed::Lost
         }
         Err(error @ ConvectiveError::BrownDwarf { .. }) => {
             say(&format!("{label}: left out, {error}"));
-            None
+            Computed::BrownDwarf
         }
         Err(error) => {
-            say(&format!("{label}: LEFT OUT, {error}"));
-            None
+            say(&format!("{label}: LOST, {error}"));
+            Computed::Lost
         }
     }
 }

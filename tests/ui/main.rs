@@ -9,6 +9,7 @@ mod editing;
 mod exports;
 mod files;
 mod glyphs;
+mod interior;
 mod layout;
 mod light_pages;
 mod looks;

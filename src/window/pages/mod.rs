@@ -3,6 +3,8 @@
 mod chart_view;
 mod chronicle;
 mod curves;
+mod interior;
+mod interior_plot;
 mod introduction;
 mod light_columns;
 mod orbits;
@@ -27,6 +29,8 @@ pub enum Page {
     Curves,
     /// The star's spectrum, brightness and colour in numbers.
     Spectrum,
+    /// The star's layers.
+    Interior,
     /// What stands in a planet's sky.
     Sky,
     /// The system from above.
@@ -41,8 +45,16 @@ pub enum Page {
 
 impl Page {
     /// Every page, in order.
-    pub const ALL: [Self; 7] =
-        [Self::Curves, Self::Spectrum, Self::Orbits, Self::Sky, Self::Chronicle, Self::Introduction, Self::Sources];
+    pub const ALL: [Self; 8] = [
+        Self::Curves,
+        Self::Spectrum,
+        Self::Interior,
+        Self::Orbits,
+        Self::Sky,
+        Self::Chronicle,
+        Self::Introduction,
+        Self::Sources,
+    ];
 
     /// Name on its tab.
     #[must_use]
@@ -50,6 +62,7 @@ impl Page {
         match self {
             Self::Curves => "Curves",
             Self::Spectrum => "Spectrum",
+            Self::Interior => "Interior",
             Self::Sky => "Sky",
             Self::Orbits => "Orbits",
             Self::Chronicle => "Chronicle",
@@ -76,6 +89,7 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
     commands.extend(match workspace.page {
         Page::Curves => curves::show(ui, workspace),
         Page::Spectrum => spectrum::show(ui, workspace),
+        Page::Interior => interior::show(ui, workspace),
         Page::Sky => sky::show(ui, workspace),
         Page::Orbits => orbits::show(ui, workspace),
         Page::Chronicle => chronicle::show(ui, workspace),

@@ -38,6 +38,6 @@ mod structure;
 
 pub use evolution::Resolution;
 pub use life::{
-    Caution, ConvectiveError, ConvectiveInput, Ending, Life, Node, Options, Stage, SurfaceOpacity, compute,
-    compute_with,
+    Caution, ConvectiveError, ConvectiveInput, Ending, Layer, Life, Node, Options, Profile, Stage, SurfaceOpacity,
+    compute, compute_with, profile_at,
 };

@@ -106,6 +106,7 @@ fn between(computed: &Moment, track: &Track, fitted_yr: f64, share: f64, age_yr:
     let state = track.state_at(fitted_yr);
     let fitted = Moment {
         age_yr,
+        structure_yr: computed.structure_yr,
         log_luminosity: state.luminosity_lsun.ln(),
         log_radius: state.radius_rsun.ln(),
         mass_msun: state.mass_msun,

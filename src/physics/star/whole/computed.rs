@@ -136,6 +136,7 @@ fn cool_the_core(moments: &mut Vec<Moment>) {
         let left = (1.0 - x) * (1.0 - x) * (1.0 + 2.0 * x);
         moments.push(Moment {
             age_yr: last.age_yr + cooling_yr,
+            structure_yr: last.age_yr + cooling_yr,
             log_luminosity: log_luminosity + left * brighter,
             log_radius: log_radius + left * larger,
             mass_msun: last.core_mass_msun + left * (last.mass_msun - last.core_mass_msun),

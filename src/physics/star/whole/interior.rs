@@ -13,6 +13,9 @@ pub struct Interior {
     pub core_temperature_k: f64,
     /// Density of the centre, g cm⁻³.
     pub core_density_g_cm3: f64,
+    /// Fermi energy of the electrons at the centre over the thermal energy kT: far above 1 they are degenerate and hold
+    /// the star up even when it is cold, below 1 they are an ordinary gas.
+    pub core_degeneracy_ratio: f64,
     /// Share of the mass outside the core in which nothing mixes: 1 where convection reaches the centre.
     pub mixed_mass_fraction: f64,
 }
@@ -25,6 +28,7 @@ impl Interior {
             core_helium3_fraction: traceless(node.core_helium3_fraction),
             core_temperature_k: node.core_temperature_k,
             core_density_g_cm3: node.core_density_g_cm3,
+            core_degeneracy_ratio: node.core_degeneracy_ratio(),
             mixed_mass_fraction: 1.0 - node.still_core_mass_fraction,
         }
     }
@@ -38,6 +42,7 @@ impl Interior {
             core_helium3_fraction: even(self.core_helium3_fraction, later.core_helium3_fraction),
             core_temperature_k: log(self.core_temperature_k, later.core_temperature_k),
             core_density_g_cm3: log(self.core_density_g_cm3, later.core_density_g_cm3),
+            core_degeneracy_ratio: log(self.core_degeneracy_ratio, later.core_degeneracy_ratio),
             mixed_mass_fraction: even(self.mixed_mass_fraction, later.mixed_mass_fraction),
         }
     }

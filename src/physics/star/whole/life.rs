@@ -4,11 +4,12 @@ use super::blend;
 use super::computed::Computed;
 use super::fitted::Fitted;
 use super::interior::Interior;
+use super::no_profile::NoProfile;
 use super::quick_look::quick_look;
 use super::told::Told;
 use crate::physics::star::caution::StarCaution;
 use crate::physics::star::convective::{
-    self, ConvectiveError, ConvectiveInput, Life, Options, Resolution, SurfaceOpacity,
+    self, ConvectiveError, ConvectiveInput, Ending, Life, Options, Profile, Resolution, SurfaceOpacity,
 };
 use crate::physics::star::error::StarError;
 use crate::physics::star::event::{StarEvent, StarEventKind};
@@ -57,6 +58,16 @@ pub struct LifeOptions {
 pub struct WholeLife {
     input: StarInput,
     course: Course,
+    /// Of a life whose structure was computed.
+    inside: Option<Inside>,
+}
+
+/// What a computed life knows beyond what is told of it.
+#[derive(Clone, Debug)]
+struct Inside {
+    profiles: Vec<Profile>,
+    ending: Ending,
+    contraction_yr: f64,
 }
 
 #[derive(Clone, Debug)]
@@ -139,7 +150,9 @@ impl WholeLife {
         } else {
             computed.told()
         };
-        Ok(Self { input, course: Course::Told(Box::new(told)) })
+        let inside =
+            Inside { profiles: life.profiles.clone(), ending: life.ending, contraction_yr: life.contraction_yr };
+        Ok(Self { input, course: Course::Told(Box::new(told)), inside: Some(inside) })
     }
 
     /// A first look at the life of a red dwarf within milliseconds, marked as such by its cautions.
@@ -166,7 +179,7 @@ impl WholeLife {
     }
 
     fn fitted(input: StarInput) -> Result<Self, StarError> {
-        Ok(Self { input, course: Course::Fitted(Box::new(Fitted::new(Track::compute(input)?))) })
+        Ok(Self { input, course: Course::Fitted(Box::new(Fitted::new(Track::compute(input)?))), inside: None })
     }
 
     /// The star the life belongs to.
@@ -193,6 +206,27 @@ impl WholeLife {
             Course::Fitted(_) => None,
             Course::Told(told) => Some(told.interior_at(held(age_yr))),
         }
+    }
+
+    /// The inside of the star at an age in yr, layer by layer.
+    ///
+    /// # Errors
+    /// [`NoProfile`] says why there is none.
+    pub fn profile_at(&self, age_yr: f64) -> Result<Profile, NoProfile> {
+        let (Course::Told(told), Some(inside)) = (&self.course, &self.inside) else { return Err(NoProfile::Fitted) };
+        if self.is_quick_look() {
+            return Err(NoProfile::QuickLook);
+        }
+        let of_core = if inside.ending == Ending::GiantBranch { NoProfile::CoreAlone } else { NoProfile::Crystal };
+        let structure_yr = told.structure_yr(held(age_yr));
+        let profile = convective::profile_at(&inside.profiles, structure_yr).ok_or(of_core)?;
+        Ok(Profile { age_yr, ..profile })
+    }
+
+    /// How long the young star contracted before its hydrogen burnt steadily, yr, where that was computed.
+    #[must_use]
+    pub fn contraction_yr(&self) -> Option<f64> {
+        self.inside.as_ref().map(|inside| inside.contraction_yr)
     }
 
     /// Ages between which the life is smooth, yr, strictly rising from 0 to [`END_YR`].

@@ -11,10 +11,12 @@ mod fitted;
 mod interior;
 mod life;
 mod moment;
+mod no_profile;
 pub mod quick_look;
 mod told;
 mod version;
 
 pub use interior::Interior;
 pub use life::{COMPUTED_BELOW_MSUN, FITTED_FROM_MSUN, LifeOptions, WholeLife};
+pub use no_profile::NoProfile;
 pub use version::STRUCTURE_VERSION;

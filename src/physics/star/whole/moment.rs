@@ -7,6 +7,8 @@ use crate::physics::star::convective::Node;
 #[derive(Clone, Copy, Debug)]
 pub(super) struct Moment {
     pub(super) age_yr: f64,
+    /// Age at which the computed structure looks like this; another one where lives are blended.
+    pub(super) structure_yr: f64,
     /// Natural logarithm of the luminosity, solar units.
     pub(super) log_luminosity: f64,
     /// Natural logarithm of the radius, solar units.
@@ -29,6 +31,7 @@ impl Moment {
     pub(super) fn of(node: &Node) -> Self {
         Self {
             age_yr: node.age_yr,
+            structure_yr: node.age_yr,
             log_luminosity: node.luminosity_lsun.ln(),
             log_radius: node.radius_rsun.ln(),
             mass_msun: node.mass_msun,
@@ -43,6 +46,7 @@ impl Moment {
         let even = |a: f64, b: f64| a + share * (b - a);
         Self {
             age_yr: even(self.age_yr, later.age_yr),
+            structure_yr: even(self.structure_yr, later.structure_yr),
             log_luminosity: even(self.log_luminosity, later.log_luminosity),
             log_radius: even(self.log_radius, later.log_radius),
             mass_msun: even(self.mass_msun, later.mass_msun),

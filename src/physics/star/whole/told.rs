@@ -25,6 +25,8 @@ pub(super) struct Told {
     curve: Curve<6>,
     interiors: Vec<Interior>,
     node_ages: Vec<f64>,
+    /// Ages at which the computed structure looks like the star at the nodes.
+    structure_ages: Vec<f64>,
 }
 
 /// What a list of moments does not say itself.
@@ -69,6 +71,7 @@ impl Told {
             curve,
             interiors: moments.iter().map(|moment| moment.interior).collect(),
             node_ages,
+            structure_ages: moments.iter().map(|moment| moment.structure_yr).collect(),
         }
     }
 
@@ -99,11 +102,23 @@ impl Told {
 
     /// The inside of the star at an age from 0 to [`END_YR`], yr.
     pub(super) fn interior_at(&self, age_yr: f64) -> Interior {
+        let (next, share) = self.place(age_yr);
+        self.interiors[next - 1].towards(&self.interiors[next], share)
+    }
+
+    /// The age at which the computed structure looks like the star at an age from 0 to [`END_YR`], yr.
+    pub(super) fn structure_yr(&self, age_yr: f64) -> f64 {
+        let (next, share) = self.place(age_yr);
+        let [before, after] = [self.structure_ages[next - 1], self.structure_ages[next]];
+        before + share * (after - before)
+    }
+
+    /// The node after an age, and how far the age lies between the node before and this one.
+    fn place(&self, age_yr: f64) -> (usize, f64) {
         let last = self.interiors.len() - 1;
         let next = self.node_ages.partition_point(|node| *node <= age_yr).clamp(1, last);
         let (from, to) = (self.node_ages[next - 1], self.node_ages[next]);
-        let share = ((age_yr - from) / (to - from)).clamp(0.0, 1.0);
-        self.interiors[next - 1].towards(&self.interiors[next], share)
+        (next, ((age_yr - from) / (to - from)).clamp(0.0, 1.0))
     }
 }
 
@@ -118,7 +133,12 @@ fn cool_to_the_sky(moments: &mut Vec<Moment>) {
     let [.., before, last] = moments[..] else { return };
     let excess = (temperature_k(&last) / BACKGROUND_TEMPERATURE_K).ln();
     let pace = (temperature_k(&before) / temperature_k(&last)).ln() / (last.age_yr - before.age_yr);
-    let colder = |age_yr: f64, fall: f64| Moment { age_yr, log_luminosity: last.log_luminosity - 4.0 * fall, ..last };
+    let colder = |age_yr: f64, fall: f64| Moment {
+        age_yr,
+        structure_yr: last.structure_yr + age_yr - last.age_yr,
+        log_luminosity: last.log_luminosity - 4.0 * fall,
+        ..last
+    };
     let mut fallen = 0.0;
     if pace > 0.0 && excess > 0.0 {
         const STEP: f64 = 0.06;

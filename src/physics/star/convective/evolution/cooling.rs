@@ -10,8 +10,9 @@
 //! # Accuracy
 //! Ages after the surface is colder than 1000 K: 30 %.
 
-use super::super::cgs::{ATOMIC_MASS, BOLTZMANN, CHARGE_SQUARED, ELECTRON_REST_ENERGY, PLANCK};
+use super::super::cgs::{ATOMIC_MASS, BOLTZMANN, CHARGE_SQUARED, PLANCK};
 use super::super::composition::HELIUM4_MASS;
+use super::super::gas::fermi_temperature_k;
 use std::f64::consts::PI;
 
 /// Debye temperature over the ions' plasma temperature.
@@ -39,10 +40,7 @@ impl Crystal {
         let ions = density_g_cm3 / ion;
         let plasma = (4.0 * PI * 4.0 * CHARGE_SQUARED * ions / ion).sqrt();
         let reduced_planck = PLANCK / (2.0 * PI);
-        let momentum = reduced_planck * (3.0 * PI * PI * 2.0 * ions).cbrt();
-        let relative = momentum * super::super::cgs::LIGHT_SPEED / ELECTRON_REST_ENERGY;
-        let fermi = ELECTRON_REST_ENERGY * relative * relative / ((1.0 + relative * relative).sqrt() + 1.0);
-        Self { debye_k: DEBYE * reduced_planck * plasma / BOLTZMANN, fermi_k: fermi / BOLTZMANN }
+        Self { debye_k: DEBYE * reduced_planck * plasma / BOLTZMANN, fermi_k: fermi_temperature_k(2.0 * ions) }
     }
 
     /// Heat capacity per ion over k.

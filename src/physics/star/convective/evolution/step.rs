@@ -28,7 +28,7 @@ const GIANT_RSUN: f64 = 1.5;
 const SPENT_CORE: f64 = 0.05;
 /// … may change so many times more at each point: its thin shell eats its way outwards through mesh points without
 /// changing otherwise.
-const GIANT_EASE: f64 = 4.0;
+const GIANT_EASE: f64 = 6.0;
 
 /// A step that was computed.
 pub(in super::super) struct Step {
@@ -100,7 +100,8 @@ impl Stepper {
         let mut largest = 0.0_f64;
         let mut note = |change: f64, aim: f64| largest = largest.max(change.abs() / aim);
         let giant = old.radius_cm() > GIANT_RSUN * SOLAR_RADIUS && old.helium_core_share(&self.mesh) > SPENT_CORE;
-        let scale = if giant { GIANT_EASE } else { 1.0 };
+        // Coarse steps as well: a giant's shell must not leap over its own width.
+        let scale = if giant { GIANT_EASE / self.stride.max(1.0) } else { 1.0 };
         for k in 0..self.mesh.len() {
             let above = self.mesh.above[k];
             if above > INTERIOR_ABOVE {

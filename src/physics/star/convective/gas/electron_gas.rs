@@ -9,7 +9,7 @@
 //! 0.25 % for β 10⁻⁶–0.1, f 10⁻⁴–10⁵, by our own quadrature of the Fermi integrals (see the test).
 
 use super::super::cgs::{BOLTZMANN, ELECTRON_REST_ENERGY, ELECTRON_STATES};
-use super::super::numbers::{Number, Partials};
+use super::super::numbers::{Dual, Number, Partials};
 
 type Coefficients = [[f64; 4]; 4];
 
@@ -50,6 +50,12 @@ fn polynomial<N: Number>(coefficients: &Coefficients, f: N, g: N) -> N {
         p.value = p.value * gv + value;
     }
     f.chain_two(g, &p)
+}
+
+/// Free electrons per cm³ whose degeneracy variable is given by its logarithm, at a temperature (K).
+pub(in super::super) fn electrons_per_cm3(ln_f: f64, temperature_k: f64) -> f64 {
+    let [ln_f, temperature_k] = [ln_f, temperature_k].map(Dual::<1>::constant);
+    ElectronGas::new(ln_f, temperature_k).density_per_cm3().value
 }
 
 /// The electron gas at one degeneracy and temperature.

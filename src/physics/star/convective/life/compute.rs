@@ -9,6 +9,7 @@ use super::error::ConvectiveError;
 use super::follow::{follow, stuck};
 use super::input::{ConvectiveInput, Options, SurfaceOpacity};
 use super::node::{Caution, Ending, Life, Node};
+use super::profiles::profile;
 use super::stage::assign;
 use super::track::count_from_arrival;
 use std::ops::ControlFlow;
@@ -67,6 +68,7 @@ pub fn compute_with(
 
     let mut cautions = cautions(input, options);
     let mut nodes = followed.nodes;
+    let end = profile(&followed.model, &followed.mesh, nodes[nodes.len() - 1].age_yr);
     if nodes[nodes.len() - 1].mass_msun < WINDY * mass_msun {
         cautions.push(Caution::GiantWind);
     }
@@ -82,7 +84,8 @@ pub fn compute_with(
     }
     let contraction_yr = count_from_arrival(&mut nodes).ok_or(ConvectiveError::BrownDwarf { mass_msun })?;
     assign(&mut nodes, followed.ending);
-    Ok(Life { nodes, contraction_yr, ending: followed.ending, cautions })
+    let profiles = followed.inside.finish(end, contraction_yr);
+    Ok(Life { nodes, contraction_yr, ending: followed.ending, cautions, profiles })
 }
 
 /// Adds the moments of the crystal. Nothing if the structure did not cool at its end.

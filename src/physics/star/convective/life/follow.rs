@@ -4,6 +4,7 @@ use super::super::evolution::{Step, Stepper, blow};
 use super::super::structure::{Mesh, Model, Unknowns};
 use super::error::ConvectiveError;
 use super::node::{Ending, Node};
+use super::profiles::Collector;
 use super::stage::BLACK_BELOW_K;
 use super::track::{node, shines_by_burning};
 use std::ops::ControlFlow;
@@ -43,6 +44,8 @@ const MOST_STEPS: usize = 6000;
 pub(super) struct Followed {
     /// Moments in order, their ages counted from birth.
     pub(super) nodes: Vec<Node>,
+    /// The inside at some of them.
+    pub(super) inside: Collector,
     /// The last structure.
     pub(super) model: Model,
     /// Its mesh.
@@ -55,10 +58,17 @@ pub(super) struct Followed {
     pub(super) levelled: bool,
 }
 
+/// What is kept on the way.
+struct Seen {
+    nodes: Vec<Node>,
+    inside: Collector,
+}
+
 impl Followed {
-    fn new(nodes: Vec<Node>, model: Model, ending: Ending, stopped_early: bool, stepper: Stepper) -> Self {
+    fn new(seen: Seen, model: Model, ending: Ending, stopped_early: bool, stepper: Stepper) -> Self {
         let levelled = stepper.laws.cn_ceiling_k.is_some();
-        Self { nodes, model, mesh: stepper.mesh, ending, stopped_early, levelled }
+        let Seen { nodes, inside } = seen;
+        Self { nodes, inside, model, mesh: stepper.mesh, ending, stopped_early, levelled }
     }
 }
 
@@ -71,12 +81,13 @@ pub(super) fn follow(
 ) -> Result<Followed, ConvectiveError> {
     let mut step_s = FIRST_STEP * model.thermal_time_s(&stepper.mesh);
     let mut age_s = 0.0;
-    let mut nodes = vec![node(&model, &stepper.mesh, age_s)];
-    let mut done = Progress::new(&nodes[0]);
+    let first = node(&model, &stepper.mesh, age_s);
+    let mut done = Progress::new(&first);
+    let mut seen = Seen { nodes: vec![first], inside: Collector::default() };
     let mut arrived = false;
     let mut trend: Option<Vec<Unknowns>> = None;
     for _ in 0..MOST_STEPS {
-        let last = nodes[nodes.len() - 1];
+        let last = seen.nodes[seen.nodes.len() - 1];
         let Some((step, taken_s)) = attempt(&stepper, &model, trend.as_deref(), step_s) else {
             let ending = match last {
                 _ if !arrived => break,
@@ -84,7 +95,7 @@ pub(super) fn follow(
                 Node { radius_rsun, .. } if radius_rsun > GIANT_RSUN => Ending::GiantBranch,
                 _ => break,
             };
-            return Ok(Followed::new(nodes, model, ending, true, stepper));
+            return Ok(Followed::new(seen, model, ending, true, stepper));
         };
         age_s += taken_s;
         let stretch = (0.9 / step.change.max(0.05)).clamp(LENGTHENED[0], LENGTHENED[1]);
@@ -99,8 +110,9 @@ pub(super) fn follow(
             trend = Some(new_trend);
         }
         let now = node(&model, &stepper.mesh, age_s);
-        nodes.push(now);
+        seen.nodes.push(now);
         arrived |= shines_by_burning(&now);
+        seen.inside.note(&now, &model, &stepper.mesh, arrived);
         if arrived && stepper.laws.cn_ceiling_k.is_none() && runs_away(&now) {
             stepper.laws.cn_ceiling_k = Some(model.shell_temperature_k(&stepper.mesh));
         }
@@ -111,13 +123,13 @@ pub(super) fn follow(
             if !arrived {
                 return Err(ConvectiveError::BrownDwarf { mass_msun });
             }
-            return Ok(Followed::new(nodes, model, Ending::BlackDwarf, false, stepper));
+            return Ok(Followed::new(seen, model, Ending::BlackDwarf, false, stepper));
         }
         if arrived && now.helium_core_mass_msun > CORE_IGNITES_MSUN && now.radius_rsun > GIANT_RSUN {
-            return Ok(Followed::new(nodes, model, Ending::GiantBranch, false, stepper));
+            return Ok(Followed::new(seen, model, Ending::GiantBranch, false, stepper));
         }
     }
-    Err(stuck(mass_msun, &nodes[nodes.len() - 1]))
+    Err(stuck(mass_msun, &seen.nodes[seen.nodes.len() - 1]))
 }
 
 /// The error of a life that could not be followed beyond a moment.

@@ -5,6 +5,8 @@ mod error;
 mod follow;
 mod input;
 mod node;
+mod profile;
+mod profiles;
 mod stage;
 mod track;
 
@@ -12,4 +14,6 @@ pub use compute::{compute, compute_with};
 pub use error::ConvectiveError;
 pub use input::{ConvectiveInput, Options, SurfaceOpacity};
 pub use node::{Caution, Ending, Life, Node};
+pub use profile::{Layer, Profile};
+pub use profiles::profile_at;
 pub use stage::Stage;

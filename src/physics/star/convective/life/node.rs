@@ -1,5 +1,8 @@
 //! One moment of a life, and the life as the line of its moments.
 
+use super::super::cgs::ATOMIC_MASS;
+use super::super::gas::fermi_temperature_k;
+use super::profile::Profile;
 use super::stage::Stage;
 
 /// The star at one moment.
@@ -77,6 +80,8 @@ pub struct Life {
     pub ending: Ending,
     /// What to know before trusting it.
     pub cautions: Vec<Caution>,
+    /// The inside at some of the moments, in order of age; none where it was not computed.
+    pub profiles: Vec<Profile>,
 }
 
 impl Caution {
@@ -115,6 +120,17 @@ impl Life {
 }
 
 impl Node {
+    /// Fermi energy of the electrons at the centre over kT.
+    ///
+    /// # Valid for
+    /// Centres, where nothing keeps its electrons: half an electron per nucleon, a whole one in hydrogen.
+    #[must_use]
+    pub fn core_degeneracy_ratio(&self) -> f64 {
+        let electrons_per_nucleon = 0.5 * (1.0 + self.core_hydrogen_fraction);
+        let electrons_per_cm3 = self.core_density_g_cm3 / ATOMIC_MASS * electrons_per_nucleon;
+        fermi_temperature_k(electrons_per_cm3) / self.core_temperature_k
+    }
+
     /// The moment a share of the way from this to a later one: positive quantities in their logarithms.
     pub(super) fn towards(&self, later: &Self, share: f64) -> Self {
         let even = |a: f64, b: f64| a + (b - a) * share;

@@ -8,6 +8,13 @@ use super::model::{Model, Settled, Unknowns};
 
 /// Largest differences between neighbours: hydrogen mass fraction, luminosity over the largest anywhere, ln pressure.
 const LARGEST: [f64; 3] = [0.06, 0.06, 0.5];
+/// Largest difference of ln temperature between neighbours. It is exceeded only where hydrogen is half ionised under a
+/// giant's surface; coarser shells there have two structures each, between which Newton's method cycles.
+const LARGEST_LN_TEMPERATURE: f64 = 0.2;
+/// The mass share above such neighbours is at least this, …
+const TEMPERATURE_SKIN: f64 = 1e-11;
+/// … and what lies between them at least this part of it.
+const TEMPERATURE_THINNEST: f64 = 0.02;
 /// Added points go when all differences across them are smaller than this share of the largest.
 const NEEDLESS: f64 = 0.4;
 /// At most so many points are added.
@@ -84,19 +91,21 @@ impl Model {
 
     /// Largest difference between two points over that allowed.
     fn unlike(&self, mesh: &Mesh, a: usize, b: usize, brightest: f64) -> f64 {
+        let warmer = (self.unknowns[b][1] - self.unknowns[a][1]).abs() / LARGEST_LN_TEMPERATURE;
         if mesh.above[b] < SKIN {
-            return 0.0;
+            return if mesh.above[b] < TEMPERATURE_SKIN { 0.0 } else { warmer };
         }
         let differences = [
             self.composition[b].hydrogen - self.composition[a].hydrogen,
             (self.unknowns[b][3] - self.unknowns[a][3]) / brightest,
             self.settled[b].ln_pressure - self.settled[a].ln_pressure,
         ];
-        differences.iter().zip(LARGEST).map(|(difference, largest)| difference.abs() / largest).fold(0.0, f64::max)
+        differences.iter().zip(LARGEST).map(|(difference, largest)| difference.abs() / largest).fold(warmer, f64::max)
     }
 
     fn splits(&self, mesh: &Mesh, k: usize, brightest: f64) -> bool {
-        mesh.shell_g[k] > THINNEST * mesh.star_g && self.unlike(mesh, k, k + 1, brightest) > 1.0
+        let thinnest = (THINNEST * mesh.star_g).min(TEMPERATURE_THINNEST * mesh.above[k + 1] * mesh.star_g);
+        mesh.shell_g[k] > thinnest && self.unlike(mesh, k, k + 1, brightest) > 1.0
     }
 
     /// Unknowns half-way in mass between a point and the next, on a cubic that neither overshoots nor undershoots.

@@ -14,16 +14,15 @@ const BRIGHTENED: f64 = 3.0;
 
 /// The life of a red dwarf, interpolated between lives computed in advance: in milliseconds, not exact.
 ///
-/// The logarithm of the mass and the metallicity are the coordinates; surfaces of 1997 are known at metallicity zero only
-/// and taken from there. Nothing outside the grid, as near the edge to brown dwarfs.
+/// The logarithm of the mass and the metallicity are the coordinates. Nothing outside the grid, as near the edge to brown
+/// dwarfs.
 #[must_use]
 pub fn quick_look(input: ConvectiveInput, surface: SurfaceOpacity) -> Option<Life> {
-    let metallicity_dex = if surface == SurfaceOpacity::Of1997 { 0.0 } else { input.metallicity_dex };
     let mut rows: Vec<f64> =
         GRID.iter().filter(|entry| entry.surface == surface).map(|entry| entry.metallicity_dex).collect();
     rows.sort_by(f64::total_cmp);
     rows.dedup();
-    let (poorer, richer, share) = around(&rows, metallicity_dex)?;
+    let (poorer, richer, share) = around(&rows, input.metallicity_dex)?;
     let of_poorer = along_masses(input.mass_msun, rows[poorer], surface)?;
     let mut sampled = if share > 0.0 {
         let of_richer = along_masses(input.mass_msun, rows[richer], surface)?;
@@ -111,7 +110,13 @@ fn life(sampled: &Sampled) -> Life {
         start_yr += sampled.lengths_yr[stretch];
     }
     name_the_late_stage(&mut nodes, sampled.is_giant);
-    Life { nodes, contraction_yr: sampled.contraction_yr, ending: Ending::BlackDwarf, cautions: Vec::new() }
+    Life {
+        nodes,
+        contraction_yr: sampled.contraction_yr,
+        ending: Ending::BlackDwarf,
+        cautions: Vec::new(),
+        profiles: Vec::new(),
+    }
 }
 
 /// Names the last burning: from the threefold light of the end of mixing on, or half-way to the peak of faint stars.

@@ -18,7 +18,7 @@ pub const GRID_MASSES_MSUN: [f64; 31] = [
     0.07, 0.072, 0.075, 0.08, 0.085, 0.09, 0.10, 0.11, 0.12, 0.13, 0.14, 0.15, 0.16, 0.17, 0.18, 0.19, 0.20, 0.205,
     0.21, 0.215, 0.22, 0.235, 0.25, 0.275, 0.30, 0.32, 0.34, 0.36, 0.40, 0.45, 0.50,
 ];
-/// Metallicities of the grid, dex. Surfaces of 1997 come at zero only.
+/// Metallicities of the grid, dex.
 pub const GRID_METALLICITIES_DEX: [f64; 5] = [-2.0, -1.0, -0.4, 0.0, 0.2];
 
 /// A life computed for the grid.
