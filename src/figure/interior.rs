@@ -62,6 +62,9 @@ impl LayerScale {
     }
 }
 
+/// Name of a line and how it is read of a layer.
+type Reader = (&'static str, fn(&Layer) -> f64);
+
 /// What is shown of the layers.
 #[derive(Clone, Copy, Debug, Default, PartialEq, Eq, Hash)]
 pub enum LayerFigure {
@@ -111,7 +114,7 @@ impl LayerFigure {
         }
     }
 
-    fn lines(self) -> &'static [(&'static str, fn(&Layer) -> f64)] {
+    fn lines(self) -> &'static [Reader] {
         match self {
             Self::Temperature => &[("temperature", |layer| layer.temperature_k)],
             Self::Density => &[("density", |layer| layer.density_g_cm3)],
@@ -127,7 +130,7 @@ impl LayerFigure {
     }
 
     fn axis(self, profile: &Profile) -> ValueAxis {
-        let values = || self.lines().iter().flat_map(|(_, value)| profile.layers.iter().map(move |layer| value(layer)));
+        let values = || self.lines().iter().flat_map(|(_, value)| profile.layers.iter().map(value));
         match self {
             Self::Temperature | Self::Density | Self::Pressure => ValueAxis::log(values(), MOST_DECADES),
             Self::Degeneracy => ValueAxis::log(values().chain([1.0]), 6.0),
@@ -259,7 +262,7 @@ impl MixedZone {
 }
 
 fn panel(profile: &Profile, scale: LayerScale, figure: LayerFigure) -> LayerPanel {
-    let line = |(name, value): &(&'static str, fn(&Layer) -> f64)| {
+    let line = |(name, value): &Reader| {
         let points = profile.layers.iter().map(|layer| [scale.place(layer), value(layer)]);
         LayerLine { name, points: points.collect() }
     };

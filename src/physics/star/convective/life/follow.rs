@@ -37,6 +37,10 @@ const SHELL_FROM: f64 = 0.05;
 const GIANT_RSUN: f64 = 1.5;
 /// A helium core this heavy would soon ignite, which is not followed, solar masses.
 const CORE_IGNITES_MSUN: f64 = 0.45;
+/// Steep layers that cannot be followed are looked at this many times as closely at most, …
+const CLOSEST: f64 = 8.0;
+/// … with shells halved so often at once.
+const REFINEMENTS: usize = 3;
 /// Steps after which a life is given up.
 const MOST_STEPS: usize = 6000;
 
@@ -86,9 +90,19 @@ pub(super) fn follow(
     let mut seen = Seen { nodes: vec![first], inside: Collector::default() };
     let mut arrived = false;
     let mut trend: Option<Vec<Unknowns>> = None;
+    let mut closeness = 1.0;
     for _ in 0..MOST_STEPS {
         let last = seen.nodes[seen.nodes.len() - 1];
         let Some((step, taken_s)) = attempt(&stepper, &model, trend.as_deref(), step_s) else {
+            // Steep layers may still be too coarse: look again more closely before giving up.
+            if arrived && last.effective_temperature_k > CRYSTAL_BELOW_K && closeness < CLOSEST {
+                closeness *= 2.0;
+                for _ in 0..REFINEMENTS {
+                    model.refine(&stepper.laws, &mut stepper.mesh, closeness);
+                }
+                trend = None;
+                continue;
+            }
             let ending = match last {
                 _ if !arrived => break,
                 Node { effective_temperature_k, .. } if effective_temperature_k < CRYSTAL_BELOW_K => Ending::BlackDwarf,
@@ -104,7 +118,7 @@ pub(super) fn follow(
         model = step.model;
         if arrived && model.helium_core_share(&stepper.mesh) > SHELL_FROM {
             step_s = step_s.min(blow(&model, &mut stepper.mesh, taken_s));
-            let Some(changed) = model.refine(&stepper.laws, &mut stepper.mesh) else { break };
+            let Some(changed) = model.refine(&stepper.laws, &mut stepper.mesh, closeness) else { break };
             trend = (!changed).then_some(new_trend);
         } else {
             trend = Some(new_trend);

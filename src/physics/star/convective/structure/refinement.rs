@@ -24,18 +24,25 @@ const SKIN: f64 = 1e-7;
 /// … nor in shells thinner than this share of the star.
 const THINNEST: f64 = 1e-8;
 
+/// What differences are measured against.
+struct Scales {
+    brightest: f64,
+    closeness: f64,
+}
+
 impl Model {
     /// Adds points where neighbours differ too much and takes away added ones that are no longer needed; tells whether any were.
     ///
-    /// Nothing where the gas has no neutral state at a new point.
-    pub(in super::super) fn refine(&mut self, laws: &Microphysics, mesh: &mut Mesh) -> Option<bool> {
+    /// `closeness` 1 is the usual difference of temperature between neighbours, 2 allows half of it. Nothing where the gas
+    /// has no neutral state at a new point.
+    pub(in super::super) fn refine(&mut self, laws: &Microphysics, mesh: &mut Mesh, closeness: f64) -> Option<bool> {
         let count = mesh.len();
-        let brightest = self.brightest();
+        let scales = Scales { brightest: self.brightest(), closeness };
         let kept: Vec<bool> =
-            (0..count).map(|k| mesh.lasting[k] || self.unlike(mesh, k - 1, k + 1, brightest) > NEEDLESS).collect();
+            (0..count).map(|k| mesh.lasting[k] || self.unlike(mesh, k - 1, k + 1, &scales) > NEEDLESS).collect();
         let room = MOST_ADDED > mesh.lasting.iter().filter(|lasting| !**lasting).count();
         let split: Vec<bool> =
-            (0..count - 1).map(|k| room && kept[k] && kept[k + 1] && self.splits(mesh, k, brightest)).collect();
+            (0..count - 1).map(|k| room && kept[k] && kept[k + 1] && self.splits(mesh, k, &scales)).collect();
         if kept.iter().all(|keep| *keep) && !split.iter().any(|wanted| *wanted) {
             return Some(false);
         }
@@ -90,22 +97,22 @@ impl Model {
     }
 
     /// Largest difference between two points over that allowed.
-    fn unlike(&self, mesh: &Mesh, a: usize, b: usize, brightest: f64) -> f64 {
-        let warmer = (self.unknowns[b][1] - self.unknowns[a][1]).abs() / LARGEST_LN_TEMPERATURE;
+    fn unlike(&self, mesh: &Mesh, a: usize, b: usize, scales: &Scales) -> f64 {
+        let warmer = (self.unknowns[b][1] - self.unknowns[a][1]).abs() * scales.closeness / LARGEST_LN_TEMPERATURE;
         if mesh.above[b] < SKIN {
             return if mesh.above[b] < TEMPERATURE_SKIN { 0.0 } else { warmer };
         }
         let differences = [
             self.composition[b].hydrogen - self.composition[a].hydrogen,
-            (self.unknowns[b][3] - self.unknowns[a][3]) / brightest,
+            (self.unknowns[b][3] - self.unknowns[a][3]) / scales.brightest,
             self.settled[b].ln_pressure - self.settled[a].ln_pressure,
         ];
         differences.iter().zip(LARGEST).map(|(difference, largest)| difference.abs() / largest).fold(warmer, f64::max)
     }
 
-    fn splits(&self, mesh: &Mesh, k: usize, brightest: f64) -> bool {
+    fn splits(&self, mesh: &Mesh, k: usize, scales: &Scales) -> bool {
         let thinnest = (THINNEST * mesh.star_g).min(TEMPERATURE_THINNEST * mesh.above[k + 1] * mesh.star_g);
-        mesh.shell_g[k] > thinnest && self.unlike(mesh, k, k + 1, brightest) > 1.0
+        mesh.shell_g[k] > thinnest && self.unlike(mesh, k, k + 1, scales) > 1.0
     }
 
     /// Unknowns half-way in mass between a point and the next, on a cubic that neither overshoots nor undershoots.
@@ -161,7 +168,7 @@ mod tests {
         model.settle(&laws).expect("ordinary states");
         let hydrogen = model.mean_hydrogen(&mesh);
         for _ in 0..10 {
-            model.refine(&laws, &mut mesh).expect("ordinary states");
+            model.refine(&laws, &mut mesh, 1.0).expect("ordinary states");
         }
         assert!(mesh.len() > count + 3, "{count} points became {}", mesh.len());
         assert!((model.mean_hydrogen(&mesh) / hydrogen - 1.0).abs() < 1e-12);
@@ -171,7 +178,7 @@ mod tests {
         model.unknowns.iter_mut().for_each(|point| *point = [5.0, 16.0, 22.0, 1.0]);
         model.settle(&laws).expect("ordinary states");
         for _ in 0..10 {
-            model.refine(&laws, &mut mesh).expect("ordinary states");
+            model.refine(&laws, &mut mesh, 1.0).expect("ordinary states");
         }
         assert_eq!(mesh.len(), count);
     }
