@@ -20,7 +20,20 @@ TIME counts from the star's arrival on the main sequence: 4.57Gyr, 2.1e12yr,
 \"3 trillion years\", now (the scenario's present age), or an event of this
 history by its name: event:\"largest radius\"
 
-Exit codes: 0 done, 2 wrong usage, 3 bad scenario or value, 4 file trouble.";
+Exit codes: 0 done, 1 a statement does not hold, 2 wrong usage, 3 bad scenario or value, 4 file trouble.";
+
+const CHECK_HELP: &str = "\
+A line says body, quantity, when, relation, value with its unit:
+  star luminosity at 5 Gyr is about 1.0 Lsun
+  Talune surface temperature ever is at least 373 K
+  Talune event 'engulfed by the star' never happens
+
+A statement within the spread of the model does not fail; one that cannot be
+judged does.
+
+Examples:
+  longember check demo:sunlike_five_worlds
+  longember check --statement \"star radius ever is at least 200 Rsun\"";
 
 /// A star's whole life and the fate of its planets, at any moment, with sources
 ///
@@ -63,6 +76,9 @@ pub(super) enum Command {
     /// A fact sheet on one moment or several, every number with its source
     #[command(after_help = "Example:\n  longember sheet demo:sunlike_five_worlds --at 4.57Gyr --at 7.6Gyr")]
     Sheet(SheetArguments),
+    /// Judge the statements of a scenario: exit code 0 if none fails, 1 if one does not hold
+    #[command(after_help = CHECK_HELP)]
+    Check(CheckArguments),
     /// List the built-in scenarios, or write one as a file to start from
     #[command(after_help = "Example:\n  longember demo sunlike_five_worlds")]
     Demo(DemoArguments),
@@ -266,6 +282,20 @@ fn sides(text: &str) -> Result<Sides, String> {
     let side = |digits: &str| digits.trim().parse::<u32>().ok();
     let found = text.split_once(['x', 'X', '×']).and_then(|(width, height)| Some(Sides([side(width)?, side(height)?])));
     found.ok_or_else(|| "write width and height in pixels, such as 960x600".to_owned())
+}
+
+/// `check`.
+#[derive(Args, Debug)]
+pub(super) struct CheckArguments {
+    /// A file, demo:NAME, or - for standard input; the demo if none is named
+    #[arg(value_name = "SCENARIO", value_parser = source_parser())]
+    pub(super) scenario: Option<ScenarioSource>,
+    /// Judge this line instead of those of the scenario; may be given several times
+    #[arg(long, value_name = "LINE", allow_hyphen_values = true)]
+    pub(super) statement: Vec<String>,
+    /// Form of the result
+    #[arg(long, value_enum, default_value_t)]
+    pub(super) format: PageFormat,
 }
 
 /// `demo`.

@@ -1,9 +1,10 @@
 //! The command line: arguments to a typed command, the command to text, the outcome to an exit code.
 //!
-//! Standard output carries only the result; every message goes to standard error. Exit codes: 0 done, 2 wrong
-//! usage, 3 a bad scenario or value, 4 trouble with a file or the system. (1 is kept for "the answer is no".)
+//! Standard output carries only the result; every message goes to standard error. Exit codes: 0 done, 1 a
+//! statement does not hold, 2 wrong usage, 3 a bad scenario or value, 4 trouble with a file or the system.
 
 mod arguments;
+mod check;
 mod destination;
 mod figure_run;
 mod outcome;

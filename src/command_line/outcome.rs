@@ -16,6 +16,8 @@ pub enum Outcome {
 
 /// Exit code: done.
 pub(super) const DONE: u8 = 0;
+/// Exit code: the answer is "does not hold".
+pub(super) const DOES_NOT_HOLD: u8 = 1;
 /// Exit code: the command line itself is wrong.
 pub(super) const WRONG_USAGE: u8 = 2;
 /// Exit code: a scenario or a value is not allowed.

@@ -4,6 +4,7 @@ use super::arguments::{
     Arguments, Command, DemoArguments, EventsArguments, EventsFormat, PageFormat, SourcesArguments, StarArguments,
     StateArguments, TableArguments, TableFormat,
 };
+use super::check::check;
 use super::figure_run;
 use super::outcome::{DONE, Outcome, WRONG_USAGE};
 use super::scenario_source::{ScenarioSource, find_demo};
@@ -48,7 +49,7 @@ pub fn run_with(arguments: impl IntoIterator<Item = OsString>, streams: &mut Str
             Err(trouble) => Outcome::Done(tell(&trouble, streams)),
         },
         Ok(Arguments { command: Some(command), .. }) => Outcome::Done(match carry_out(command, streams) {
-            Ok(()) => DONE,
+            Ok(code) => code,
             Err(trouble) => tell(&trouble, streams),
         }),
     }
@@ -90,8 +91,10 @@ fn openable(scenario: Option<ScenarioSource>) -> Result<Option<ScenarioSource>, 
     Ok(scenario)
 }
 
-fn carry_out(command: Command, streams: &mut Streams<'_>) -> Result<(), Trouble> {
-    match command {
+/// Carries a command out and returns its exit code.
+fn carry_out(command: Command, streams: &mut Streams<'_>) -> Result<u8, Trouble> {
+    let done = match command {
+        Command::Check(arguments) => return check(&arguments, streams),
         Command::State(arguments) => state(&arguments, streams),
         Command::Star(arguments) => star(&arguments, streams),
         Command::Table(arguments) => table(&arguments, streams),
@@ -100,7 +103,8 @@ fn carry_out(command: Command, streams: &mut Streams<'_>) -> Result<(), Trouble>
         Command::Sheet(arguments) => figure_run::sheet(&arguments, streams),
         Command::Demo(arguments) => demo(&arguments, streams),
         Command::Sources(arguments) => sources(&arguments, streams),
-    }
+    };
+    done.map(|()| DONE)
 }
 
 fn state(arguments: &StateArguments, streams: &mut Streams<'_>) -> Result<(), Trouble> {

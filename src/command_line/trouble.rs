@@ -4,6 +4,7 @@ use super::outcome::{BAD_VALUE, SYSTEM_TROUBLE, WRONG_USAGE};
 use crate::document::{LoadError, Problem, WriteError, built_in};
 use crate::drawing::PictureProblem;
 use crate::handover::{ColumnsProblem, TableAgesProblem};
+use crate::system::statements::LineProblem;
 use crate::system::{HistoryError, MomentProblem};
 use std::io;
 use std::path::PathBuf;
@@ -61,6 +62,19 @@ pub(super) enum Trouble {
         /// What is wrong with it.
         problem: MomentProblem,
     },
+    /// A line that is no statement.
+    #[error("the statement \"{line}\": {problem}")]
+    Statement {
+        /// The line.
+        line: String,
+        /// What is wrong with it.
+        problem: LineProblem,
+    },
+    /// There is nothing to judge.
+    #[error(
+        "the scenario states nothing, allowed one statement or more; add statements to it, or give --statement LINE"
+    )]
+    NothingStated,
     /// No such table.
     #[error(transparent)]
     TableAges(#[from] TableAgesProblem),
@@ -132,6 +146,8 @@ impl Trouble {
             | Self::History(_)
             | Self::Moment(_)
             | Self::TableEnd { .. }
+            | Self::Statement { .. }
+            | Self::NothingStated
             | Self::TableAges(_)
             | Self::Picture(_)
             | Self::Columns(_)

@@ -6,7 +6,6 @@ mod files;
 mod history;
 mod life_form;
 mod life_store;
-mod likeness;
 mod problem;
 mod record_reading;
 pub mod recovery;

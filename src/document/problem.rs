@@ -3,6 +3,7 @@
 use super::ron_text::SyntaxFault;
 use crate::system::MomentProblem;
 use crate::system::specification;
+use crate::system::statements::LineProblem;
 use std::fmt;
 use thiserror::Error;
 
@@ -40,6 +41,11 @@ pub enum Subject {
         /// Its name, empty if it has none.
         name: String,
     },
+    /// A statement.
+    Statement {
+        /// Its index, counted from 0.
+        index: usize,
+    },
     /// A cue of the show.
     Cue {
         /// Its index, counted from 0.
@@ -64,6 +70,9 @@ pub enum Fault {
     /// The form of the text.
     #[error(transparent)]
     Syntax(#[from] SyntaxFault),
+    /// The line of a statement.
+    #[error(transparent)]
+    Line(#[from] LineProblem),
     /// The moment of a cue.
     #[error(transparent)]
     Moment(#[from] MomentProblem),
@@ -190,6 +199,7 @@ impl fmt::Display for Subject {
             Self::Whole => return Ok(()),
             Self::Star { name } => ("star".to_owned(), name),
             Self::Planet { index, name } => (format!("planet {}", index + 1), name),
+            Self::Statement { index } => return write!(formatter, "statement {}: ", index + 1),
             Self::Cue { index } => return write!(formatter, "cue {}: ", index + 1),
         };
         if name.is_empty() {

@@ -1,8 +1,8 @@
 //! Taking values out of parsed text: every wrong, missing or unknown field becomes a problem with its place.
 
-use super::likeness::likest;
 use super::problem::{Fault, Place, Problem, Subject};
 use super::ron_text::{self, Field, Lines, Node, Parsed, Record, SyntaxFault, Value};
+use crate::units::likeness::likest;
 use std::collections::HashMap;
 
 /// More problems than this are not listed.

@@ -3,6 +3,7 @@
 use super::problem::{Fault, Problem, Subject};
 use crate::system::cues::{Cue, LONGEST_SHOW_S, MOST_CUES};
 use crate::system::specification::{Body, PlanetSpecification, StarSpecification, System};
+use crate::system::statements::{MOST_STATEMENTS, Statement};
 
 /// Longest title, in characters.
 pub const LONGEST_TITLE: usize = 120;
@@ -20,6 +21,8 @@ pub struct Scenario {
     pub about: String,
     /// The star and its planets.
     pub system: System,
+    /// Claims about the system that are to be checked, in the order of the rows.
+    pub statements: Vec<Statement>,
     /// The cues of a show, in the order of the rows.
     pub cues: Vec<Cue>,
 }
@@ -32,6 +35,7 @@ impl Scenario {
             title: "Untitled".to_owned(),
             about: String::new(),
             system: System { star: StarSpecification::default(), planets: vec![PlanetSpecification::default()] },
+            statements: Vec::new(),
             cues: Vec::new(),
         }
     }
@@ -48,39 +52,38 @@ impl Scenario {
             let subject = if problem.key == "planets" { Subject::Whole } else { self.subject(problem.body) };
             Problem { subject, key: Some(problem.key), fault: problem.fault.into(), place: None }
         });
-        texts.chain(inputs).chain(self.cue_problems()).collect()
+        texts.chain(inputs).chain(self.statement_problems()).chain(self.cue_problems()).collect()
+    }
+
+    fn statement_problems(&self) -> impl Iterator<Item = Problem> + '_ {
+        let rows = self.statements.iter().enumerate().filter_map(|(index, statement)| {
+            let fault = note_fault(&statement.note)?;
+            Some(Problem { subject: Subject::Statement { index }, key: Some("note"), fault, place: None })
+        });
+        too_many("statements", self.statements.len(), MOST_STATEMENTS).into_iter().chain(rows)
     }
 
     fn cue_problems(&self) -> impl Iterator<Item = Problem> + '_ {
-        let count = self.cues.len();
-        let too_many = (count > MOST_CUES).then(|| {
-            let fault = Fault::TooMany { key: "cues", count, most: MOST_CUES };
-            Problem { subject: Subject::Whole, key: Some("cues"), fault, place: None }
-        });
         let rows = self.cues.iter().enumerate().flat_map(|(index, cue)| {
-            let show_time = (!(0.0..=LONGEST_SHOW_S).contains(&cue.show_time_s)).then(|| {
-                let fault = Fault::OutOfRange {
-                    key: "show_time_s",
-                    value: cue.show_time_s,
-                    allowed: format!("0 to {LONGEST_SHOW_S} s"),
-                };
-                ("show_time_s", fault)
+            let is_in_show = (0.0..=LONGEST_SHOW_S).contains(&cue.show_time_s);
+            let show_time = (!is_in_show).then(|| {
+                let allowed = format!("0 to {LONGEST_SHOW_S} s");
+                ("show_time_s", Fault::OutOfRange { key: "show_time_s", value: cue.show_time_s, allowed })
             });
             let faults = show_time.into_iter().chain(note_fault(&cue.note).map(|fault| ("note", fault)));
-            faults.map(move |(key, fault)| Problem {
-                subject: Subject::Cue { index },
-                key: Some(key),
-                fault,
-                place: None,
-            })
+            let subject = Subject::Cue { index };
+            faults.map(move |(key, fault)| Problem { subject: subject.clone(), key: Some(key), fault, place: None })
         });
-        too_many.into_iter().chain(rows)
+        too_many("cues", self.cues.len(), MOST_CUES).into_iter().chain(rows)
     }
 
     /// Gives a planet another name, and everything that calls it by its name.
     pub fn rename_planet(&mut self, index: usize, name: &str) {
         let Some(planet) = self.system.planets.get_mut(index) else { return };
         let before = std::mem::replace(&mut planet.name, name.to_owned());
+        for statement in &mut self.statements {
+            statement.rename(&before, name);
+        }
         for cue in &mut self.cues {
             if let Some(moment) = cue.moment.renamed(&before, name) {
                 cue.moment = moment;
@@ -116,7 +119,12 @@ fn title_fault(title: &str) -> Option<Fault> {
     bad.then_some(Fault::BadText { key: "title", length, most: LONGEST_TITLE })
 }
 
-pub(super) fn note_fault(note: &str) -> Option<Fault> {
+fn too_many(key: &'static str, count: usize, most: usize) -> Option<Problem> {
+    let fault = (count > most).then_some(Fault::TooMany { key, count, most })?;
+    Some(Problem { subject: Subject::Whole, key: Some(key), fault, place: None })
+}
+
+fn note_fault(note: &str) -> Option<Fault> {
     let length = note.chars().count();
     let bad = length > LONGEST_NOTE || note.chars().any(char::is_control);
     bad.then_some(Fault::BadText { key: "note", length, most: LONGEST_NOTE })

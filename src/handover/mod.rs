@@ -6,6 +6,7 @@
 
 mod bodies;
 mod cell;
+mod checked_statements;
 mod comma_separated;
 mod dated_events;
 mod enhanced_table;
@@ -22,6 +23,7 @@ mod source_list;
 mod table_ages;
 mod table_columns;
 
+pub use checked_statements::{JudgedStatement, checked_json, checked_text, model_text};
 pub use dated_events::{doubt, events_csv, events_json, events_text};
 pub use fact_sheet::{FactSheet, fact_sheet, sheet_html, sheet_markdown, sheet_text};
 pub use history_table::{TableRequest, table_csv, table_ecsv, table_json};

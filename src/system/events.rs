@@ -117,6 +117,26 @@ impl EventFilter {
 }
 
 impl EventKind {
+    /// Every kind that a star or a planet can have, changes of colour aside, which are as many as there are words.
+    #[must_use]
+    pub fn all_of(body: Body) -> Vec<Self> {
+        match body {
+            Body::Star => StarEventKind::ALL.map(Self::Star).to_vec(),
+            Body::Planet(_) => {
+                let mut kinds = PlanetEventKind::ALL.map(Self::Planet).to_vec();
+                kinds.extend([
+                    Self::RisesAboveFreezing,
+                    Self::FallsBelowFreezing,
+                    Self::RisesAboveBoiling,
+                    Self::FallsBelowBoiling,
+                    Self::HottestSurface,
+                    Self::GiantNearest,
+                ]);
+                kinds
+            }
+        }
+    }
+
     /// Stable machine name.
     #[must_use]
     pub fn key(self) -> &'static str {

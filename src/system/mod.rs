@@ -27,6 +27,7 @@ pub mod quantities;
 pub mod specification;
 mod star_colours;
 pub mod starlight;
+pub mod statements;
 pub mod ticks;
 
 pub use air::Air;

@@ -1,6 +1,6 @@
 //! A moment as people name it: a span of time, `now`, or an event.
 
-use super::events::Event;
+use super::events::{Event, EventKind};
 use super::history::History;
 use super::specification::Body;
 use crate::physics::star::END_YR;
@@ -163,12 +163,23 @@ fn event_named<'h>(history: &'h History, name: &str) -> Result<&'h Event, Moment
     }
 }
 
+/// Whether a name means a kind of event: by its words or its key, whatever the case.
+pub(super) fn is_kind_named(kind: EventKind, name: &str) -> bool {
+    words_of(kind).contains(&folded(name))
+}
+
+/// Names by which a kind of event is known, in lower case.
+fn words_of(kind: EventKind) -> Vec<String> {
+    let key = kind.key();
+    let mut words = vec![folded(&kind.name()), folded(key), folded(&key.replace('_', " "))];
+    words.extend(ALSO_KNOWN.iter().filter(|(_, of)| *of == key).map(|(known, _)| (*known).to_owned()));
+    words
+}
+
 /// Whether a name means an event: by its words or its key, alone or after `PLANET: `, whatever the case.
 fn is_named(history: &History, event: &Event, name: &str) -> bool {
     let wanted = folded(name);
-    let key = event.kind.key();
-    let mut words = vec![folded(&event.kind.name()), folded(key)];
-    words.extend(ALSO_KNOWN.iter().filter(|(_, of)| *of == key).map(|(known, _)| (*known).to_owned()));
+    let words = words_of(event.kind);
     if words.contains(&wanted) {
         return true;
     }

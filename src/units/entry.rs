@@ -2,7 +2,7 @@
 
 use super::constants::{
     AU_M, EARTH_MASS_KG, EARTH_MASSES_PER_SOLAR_MASS, EARTH_RADIUS_M, JUPITER_MASS_KG, JUPITER_RADIUS_M, LIGHT_YEAR_M,
-    SOLAR_MASS_KG, SOLAR_RADIUS_M,
+    SOLAR_LUMINOSITY_W, SOLAR_MASS_KG, SOLAR_RADIUS_M,
 };
 use super::number_text::{machine, parse_number};
 use super::time_words::parse_span;
@@ -34,6 +34,36 @@ pub enum EntryKind {
     AngleDeg,
     /// A logarithmic abundance, kept in dex.
     AbundanceDex,
+    /// A luminosity, kept in solar luminosities.
+    LuminosityLsun,
+    /// A star's radius, kept in solar radii.
+    RadiusRsun,
+    /// A loss of mass, kept in solar masses per year.
+    MassLossMsunYr,
+    /// A density, kept in grams per cubic centimetre.
+    DensityGCm3,
+    /// A wavelength, kept in nanometres.
+    WavelengthNm,
+    /// A frequency, kept in terahertz.
+    FrequencyThz,
+    /// Starlight received, kept in units of the Earth's.
+    InsolationEarth,
+    /// A flux of energy, kept in watts per square metre.
+    IrradianceWM2,
+    /// A flux of photons, kept in micromoles per square metre and second.
+    PhotonFluxUmolM2S,
+    /// An illuminance, kept in lux.
+    IlluminanceLx,
+    /// A luminance, kept in candelas per square metre.
+    LuminanceCdM2,
+    /// A luminous flux, kept in lumens.
+    LuminousFluxLm,
+    /// A luminous efficacy, kept in lumens per watt.
+    EfficacyLmW,
+    /// A magnitude.
+    Magnitude,
+    /// Water, kept in oceans of the Earth.
+    WaterOceans,
     /// A plain number; a per cent sign is understood.
     Plain,
 }
@@ -52,7 +82,32 @@ impl EntryKind {
             Self::PressureBar => "bar",
             Self::AngleDeg => "°",
             Self::AbundanceDex => "dex",
+            Self::LuminosityLsun => "L☉",
+            Self::RadiusRsun => "R☉",
+            Self::MassLossMsunYr => "M☉/yr",
+            Self::DensityGCm3 => "g/cm³",
+            Self::WavelengthNm => "nm",
+            Self::FrequencyThz => "THz",
+            Self::InsolationEarth => "S⊕",
+            Self::IrradianceWM2 => "W/m²",
+            Self::PhotonFluxUmolM2S => "µmol/m²/s",
+            Self::IlluminanceLx => "lx",
+            Self::LuminanceCdM2 => "cd/m²",
+            Self::LuminousFluxLm => "lm",
+            Self::EfficacyLmW => "lm/W",
+            Self::Magnitude => "mag",
+            Self::WaterOceans => "oceans",
             Self::Plain => "",
+        }
+    }
+
+    /// The unit the value is kept in as it is typed on any keyboard; empty for a plain number.
+    #[must_use]
+    pub fn typed_unit(self) -> &'static str {
+        match self {
+            Self::SpanYr => "yr",
+            Self::TemperatureDifferenceK => "K",
+            other => other.units().iter().find(|(_, factor)| *factor == 1.0).map_or("", |(unit, _)| unit),
         }
     }
 
@@ -95,6 +150,18 @@ impl EntryKind {
         ];
         const PRESSURE_BAR: &[(&str, f64)] =
             &[("mbar", 1e-3), ("bar", 1.0), ("hPa", 1e-3), ("kPa", 1e-2), ("Pa", 1e-5), ("atm", 1.01325)];
+        const LUMINOSITY_LSUN: &[(&str, f64)] =
+            &[("Lsun", 1.0), ("L☉", 1.0), ("L⊙", 1.0), ("solar luminosities", 1.0), ("W", 1.0 / SOLAR_LUMINOSITY_W)];
+        const RADIUS_RSUN: &[(&str, f64)] = &[
+            ("Rsun", 1.0),
+            ("R☉", 1.0),
+            ("R⊙", 1.0),
+            ("solar radii", 1.0),
+            ("Rearth", EARTH_RADIUS_M / SOLAR_RADIUS_M),
+            ("au", AU_M / SOLAR_RADIUS_M),
+            ("million km", 1e9 / SOLAR_RADIUS_M),
+            ("km", 1e3 / SOLAR_RADIUS_M),
+        ];
         match self {
             Self::MassMsun => MASS_MSUN,
             Self::MassMearth => MASS_MEARTH,
@@ -106,6 +173,21 @@ impl EntryKind {
             Self::PressureBar => PRESSURE_BAR,
             Self::AngleDeg => &[("degrees", 1.0), ("deg", 1.0), ("°", 1.0)],
             Self::AbundanceDex => &[("dex", 1.0)],
+            Self::LuminosityLsun => LUMINOSITY_LSUN,
+            Self::RadiusRsun => RADIUS_RSUN,
+            Self::MassLossMsunYr => &[("Msun/yr", 1.0), ("M☉/yr", 1.0), ("solar masses per year", 1.0)],
+            Self::DensityGCm3 => &[("g/cm3", 1.0), ("g/cm³", 1.0), ("kg/m3", 1e-3), ("kg/m³", 1e-3)],
+            Self::WavelengthNm => &[("nm", 1.0), ("µm", 1e3), ("um", 1e3), ("micrometres", 1e3)],
+            Self::FrequencyThz => &[("THz", 1.0), ("GHz", 1e-3)],
+            Self::InsolationEarth => &[("Searth", 1.0), ("S⊕", 1.0), ("times the Earth's", 1.0), ("x", 1.0)],
+            Self::IrradianceWM2 => &[("W/m2", 1.0), ("W/m²", 1.0), ("W m-2", 1.0), ("W m⁻²", 1.0)],
+            Self::PhotonFluxUmolM2S => &[("umol/m2/s", 1.0), ("µmol/m²/s", 1.0)],
+            Self::IlluminanceLx => &[("klx", 1e3), ("lx", 1.0), ("lux", 1.0)],
+            Self::LuminanceCdM2 => &[("cd/m2", 1.0), ("cd/m²", 1.0)],
+            Self::LuminousFluxLm => &[("lm", 1.0), ("lumens", 1.0)],
+            Self::EfficacyLmW => &[("lm/W", 1.0)],
+            Self::Magnitude => &[("mag", 1.0), ("magnitudes", 1.0)],
+            Self::WaterOceans => &[("oceans", 1.0), ("ocean", 1.0)],
             Self::Plain => &[("%", 0.01)],
         }
     }
@@ -152,7 +234,9 @@ pub fn parse_entry(text: &str, kind: EntryKind) -> Result<f64, EntryProblem> {
     if kind == EntryKind::TemperatureK {
         let celsius = ["°C", "C"].iter().find_map(|unit| trimmed.strip_suffix(unit));
         if let Some(value) = celsius.and_then(|number| parse_number(number.trim_end())) {
-            return Ok(value + CELSIUS_ZERO_K);
+            // The sum of two decimals is a decimal again, without the noise of their binary forms.
+            let kelvin = value + CELSIUS_ZERO_K;
+            return Ok(format!("{kelvin:.9}").parse().unwrap_or(kelvin));
         }
     }
     for (unit, factor) in kind.units() {

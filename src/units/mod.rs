@@ -5,5 +5,6 @@
 
 pub mod constants;
 pub mod entry;
+pub mod likeness;
 pub mod number_text;
 pub mod time_words;

@@ -2,6 +2,7 @@
 
 mod application;
 mod background;
+mod checked;
 mod command;
 mod derived;
 mod dialogs;

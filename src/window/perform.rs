@@ -9,8 +9,8 @@ use super::pages::Page;
 use super::theme;
 use super::view::WHOLE;
 use crate::document::{SaveError, Session, built_in};
-use crate::system::Body;
 use crate::system::history::held;
+use crate::system::{Body, System};
 use egui::{Context, ViewportCommand};
 use std::path::Path;
 
@@ -36,20 +36,23 @@ impl Longember {
             Command::AskSaveAs => self.ask(context, Purpose::Save, None),
             Command::SaveAs(path) => self.save_as(&path),
             Command::Undo => {
+                let before = workspace.scenario().system.clone();
                 if let Some(label) = workspace.session.undo() {
                     workspace.say(format!("Undone: {label}"));
-                    self.recompute(context);
+                    self.recompute_unless(context, &before);
                 }
             }
             Command::Redo => {
+                let before = workspace.scenario().system.clone();
                 if let Some(label) = workspace.session.redo() {
                     workspace.say(format!("Redone: {label}"));
-                    self.recompute(context);
+                    self.recompute_unless(context, &before);
                 }
             }
             Command::Edit(edit) => {
+                let before = workspace.scenario().system.clone();
                 workspace.session.edit(edit.label, |scenario| *scenario = *edit.scenario);
-                self.recompute(context);
+                self.recompute_unless(context, &before);
             }
             Command::CancelComputation => {
                 workspace.job.cancel();
@@ -309,6 +312,13 @@ impl Longember {
         workspace.playback.is_running = false;
         workspace.moment_yr = present_yr;
         self.recompute(context);
+    }
+
+    /// Computes anew unless the system is still this one: words, statements and cues have no part in its history.
+    fn recompute_unless(&mut self, context: &Context, before: &System) {
+        if self.workspace.scenario().system != *before {
+            self.recompute(context);
+        }
     }
 
     /// Starts computing the history of the scenario as it stands.

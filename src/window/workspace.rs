@@ -1,5 +1,6 @@
 //! Everything the window knows at one time: the session, the history, the moment, the view.
 
+use super::checked::Checked;
 use super::derived::Derived;
 use super::dialogs::Dialog;
 use super::jobs::{ExportJobs, HistoryJob};
@@ -63,6 +64,8 @@ pub struct Workspace {
     pub playback: Playback,
     /// Axis, samples, charts and ribbon for the history and view.
     pub(super) derived: Derived,
+    /// Statements judged so far.
+    pub(super) checked: Checked,
     /// A dialog that waits for an answer.
     pub(super) dialog: Option<Dialog>,
     /// The last message to the user.
@@ -113,6 +116,7 @@ impl Workspace {
             hidden_events: Vec::new(),
             playback: Playback::default(),
             derived,
+            checked: Checked::default(),
             dialog: None,
             notice: None,
             wanted_source: None,

@@ -3,6 +3,7 @@
 #![expect(clippy::expect_used, clippy::panic, reason = "a test that cannot go on has failed")]
 
 mod bad_input;
+mod check;
 mod demos;
 mod events;
 mod figures;

@@ -7,6 +7,7 @@ use longember::physics::star::convective::SurfaceOpacity;
 use longember::system::cues::{Cue, LONGEST_SHOW_S, Transition};
 use longember::system::limits::{self, Limit};
 use longember::system::specification::{PlanetSpecification, RED_DWARF_SURFACES, StarSpecification, System};
+use longember::system::statements::{Statement, parse_saved_statement};
 use longember::system::{Air, Carbon, MomentRequest, TidesChoice, Water};
 use proptest::prelude::*;
 use proptest::sample::Index;
@@ -27,7 +28,16 @@ mod oracle {
         #[serde(default)]
         pub(super) planets: Vec<Planet>,
         #[serde(default)]
+        pub(super) statements: Vec<Statement>,
+        #[serde(default)]
         pub(super) cues: Vec<Cue>,
+    }
+
+    #[derive(Deserialize)]
+    #[serde(deny_unknown_fields)]
+    pub(super) struct Statement {
+        pub(super) claim: String,
+        pub(super) note: String,
     }
 
     #[derive(Deserialize)]
@@ -260,7 +270,12 @@ fn read_by_oracle(text: &str, ours: &Scenario) -> Result<Scenario, String> {
         note: cue.note,
     });
     let cues = cues.collect();
-    Ok(Scenario { title: read.title, about: read.about.replace("\r\n", "\n"), system, cues })
+    let statements = read
+        .statements
+        .into_iter()
+        .map(|row| Statement { note: row.note, ..parse_saved_statement(&row.claim, &system).expect("a statement") });
+    let statements = statements.collect();
+    Ok(Scenario { title: read.title, about: read.about.replace("\r\n", "\n"), system, statements, cues })
 }
 
 /// Values over the whole permitted range, its ends included, and over many powers of ten.
@@ -355,20 +370,36 @@ fn cue() -> impl Strategy<Value = Cue> {
     )
 }
 
+/// Statements of every kind, about the star, a planet and one that is gone.
+fn statement() -> impl Strategy<Value = Statement> {
+    let lines = vec![
+        "star luminosity at 5 Gyr is about 1 Lsun",
+        "star radius ever from now to event 'it\\'s \"so\"' is at least 200.1 Rsun",
+        "'Gone \"b\"' surface temperature always is between 253.15 K and 303.15 K",
+        "Gone date of event 'engulfed by the star' is about 12 Gyr within 3 %",
+        "Gone event 'engulfed by the star' never happens",
+        "star duration of main sequence is at most 10 Gyr",
+    ];
+    (prop::sample::select(lines), "([a-z\"\\\\é☉ ]{0,9}[ -~]){0,9}").prop_map(|(line, note)| Statement {
+        note,
+        ..parse_saved_statement(line, &Scenario::new_untitled().system).expect("a statement")
+    })
+}
+
 fn scenario() -> impl Strategy<Value = Scenario> {
     let star =
         (name(), value(&limits::STAR_MASS), value(&limits::METALLICITY), value(&limits::PRESENT_AGE), 0..2_usize);
     let about = "([a-zA-Z\"\\\\é☉,.]{0,12}[ \n]{1,3}){0,60}";
-    let cues = prop::collection::vec(cue(), 0..5);
+    let rows = (prop::collection::vec(statement(), 0..5), prop::collection::vec(cue(), 0..5));
     let planets = prop::collection::vec(planet(), 0..6);
-    (name(), about, star, planets, cues).prop_map(|(title, about, star, mut planets, cues)| {
+    (name(), about, star, planets, rows).prop_map(|(title, about, star, mut planets, (statements, cues))| {
         for (index, planet) in planets.iter_mut().enumerate() {
             planet.name.push_str(&index.to_string());
         }
         let (name, mass_msun, metallicity_dex, present_age_yr, surface) = star;
         let red_dwarf_surface = RED_DWARF_SURFACES[surface];
         let star = StarSpecification { name, mass_msun, metallicity_dex, present_age_yr, red_dwarf_surface };
-        Scenario { title, about, system: System { star, planets }, cues }
+        Scenario { title, about, system: System { star, planets }, statements, cues }
     })
 }
 

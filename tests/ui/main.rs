@@ -17,6 +17,7 @@ mod opening;
 mod pages;
 mod planets;
 mod playing;
+mod statements;
 mod time;
 mod typed_moment;
 mod undo;

@@ -8,7 +8,7 @@ pub const CURRENT_VERSION: u32 = 1;
 
 /// The name of the outermost struct.
 pub(super) const SCENARIO: &str = "Longember";
-pub(super) const SCENARIO_KEYS: &[&str] = &["version", "title", "about", "star", "planets", "cues"];
+pub(super) const SCENARIO_KEYS: &[&str] = &["version", "title", "about", "star", "planets", "statements", "cues"];
 pub(super) const STAR_KEYS: &[&str] = &["name", "mass_msun", "metallicity_dex", "present_age_yr", "red_dwarf_surface"];
 /// In the order of `specification::RED_DWARF_SURFACES`.
 pub(super) const SURFACES: &[&str] = &["Modern", "Of1997"];
@@ -44,6 +44,7 @@ pub(super) const HELD_KEYS: &[&str] = &["carbon_dioxide_bar"];
 pub(super) const TIDES: &[&str] = &["On", "Off"];
 /// In the order of `Redistribution::ALL`.
 pub(super) const REDISTRIBUTIONS: &[&str] = &["WholePlanet", "DaySide", "DaySideFullPhase", "SubStellar"];
+pub(super) const STATEMENT_KEYS: &[&str] = &["claim", "note"];
 pub(super) const CUE_KEYS: &[&str] = &["show_time_s", "moment", "transition", "note"];
 /// In the order of `Transition::ALL`.
 pub(super) const TRANSITIONS: &[&str] = &["Cut", "Steady", "SteadyLog", "Paced"];

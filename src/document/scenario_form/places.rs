@@ -11,6 +11,8 @@ pub(super) enum Owner {
     Whole,
     /// The star or a planet.
     Body(Body),
+    /// A statement, by its index.
+    Statement(usize),
     /// A cue, by its index.
     Cue(usize),
 }
@@ -21,6 +23,7 @@ impl From<&Subject> for Owner {
             Subject::Whole => Self::Whole,
             Subject::Star { .. } => Self::Body(Body::Star),
             Subject::Planet { index, .. } => Self::Body(Body::Planet(*index)),
+            Subject::Statement { index } => Self::Statement(*index),
             Subject::Cue { index } => Self::Cue(*index),
         }
     }

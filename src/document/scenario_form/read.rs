@@ -6,7 +6,7 @@ use super::keys::{
     WATER_WORLD,
 };
 use super::places::{Owner, Places};
-use super::read_rows::read_cues;
+use super::read_rows::{read_cues, read_statements};
 use crate::document::problem::{Fault, Problem, Subject};
 use crate::document::record_reading::{Fields, Reading};
 use crate::document::ron_text::{Node, Value, number_text};
@@ -94,8 +94,11 @@ pub(in crate::document) fn read_scenario_node(
         Some(node) => read_planets(reading, node, &mut places),
         None => Vec::new(),
     };
+    let system = System { star, planets };
+    let statements =
+        fields.given("statements").map_or_else(Vec::new, |node| read_statements(reading, node, &system, &mut places));
     let cues = fields.given("cues").map_or_else(Vec::new, |node| read_cues(reading, node, &mut places));
-    let scenario = Scenario { title, about, system: System { star, planets }, cues };
+    let scenario = Scenario { title, about, system, statements, cues };
     for problem in scenario.problems() {
         let owner = Owner::from(&problem.subject);
         // Without a place it is about a placeholder, whose cause was reported already.

@@ -1,12 +1,46 @@
-//! Text to the rows of a scenario that are no bodies: the cues of a show.
+//! Text to the rows of a scenario that are no bodies: statements, and the cues of a show.
 
-use super::keys::{CUE_KEYS, TRANSITIONS};
+use super::keys::{CUE_KEYS, STATEMENT_KEYS, TRANSITIONS};
 use super::places::{Owner, Places};
 use crate::document::problem::{Fault, Subject};
 use crate::document::record_reading::{Fields, Reading};
 use crate::document::ron_text::{Node, Value};
 use crate::system::MomentRequest;
 use crate::system::cues::{Cue, LONGEST_SHOW_S, MOST_CUES, Transition};
+use crate::system::specification::System;
+use crate::system::statements::{MOST_STATEMENTS, Statement, parse_saved_statement};
+
+/// The statements of a list about a system, whose planets they may call by name.
+pub(super) fn read_statements(
+    reading: &mut Reading<'_>,
+    node: &Node,
+    system: &System,
+    places: &mut Places,
+) -> Vec<Statement> {
+    let Some(items) = rows(reading, node, "statements", MOST_STATEMENTS) else { return Vec::new() };
+    let items = items.iter().take(MOST_STATEMENTS).enumerate();
+    items.filter_map(|(index, item)| read_statement(reading, item, index, system, places)).collect()
+}
+
+fn read_statement(
+    reading: &mut Reading<'_>,
+    node: &Node,
+    index: usize,
+    system: &System,
+    places: &mut Places,
+) -> Option<Statement> {
+    let fields = reading.fields(node, "Statement", "statement", STATEMENT_KEYS, Subject::Statement { index })?;
+    let node = reading.required(&fields, "claim", "a line such as \"star luminosity at 5 Gyr is about 1.0 Lsun\"")?;
+    let line = reading.text(node, &fields.subject, "claim")?;
+    let note = read_note(reading, &fields, Owner::Statement(index), places);
+    match parse_saved_statement(line, system) {
+        Ok(statement) => Some(Statement { note, ..statement }),
+        Err(problem) => {
+            reading.report(node.span.start, &fields.subject, Some("claim"), problem.into());
+            None
+        }
+    }
+}
 
 /// The cues of a list.
 pub(super) fn read_cues(reading: &mut Reading<'_>, node: &Node, places: &mut Places) -> Vec<Cue> {

@@ -9,6 +9,7 @@ use crate::physics::planet::{Greenhouse, Redistribution};
 use crate::physics::star::convective::SurfaceOpacity;
 use crate::system::cues::{Cue, Transition};
 use crate::system::specification::{PlanetSpecification, StarSpecification};
+use crate::system::statements::Statement;
 use crate::system::{Air, Carbon, TidesChoice, Water};
 
 /// Writes a scenario in its file form, every key in a fixed order, one a line.
@@ -33,8 +34,24 @@ pub(in crate::document) fn write_scenario_member(writer: &mut Writer, key: &str,
         write_planet(writer, planet);
     }
     writer.close(']');
+    write_statements(writer, &scenario.statements);
     write_cues(writer, &scenario.cues);
     writer.close(')');
+}
+
+/// Where nothing is stated, nothing is written.
+fn write_statements(writer: &mut Writer, statements: &[Statement]) {
+    if statements.is_empty() {
+        return;
+    }
+    writer.open("statements", "", '[');
+    for statement in statements {
+        writer.open("", "", '(');
+        writer.paragraph("claim", &statement.line());
+        writer.paragraph("note", &statement.note);
+        writer.close(')');
+    }
+    writer.close(']');
 }
 
 /// A show that has no cue yet takes no line.

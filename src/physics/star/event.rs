@@ -45,6 +45,29 @@ pub enum StarEventKind {
 }
 
 impl StarEventKind {
+    /// Every kind, in order.
+    pub const ALL: [Self; 19] = [
+        Self::MainSequenceStart,
+        Self::MixingEnds,
+        Self::MainSequenceEnd,
+        Self::BlueDwarfStart,
+        Self::GiantBranchBase,
+        Self::HeliumIgnition { flash: true },
+        Self::HeliumIgnition { flash: false },
+        Self::CoreHeliumEnd,
+        Self::ThermalPulsesStart,
+        Self::EnvelopeLost,
+        Self::LargestRadius,
+        Self::HighestLuminosity,
+        Self::HottestSurface,
+        Self::SupernovaCollapse,
+        Self::ThermonuclearDisruption,
+        Self::WhiteDwarfBirth,
+        Self::BlackDwarfBirth,
+        Self::NeutronStarBirth,
+        Self::BlackHoleBirth,
+    ];
+
     /// Stable machine name.
     #[must_use]
     pub fn key(self) -> &'static str {

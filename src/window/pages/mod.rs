@@ -14,6 +14,9 @@ mod sky_scene;
 mod sources;
 mod spectrum;
 mod spectrum_plot;
+mod statement_form;
+mod statement_rows;
+mod statements;
 
 use super::command::Command;
 use super::theme::GRID;
@@ -37,6 +40,8 @@ pub enum Page {
     Orbits,
     /// Every dated event.
     Chronicle,
+    /// Claims and what the model says to them.
+    Statements,
     /// What the scenario is about.
     Introduction,
     /// Methods, papers, ranges.
@@ -45,13 +50,14 @@ pub enum Page {
 
 impl Page {
     /// Every page, in order.
-    pub const ALL: [Self; 8] = [
+    pub const ALL: [Self; 9] = [
         Self::Curves,
         Self::Spectrum,
         Self::Interior,
         Self::Orbits,
         Self::Sky,
         Self::Chronicle,
+        Self::Statements,
         Self::Introduction,
         Self::Sources,
     ];
@@ -66,6 +72,7 @@ impl Page {
             Self::Sky => "Sky",
             Self::Orbits => "Orbits",
             Self::Chronicle => "Chronicle",
+            Self::Statements => "Statements",
             Self::Introduction => "What to look for",
             Self::Sources => "Sources",
         }
@@ -93,6 +100,7 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
         Page::Sky => sky::show(ui, workspace),
         Page::Orbits => orbits::show(ui, workspace),
         Page::Chronicle => chronicle::show(ui, workspace),
+        Page::Statements => statements::show(ui, workspace),
         Page::Introduction => introduction::show(ui, workspace),
         Page::Sources => sources::show(ui, workspace),
     });

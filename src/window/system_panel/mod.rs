@@ -43,7 +43,11 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
 }
 
 /// An edit of a copy of the scenario, with the words that undo will use.
-pub(super) fn edit(label: impl Into<String>, scenario: &Scenario, change: impl FnOnce(&mut Scenario)) -> Command {
+pub(in crate::window) fn edit(
+    label: impl Into<String>,
+    scenario: &Scenario,
+    change: impl FnOnce(&mut Scenario),
+) -> Command {
     let mut changed = scenario.clone();
     change(&mut changed);
     Command::Edit(Edit { label: label.into(), scenario: Box::new(changed) })

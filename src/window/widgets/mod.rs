@@ -8,3 +8,4 @@ pub(crate) mod icon;
 pub(crate) mod state_mark;
 pub(crate) mod text_entry;
 pub(crate) mod value_entry;
+pub(crate) mod verdict_mark;

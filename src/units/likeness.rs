@@ -4,7 +4,7 @@
 ///
 /// Words that differ only in the unit at their end are alike; else up to a third of the letters may differ.
 #[must_use]
-pub(super) fn likest(written: &str, known: &[&'static str]) -> Option<&'static str> {
+pub fn likest<'k>(written: &str, known: &[&'k str]) -> Option<&'k str> {
     if written.chars().count() > 60 {
         return None;
     }
