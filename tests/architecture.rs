@@ -42,7 +42,7 @@ const UNIT_ENDS: &str = "_k _m _au _rsun _rearth _kg _msun _mearth _w _lsun _w_m
 /// Last words of names that are numbers without a unit.
 const PURE_ENDS: &str = "fraction share factor ratio efficiency albedo eccentricity emissivity index quality exponent";
 /// Whole names without a unit.
-const PURE_NAMES: &str = "x y z duv degree value lowest highest height ultraviolet visible infrared air_mass air_masses \
+const PURE_NAMES: &str = "x y z duv degree value difference lowest highest height ultraviolet visible infrared air_mass air_masses \
     molecular_mass optical_depth optical_depth_550 heavy_elements envelope_measure relative_brightness most_decades text_scale \
     quality_high quality_low love_number place visibility";
 /// Where names of numbers are free: formulas in the letters of their paper, and places on a picture.

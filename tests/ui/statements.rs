@@ -90,9 +90,10 @@ fn rows_are_edited_moved_and_removed() {
     driver.click("Move statement 2 up");
     assert_eq!(lines(&driver), [FALSE, TRUE]);
     driver.click("Edit statement 1");
+    driver.enter("Remark on statement 1", "from the draft, page 3");
     driver.enter("Statement 1", "star radius at now is at most 5 Rsun");
     assert_eq!(lines(&driver)[0], "star radius at now is at most 5 Rsun");
-    driver.enter("Note of statement 1", "from the draft, page 3");
+    assert!(driver.shows("Remark: from the draft, page 3"));
     assert_eq!(driver.workspace().scenario().statements[0].note, "from the draft, page 3");
     driver.click("Remove statement 2");
     assert_eq!(lines(&driver).len(), 1);

@@ -37,8 +37,19 @@ pub(super) fn row(ui: &mut Ui, workspace: &Workspace, index: usize) -> Vec<Comma
             LineEntry::GivenUp => keep_draft::<bool>(ui, editing, None),
             LineEntry::Nothing => {}
         }
+        ui.horizontal(|ui| {
+            ui.label(RichText::new("Remark").font(small()).color(palette.dim));
+            let name = format!("Remark on statement {number}");
+            let width = (ui.available_width() - 12.0).max(80.0);
+            if let Some(note) = text_entry(ui, palette, &name, &statement.note, LONGEST_NOTE, width) {
+                commands.push(change(workspace, index, "Change the remark on", move |row| row.note = note));
+            }
+        });
     } else {
         headline(ui, workspace, number, &line, judged);
+        if !statement.note.is_empty() {
+            ui.label(RichText::new(format!("Remark: {}", statement.note)).color(palette.text));
+        }
     }
     if let Some(judged) = judged {
         ui.label(RichText::new(format!("Model: {}", model_text(judged))).color(palette.text));
@@ -72,12 +83,6 @@ pub(super) fn row(ui: &mut Ui, workspace: &Workspace, index: usize) -> Vec<Comma
             keep_draft(ui, editing, Some(true));
         }
         commands.extend(places(ui, workspace, index));
-        let name = format!("Note of statement {number}");
-        if let Some(note) =
-            text_entry(ui, palette, &name, &statement.note, LONGEST_NOTE, ui.available_width().clamp(80.0, 260.0))
-        {
-            commands.push(change(workspace, index, "Change the note of", move |row| row.note = note));
-        }
     });
     ui.separator();
     commands
