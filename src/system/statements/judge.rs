@@ -196,17 +196,15 @@ fn find(statement: &Statement, history: &History, body: Body) -> Finding {
             }
             None => Finding::none("star_life", "the star shines on beyond all that is computed".to_owned()),
         },
-        Quantity::Duration(phase) => match duration(history, *phase) {
-            Some((from_yr, span_yr)) => {
-                let known = range_of_span(history, span_yr);
-                with_dates_remark(Finding::span(life_method(history), span_yr, Some(known), Some(from_yr)), history)
-            }
-            None => {
+        Quantity::Duration(phase) => {
+            let Some((from_yr, span_yr)) = duration(history, *phase) else {
                 let is_ever = history.spans().iter().any(|span| span.phase == *phase);
                 let reason = if is_ever { "the star stays in it for good" } else { "the star is never in this phase" };
-                Finding::none("star_life", reason.to_owned())
-            }
-        },
+                return Finding::none("star_life", reason.to_owned());
+            };
+            let known = range_of_span(history, span_yr);
+            with_dates_remark(Finding::span(life_method(history), span_yr, Some(known), Some(from_yr)), history)
+        }
         Quantity::MildTime | Quantity::LongestMildTime | Quantity::HabitableZoneTime => {
             span_finding(statement, history, body)
         }
@@ -256,13 +254,13 @@ fn figure_finding(statement: &Statement, key: FigureKey, history: &History, body
         When::At(moment) => {
             return match time_of(moment, history) {
                 Err(reason) => Finding::none(any_method(&statement.quantity), reason),
-                Ok(time_yr) => match reader.at(key, time_yr) {
-                    Some(reading) => finding_of(&reader, key, Timed { time_yr, reading }),
-                    None => {
+                Ok(time_yr) => reader.at(key, time_yr).map_or_else(
+                    || {
                         let method = method_at(&reader, key, time_yr);
                         Finding { time_yr: Some(time_yr), ..Finding::none(method, reader.why_none(time_yr)) }
-                    }
-                },
+                    },
+                    |reading| finding_of(&reader, key, Timed { time_yr, reading }),
+                ),
             };
         }
         When::Ever(during) | When::Always(during) | When::Life(during) => during.as_ref(),

@@ -355,8 +355,8 @@ fn value(text: &str, kind: EntryKind) -> Result<f64, LineFault> {
 
 /// What follows the number at the start of a text.
 fn unit_of(text: &str) -> &str {
-    let ends = text.char_indices().map(|(at, sign)| at + sign.len_utf8());
-    let number = ends.filter(|end| parse_number(&text[..*end]).is_some()).last().unwrap_or(0);
+    let mut ends = text.char_indices().rev().map(|(at, sign)| at + sign.len_utf8());
+    let number = ends.find(|end| parse_number(&text[..*end]).is_some()).unwrap_or(0);
     text[number..].trim()
 }
 

@@ -157,7 +157,7 @@ pub(super) fn by_form(ui: &mut Ui, workspace: &Workspace) -> Option<Statement> {
             let before = chosen.body.clone();
             pick(ui, "Body of the new statement", &mut chosen.body, &bodies);
             if (before == "star") != (chosen.body == "star") {
-                chosen.quantity = quantities(chosen.body == "star")[0].clone();
+                chosen.quantity.clone_from(&quantities(chosen.body == "star")[0]);
             }
             if chosen.is_of_an_event() {
                 text(ui, "Event of the new statement", &mut chosen.time, "engulfed by the star");
