@@ -3,7 +3,7 @@
 use crate::driver::{CTRL, Driver};
 use egui::{Key, Modifiers, OutputCommand};
 use longember::document::Scenario;
-use longember::system::statements::{Verdict, judge, parse_statement};
+use longember::system::statements::{Statement, Verdict, judge, parse_statement};
 use longember::window::Page;
 
 const TRUE: &str = "star luminosity at now is about 1 Lsun";
@@ -22,7 +22,7 @@ fn page(lines: &[&str]) -> Driver {
 }
 
 fn lines(driver: &Driver) -> Vec<String> {
-    driver.workspace().scenario().statements.iter().map(|statement| statement.line()).collect()
+    driver.workspace().scenario().statements.iter().map(Statement::line).collect()
 }
 
 #[test]
