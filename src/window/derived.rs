@@ -3,8 +3,9 @@
 use super::view::{View, WHOLE};
 use crate::figure::curves::Curve;
 use crate::figure::ribbon::LightRange;
-use crate::figure::{Chart, Ribbon, Samples};
+use crate::figure::{Chart, HrDiagram, Ribbon, Samples};
 use crate::system::{History, TimeAxis, TimeScale};
+use std::cell::OnceCell;
 use std::sync::Arc;
 
 /// Places at which a view is read: more than the pixels of a usual screen would not be seen.
@@ -27,6 +28,7 @@ pub(super) struct Derived {
     view: View,
     curves: Vec<Curve>,
     light: LightRange,
+    hr_diagram: OnceCell<HrDiagram>,
 }
 
 impl Derived {
@@ -44,7 +46,13 @@ impl Derived {
             view,
             curves: curves.to_vec(),
             light,
+            hr_diagram: OnceCell::new(),
         }
+    }
+
+    /// The Hertzsprung-Russell diagram of the whole life, made when it is first asked for.
+    pub(super) fn hr_diagram(&self) -> &HrDiagram {
+        self.hr_diagram.get_or_init(|| HrDiagram::new(&self.history))
     }
 
     /// Makes anew only what changed.

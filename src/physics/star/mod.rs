@@ -35,5 +35,6 @@ pub use phase::{Phase, PhaseSpan};
 pub use state::{StarState, effective_temperature_k};
 pub use track::Track;
 pub use whole::{
-    COMPUTED_BELOW_MSUN, FITTED_FROM_MSUN, Interior, LifeOptions, NoProfile, STRUCTURE_VERSION, WholeLife, quick_look,
+    COMPUTED_BELOW_MSUN, FITTED_FROM_MSUN, Interior, LifeOptions, NoProfile, STRUCTURE_VERSION, WholeLife, ZeroAgeStar,
+    quick_look, zero_age_line,
 };

@@ -5,6 +5,7 @@ mod chronicle;
 mod curves;
 mod interior;
 mod interior_plot;
+mod hr_diagram;
 mod introduction;
 mod light_columns;
 mod orbits;
@@ -30,6 +31,8 @@ pub enum Page {
     /// Strip charts over one shared time axis.
     #[default]
     Curves,
+    /// Luminosity over temperature.
+    HrDiagram,
     /// The star's spectrum, brightness and colour in numbers.
     Spectrum,
     /// The star's layers.
@@ -50,8 +53,9 @@ pub enum Page {
 
 impl Page {
     /// Every page, in order.
-    pub const ALL: [Self; 9] = [
+    pub const ALL: [Self; 10] = [
         Self::Curves,
+        Self::HrDiagram,
         Self::Spectrum,
         Self::Interior,
         Self::Orbits,
@@ -67,6 +71,7 @@ impl Page {
     pub fn name(self) -> &'static str {
         match self {
             Self::Curves => "Curves",
+            Self::HrDiagram => "HR diagram",
             Self::Spectrum => "Spectrum",
             Self::Interior => "Interior",
             Self::Sky => "Sky",
@@ -95,6 +100,7 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
     workspace.chart_line_foot = None;
     commands.extend(match workspace.page {
         Page::Curves => curves::show(ui, workspace),
+        Page::HrDiagram => hr_diagram::show(ui, workspace),
         Page::Spectrum => spectrum::show(ui, workspace),
         Page::Interior => interior::show(ui, workspace),
         Page::Sky => sky::show(ui, workspace),

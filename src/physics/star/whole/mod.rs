@@ -15,8 +15,10 @@ mod no_profile;
 pub mod quick_look;
 mod told;
 mod version;
+mod zero_age;
 
 pub use interior::Interior;
 pub use life::{COMPUTED_BELOW_MSUN, FITTED_FROM_MSUN, LifeOptions, WholeLife};
 pub use no_profile::NoProfile;
 pub use version::STRUCTURE_VERSION;
+pub use zero_age::{ZeroAgeStar, zero_age_line};
