@@ -111,6 +111,24 @@ impl Session {
         self.path.as_deref()
     }
 
+    /// The scenario as it was saved or opened last; none when it never was.
+    #[must_use]
+    pub fn saved(&self) -> Option<&Scenario> {
+        self.saved.as_ref()
+    }
+
+    /// Whether another program wrote the file since it was read or written here.
+    #[must_use]
+    pub fn is_changed_elsewhere(&self) -> bool {
+        let bytes = self.path.as_deref().and_then(|path| fs::read(path).ok());
+        bytes.is_some() && bytes != self.known_bytes
+    }
+
+    /// Takes the file as it is now for known: it may be replaced by saving.
+    pub fn accept_file(&mut self) {
+        self.known_bytes = self.path.as_deref().and_then(|path| fs::read(path).ok());
+    }
+
     /// Whether there is something that closing would lose.
     #[must_use]
     pub fn is_dirty(&self) -> bool {

@@ -12,7 +12,11 @@ use std::path::{Path, PathBuf};
 /// More recent files than this are not remembered.
 pub const MOST_RECENT_FILES: usize = 10;
 /// Permitted enlargements of all text, dimensionless.
-pub const TEXT_SCALE_RANGE: (f64, f64) = (0.75, 2.5);
+pub const TEXT_SCALE_RANGE: (f64, f64) = (0.75, 3.0);
+/// Permitted widths of the panels beside the stage, in logical pixels.
+pub const SIDE_WIDTH_RANGE: (f64, f64) = (220.0, 420.0);
+/// Usual width of the panels beside the stage, in logical pixels.
+const SIDE_WIDTH_PX: f64 = 252.0;
 /// Permitted widths and heights of the window, in logical pixels.
 pub const WINDOW_SIDE_RANGE: (f64, f64) = (320.0, 16384.0);
 
@@ -63,6 +67,14 @@ pub struct Settings {
     pub window_size_px: (f64, f64),
     /// The window fills the screen.
     pub is_maximised: bool,
+    /// The panel of the inputs is shown.
+    pub shows_system: bool,
+    /// The panel of the figures at the moment is shown.
+    pub shows_moment: bool,
+    /// Width of the panel of the inputs, in logical pixels.
+    pub system_width_px: f64,
+    /// Width of the panel of the figures, in logical pixels.
+    pub moment_width_px: f64,
     /// The folder file dialogs begin in.
     pub folder: Option<PathBuf>,
     /// Files opened or saved lately, the latest first.
@@ -82,6 +94,10 @@ impl Default for Settings {
             text_scale: 1.0,
             window_size_px: (1280.0, 800.0),
             is_maximised: false,
+            shows_system: true,
+            shows_moment: true,
+            system_width_px: SIDE_WIDTH_PX,
+            moment_width_px: SIDE_WIDTH_PX,
             folder: None,
             recent_files: Vec::new(),
             unknown: Vec::new(),
@@ -199,10 +215,15 @@ impl Settings {
             "window_height_px" => {
                 set(&mut self.window_size_px.1, number(reading, node, "window_height_px", WINDOW_SIDE_RANGE));
             }
-            "is_maximised" => match node.value {
-                Value::Truth(truth) => self.is_maximised = truth,
-                _ => reading.wrong_kind(node, whole, "is_maximised", "true or false".to_owned()),
-            },
+            "is_maximised" => truth(reading, node, "is_maximised", &mut self.is_maximised),
+            "shows_system" => truth(reading, node, "shows_system", &mut self.shows_system),
+            "shows_moment" => truth(reading, node, "shows_moment", &mut self.shows_moment),
+            "system_width_px" => {
+                set(&mut self.system_width_px, number(reading, node, "system_width_px", SIDE_WIDTH_RANGE));
+            }
+            "moment_width_px" => {
+                set(&mut self.moment_width_px, number(reading, node, "moment_width_px", SIDE_WIDTH_RANGE));
+            }
             "folder" => self.folder = reading.text(node, whole, "folder").map(PathBuf::from),
             "recent_files" => {
                 let items = reading.list(node, whole, "recent_files").unwrap_or_default();
@@ -226,6 +247,10 @@ impl Settings {
         writer.number("window_width_px", in_range(self.window_size_px.0, WINDOW_SIDE_RANGE, 1280.0));
         writer.number("window_height_px", in_range(self.window_size_px.1, WINDOW_SIDE_RANGE, 800.0));
         writer.field("is_maximised", &self.is_maximised.to_string());
+        writer.field("shows_system", &self.shows_system.to_string());
+        writer.field("shows_moment", &self.shows_moment.to_string());
+        writer.number("system_width_px", in_range(self.system_width_px, SIDE_WIDTH_RANGE, SIDE_WIDTH_PX));
+        writer.number("moment_width_px", in_range(self.moment_width_px, SIDE_WIDTH_RANGE, SIDE_WIDTH_PX));
         // A path that is no text can't be written down.
         if let Some(folder) = self.folder.as_deref().and_then(Path::to_str) {
             writer.string("folder", folder);
@@ -246,6 +271,13 @@ impl Settings {
 fn set(target: &mut f64, value: Option<f64>) {
     if let Some(value) = value {
         *target = value;
+    }
+}
+
+fn truth(reading: &mut Reading<'_>, node: &Node, key: &'static str, target: &mut bool) {
+    match node.value {
+        Value::Truth(truth) => *target = truth,
+        _ => reading.wrong_kind(node, &Subject::Whole, key, "true or false".to_owned()),
     }
 }
 

@@ -115,6 +115,15 @@ impl HrDiagram {
         Some([1.0 - self.temperature.height(temperature_k)?, self.luminosity.height(luminosity_lsun)?])
     }
 
+    /// The way of another star on this diagram, for comparison.
+    #[must_use]
+    pub fn path(&self, other: &History) -> Vec<Vec<[f64; 2]>> {
+        super::chart::runs(states(other).iter().map(|state| {
+            let state = state.as_ref()?;
+            self.place(state.temperature_k, state.luminosity_lsun)
+        }))
+    }
+
     /// Temperature, K, luminosity and radius, in solar units, at a place.
     #[must_use]
     pub fn reading(&self, [left, bottom]: [f64; 2]) -> [f64; 3] {

@@ -11,6 +11,7 @@ mod comma_separated;
 mod dated_events;
 mod enhanced_table;
 mod fact_sheet;
+mod figure_sentence;
 mod figures;
 mod history_table;
 mod instant_json;
@@ -27,6 +28,7 @@ pub use checked_statements::{JudgedStatement, checked_json, checked_text, model_
 pub use dated_events::{doubt, events_csv, events_json, events_text};
 pub use fact_sheet::{FactSheet, fact_sheet, sheet_html, sheet_markdown, sheet_text};
 pub use history_table::{TableRequest, table_csv, table_ecsv, table_json};
+pub use figure_sentence::FigureSentence;
 pub use instant_json::instant_json;
 pub use instant_text::instant_text;
 pub use named_list::named_list;

@@ -8,6 +8,7 @@ use super::theme::{self, GRID};
 use super::workspace::Workspace;
 use super::{fonts, life_strip, menu_bar, moment_panel, pages, system_panel};
 use crate::document::recovery::Recovered;
+use crate::document::settings::{SIDE_WIDTH_RANGE, TEXT_SCALE_RANGE};
 use crate::document::{LifeStore, Scenario, Session, Settings};
 use crate::system::{History, HistoryError};
 use egui::{CentralPanel, Context, Frame, Margin, Panel, Ui, ViewportCommand};
@@ -44,6 +45,8 @@ impl Longember {
             workspace.job.start(system, context);
         }
         theme::apply(context, workspace.theme());
+        // Larger and smaller text are commands of ours, within a range that is kept.
+        context.options_mut(|options| options.zoom_with_keyboard = false);
         context.set_zoom_factor(workspace.settings.text_scale as f32);
         Ok(Self {
             workspace,
@@ -102,6 +105,7 @@ impl Longember {
         {
             self.workspace.say_error(sentence);
         }
+        self.watch_file(&context);
         self.watch_closing(&context);
         self.show_title(&context);
         self.note_window(&context);
@@ -110,7 +114,7 @@ impl Longember {
     /// Size of window and text for the next start; written when the window closes.
     fn note_window(&mut self, context: &Context) {
         let settings = &mut self.workspace.settings;
-        settings.text_scale = f64::from(context.zoom_factor());
+        settings.text_scale = f64::from(context.zoom_factor()).clamp(TEXT_SCALE_RANGE.0, TEXT_SCALE_RANGE.1);
         context.input(|input| {
             let viewport = input.viewport();
             settings.is_maximised = viewport.maximized.unwrap_or(false);
@@ -132,13 +136,22 @@ impl Longember {
             dim_when_stale(ui, &self.workspace);
             commands.extend(life_strip::show(ui, &self.workspace));
         });
-        Panel::left("system").frame(side).exact_size(system_panel::WIDTH).resizable(false).show(ui, |ui| {
-            commands.extend(system_panel::show(ui, &self.workspace));
-        });
-        Panel::right("moment").frame(side).exact_size(moment_panel::WIDTH).resizable(false).show(ui, |ui| {
-            dim_when_stale(ui, &self.workspace);
-            commands.extend(moment_panel::show(ui, &self.workspace));
-        });
+        let settings = &self.workspace.settings;
+        let [system_px, moment_px] = [settings.system_width_px, settings.moment_width_px].map(|width| width as f32);
+        let widths = (SIDE_WIDTH_RANGE.0 as f32)..=(SIDE_WIDTH_RANGE.1 as f32);
+        if settings.shows_system {
+            let panel = Panel::left("system").frame(side).default_size(system_px).size_range(widths.clone());
+            let shown = panel.show(ui, |ui| commands.extend(system_panel::show(ui, &self.workspace)));
+            self.workspace.settings.system_width_px = f64::from(shown.response.rect.width());
+        }
+        if self.workspace.settings.shows_moment {
+            let panel = Panel::right("moment").frame(side).default_size(moment_px).size_range(widths);
+            let shown = panel.show(ui, |ui| {
+                dim_when_stale(ui, &self.workspace);
+                commands.extend(moment_panel::show(ui, &self.workspace));
+            });
+            self.workspace.settings.moment_width_px = f64::from(shown.response.rect.width());
+        }
         let stage = Frame::new().fill(palette.ground).inner_margin(Margin::symmetric(3 * GRID as i8, GRID as i8));
         CentralPanel::default().frame(stage).show(ui, |ui| {
             dim_when_stale(ui, &self.workspace);
@@ -174,6 +187,15 @@ impl Longember {
         workspace.moment_yr = workspace.playback.advance(&workspace.derived.axis, workspace.moment_yr, elapsed_s);
         self.keep_moment_in_view();
         context.request_repaint_after(PLAY_FRAME);
+    }
+
+    /// Coming back to the window is the moment to see that another program wrote the file.
+    fn watch_file(&mut self, context: &Context) {
+        let comes_back =
+            context.input(|input| input.events.iter().any(|event| matches!(event, egui::Event::WindowFocused(true))));
+        if comes_back && self.workspace.dialog.is_none() && self.workspace.session.is_changed_elsewhere() {
+            self.workspace.dialog = Some(Dialog::ChangedElsewhere);
+        }
     }
 
     /// Closing waits while there is unsaved work.

@@ -30,12 +30,18 @@ pub enum Command {
     AskSaveAs,
     /// Save to this file.
     SaveAs(PathBuf),
+    /// Bring back the scenario as it was saved last; can be undone.
+    Revert,
     /// Close the window.
     Quit,
     /// Take an edit back.
     Undo,
     /// Do an edit again.
     Redo,
+    /// Keep the system as it is as a pale reference on charts and beside figures.
+    Pin,
+    /// Take the reference away.
+    Unpin,
     /// Change the scenario; the label says what changes.
     Edit(Edit),
     /// Go to a moment.
@@ -57,6 +63,12 @@ pub enum Command {
     Select(Body),
     /// Turn to a page of the stage.
     ShowPage(Page),
+    /// Turn pages: one on, one back.
+    TurnPage(i32),
+    /// Show or hide a side panel.
+    TogglePanel(PanelSide),
+    /// Text larger (1), smaller (-1) or as usual (0).
+    ScaleText(i32),
     /// Show or hide a chart.
     ToggleCurve(Curve),
     /// Look at the spectrum in another way.
@@ -79,12 +91,23 @@ pub enum Command {
     Export(Export, PathBuf),
     /// Put the fact sheet of the moment on the clipboard.
     CopySheet,
+    /// Show every command with a field to search.
+    ShowCommands,
     /// Show every key.
     ShowKeys,
     /// Say what this program is.
     ShowAbout,
     /// Stop a computation that takes long.
     CancelComputation,
+}
+
+/// A panel beside the stage.
+#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+pub enum PanelSide {
+    /// The question panel on the left.
+    System,
+    /// The answer panel on the right.
+    Moment,
 }
 
 /// A change of the scenario as a whole value.
@@ -118,6 +141,12 @@ pub enum TimeCommand {
     Now,
     /// Start or stop playing.
     TogglePlay,
+    /// Let a loop begin at the moment.
+    BeginLoop,
+    /// Let a loop end at the moment.
+    EndLoop,
+    /// Play without a loop.
+    ClearLoop,
     /// Seconds that a whole life takes when played.
     SetLifeSeconds(f64),
 }
@@ -161,6 +190,9 @@ pub fn key_bindings() -> Vec<KeyBinding> {
         (none, Key::N, time(TimeCommand::Now), "the scenario's present", false),
         (none, Key::Plus, Command::Zoom { about: f64::NAN, factor: 1.5 }, "zoom in about the moment", false),
         (none, Key::Minus, Command::Zoom { about: f64::NAN, factor: 1.0 / 1.5 }, "zoom out", false),
+        (none, Key::OpenBracket, time(TimeCommand::BeginLoop), "let a loop begin here", false),
+        (none, Key::CloseBracket, time(TimeCommand::EndLoop), "let a loop end here", false),
+        (none, Key::Backslash, time(TimeCommand::ClearLoop), "no loop", false),
         (none, Key::Num0, Command::ShowWhole, "show the whole life", false),
         (none, Key::Num1, Command::SetScale(TimeScale::Paced), "paced time", false),
         (none, Key::Num2, Command::SetScale(TimeScale::Log), "logarithmic time", false),
@@ -172,9 +204,23 @@ pub fn key_bindings() -> Vec<KeyBinding> {
         (command_shift, Key::S, Command::AskSaveAs, "save as", true),
         (command, Key::S, Command::Save, "save", true),
         (command, Key::Q, Command::Quit, "quit", true),
+        (command_shift, Key::Tab, Command::TurnPage(-1), "previous page", true),
+        (command, Key::Tab, Command::TurnPage(1), "next page", true),
+        (command, Key::B, Command::TogglePanel(PanelSide::System), "show or hide the system panel", true),
+        (command, Key::M, Command::TogglePanel(PanelSide::Moment), "show or hide this moment", true),
+        (command_shift, Key::P, Command::Unpin, "take the pinned reference away", true),
+        (command, Key::P, Command::Pin, "pin the system for comparison", true),
+        (command, Key::Plus, Command::ScaleText(1), "larger text", true),
+        (command, Key::Equals, Command::ScaleText(1), "larger text", true),
+        (command, Key::Minus, Command::ScaleText(-1), "smaller text", true),
+        (command, Key::Num0, Command::ScaleText(0), "usual text size", true),
+        (command, Key::K, Command::ShowCommands, "all commands, with a search", true),
         (none, Key::F1, Command::ShowKeys, "all keys", true),
     ];
-    rows.into_iter()
+    let (with_command, plain): (Vec<_>, Vec<_>) = rows.into_iter().partition(|row| row.0.command);
+    with_command
+        .into_iter()
+        .chain(plain)
         .map(|(modifiers, key, command, words, even_while_typing)| KeyBinding {
             shortcut: KeyboardShortcut::new(modifiers, key),
             command,

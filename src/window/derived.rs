@@ -3,7 +3,7 @@
 use super::view::{View, WHOLE};
 use crate::figure::curves::Curve;
 use crate::figure::ribbon::LightRange;
-use crate::figure::{Chart, HrDiagram, Ribbon, Samples};
+use crate::figure::{Chart, HrDiagram, Owner, Ribbon, Samples, Series};
 use crate::system::{History, TimeAxis, TimeScale};
 use std::cell::OnceCell;
 use std::sync::Arc;
@@ -22,6 +22,8 @@ pub(super) struct Derived {
     pub samples: Samples,
     /// The charts on the curves page, in order.
     pub charts: Vec<Chart>,
+    /// Of each chart, the pinned star's curve; empty without a pinned system.
+    pub references: Vec<Vec<Series>>,
     /// The ribbon of the view.
     pub ribbon: Ribbon,
     history: Arc<History>,
@@ -29,6 +31,8 @@ pub(super) struct Derived {
     curves: Vec<Curve>,
     light: LightRange,
     hr_diagram: OnceCell<HrDiagram>,
+    pinned: Option<Arc<History>>,
+    pinned_path: OnceCell<Vec<Vec<[f64; 2]>>>,
 }
 
 impl Derived {
@@ -47,6 +51,9 @@ impl Derived {
             curves: curves.to_vec(),
             light,
             hr_diagram: OnceCell::new(),
+            references: Vec::new(),
+            pinned: None,
+            pinned_path: OnceCell::new(),
         }
     }
 
@@ -55,12 +62,53 @@ impl Derived {
         self.hr_diagram.get_or_init(|| HrDiagram::new(&self.history))
     }
 
+    /// The pinned star's way on the diagram; empty without a pinned system.
+    pub(super) fn pinned_path(&self) -> &[Vec<[f64; 2]>] {
+        self.pinned_path
+            .get_or_init(|| self.pinned.as_deref().map_or_else(Vec::new, |pinned| self.hr_diagram().path(pinned)))
+    }
+
     /// Makes anew only what changed.
-    pub(super) fn update(&mut self, history: &Arc<History>, scale: TimeScale, view: View, curves: &[Curve]) {
-        if !Arc::ptr_eq(history, &self.history) || scale != self.axis.scale() {
+    pub(super) fn update(
+        &mut self,
+        history: &Arc<History>,
+        scale: TimeScale,
+        view: View,
+        curves: &[Curve],
+        pinned: Option<&Arc<History>>,
+    ) {
+        let same = |first: Option<&Arc<History>>, second: Option<&Arc<History>>| match (first, second) {
+            (Some(first), Some(second)) => Arc::ptr_eq(first, second),
+            (None, None) => true,
+            _ => false,
+        };
+        let is_new = !Arc::ptr_eq(history, &self.history) || scale != self.axis.scale();
+        let wants_references =
+            is_new || view != self.view || *curves != self.curves[..] || !same(pinned, self.pinned.as_ref());
+        if is_new {
             *self = Self::new(history, scale, view, curves);
-            return;
+        } else {
+            self.update_charts(history, view, curves);
         }
+        if wants_references {
+            self.pinned = pinned.cloned();
+            self.pinned_path = OnceCell::new();
+            self.references = self.pinned.as_deref().map_or_else(Vec::new, |pinned| self.references_of(pinned));
+        }
+    }
+
+    /// The star's curves of another history at the same ages.
+    fn references_of(&self, pinned: &History) -> Vec<Vec<Series>> {
+        let samples = Samples::new(pinned, &self.axis, self.view.from, self.view.to, SAMPLES);
+        let of_star = |curve: &Curve| {
+            let mut series = curve.chart(&samples).series;
+            series.retain(|series| series.owner == Owner::Star);
+            series
+        };
+        self.curves.iter().map(of_star).collect()
+    }
+
+    fn update_charts(&mut self, history: &Arc<History>, view: View, curves: &[Curve]) {
         let view_changed = view != self.view;
         if view_changed {
             self.samples = Samples::new(history, &self.axis, view.from, view.to, SAMPLES);

@@ -1,18 +1,25 @@
 //! Carries commands out: the one place where the workspace changes.
 
 use super::application::Longember;
-use super::command::{Command, STEP, TimeCommand};
+use super::command::{Command, PanelSide, STEP, TimeCommand};
+use super::dialogs::command_list::Search;
 use super::dialogs::{Dialog, Reply};
 use super::exports::{self, Exported};
 use super::file_dialogs::{Asked, Purpose};
 use super::pages::Page;
+use super::pinned::Pinned;
 use super::theme;
 use super::view::WHOLE;
+use crate::document::settings::TEXT_SCALE_RANGE;
 use crate::document::{SaveError, Session, built_in};
 use crate::system::history::held;
 use crate::system::{Body, System};
 use egui::{Context, ViewportCommand};
 use std::path::Path;
+use std::sync::Arc;
+
+/// One step of the size of all text.
+const TEXT_STEP: f32 = 1.1;
 
 impl Longember {
     /// Carries one command out.
@@ -35,6 +42,25 @@ impl Longember {
             Command::Save => self.save(context),
             Command::AskSaveAs => self.ask(context, Purpose::Save, None),
             Command::SaveAs(path) => self.save_as(&path),
+            Command::Revert => {
+                if let Some(saved) = workspace.session.saved().cloned() {
+                    workspace.session.edit("Revert to saved", |scenario| *scenario = saved);
+                    self.recompute(context);
+                }
+            }
+            Command::ScaleText(step) => {
+                let (least, most) = TEXT_SCALE_RANGE;
+                let scale = if step == 0 { 1.0 } else { context.zoom_factor() * TEXT_STEP.powi(step) };
+                context.set_zoom_factor(scale.clamp(least as f32, most as f32));
+            }
+            Command::TogglePanel(side) => {
+                let shown = match side {
+                    PanelSide::System => &mut workspace.settings.shows_system,
+                    PanelSide::Moment => &mut workspace.settings.shows_moment,
+                };
+                *shown = !*shown;
+                self.keep_settings();
+            }
             Command::Undo => {
                 let before = workspace.scenario().system.clone();
                 if let Some(label) = workspace.session.undo() {
@@ -77,6 +103,8 @@ impl Longember {
                 self.keep_settings();
             }
             Command::SetScale(scale) => {
+                // Its places belong to the old scale.
+                workspace.playback.loop_fractions = None;
                 workspace.scale = scale;
                 workspace.view = WHOLE;
                 scale.key().clone_into(&mut workspace.settings.time_scale);
@@ -107,6 +135,17 @@ impl Longember {
             }
             Command::Select(body) => workspace.selected = body,
             Command::ShowPage(page) => workspace.page = page,
+            Command::TurnPage(by) => workspace.page = workspace.page.turned(by),
+            Command::Pin => {
+                let label = workspace.scenario().title.clone();
+                workspace.say(format!("Pinned: {label}"));
+                workspace.pinned = Some(Pinned { label, history: Arc::clone(&workspace.history) });
+                workspace.refresh();
+            }
+            Command::Unpin => {
+                workspace.pinned = None;
+                workspace.refresh();
+            }
             Command::SetSpectrumView(view) => workspace.spectrum_view = view,
             Command::SetSkyView(view) => workspace.sky_view = view,
             Command::SetLayerScale(scale) => workspace.layer_scale = scale,
@@ -125,6 +164,7 @@ impl Longember {
                 workspace.page = Page::Sources;
                 workspace.wanted_source = Some(method);
             }
+            Command::ShowCommands => workspace.dialog = Some(Dialog::Commands(Search::default())),
             Command::ShowKeys => workspace.dialog = Some(Dialog::Keys),
             Command::ShowAbout => workspace.dialog = Some(Dialog::About),
             _ => {}
@@ -153,6 +193,18 @@ impl Longember {
                 workspace.playback.is_running = starts;
                 // Playing from the end would stop at once; begin anew instead.
                 (starts && now_yr >= workspace.derived.axis.to_yr()).then_some(0.0)
+            }
+            TimeCommand::BeginLoop | TimeCommand::EndLoop => {
+                let fraction = workspace.derived.axis.fraction_at(now_yr);
+                match command {
+                    TimeCommand::BeginLoop => workspace.playback.begin_loop(fraction),
+                    _ => workspace.playback.end_loop(fraction),
+                }
+                None
+            }
+            TimeCommand::ClearLoop => {
+                workspace.playback.loop_fractions = None;
+                None
             }
             TimeCommand::SetLifeSeconds(seconds) => {
                 workspace.playback.life_seconds = seconds;
@@ -310,6 +362,7 @@ impl Longember {
         workspace.view = WHOLE;
         workspace.notice = None;
         workspace.playback.is_running = false;
+        workspace.playback.loop_fractions = None;
         workspace.moment_yr = present_yr;
         self.recompute(context);
     }

@@ -5,6 +5,7 @@ use super::derived::Derived;
 use super::dialogs::Dialog;
 use super::jobs::{ExportJobs, HistoryJob};
 use super::pages::Page;
+use super::pinned::Pinned;
 use super::playback::Playback;
 use super::theme::{self, Palette};
 use super::view::{View, WHOLE};
@@ -60,6 +61,8 @@ pub struct Workspace {
     pub plan_rim_au: Option<f64>,
     /// Groups of events that the chronicle leaves out.
     pub hidden_events: Vec<EventGroup>,
+    /// A system kept as a pale reference.
+    pub pinned: Option<Pinned>,
     /// Playing.
     pub playback: Playback,
     /// Axis, samples, charts and ribbon for the history and view.
@@ -114,6 +117,7 @@ impl Workspace {
             plan_scale: PlanScale::default(),
             plan_rim_au: None,
             hidden_events: Vec::new(),
+            pinned: None,
             playback: Playback::default(),
             derived,
             checked: Checked::default(),
@@ -184,7 +188,8 @@ impl Workspace {
 
     /// Builds axis, samples and charts anew after a change of history, scale, view or charts.
     pub(super) fn refresh(&mut self) {
-        self.derived.update(&self.history, self.scale, self.view, &self.curves);
+        let pinned = self.pinned.as_ref().map(|pinned| &pinned.history);
+        self.derived.update(&self.history, self.scale, self.view, &self.curves, pinned);
     }
 
     /// Says something that needs no answer.

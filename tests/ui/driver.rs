@@ -239,6 +239,13 @@ impl Driver {
         moment_yr
     }
 
+    /// Where the Hertzsprung-Russell diagram is drawn.
+    pub(crate) fn diagram(&self) -> Rect {
+        let nodes = self.named(|label| label.starts_with("Hertzsprung-Russell diagram"));
+        assert_eq!(nodes.len(), 1, "{}", self.everything());
+        nodes[0].rect()
+    }
+
     /// A place on the strip, as a share of its width.
     pub(crate) fn on_strip(&self, share: f32) -> Pos2 {
         let rect = self.the(STRIP).rect();

@@ -2,6 +2,7 @@
 
 #![expect(clippy::expect_used, reason = "a test that cannot go on has failed")]
 
+mod commands;
 mod curves;
 mod dialogs;
 mod driver;

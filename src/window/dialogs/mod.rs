@@ -1,6 +1,8 @@
 //! Dialogs: each waits for one answer.
 
 mod about;
+mod changed_elsewhere;
+pub(super) mod command_list;
 mod keys;
 mod load_problems;
 mod path_entry;
@@ -36,6 +38,10 @@ pub(super) enum Dialog {
         /// The work; taken out once it is settled.
         found: Option<Box<Recovered>>,
     },
+    /// Another program wrote the file.
+    ChangedElsewhere,
+    /// Every command, with a field to search.
+    Commands(command_list::Search),
     /// Every key.
     Keys,
     /// What this program is.
@@ -72,7 +78,9 @@ pub(super) fn show(context: &Context, workspace: &mut Workspace) -> Answer {
         Dialog::Path(_) => ("path", 460.0),
         Dialog::LoadProblems { .. } => ("load_problems", 560.0),
         Dialog::Recovered { .. } => ("recovered", 420.0),
-        Dialog::Keys => ("keys", 520.0),
+        Dialog::ChangedElsewhere => ("changed_elsewhere", 440.0),
+        Dialog::Commands(_) => ("commands", 520.0),
+        Dialog::Keys => ("keys", 560.0),
         Dialog::About => ("about", 440.0),
     };
     let frame = egui::Frame::popup(&context.global_style()).inner_margin(5.0 * GRID);
@@ -84,6 +92,8 @@ pub(super) fn show(context: &Context, workspace: &mut Workspace) -> Answer {
             Dialog::Path(asked) => path_entry::show(ui, workspace, asked),
             Dialog::LoadProblems { file, problems } => load_problems::show(ui, workspace, file, problems),
             Dialog::Recovered { found } => recovered::show(ui, found),
+            Dialog::ChangedElsewhere => changed_elsewhere::show(ui, workspace),
+            Dialog::Commands(search) => command_list::show(ui, workspace, search),
             Dialog::Keys => keys::show(ui, workspace),
             Dialog::About => about::show(ui, workspace),
         }

@@ -24,6 +24,24 @@ pub(super) fn time_ticks(painter: &Painter, band: Rect, workspace: &Workspace) {
     }
 }
 
+/// Brackets around the part that is played in a loop.
+pub(super) fn round(painter: &Painter, band: Rect, workspace: &Workspace) {
+    let Some(ends) = workspace.playback.loop_fractions else { return };
+    let stroke = Stroke::new(2.0, workspace.palette().accent);
+    for (fraction, inwards) in ends.into_iter().zip([5.0, -5.0]) {
+        let place = workspace.view.place_of(fraction);
+        if !(0.0..=1.0).contains(&place) {
+            continue;
+        }
+        let x = band.left() + place as f32 * band.width();
+        let (top, bottom) = (band.top() - 3.0, band.bottom() + 3.0);
+        painter.vline(x, top..=bottom, stroke);
+        for y in [top, bottom] {
+            painter.line_segment([pos2(x, y), pos2(x + inwards, y)], stroke);
+        }
+    }
+}
+
 /// Names of the phases of life under the ages, each within its own stretch.
 pub(super) fn phases(ui: &Ui, band: Rect, workspace: &Workspace) {
     let palette = workspace.palette();

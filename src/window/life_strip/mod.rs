@@ -31,6 +31,7 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
     marks::time_ticks(ui.painter(), band, workspace);
     marks::phases(ui, band, workspace);
     commands.extend(marks::events(ui, band, workspace));
+    marks::round(ui.painter(), band, workspace);
     draw_moment(ui, band, strip.top(), workspace, palette);
     if response.has_focus() {
         ui.painter().rect_stroke(band.expand(2.0), 3.0, Stroke::new(1.0, palette.accent), egui::StrokeKind::Outside);

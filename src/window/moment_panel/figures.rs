@@ -3,14 +3,15 @@
 use crate::system::quantities::{PLANET, STAR};
 use crate::system::{Moment, PlanetMoment};
 use crate::units::number_text::number;
-use crate::units::time_words::short_span;
+use crate::units::time_words::{SpanStyle, short_span, span};
 use crate::window::command::Command;
 use crate::window::theme::{Palette, ROW, usual};
 use crate::window::widgets::figure_row::{FigureRow, UNIT_AND_SPREAD, figure_row};
 use egui::{Align2, Rect, Role, Sense, Ui, WidgetInfo, pos2, vec2};
 
 /// The star's figures.
-pub(super) fn star(ui: &mut Ui, palette: &Palette, moment: &Moment) -> Vec<Command> {
+pub(super) fn star(ui: &mut Ui, palette: &Palette, name: &str, moment: &Moment) -> Vec<Command> {
+    let time = span(moment.time_yr, 4, SpanStyle::Words);
     let mut commands = Vec::new();
     for quantity in STAR {
         let value = (quantity.value)(&moment.star);
@@ -28,6 +29,7 @@ pub(super) fn star(ui: &mut Ui, palette: &Palette, moment: &Moment) -> Vec<Comma
             spread: (quantity.spread)(&moment.star).map(|spread| format!("± {} %", number(100.0 * spread, 2))),
             method: quantity.method,
             unit_room: UNIT_AND_SPREAD,
+            told_of: value.is_some().then_some((name, &time)),
         };
         commands.extend(figure_row(ui, palette, &row));
     }
@@ -35,7 +37,8 @@ pub(super) fn star(ui: &mut Ui, palette: &Palette, moment: &Moment) -> Vec<Comma
 }
 
 /// A planet's figures.
-pub(super) fn planet(ui: &mut Ui, palette: &Palette, planet: &PlanetMoment) -> Vec<Command> {
+pub(super) fn planet(ui: &mut Ui, palette: &Palette, time_yr: f64, planet: &PlanetMoment) -> Vec<Command> {
+    let time = span(time_yr, 4, SpanStyle::Words);
     let mut commands = Vec::new();
     word_row(ui, palette, "State", planet.state.name());
     for quantity in PLANET {
@@ -53,6 +56,7 @@ pub(super) fn planet(ui: &mut Ui, palette: &Palette, planet: &PlanetMoment) -> V
             spread: None,
             method: quantity.method,
             unit_room: UNIT_AND_SPREAD,
+            told_of: Some((&planet.name, &time)),
         };
         commands.extend(figure_row(ui, palette, &row));
     }

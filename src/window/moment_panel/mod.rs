@@ -1,5 +1,6 @@
 //! The answer panel: the star's disc in its true colour, then figures in aligned columns.
 
+mod against;
 mod disc;
 mod figures;
 
@@ -12,16 +13,13 @@ use crate::units::number_text::number;
 use crate::units::time_words::{SpanStyle, span};
 use egui::{RichText, ScrollArea, Ui};
 
-/// Width of the panel, points.
-pub(super) const WIDTH: f32 = 252.0;
-
 /// Draws the panel and returns what it was told.
 pub(super) fn show(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
     let palette = workspace.palette();
     let moment = workspace.moment();
     let mut commands = Vec::new();
     ScrollArea::vertical().auto_shrink(false).show(ui, |ui| {
-        ui.set_width(WIDTH - 8.0 * GRID);
+        ui.set_width(ui.available_width());
         section(ui, palette, "This moment");
         let time = RichText::new(span(moment.time_yr, 4, SpanStyle::Words)).size(LARGE_SIZE).color(palette.text);
         ui.label(time);
@@ -37,12 +35,13 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
         ui.add_space(GRID);
         disc::show(ui, workspace, &moment);
         section(ui, palette, &workspace.scenario().system.star.name);
-        commands.extend(figures::star(ui, palette, &moment));
+        commands.extend(figures::star(ui, palette, &workspace.scenario().system.star.name, &moment));
+        against::show(ui, workspace, &moment);
         if let Body::Planet(index) = workspace.selected
             && let Some(planet) = moment.planets.get(index)
         {
             section(ui, palette, &planet.name);
-            commands.extend(figures::planet(ui, palette, planet));
+            commands.extend(figures::planet(ui, palette, moment.time_yr, planet));
         }
         notes(ui, workspace, &moment);
         commands.extend(next_event(ui, workspace));

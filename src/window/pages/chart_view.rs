@@ -23,7 +23,7 @@ pub(super) struct Frame {
 }
 
 /// Draws a chart.
-pub(super) fn draw(ui: &Ui, frame: &Frame, chart: &Chart, workspace: &Workspace) {
+pub(super) fn draw(ui: &Ui, frame: &Frame, chart: &Chart, references: &[Series], workspace: &Workspace) {
     let palette = workspace.palette();
     let rect = frame.rect;
     let painter = ui.painter();
@@ -46,6 +46,9 @@ pub(super) fn draw(ui: &Ui, frame: &Frame, chart: &Chart, workspace: &Workspace)
             let line = [pos2(rect.left(), y), pos2(rect.right(), y)];
             inside.extend(Shape::dashed_line(&line, Stroke::new(1.0, palette.dim.gamma_multiply(0.7)), 1.5, 4.0));
         }
+    }
+    for run in references.iter().flat_map(|series| &series.runs) {
+        inside.extend(Shape::dashed_line(&place.points(run), Stroke::new(1.4, palette.dim), 6.0, 4.0));
     }
     for series in &chart.series {
         draw_series(&inside, &place, series, palette);

@@ -44,7 +44,8 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
             let rect = Rect::from_min_max(pos2(plot.left(), top + 20.0), pos2(plot.right(), top + height - 8.0));
             let frame =
                 Frame { rect, title_y: top + 9.0, left: area.left(), hover_x: hover.map(|position| position.x) };
-            chart_view::draw(ui, &frame, chart, workspace);
+            let references = workspace.derived.references.get(index).map_or(&[][..], Vec::as_slice);
+            chart_view::draw(ui, &frame, chart, references, workspace);
         }
         let place = workspace.moment_place();
         if (0.0..=1.0).contains(&place) {

@@ -78,6 +78,10 @@ fn draw(ui: &Ui, area: Rect, place: &Places, diagram: &HrDiagram, workspace: &Wo
     inside.circle(sun, 5.0, Color32::TRANSPARENT, Stroke::new(1.2, palette.dim));
     inside.circle_filled(sun, 1.4, palette.dim);
     label(&inside, sun + vec2(9.0, -9.0), "Sun, today", palette.dim, palette, &mut taken);
+    for run in workspace.derived.pinned_path() {
+        let points: Vec<Pos2> = run.iter().map(|at| place.at(*at)).collect();
+        inside.extend(Shape::dashed_line(&points, Stroke::new(1.4, palette.dim), 6.0, 4.0));
+    }
     for run in &diagram.track {
         let points: Vec<Pos2> = run.iter().map(|point| place.at(point.place)).collect();
         inside.add(Shape::line(points.clone(), Stroke::new(5.0, palette.casing)));
@@ -85,6 +89,10 @@ fn draw(ui: &Ui, area: Rect, place: &Places, diagram: &HrDiagram, workspace: &Wo
             let [r, g, b] = point.colour_srgb;
             inside.line_segment([pair[0], pair[1]], Stroke::new(3.0, Color32::from_rgb(r, g, b)));
         }
+    }
+    if let Some(pinned) = &workspace.pinned {
+        let words = format!("dashed: {}", pinned.label);
+        painter.text(pos2(rect.left() + 6.0, rect.bottom() - 10.0), Align2::LEFT_CENTER, words, small(), palette.dim);
     }
     let dot = moment_dot(&inside, place, diagram, workspace, palette);
     if let Some(dot) = dot {

@@ -61,6 +61,7 @@ pub(super) fn figure<T>(
         spread: None,
         method: quantity.method,
         unit_room: UNIT,
+        told_of: None,
     };
     figure_row(ui, palette, &row)
 }

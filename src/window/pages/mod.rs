@@ -66,6 +66,14 @@ impl Page {
         Self::Sources,
     ];
 
+    /// The page so many places on; after the last comes the first.
+    #[must_use]
+    pub fn turned(self, by: i32) -> Self {
+        let count = Self::ALL.len() as i32;
+        let here = Self::ALL.iter().position(|page| *page == self).unwrap_or(0) as i32;
+        Self::ALL[(here + by).rem_euclid(count) as usize]
+    }
+
     /// Name on its tab.
     #[must_use]
     pub fn name(self) -> &'static str {

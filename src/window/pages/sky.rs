@@ -257,7 +257,7 @@ fn star(ui: &mut Ui, palette: &Palette, light: Option<&PlanetLight>) -> Vec<Comm
     for (name, value, digits, symbol, method) in rows {
         let text = value.map_or_else(|| "–".to_owned(), |value| number(value, digits));
         let symbol = if value.is_some() { symbol } else { "" };
-        let row = FigureRow { name, value, text, symbol, spread: None, method, unit_room: UNIT };
+        let row = FigureRow { name, value, text, symbol, spread: None, method, unit_room: UNIT, told_of: None };
         commands.extend(figure_row(ui, palette, &row));
     }
     commands.extend(figures(ui, palette, PLANET_LIGHT, &["star_visual_mag"], light));

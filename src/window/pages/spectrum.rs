@@ -125,7 +125,7 @@ fn plain<'n>(
 ) -> FigureRow<'n> {
     let text = value.map_or_else(|| "–".to_owned(), |value| number(value, digits));
     let symbol = if value.is_some() { symbol } else { "" };
-    FigureRow { name, value, text, symbol, spread: None, method, unit_room: UNIT }
+    FigureRow { name, value, text, symbol, spread: None, method, unit_room: UNIT, told_of: None }
 }
 
 fn colour(ui: &mut Ui, workspace: &Workspace, star: Option<&Starlight>) -> Vec<Command> {

@@ -13,15 +13,12 @@ use crate::document::{LONGEST_TITLE, Scenario};
 use crate::system::Body;
 use egui::{RichText, ScrollArea, Ui};
 
-/// Width of the panel, points.
-pub(super) const WIDTH: f32 = 252.0;
-
 /// Draws the panel and returns what it was told.
 pub(super) fn show(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
     let mut commands = Vec::new();
     let palette = workspace.palette();
     ScrollArea::vertical().auto_shrink(false).show(ui, |ui| {
-        ui.set_width(WIDTH - 8.0 * GRID);
+        ui.set_width(ui.available_width());
         section(ui, palette, "Scenario");
         let scenario = workspace.scenario();
         let width = ui.available_width() - 2.0 * GRID;

@@ -1,5 +1,6 @@
 //! One figure: name, value, unit, spread. A click on it shows the source.
 
+use crate::handover::FigureSentence;
 use crate::units::number_text::number;
 use crate::window::command::Command;
 use crate::window::theme::{Palette, ROW, small, usual};
@@ -26,6 +27,8 @@ pub(crate) struct FigureRow<'a> {
     pub method: &'static str,
     /// Room right of the value.
     pub unit_room: f32,
+    /// Whose figure it is and at what time, in words: for the sentence that can be copied.
+    pub told_of: Option<(&'a str, &'a str)>,
 }
 
 /// Draws a figure and returns what it was told.
@@ -43,7 +46,12 @@ pub(crate) fn figure_row(ui: &mut Ui, palette: &Palette, row: &FigureRow<'_>) ->
     if let Some(spread) = &row.spread {
         painter.text(pos2(rect.right(), y), Align2::RIGHT_CENTER, spread, small(), palette.dim);
     }
-    to_source(response, row.name, full.trim(), row.method)
+    let sentence = row.told_of.map(|(body, time)| {
+        let value = format!("{} {}", row.text, row.symbol);
+        let (spread, method) = (row.spread.as_deref(), row.method);
+        FigureSentence { time, body, name: row.name, value: &value, spread, method }.text()
+    });
+    to_source(response, row.name, full.trim(), sentence, row.method)
 }
 
 /// A row of words in place of a figure.
@@ -96,7 +104,7 @@ pub(crate) fn word_row(ui: &mut Ui, palette: &Palette, row: &WordRow<'_>) -> Opt
         usual(),
         palette.text,
     );
-    to_source(response, full_name, words, method)
+    to_source(response, full_name, words, None, method)
 }
 
 fn row_ground(ui: &mut Ui, palette: &Palette, words: &str) -> (Rect, Response) {
@@ -108,11 +116,23 @@ fn row_ground(ui: &mut Ui, palette: &Palette, words: &str) -> (Rect, Response) {
     (rect, response)
 }
 
-fn to_source(response: Response, name: &str, full: &str, method: &'static str) -> Option<Command> {
+fn to_source(
+    response: Response,
+    name: &str,
+    full: &str,
+    sentence: Option<String>,
+    method: &'static str,
+) -> Option<Command> {
     let mut command = response.clicked().then_some(Command::ShowSource(method));
     response.context_menu(|ui| {
         if ui.button("Copy value").clicked() {
             command = Some(Command::Copy(full.to_owned()));
+            ui.close();
+        }
+        if let Some(sentence) = &sentence
+            && ui.button("Copy sentence with source").clicked()
+        {
+            command = Some(Command::Copy(sentence.clone()));
             ui.close();
         }
         if ui.button("Show source").clicked() {
