@@ -143,6 +143,7 @@ impl Longember {
             let panel = Panel::left("system").frame(side).default_size(system_px).size_range(widths.clone());
             let shown = panel.show(ui, |ui| commands.extend(system_panel::show(ui, &self.workspace)));
             self.workspace.settings.system_width_px = f64::from(shown.response.rect.width());
+            name_edge(ui, "system", "Width of the system panel");
         }
         if self.workspace.settings.shows_moment {
             let panel = Panel::right("moment").frame(side).default_size(moment_px).size_range(widths);
@@ -151,6 +152,7 @@ impl Longember {
                 commands.extend(moment_panel::show(ui, &self.workspace));
             });
             self.workspace.settings.moment_width_px = f64::from(shown.response.rect.width());
+            name_edge(ui, "moment", "Width of the panel of this moment");
         }
         let stage = Frame::new().fill(palette.ground).inner_margin(Margin::symmetric(3 * GRID as i8, GRID as i8));
         CentralPanel::default().frame(stage).show(ui, |ui| {
@@ -236,6 +238,12 @@ impl Longember {
             self.workspace.say_error(error);
         }
     }
+}
+
+/// Names the edge by which a panel is drawn wider: the toolkit calls all of them the same.
+fn name_edge(ui: &Ui, panel: &str, name: &str) {
+    let edge = ui.scope_id().with_salt(egui::IdSalt::new(panel)).with("__resize");
+    ui.ctx().accesskit_node_builder(edge, |node| node.set_label(name));
 }
 
 /// The old figures stay while new ones are made, and look like it.

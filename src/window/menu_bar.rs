@@ -104,7 +104,11 @@ fn item(ui: &mut Ui, offer: &Offer, commands: &mut Vec<Command>) {
             let words = if key.is_empty() { offer.words.clone() } else { format!("{}   {key}", offer.words) };
             ui.radio(is_chosen, words).clicked()
         }
-        None => ui.add_enabled(offer.is_possible, Button::new(&offer.words).shortcut_text(key)).clicked(),
+        None => {
+            let button = Button::new(&offer.words);
+            let button = if key.is_empty() { button } else { button.shortcut_text(key) };
+            ui.add_enabled(offer.is_possible, button).clicked()
+        }
     };
     if clicked {
         commands.push(offer.command.clone());
