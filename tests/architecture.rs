@@ -38,7 +38,7 @@ const CONFINED: [(&str, &[&str]); 14] = [
 ];
 /// Ends of names that say the unit; the Earth, the Sun and the Earth's oceans are units too.
 const UNIT_ENDS: &str = "_k _m _au _rsun _rearth _kg _msun _mearth _w _lsun _w_m2 _s _h _yr _myr _gyr _nm _um _dex _deg _rad _sr \
-    _bar _pc _mag _lx _lm _cd_m2 _m_s2 _kg_m3 _g_cm3 _thz _de00 _earth _over_sun _oceans";
+    _bar _pc _px _mag _lx _lm _cd_m2 _m_s2 _kg_m3 _g_cm3 _thz _de00 _earth _over_sun _oceans";
 /// Last words of names that are numbers without a unit.
 const PURE_ENDS: &str = "fraction share factor ratio efficiency albedo eccentricity emissivity index quality exponent";
 /// Whole names without a unit.
