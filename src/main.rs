@@ -1,27 +1,47 @@
 //! The program: a command line, or the window when no sub-command is given.
 
-use longember::command_line::{self, Outcome, ScenarioSource};
+use longember::command_line::{self, GraphicsChoice, Outcome, ScenarioSource};
 use longember::document::built_in;
-use longember::window::{self, Opening};
-use std::io::Write;
-use std::process::ExitCode;
+use longember::window::{self, Graphics, NoWindow, Opening};
+use std::env;
+use std::io::{self, Write};
+use std::process::{self, ExitCode};
 
 /// Exit code for trouble with a file or the system.
 const SYSTEM_TROUBLE: u8 = 4;
+/// Who draws the window, where the command line leaves it open: for drivers that crash instead of saying no.
+const GRAPHICS: &str = "LONGEMBER_GRAPHICS";
 
 fn main() -> ExitCode {
-    let scenario = match command_line::run(std::env::args_os()) {
+    let (scenario, asked) = match command_line::run(env::args_os()) {
         Outcome::Done(code) => return ExitCode::from(code),
-        Outcome::OpenWindow { scenario } => scenario,
+        Outcome::OpenWindow { scenario, graphics } => (scenario, graphics),
     };
-    match window::run(opening(scenario)) {
+    let of_user = env::var(GRAPHICS).ok().and_then(|name| GraphicsChoice::from_name(&name)).unwrap_or_default();
+    let choice = if asked == GraphicsChoice::Auto { of_user } else { asked };
+    let graphics = if choice == GraphicsChoice::Processor { Graphics::Processor } else { Graphics::OpenGl };
+    match window::run(opening(scenario), graphics) {
         Ok(()) => ExitCode::SUCCESS,
-        Err(error) => {
-            // Nothing is left to try when even standard error is closed.
-            let _ = writeln!(std::io::stderr(), "longember: {error}");
-            ExitCode::from(SYSTEM_TROUBLE)
-        }
+        // An event loop cannot be made twice in one process: a new one draws without OpenGL.
+        Err(NoWindow::NoOpenGl { .. }) if choice == GraphicsChoice::Auto => again_without_opengl(),
+        Err(error) => failed(&error.to_string()),
     }
+}
+
+fn again_without_opengl() -> ExitCode {
+    let started = env::current_exe().and_then(|program| {
+        process::Command::new(program).args(env::args_os().skip(1)).env(GRAPHICS, "processor").status()
+    });
+    match started {
+        Ok(status) => status.code().and_then(|code| u8::try_from(code).ok()).map_or(ExitCode::FAILURE, ExitCode::from),
+        Err(error) => failed(&format!("the window cannot be drawn without OpenGL: {error}")),
+    }
+}
+
+fn failed(sentence: &str) -> ExitCode {
+    // Nothing is left to try when even standard error is closed.
+    let _ = writeln!(io::stderr(), "longember: {sentence}");
+    ExitCode::from(SYSTEM_TROUBLE)
 }
 
 fn opening(scenario: Option<ScenarioSource>) -> Opening {

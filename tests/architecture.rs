@@ -20,11 +20,14 @@ const LAYERS: [(&str, &[&str]); 9] = [
 /// Parts of physics that do not know each other.
 const BRANCHES: [&str; 3] = ["light", "planet", "star"];
 /// Names from outside, and where alone they may stand (beginnings of paths under `src`).
-const CONFINED: [(&str, &[&str]); 14] = [
+const CONFINED: [(&str, &[&str]); 17] = [
     ("eframe", &["window/"]),
     ("egui", &["window/"]),
+    ("egui_winit", &["window/software/"]),
+    ("winit", &["window/software/"]),
+    ("softbuffer", &["window/software/"]),
     ("rfd", &["window/file_dialogs.rs"]),
-    ("std::thread", &["window/file_dialogs.rs", "window/jobs.rs"]),
+    ("std::thread", &["window/file_dialogs.rs", "window/jobs.rs", "window/software/canvas.rs"]),
     ("std::fs", &["document/", "command_line/"]),
     ("std::env", &["document/", "main.rs"]),
     ("std::process", &["document/", "main.rs"]),

@@ -1,10 +1,11 @@
 //! The words of the command line.
 
 use super::destination::Destination;
+use super::outcome::GraphicsChoice;
 use super::scenario_source::ScenarioSource;
 use crate::drawing::{Look, Plot};
 use crate::system::{EventGroup, TimeScale};
-use clap::builder::{OsStringValueParser, PossibleValue, TypedValueParser};
+use clap::builder::{OsStringValueParser, PossibleValue, PossibleValuesParser, TypedValueParser};
 use clap::{Args, Parser, Subcommand, ValueEnum};
 use std::sync::LazyLock;
 
@@ -50,6 +51,9 @@ pub(super) struct Arguments {
     /// Scenario to open in the window: a file or demo:NAME; the demo if none is named
     #[arg(value_name = "SCENARIO", value_parser = source_parser())]
     pub(super) scenario: Option<ScenarioSource>,
+    /// Who draws the window: auto takes OpenGL where it works
+    #[arg(long, value_name = "WHO", default_value = "auto", value_parser = graphics_parser())]
+    pub(super) graphics: GraphicsChoice,
     /// What to do without a window.
     #[command(subcommand)]
     pub(super) command: Option<Command>,
@@ -400,6 +404,11 @@ impl ValueEnum for EventGroupArgument {
 
 fn source_parser() -> impl TypedValueParser<Value = ScenarioSource> {
     OsStringValueParser::new().map(ScenarioSource::parse)
+}
+
+fn graphics_parser() -> impl TypedValueParser<Value = GraphicsChoice> {
+    PossibleValuesParser::new(GraphicsChoice::ALL.map(|(name, _)| name))
+        .map(|name| GraphicsChoice::from_name(&name).unwrap_or_default())
 }
 
 #[cfg(test)]

@@ -13,7 +13,7 @@ mod scenario_source;
 mod streams;
 mod trouble;
 
-pub use outcome::Outcome;
+pub use outcome::{GraphicsChoice, Outcome};
 pub use run::{run, run_with};
 pub use scenario_source::ScenarioSource;
 pub use streams::Streams;

@@ -2,6 +2,29 @@
 
 use super::scenario_source::ScenarioSource;
 
+/// Who is asked to draw the window.
+#[derive(Clone, Copy, Debug, Default, PartialEq, Eq)]
+pub enum GraphicsChoice {
+    /// OpenGL where it works, the processor where it does not.
+    #[default]
+    Auto,
+    /// OpenGL and nothing else.
+    OpenGl,
+    /// The processor, without OpenGL.
+    Processor,
+}
+
+impl GraphicsChoice {
+    /// Every choice, as it is written on the command line.
+    pub const ALL: [(&str, Self); 3] = [("auto", Self::Auto), ("opengl", Self::OpenGl), ("processor", Self::Processor)];
+
+    /// The choice of this name.
+    #[must_use]
+    pub fn from_name(name: &str) -> Option<Self> {
+        Self::ALL.into_iter().find(|(its, _)| *its == name).map(|(_, choice)| choice)
+    }
+}
+
 /// What is to be done after the command line has run.
 #[derive(Clone, Debug, PartialEq, Eq)]
 pub enum Outcome {
@@ -9,6 +32,8 @@ pub enum Outcome {
     OpenWindow {
         /// The scenario asked for; a demo that is named exists, and so does a file.
         scenario: Option<ScenarioSource>,
+        /// Who draws it.
+        graphics: GraphicsChoice,
     },
     /// Everything is done; the process ends with this exit code.
     Done(u8),

@@ -44,8 +44,8 @@ pub fn run(arguments: impl IntoIterator<Item = OsString>) -> Outcome {
 pub fn run_with(arguments: impl IntoIterator<Item = OsString>, streams: &mut Streams<'_>) -> Outcome {
     match Arguments::try_parse_from(arguments) {
         Err(error) => Outcome::Done(tell_about_words(&error, streams)),
-        Ok(Arguments { command: None, scenario }) => match openable(scenario) {
-            Ok(scenario) => Outcome::OpenWindow { scenario },
+        Ok(Arguments { command: None, scenario, graphics }) => match openable(scenario) {
+            Ok(scenario) => Outcome::OpenWindow { scenario, graphics },
             Err(trouble) => Outcome::Done(tell(&trouble, streams)),
         },
         Ok(Arguments { command: Some(command), .. }) => Outcome::Done(match carry_out(command, streams) {

@@ -52,6 +52,25 @@ impl Theme {
     }
 }
 
+/// The panels beside the stage: whether they are shown, and how wide they are.
+#[derive(Clone, Debug, PartialEq)]
+pub struct Panels {
+    /// The panel of the inputs is shown.
+    pub shows_system: bool,
+    /// The panel of the figures at the moment is shown.
+    pub shows_moment: bool,
+    /// Width of the panel of the inputs, in logical pixels.
+    pub system_width_px: f64,
+    /// Width of the panel of the figures, in logical pixels.
+    pub moment_width_px: f64,
+}
+
+impl Default for Panels {
+    fn default() -> Self {
+        Self { shows_system: true, shows_moment: true, system_width_px: SIDE_WIDTH_PX, moment_width_px: SIDE_WIDTH_PX }
+    }
+}
+
 /// A user's preferences.
 #[derive(Clone, Debug, PartialEq)]
 pub struct Settings {
@@ -67,14 +86,8 @@ pub struct Settings {
     pub window_size_px: (f64, f64),
     /// The window fills the screen.
     pub is_maximised: bool,
-    /// The panel of the inputs is shown.
-    pub shows_system: bool,
-    /// The panel of the figures at the moment is shown.
-    pub shows_moment: bool,
-    /// Width of the panel of the inputs, in logical pixels.
-    pub system_width_px: f64,
-    /// Width of the panel of the figures, in logical pixels.
-    pub moment_width_px: f64,
+    /// The panels beside the stage.
+    pub panels: Panels,
     /// The folder file dialogs begin in.
     pub folder: Option<PathBuf>,
     /// Files opened or saved lately, the latest first.
@@ -94,10 +107,7 @@ impl Default for Settings {
             text_scale: 1.0,
             window_size_px: (1280.0, 800.0),
             is_maximised: false,
-            shows_system: true,
-            shows_moment: true,
-            system_width_px: SIDE_WIDTH_PX,
-            moment_width_px: SIDE_WIDTH_PX,
+            panels: Panels::default(),
             folder: None,
             recent_files: Vec::new(),
             unknown: Vec::new(),
@@ -216,13 +226,13 @@ impl Settings {
                 set(&mut self.window_size_px.1, number(reading, node, "window_height_px", WINDOW_SIDE_RANGE));
             }
             "is_maximised" => truth(reading, node, "is_maximised", &mut self.is_maximised),
-            "shows_system" => truth(reading, node, "shows_system", &mut self.shows_system),
-            "shows_moment" => truth(reading, node, "shows_moment", &mut self.shows_moment),
+            "shows_system" => truth(reading, node, "shows_system", &mut self.panels.shows_system),
+            "shows_moment" => truth(reading, node, "shows_moment", &mut self.panels.shows_moment),
             "system_width_px" => {
-                set(&mut self.system_width_px, number(reading, node, "system_width_px", SIDE_WIDTH_RANGE));
+                set(&mut self.panels.system_width_px, number(reading, node, "system_width_px", SIDE_WIDTH_RANGE));
             }
             "moment_width_px" => {
-                set(&mut self.moment_width_px, number(reading, node, "moment_width_px", SIDE_WIDTH_RANGE));
+                set(&mut self.panels.moment_width_px, number(reading, node, "moment_width_px", SIDE_WIDTH_RANGE));
             }
             "folder" => self.folder = reading.text(node, whole, "folder").map(PathBuf::from),
             "recent_files" => {
@@ -247,10 +257,10 @@ impl Settings {
         writer.number("window_width_px", in_range(self.window_size_px.0, WINDOW_SIDE_RANGE, 1280.0));
         writer.number("window_height_px", in_range(self.window_size_px.1, WINDOW_SIDE_RANGE, 800.0));
         writer.field("is_maximised", &self.is_maximised.to_string());
-        writer.field("shows_system", &self.shows_system.to_string());
-        writer.field("shows_moment", &self.shows_moment.to_string());
-        writer.number("system_width_px", in_range(self.system_width_px, SIDE_WIDTH_RANGE, SIDE_WIDTH_PX));
-        writer.number("moment_width_px", in_range(self.moment_width_px, SIDE_WIDTH_RANGE, SIDE_WIDTH_PX));
+        writer.field("shows_system", &self.panels.shows_system.to_string());
+        writer.field("shows_moment", &self.panels.shows_moment.to_string());
+        writer.number("system_width_px", in_range(self.panels.system_width_px, SIDE_WIDTH_RANGE, SIDE_WIDTH_PX));
+        writer.number("moment_width_px", in_range(self.panels.moment_width_px, SIDE_WIDTH_RANGE, SIDE_WIDTH_PX));
         // A path that is no text can't be written down.
         if let Some(folder) = self.folder.as_deref().and_then(Path::to_str) {
             writer.string("folder", folder);

@@ -5,7 +5,7 @@ use crate::physics::light::blackbody_swatch;
 use crate::physics::star::zero_age_line;
 use crate::system::{History, TimeAxis, TimeScale};
 use crate::units::constants::SOLAR_TEMPERATURE_K;
-use crate::units::number_text::number;
+use crate::units::number_text::{number, superscript};
 
 /// Places along the track: paced, so that every visible change gets its share.
 const PLACES: usize = 900;
@@ -174,6 +174,11 @@ fn states(history: &History) -> Vec<Option<State>> {
         .collect()
 }
 
+/// `0.01`, `1000`, farther away `10⁻⁴`.
+fn radius_text(exponent: i32) -> String {
+    if (-3..=3).contains(&exponent) { number(10_f64.powi(exponent), 1) } else { format!("10{}", superscript(exponent)) }
+}
+
 /// Lines of equal radius, a factor of ten apart: L = R² (T/T☉)⁴ in solar units (Stefan-Boltzmann law).
 fn radius_lines(temperature: &ValueAxis, luminosity: &ValueAxis) -> Vec<RadiusLine> {
     let line = |exponent: i32| {
@@ -186,7 +191,7 @@ fn radius_lines(temperature: &ValueAxis, luminosity: &ValueAxis) -> Vec<RadiusLi
         let end = |at_k: f64| Some([1.0 - temperature.height(at_k)?, luminosity.height(light_lsun(at_k))?]);
         let is_long = hot_k > 1.08 * cool_k;
         is_long.then(|| {
-            Some(RadiusLine { label: format!("{} R☉", number(radius_rsun, 1)), ends: [end(hot_k)?, end(cool_k)?] })
+            Some(RadiusLine { label: format!("{} R☉", radius_text(exponent)), ends: [end(hot_k)?, end(cool_k)?] })
         })?
     };
     (-6..=4).filter_map(line).collect()
@@ -195,10 +200,11 @@ fn radius_lines(temperature: &ValueAxis, luminosity: &ValueAxis) -> Vec<RadiusLi
 #[cfg(test)]
 mod tests {
     use super::*;
-    use crate::system::System;
+    use crate::system::{StarSpecification, System};
 
     fn diagram() -> HrDiagram {
-        HrDiagram::new(&History::compute(System::default()).expect("computed"))
+        let system = System { star: StarSpecification::default(), planets: Vec::new() };
+        HrDiagram::new(&History::compute(system).expect("computed"))
     }
 
     #[test]

@@ -111,6 +111,14 @@ impl Longember {
         self.note_window(&context);
     }
 
+    /// The window is gone: keeps what the next start needs.
+    pub(super) fn leave(&mut self) {
+        self.keep_settings();
+        if self.drop_unsaved || !self.workspace.session.is_dirty() {
+            self.keeper.close();
+        }
+    }
+
     /// Size of window and text for the next start; written when the window closes.
     fn note_window(&mut self, context: &Context) {
         let settings = &mut self.workspace.settings;
@@ -137,21 +145,22 @@ impl Longember {
             commands.extend(life_strip::show(ui, &self.workspace));
         });
         let settings = &self.workspace.settings;
-        let [system_px, moment_px] = [settings.system_width_px, settings.moment_width_px].map(|width| width as f32);
+        let [system_px, moment_px] =
+            [settings.panels.system_width_px, settings.panels.moment_width_px].map(|width| width as f32);
         let widths = (SIDE_WIDTH_RANGE.0 as f32)..=(SIDE_WIDTH_RANGE.1 as f32);
-        if settings.shows_system {
+        if settings.panels.shows_system {
             let panel = Panel::left("system").frame(side).default_size(system_px).size_range(widths.clone());
             let shown = panel.show(ui, |ui| commands.extend(system_panel::show(ui, &self.workspace)));
-            self.workspace.settings.system_width_px = f64::from(shown.response.rect.width());
+            self.workspace.settings.panels.system_width_px = f64::from(shown.response.rect.width());
             name_edge(ui, "system", "Width of the system panel");
         }
-        if self.workspace.settings.shows_moment {
+        if self.workspace.settings.panels.shows_moment {
             let panel = Panel::right("moment").frame(side).default_size(moment_px).size_range(widths);
             let shown = panel.show(ui, |ui| {
                 dim_when_stale(ui, &self.workspace);
                 commands.extend(moment_panel::show(ui, &self.workspace));
             });
-            self.workspace.settings.moment_width_px = f64::from(shown.response.rect.width());
+            self.workspace.settings.panels.moment_width_px = f64::from(shown.response.rect.width());
             name_edge(ui, "moment", "Width of the panel of this moment");
         }
         let stage = Frame::new().fill(palette.ground).inner_margin(Margin::symmetric(3 * GRID as i8, GRID as i8));
@@ -271,9 +280,6 @@ impl eframe::App for Longember {
     }
 
     fn on_exit(&mut self, _gl: Option<&eframe::glow::Context>) {
-        self.keep_settings();
-        if self.drop_unsaved || !self.workspace.session.is_dirty() {
-            self.keeper.close();
-        }
+        self.leave();
     }
 }

@@ -63,8 +63,10 @@ pub enum Command {
     Select(Body),
     /// Turn to a page of the stage.
     ShowPage(Page),
-    /// Turn pages: one on, one back.
-    TurnPage(i32),
+    /// Turn to the next page.
+    NextPage,
+    /// Turn to the page before.
+    PreviousPage,
     /// Show or hide a side panel.
     TogglePanel(PanelSide),
     /// Text larger (1), smaller (-1) or as usual (0).
@@ -204,8 +206,8 @@ pub fn key_bindings() -> Vec<KeyBinding> {
         (command_shift, Key::S, Command::AskSaveAs, "save as", true),
         (command, Key::S, Command::Save, "save", true),
         (command, Key::Q, Command::Quit, "quit", true),
-        (command_shift, Key::Tab, Command::TurnPage(-1), "previous page", true),
-        (command, Key::Tab, Command::TurnPage(1), "next page", true),
+        (command_shift, Key::Tab, Command::PreviousPage, "previous page", true),
+        (command, Key::Tab, Command::NextPage, "next page", true),
         (command, Key::B, Command::TogglePanel(PanelSide::System), "show or hide the system panel", true),
         (command, Key::M, Command::TogglePanel(PanelSide::Moment), "show or hide this moment", true),
         (command_shift, Key::P, Command::Unpin, "take the pinned reference away", true),

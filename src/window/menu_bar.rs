@@ -99,16 +99,13 @@ fn submenu(ui: &mut Ui, offers: &[Offer], menu: Menu, commands: &mut Vec<Command
 /// A menu item with its key.
 fn item(ui: &mut Ui, offer: &Offer, commands: &mut Vec<Command>) {
     let key = shortcut_of(&offer.command).map(|shortcut| ui.ctx().format_shortcut(&shortcut)).unwrap_or_default();
-    let clicked = match offer.is_chosen {
-        Some(is_chosen) => {
-            let words = if key.is_empty() { offer.words.clone() } else { format!("{}   {key}", offer.words) };
-            ui.radio(is_chosen, words).clicked()
-        }
-        None => {
-            let button = Button::new(&offer.words);
-            let button = if key.is_empty() { button } else { button.shortcut_text(key) };
-            ui.add_enabled(offer.is_possible, button).clicked()
-        }
+    let clicked = if let Some(is_chosen) = offer.is_chosen {
+        let words = if key.is_empty() { offer.words.clone() } else { format!("{}   {key}", offer.words) };
+        ui.radio(is_chosen, words).clicked()
+    } else {
+        let button = Button::new(&offer.words);
+        let button = if key.is_empty() { button } else { button.shortcut_text(key) };
+        ui.add_enabled(offer.is_possible, button).clicked()
     };
     if clicked {
         commands.push(offer.command.clone());

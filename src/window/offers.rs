@@ -91,8 +91,8 @@ pub fn offers(workspace: &Workspace) -> Vec<Offer> {
         Page::ALL
             .map(|page| Offer::new(Menu::Page, page.name(), Command::ShowPage(page)).choice(workspace.page == page)),
     );
-    all.push(Offer::new(Menu::Page, "Next page", Command::TurnPage(1)).part());
-    all.push(Offer::new(Menu::Page, "Previous page", Command::TurnPage(-1)));
+    all.push(Offer::new(Menu::Page, "Next page", Command::NextPage).part());
+    all.push(Offer::new(Menu::Page, "Previous page", Command::PreviousPage));
     all.extend(of_time(workspace));
     all.push(Offer::new(Menu::Help, "All commands …", Command::ShowCommands));
     all.push(Offer::new(Menu::Help, "All keys", Command::ShowKeys));
@@ -160,10 +160,13 @@ fn of_looks(workspace: &Workspace) -> Vec<Offer> {
         all.push(if index == 0 { offer.part() } else { offer });
     }
     all.push(
-        Offer::new(menu, "System panel", Command::TogglePanel(PanelSide::System)).choice(settings.shows_system).part(),
+        Offer::new(menu, "System panel", Command::TogglePanel(PanelSide::System))
+            .choice(settings.panels.shows_system)
+            .part(),
     );
     all.push(
-        Offer::new(menu, "Panel of this moment", Command::TogglePanel(PanelSide::Moment)).choice(settings.shows_moment),
+        Offer::new(menu, "Panel of this moment", Command::TogglePanel(PanelSide::Moment))
+            .choice(settings.panels.shows_moment),
     );
     all.push(Offer::new(menu, "Larger text", Command::ScaleText(1)).part());
     all.push(Offer::new(menu, "Smaller text", Command::ScaleText(-1)));

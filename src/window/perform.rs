@@ -55,8 +55,8 @@ impl Longember {
             }
             Command::TogglePanel(side) => {
                 let shown = match side {
-                    PanelSide::System => &mut workspace.settings.shows_system,
-                    PanelSide::Moment => &mut workspace.settings.shows_moment,
+                    PanelSide::System => &mut workspace.settings.panels.shows_system,
+                    PanelSide::Moment => &mut workspace.settings.panels.shows_moment,
                 };
                 *shown = !*shown;
                 self.keep_settings();
@@ -135,7 +135,8 @@ impl Longember {
             }
             Command::Select(body) => workspace.selected = body,
             Command::ShowPage(page) => workspace.page = page,
-            Command::TurnPage(by) => workspace.page = workspace.page.turned(by),
+            Command::NextPage => workspace.page = workspace.page.turned(1),
+            Command::PreviousPage => workspace.page = workspace.page.turned(Page::ALL.len() - 1),
             Command::Pin => {
                 let label = workspace.scenario().title.clone();
                 workspace.say(format!("Pinned: {label}"));

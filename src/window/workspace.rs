@@ -7,6 +7,7 @@ use super::jobs::{ExportJobs, HistoryJob};
 use super::pages::Page;
 use super::pinned::Pinned;
 use super::playback::Playback;
+use super::start::Graphics;
 use super::theme::{self, Palette};
 use super::view::{View, WHOLE};
 use crate::document::{Scenario, Session, Settings, Theme};
@@ -69,6 +70,8 @@ pub struct Workspace {
     pub(super) derived: Derived,
     /// Statements judged so far.
     pub(super) checked: Checked,
+    /// Who draws the window.
+    pub graphics: Graphics,
     /// A dialog that waits for an answer.
     pub(super) dialog: Option<Dialog>,
     /// The last message to the user.
@@ -121,6 +124,7 @@ impl Workspace {
             playback: Playback::default(),
             derived,
             checked: Checked::default(),
+            graphics: Graphics::default(),
             dialog: None,
             notice: None,
             wanted_source: None,

@@ -7,7 +7,7 @@ use egui_kittest::{Harness, Node};
 use longember::document::{Scenario, built_in};
 use longember::units::number_text::number;
 use longember::units::time_words::parse_span;
-use longember::window::{Longember, Workspace};
+use longember::window::{Command, Longember, Workspace};
 use std::fmt::Write;
 use std::iter::successors;
 
@@ -61,6 +61,13 @@ impl Driver {
     /// What the window works on.
     pub(crate) fn workspace(&self) -> &Workspace {
         &self.harness.state().workspace
+    }
+
+    /// Tells the window a command, as a menu would.
+    pub(crate) fn tell(&mut self, command: Command) {
+        let context = self.harness.ctx.clone();
+        self.harness.state_mut().perform(&context, command);
+        self.harness.run_steps(2);
     }
 
     /// Draws frames until nothing is being computed and what was asked for is seen.

@@ -16,6 +16,7 @@ mod light_pages;
 mod looks;
 mod opening;
 mod pages;
+mod pictures;
 mod planets;
 mod playing;
 mod statements;

@@ -14,6 +14,7 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace) -> Answer {
         RichText::new("Never look at the Sun without a filter made for it; the colours here say nothing about safety.")
             .color(palette.dim),
     );
+    ui.label(RichText::new(format!("Drawn by {}.", workspace.graphics.name())).color(palette.dim));
     match buttons(ui, &["Close"]) {
         Some(_) => Answer::Close(Vec::new()),
         None => Answer::Wait,

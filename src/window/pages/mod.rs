@@ -68,10 +68,9 @@ impl Page {
 
     /// The page so many places on; after the last comes the first.
     #[must_use]
-    pub fn turned(self, by: i32) -> Self {
-        let count = Self::ALL.len() as i32;
-        let here = Self::ALL.iter().position(|page| *page == self).unwrap_or(0) as i32;
-        Self::ALL[(here + by).rem_euclid(count) as usize]
+    pub fn turned(self, by: usize) -> Self {
+        let here = Self::ALL.iter().position(|page| *page == self).unwrap_or(0);
+        Self::ALL[(here + by) % Self::ALL.len()]
     }
 
     /// Name on its tab.

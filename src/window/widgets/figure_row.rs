@@ -51,7 +51,7 @@ pub(crate) fn figure_row(ui: &mut Ui, palette: &Palette, row: &FigureRow<'_>) ->
         let (spread, method) = (row.spread.as_deref(), row.method);
         FigureSentence { time, body, name: row.name, value: &value, spread, method }.text()
     });
-    to_source(response, row.name, full.trim(), sentence, row.method)
+    to_source(response, row.name, full.trim(), sentence.as_deref(), row.method)
 }
 
 /// A row of words in place of a figure.
@@ -120,7 +120,7 @@ fn to_source(
     response: Response,
     name: &str,
     full: &str,
-    sentence: Option<String>,
+    sentence: Option<&str>,
     method: &'static str,
 ) -> Option<Command> {
     let mut command = response.clicked().then_some(Command::ShowSource(method));
@@ -129,10 +129,10 @@ fn to_source(
             command = Some(Command::Copy(full.to_owned()));
             ui.close();
         }
-        if let Some(sentence) = &sentence
+        if let Some(sentence) = sentence
             && ui.button("Copy sentence with source").clicked()
         {
-            command = Some(Command::Copy(sentence.clone()));
+            command = Some(Command::Copy(sentence.to_owned()));
             ui.close();
         }
         if ui.button("Show source").clicked() {
