@@ -28,8 +28,8 @@ mod widgets;
 mod workspace;
 
 pub use application::Longember;
-pub use exports::Export;
 pub use command::{Command, Edit, PanelSide, TimeCommand, key_bindings};
+pub use exports::Export;
 pub use fonts::{SPECIAL_CHARACTERS, definitions as font_definitions};
 pub use offers::{Menu, Offer, offers};
 pub use pages::Page;

@@ -3,7 +3,8 @@
 //! No picture is kept to compare with: a page is compared with itself at twice the scale, and with what its theme says.
 
 use crate::driver::Driver;
-use egui::{Vec2, vec2};
+use egui::epaint::ImageDelta;
+use egui::{TextureId, TextureOptions, TexturesDelta, Vec2, vec2};
 use longember::document::{Scenario, Theme, built_in};
 use longember::window::software::Canvas;
 use longember::window::{Command, Page, contrast};
@@ -23,7 +24,12 @@ fn painted(driver: &mut Driver, canvas: &mut Canvas, scale: f32) {
     let ground = driver.workspace().palette().ground;
     let primitives = driver.harness.ctx.tessellate(output.shapes.clone(), output.pixels_per_point);
     let pixels = [(SIZE.x * scale) as usize, (SIZE.y * scale) as usize];
-    canvas.paint(pixels, output.pixels_per_point, ground, &primitives, &mut output.textures_delta.clone());
+    // The window uses no texture but the letters; their changes in earlier frames are gone, the whole is not.
+    let letters = driver.harness.ctx.fonts(|fonts| fonts.image());
+    let mut textures = TexturesDelta::default();
+    let whole = ImageDelta::full(letters, TextureOptions::LINEAR);
+    textures.set.insert(TextureId::default(), std::iter::once(whole).collect());
+    canvas.paint(pixels, output.pixels_per_point, ground, &primitives, &mut textures);
 }
 
 fn channels(pixel: u32) -> [f32; 3] {
@@ -41,7 +47,7 @@ fn halved(canvas: &Canvas) -> Vec<[f32; 3]> {
     (0..height / 2).flat_map(|y| (0..width / 2).map(move |x| (2 * x, 2 * y))).map(|(x, y)| mean(x, y)).collect()
 }
 
-/// A blur over nine pixels: letters are set a little differently at another scale.
+/// A blur over nine pixels: letters and lines of text are set a little differently at another scale.
 fn blurred(picture: &[[f32; 3]], width: usize) -> Vec<[f32; 3]> {
     let height = picture.len() / width;
     let at = |x: usize, y: usize| {
@@ -97,7 +103,7 @@ fn every_page_is_seen_in_every_theme_and_looks_alike_at_twice_the_scale() {
                 first.iter().zip(second).map(|(first, second)| (first - second).abs()).fold(0.0, f32::max)
             });
             let far_off = differences.filter(|difference| *difference > 40.0).count() as f32 / once.len() as f32;
-            assert!(far_off < 0.01, "{theme:?}, {page:?}: {far_off} of the window differs between the scales");
+            assert!(far_off < 0.04, "{theme:?}, {page:?}: {far_off} of the window differs between the scales");
         }
     }
 }
@@ -110,5 +116,6 @@ fn the_same_window_is_painted_the_same() {
         painted(&mut driver, &mut canvas, 1.0);
         canvas.rgb()
     });
+    assert!(pictures[0].iter().collect::<HashSet<_>>().len() > 30, "something is painted");
     assert!(pictures[0] == pictures[1], "two runs of one window differ");
 }
