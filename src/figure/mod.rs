@@ -3,8 +3,8 @@
 pub mod chart;
 pub mod curves;
 pub mod distance;
-pub mod interior;
 pub mod hr_diagram;
+pub mod interior;
 pub mod orbit_plan;
 pub mod ribbon;
 pub mod samples;
@@ -13,8 +13,8 @@ pub mod spectrum;
 pub mod value_axis;
 
 pub use chart::{Band, Chart, Level, Owner, Run, Series};
-pub use interior::InteriorPicture;
 pub use hr_diagram::HrDiagram;
+pub use interior::InteriorPicture;
 pub use orbit_plan::OrbitPlan;
 pub use ribbon::Ribbon;
 pub use samples::Samples;

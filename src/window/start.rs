@@ -14,6 +14,8 @@ use thiserror::Error;
 /// Smallest window that still shows everything, points.
 const SMALLEST: egui::Vec2 = vec2(960.0, 600.0);
 
+/// What stands behind most failures to begin at all.
+const NO_DISPLAY: &str = "there is no display, or it does not answer (see DISPLAY and WAYLAND_DISPLAY)";
 /// The program's icon.
 const ICON: &str = include_str!("../../assets/desktop/longember.svg");
 /// Its side, pixels.
@@ -71,6 +73,13 @@ pub enum NoWindow {
     },
 }
 
+impl NoWindow {
+    /// The system has no display for us.
+    pub(super) fn no_display() -> Self {
+        Self::NoDisplay { reason: NO_DISPLAY.to_owned() }
+    }
+}
+
 /// Opens the window and returns when it closes.
 ///
 /// # Errors
@@ -107,7 +116,7 @@ pub fn run(opening: Opening, graphics: Graphics) -> Result<(), NoWindow> {
         Ok(program)
     };
     match graphics {
-        Graphics::Processor => software::run(viewport, Box::new(make)).map_err(|reason| NoWindow::NoDisplay { reason }),
+        Graphics::Processor => software::run(viewport, Box::new(make)),
         Graphics::OpenGl => {
             let options = eframe::NativeOptions { viewport, ..eframe::NativeOptions::default() };
             let created = eframe::run_native(
@@ -119,6 +128,7 @@ pub fn run(opening: Opening, graphics: Graphics) -> Result<(), NoWindow> {
                 eframe::Error::Glutin(_) | eframe::Error::NoGlutinConfigs(..) | eframe::Error::OpenGL(_) => {
                     NoWindow::NoOpenGl { reason: error.to_string() }
                 }
+                eframe::Error::WinitEventLoop(_) => NoWindow::no_display(),
                 other => NoWindow::NoDisplay { reason: other.to_string() },
             })
         }

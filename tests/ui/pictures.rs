@@ -25,7 +25,7 @@ fn painted(driver: &mut Driver, canvas: &mut Canvas, scale: f32) {
     let primitives = driver.harness.ctx.tessellate(output.shapes.clone(), output.pixels_per_point);
     let pixels = [(SIZE.x * scale) as usize, (SIZE.y * scale) as usize];
     // The window uses no texture but the letters; their changes in earlier frames are gone, the whole is not.
-    let letters = driver.harness.ctx.fonts(|fonts| fonts.image());
+    let letters = driver.harness.ctx.fonts(egui::epaint::FontsView::image);
     let mut textures = TexturesDelta::default();
     let whole = ImageDelta::full(letters, TextureOptions::LINEAR);
     textures.set.insert(TextureId::default(), std::iter::once(whole).collect());

@@ -92,7 +92,7 @@ fn draw(ui: &Ui, area: Rect, place: &Places, diagram: &HrDiagram, workspace: &Wo
     }
     if let Some(pinned) = &workspace.pinned {
         let words = format!("dashed: {}", pinned.label);
-        painter.text(pos2(rect.left() + 6.0, rect.bottom() - 10.0), Align2::LEFT_CENTER, words, small(), palette.dim);
+        painter.text(pos2(area.left() + 120.0, area.top() + 7.0), Align2::LEFT_CENTER, words, small(), palette.dim);
     }
     let dot = moment_dot(&inside, place, diagram, workspace, palette);
     if let Some(dot) = dot {

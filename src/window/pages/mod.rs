@@ -3,9 +3,9 @@
 mod chart_view;
 mod chronicle;
 mod curves;
+mod hr_diagram;
 mod interior;
 mod interior_plot;
-mod hr_diagram;
 mod introduction;
 mod light_columns;
 mod orbits;

@@ -1,7 +1,7 @@
 //! The window of the system without OpenGL: events in, frames out, nothing between them.
 
 use super::canvas::Canvas;
-use crate::window::Longember;
+use crate::window::{Longember, NoWindow};
 use egui::{Context, ViewportBuilder, ViewportCommand, ViewportEvent, ViewportId, ViewportInfo};
 use egui_winit::accesskit_winit::{Event as AccessEvent, WindowEvent as AccessWindowEvent};
 use egui_winit::{ActionRequested, State};
@@ -58,9 +58,9 @@ struct Runner {
 /// Opens the window and returns when it closes.
 ///
 /// # Errors
-/// What the system says, when no window can be opened.
-pub(in crate::window) fn run(viewport: ViewportBuilder, make: Make) -> Result<(), String> {
-    let event_loop = EventLoop::<Message>::with_user_event().build().map_err(|error| error.to_string())?;
+/// [`NoWindow`] with what the system says.
+pub(in crate::window) fn run(viewport: ViewportBuilder, make: Make) -> Result<(), NoWindow> {
+    let event_loop = EventLoop::<Message>::with_user_event().build().map_err(|_| NoWindow::no_display())?;
     let context = Context::default();
     let proxy = event_loop.create_proxy();
     let sender = proxy.clone();
@@ -69,11 +69,12 @@ pub(in crate::window) fn run(viewport: ViewportBuilder, make: Make) -> Result<()
         let _ = sender.send_event(Message::RepaintAt(Instant::now() + request.delay));
     });
     let mut runner = Runner { context, viewport, make: Some(make), shown: None, next: None, proxy, trouble: None };
-    event_loop.run_app(&mut runner).map_err(|error| error.to_string())?;
+    let failed = |reason: String| NoWindow::NoDisplay { reason };
+    event_loop.run_app(&mut runner).map_err(|error| failed(error.to_string()))?;
     if let Some(shown) = &mut runner.shown {
         shown.program.leave();
     }
-    runner.trouble.map_or(Ok(()), Err)
+    runner.trouble.map_or(Ok(()), |reason| Err(failed(reason)))
 }
 
 impl Runner {
