@@ -3,7 +3,7 @@
 //! No picture is kept to compare with: a page is compared with itself at twice the scale, and with what its theme says.
 
 use crate::driver::Driver;
-use egui::epaint::ImageDelta;
+use egui::epaint::{FontsView, ImageDelta};
 use egui::{TextureId, TextureOptions, TexturesDelta, Vec2, vec2};
 use longember::document::{Scenario, Theme, built_in};
 use longember::window::software::Canvas;
@@ -25,7 +25,7 @@ fn painted(driver: &mut Driver, canvas: &mut Canvas, scale: f32) {
     let primitives = driver.harness.ctx.tessellate(output.shapes.clone(), output.pixels_per_point);
     let pixels = [(SIZE.x * scale) as usize, (SIZE.y * scale) as usize];
     // The window uses no texture but the letters; their changes in earlier frames are gone, the whole is not.
-    let letters = driver.harness.ctx.fonts(egui::epaint::FontsView::image);
+    let letters = driver.harness.ctx.fonts(|fonts: &FontsView<'_>| fonts.image());
     let mut textures = TexturesDelta::default();
     let whole = ImageDelta::full(letters, TextureOptions::LINEAR);
     textures.set.insert(TextureId::default(), std::iter::once(whole).collect());
