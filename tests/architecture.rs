@@ -14,7 +14,7 @@ const LAYERS: [(&str, &[&str]); 9] = [
     ("document", &["system", "physics", "units"]),
     ("drawing", &["figure", "system", "physics", "units"]),
     ("handover", &["document", "drawing", "figure", "system", "physics", "units"]),
-    ("command_line", &["handover", "drawing", "document", "system", "physics", "units"]),
+    ("command_line", &["handover", "drawing", "document", "figure", "system", "physics", "units"]),
     ("window", &["handover", "drawing", "document", "figure", "system", "physics", "units"]),
 ];
 /// Parts of physics that do not know each other.
@@ -27,11 +27,16 @@ const CONFINED: [(&str, &[&str]); 17] = [
     ("winit", &["window/software/"]),
     ("softbuffer", &["window/software/"]),
     ("rfd", &["window/file_dialogs.rs"]),
-    ("std::thread", &["window/file_dialogs.rs", "window/jobs.rs", "window/software/canvas.rs"]),
+    // Frames of a show are drawn on every core; no other command is worth it.
+    (
+        "std::thread",
+        &["window/file_dialogs.rs", "window/jobs.rs", "window/software/canvas.rs", "command_line/frame_crew.rs"],
+    ),
     ("std::fs", &["document/", "command_line/"]),
     ("std::env", &["document/", "main.rs"]),
     ("std::process", &["document/", "main.rs"]),
-    ("std::io", &["document/", "command_line/", "main.rs"]),
+    // The writers of frames want something to seek in; theirs is memory.
+    ("std::io", &["document/", "command_line/", "main.rs", "drawing/frames/encoding.rs"]),
     ("std::time", &["command_line/", "document/", "window/"]),
     ("tempfile", &["document/"]),
     ("directories", &["document/"]),

@@ -3,10 +3,14 @@
 use super::destination::Destination;
 use super::outcome::GraphicsChoice;
 use super::scenario_source::ScenarioSource;
+use crate::drawing::frames::{FrameFormat, FrameSubject, Shape};
 use crate::drawing::{Look, Plot};
+use crate::figure::SkyView;
+use crate::system::cues::{FrameRate, Transition};
 use crate::system::{EventGroup, TimeScale};
 use clap::builder::{OsStringValueParser, PossibleValue, PossibleValuesParser, TypedValueParser};
 use clap::{Args, Parser, Subcommand, ValueEnum};
+use std::path::PathBuf;
 use std::sync::LazyLock;
 
 /// Name and, where the build knows it, commit.
@@ -35,6 +39,20 @@ judged does.
 Examples:
   longember check demo:sunlike_five_worlds
   longember check --statement \"star radius ever is at least 200 Rsun\"";
+
+const FRAMES_HELP: &str = "\
+The show is that of the scenario's cues, or one sweep from --from to --to in --seconds.
+Good frames that are there are kept, so that a run that was stopped goes on where it
+ended; a frame appears whole or not at all, the same bit for bit on every run. The
+star is drawn to one scale, evenly bright; a dome master is azimuthal equidistant
+with the front below.
+
+Caution: pictures that flash more than three times in a second can trigger seizures
+(WCAG 2.2, 2.3.1). Collapses and thermal pulses change within a frame or two: watch
+the sequence before an audience does, and fade. Bright projections dazzle.
+
+Example:
+  longember frames demo:sunlike_five_worlds --out frames --subject strip --size 640 --seconds 0.1";
 
 /// A star's whole life and the fate of its planets, at any moment, with sources
 ///
@@ -83,6 +101,9 @@ pub(super) enum Command {
     /// Judge the statements of a scenario: exit code 0 if none fails, 1 if one does not hold
     #[command(after_help = CHECK_HELP)]
     Check(CheckArguments),
+    /// A show as a numbered sequence of pictures, flat or for a dome
+    #[command(after_help = FRAMES_HELP)]
+    Frames(FramesArguments),
     /// List the built-in scenarios, or write one as a file to start from
     #[command(after_help = "Example:\n  longember demo sunlike_five_worlds")]
     Demo(DemoArguments),
@@ -202,6 +223,157 @@ pub(super) struct FigureArguments {
     /// Where the result goes.
     #[command(flatten)]
     pub(super) destination: Destination,
+}
+
+/// `frames`.
+#[derive(Args, Debug)]
+pub(super) struct FramesArguments {
+    /// A file, demo:NAME, or - for standard input
+    #[arg(value_name = "SCENARIO", value_parser = source_parser())]
+    pub(super) scenario: ScenarioSource,
+    /// Folder for the frames; it is made if it is not there
+    #[arg(long, value_name = "DIR")]
+    pub(super) out: PathBuf,
+    /// What is shown: the star's disc, a planet's sky, the life strip, or another plot
+    #[arg(long, value_enum, value_name = "WHAT", default_value = "star")]
+    pub(super) subject: SubjectArgument,
+    /// Width of a frame in pixels; a flat one is 16:9, a dome master square
+    #[arg(long, value_name = "N", default_value_t = 1024)]
+    pub(super) size: u32,
+    /// Shape of a frame
+    #[arg(long, value_enum, default_value_t)]
+    pub(super) shape: ShapeArgument,
+    /// Form of a frame; exr holds linear light, brighter than white where it is
+    #[arg(long, value_enum, default_value_t)]
+    pub(super) format: FrameFormatArgument,
+    /// Frames a second: 24, 25, 30, 29.97, 60
+    #[arg(long, value_name = "RATE", default_value = "30", value_parser = FrameRate::parse)]
+    pub(super) fps: FrameRate,
+    /// First moment of one sweep; birth if left out
+    #[arg(long, value_name = "TIME", allow_hyphen_values = true)]
+    pub(super) from: Option<String>,
+    /// Last moment of one sweep; the end of what the window shows if left out
+    #[arg(long, value_name = "TIME", allow_hyphen_values = true)]
+    pub(super) to: Option<String>,
+    /// Length of one sweep in seconds; 30 if left out
+    #[arg(long, value_name = "S", allow_hyphen_values = true)]
+    pub(super) seconds: Option<f64>,
+    /// How one sweep runs through time
+    #[arg(long, value_enum, default_value_t = PaceArgument(Transition::Paced))]
+    pub(super) pace: PaceArgument,
+    /// Whose sky is shown; the first with air if left out
+    #[arg(long, value_name = "NAME")]
+    pub(super) planet: Option<String>,
+    /// Altitude of the star in that sky, degrees
+    #[arg(long, value_name = "DEG", default_value_t = 30.0, allow_hyphen_values = true)]
+    pub(super) altitude: f64,
+    /// Width of the field about the star, solar radii; what holds its largest if left out
+    #[arg(long, value_name = "RSUN", allow_hyphen_values = true)]
+    pub(super) field: Option<f64>,
+    /// Only the Kth of N parts, for machines that share the work
+    #[arg(long, value_name = "K/N", default_value = "1/1", value_parser = Part::parse)]
+    pub(super) part: Part,
+    /// Replace files that are no frames of this sequence
+    #[arg(long)]
+    pub(super) force: bool,
+}
+
+/// A part of a sequence.
+#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+pub(super) struct Part {
+    /// Which one, counted from 1.
+    number: usize,
+    /// Of how many.
+    count: usize,
+}
+
+impl Part {
+    /// Reads `2/5`.
+    fn parse(text: &str) -> Result<Self, String> {
+        let whole = |digits: &str| digits.trim().parse::<usize>().ok();
+        let found = text.split_once('/').and_then(|(number, count)| Some((whole(number)?, whole(count)?)));
+        match found {
+            Some((number, count)) if number >= 1 && number <= count => Ok(Self { number, count }),
+            _ => Err("write which part of how many, such as 2/5, from 1/5 to 5/5".to_owned()),
+        }
+    }
+
+    /// This part of a whole: all parts together are the whole, and no two share anything.
+    pub(super) fn of<T>(self, all: &[T]) -> &[T] {
+        let border = |number: usize| (all.len() as u128 * number as u128 / self.count as u128) as usize;
+        &all[border(self.number - 1)..border(self.number)]
+    }
+}
+
+/// What frames show, as an argument.
+#[derive(Clone, Debug, PartialEq)]
+pub(super) struct SubjectArgument {
+    key: &'static str,
+    /// The subject; of a sky the planet is chosen elsewhere.
+    pub(super) subject: FrameSubject,
+}
+
+impl ValueEnum for SubjectArgument {
+    fn value_variants<'a>() -> &'a [Self] {
+        static ALL: LazyLock<Vec<SubjectArgument>> = LazyLock::new(|| {
+            let mut all = vec![
+                SubjectArgument { key: "star", subject: FrameSubject::Star },
+                SubjectArgument { key: "sky", subject: FrameSubject::Sky { planet: 0, view: SkyView::default() } },
+            ];
+            all.extend(Plot::all().into_iter().filter(|(_, plot)| *plot != Plot::Sky).map(|(key, plot)| {
+                let key = if plot == Plot::LifeStrip { "strip" } else { key };
+                SubjectArgument { key, subject: FrameSubject::Figure(plot) }
+            }));
+            all
+        });
+        &ALL
+    }
+
+    fn to_possible_value(&self) -> Option<PossibleValue> {
+        Some(PossibleValue::new(self.key))
+    }
+}
+
+/// A shape of frames as an argument.
+#[derive(Clone, Copy, Debug, Default, PartialEq, Eq)]
+pub(super) struct ShapeArgument(pub(super) Shape);
+
+impl ValueEnum for ShapeArgument {
+    fn value_variants<'a>() -> &'a [Self] {
+        &[Self(Shape::Flat), Self(Shape::Dome)]
+    }
+
+    fn to_possible_value(&self) -> Option<PossibleValue> {
+        Some(PossibleValue::new(self.0.key()))
+    }
+}
+
+/// A form of frames as an argument.
+#[derive(Clone, Copy, Debug, Default, PartialEq, Eq)]
+pub(super) struct FrameFormatArgument(pub(super) FrameFormat);
+
+impl ValueEnum for FrameFormatArgument {
+    fn value_variants<'a>() -> &'a [Self] {
+        &[Self(FrameFormat::Png8), Self(FrameFormat::Png16), Self(FrameFormat::Exr)]
+    }
+
+    fn to_possible_value(&self) -> Option<PossibleValue> {
+        Some(PossibleValue::new(self.0.key()))
+    }
+}
+
+/// How a sweep runs through time, as an argument.
+#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+pub(super) struct PaceArgument(pub(super) Transition);
+
+impl ValueEnum for PaceArgument {
+    fn value_variants<'a>() -> &'a [Self] {
+        &[Self(Transition::Paced), Self(Transition::Steady), Self(Transition::SteadyLog), Self(Transition::Cut)]
+    }
+
+    fn to_possible_value(&self) -> Option<PossibleValue> {
+        Some(PossibleValue::new(self.0.key()).help(self.0.name()))
+    }
 }
 
 /// `sheet`.

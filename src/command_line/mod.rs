@@ -7,6 +7,8 @@ mod arguments;
 mod check;
 mod destination;
 mod figure_run;
+mod frame_crew;
+mod frame_run;
 mod outcome;
 mod run;
 mod scenario_source;

@@ -6,6 +6,7 @@ use super::arguments::{
 };
 use super::check::check;
 use super::figure_run;
+use super::frame_run;
 use super::outcome::{DONE, Outcome, WRONG_USAGE};
 use super::scenario_source::{ScenarioSource, find_demo};
 use super::streams::Streams;
@@ -101,6 +102,7 @@ fn carry_out(command: Command, streams: &mut Streams<'_>) -> Result<u8, Trouble>
         Command::Events(arguments) => events(&arguments, streams),
         Command::Figure(arguments) => figure_run::figure(&arguments, streams),
         Command::Sheet(arguments) => figure_run::sheet(&arguments, streams),
+        Command::Frames(arguments) => frame_run::frames(&arguments, streams),
         Command::Demo(arguments) => demo(&arguments, streams),
         Command::Sources(arguments) => sources(&arguments, streams),
     };

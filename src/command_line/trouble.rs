@@ -3,7 +3,9 @@
 use super::outcome::{BAD_VALUE, SYSTEM_TROUBLE, WRONG_USAGE};
 use crate::document::{LoadError, Problem, WriteError, built_in};
 use crate::drawing::PictureProblem;
+use crate::drawing::frames::FrameProblem;
 use crate::handover::{ColumnsProblem, TableAgesProblem};
+use crate::system::cues::CueProblem;
 use crate::system::statements::LineProblem;
 use crate::system::{HistoryError, MomentProblem};
 use std::io;
@@ -81,6 +83,51 @@ pub(super) enum Trouble {
     /// No such columns.
     #[error(transparent)]
     Columns(#[from] ColumnsProblem),
+    /// A number outside its range.
+    #[error("{option} is {value}, allowed {allowed}; choose a value in that range")]
+    OutOfRange {
+        /// The option.
+        option: &'static str,
+        /// Its value.
+        value: f64,
+        /// What is allowed.
+        allowed: &'static str,
+    },
+    /// A width of frames that is none.
+    #[error("--size is {size} pixels, allowed {least} to {most}; choose a width in that range")]
+    FrameSize {
+        /// The width asked for.
+        size: u32,
+        /// Narrowest.
+        least: u32,
+        /// Widest.
+        most: u32,
+    },
+    /// A sky without a planet.
+    #[error(
+        "the scenario has no planet, allowed one or more for the subject sky; add a planet or choose another subject"
+    )]
+    NoPlanet,
+    /// The cues make no show.
+    #[error(transparent)]
+    Cues(#[from] CueProblem),
+    /// A frame of another sequence, or a spoilt one, is in the way.
+    #[error("{} is no frame of this sequence; add --force to replace such files, or choose another folder", path.display())]
+    OtherFrame {
+        /// The file.
+        path: PathBuf,
+    },
+    /// The folder for frames can't be made.
+    #[error("the folder {} can't be made: {source}; choose another one", path.display())]
+    Folder {
+        /// The folder.
+        path: PathBuf,
+        /// What the system says.
+        source: io::Error,
+    },
+    /// A frame is no file.
+    #[error(transparent)]
+    Frame(#[from] FrameProblem),
     /// No such picture.
     #[error(transparent)]
     Picture(#[from] PictureProblem),
@@ -150,12 +197,19 @@ impl Trouble {
             | Self::NothingStated
             | Self::TableAges(_)
             | Self::Picture(_)
+            | Self::OutOfRange { .. }
+            | Self::FrameSize { .. }
+            | Self::NoPlanet
+            | Self::Cues(_)
+            | Self::Frame(_)
             | Self::Columns(_)
             | Self::Write(WriteError::Unsound { .. }) => BAD_VALUE,
             Self::Load(LoadError::Unreadable { .. })
             | Self::StandardInput(_)
             | Self::NothingToOpen { .. }
             | Self::FileExists { .. }
+            | Self::OtherFrame { .. }
+            | Self::Folder { .. }
             | Self::Write(_)
             | Self::StandardOutput(_) => SYSTEM_TROUBLE,
         }

@@ -124,10 +124,10 @@ fn a_pdf_is_one_page_that_carries_its_fonts() {
 
 #[test]
 fn sizes_beyond_what_can_be_drawn_are_refused_with_the_range() {
-    for sides in [[199, 600], [600, 0], [16_385, 600], [16_384, 16_384]] {
+    for sides in [[99, 600], [600, 0], [16_385, 600], [16_384, 16_384]] {
         let problem = Size::new(sides[0], sides[1]).expect_err("refused");
         assert!(matches!(problem, PictureProblem::Size { .. }));
-        assert!(problem.to_string().contains("allowed sides of 200 to 16384"), "{problem}");
+        assert!(problem.to_string().contains("allowed sides of 100 to 16384"), "{problem}");
     }
     assert!(Size::new(16_384, 6000).is_ok());
 }

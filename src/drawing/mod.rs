@@ -8,6 +8,7 @@ mod caption;
 #[cfg(test)]
 mod checks;
 pub mod fonts;
+pub mod frames;
 mod ink;
 mod legend;
 mod life_strip;

@@ -8,7 +8,7 @@ use std::sync::{Arc, LazyLock};
 use thiserror::Error;
 
 /// Shortest and longest side of a figure, pixels.
-pub const SIDE_RANGE_PX: [u32; 2] = [200, 16_384];
+pub const SIDE_RANGE_PX: [u32; 2] = [100, 16_384];
 /// Most pixels of a figure.
 pub const MOST_PIXELS: u64 = 100_000_000;
 

@@ -18,6 +18,6 @@ pub use interior::InteriorPicture;
 pub use orbit_plan::OrbitPlan;
 pub use ribbon::Ribbon;
 pub use samples::Samples;
-pub use sky_picture::{SkyPicture, SkyView};
+pub use sky_picture::{SkyLight, SkyPicture, SkyView};
 pub use spectrum::{Spectrum, SpectrumView};
 pub use value_axis::{ValueAxis, ValueTick};

@@ -83,6 +83,8 @@ pub struct SkyPicture {
     pub ground_srgb: [u8; 3],
     /// Colour of the disc with the sky before it.
     pub disc_srgb: [u8; 3],
+    /// Sky, ground and disc in linear Rec. 709 against the screen's white, as bright as they are: the disc is far above 1.
+    pub linear: SkyLight,
     /// How the sky looks, its brightness set aside; `None` where it is black.
     pub sky: Option<SeenLight>,
     /// How the disc looks, its brightness set aside; `None` where nothing of it comes through.
@@ -93,6 +95,17 @@ pub struct SkyPicture {
     pub disc_is_seen: bool,
     /// What an eye makes of it.
     pub vision: Vision,
+}
+
+/// Linear light of the parts of a sky; what lies outside Rec. 709 has a negative channel.
+#[derive(Clone, Copy, Debug, PartialEq)]
+pub struct SkyLight {
+    /// The clear sky.
+    pub sky: [f64; 3],
+    /// Grey ground of albedo 0.2.
+    pub ground: [f64; 3],
+    /// The star's disc with the sky before it.
+    pub disc: [f64; 3],
 }
 
 impl SkyPicture {
@@ -108,10 +121,14 @@ impl SkyPicture {
         let exposed = |light| exposed(light, sky, view.viewing, white_cd_m2);
         let seen = |light| seen(light, sky.star_above_air, view.viewing);
         let (sky_srgb, disc_srgb) = (exposed(dome), exposed(surface));
+        let linear =
+            |light| RgbSpace::Rec709.linear(as_viewed(light, sky, view.viewing)).map(|channel| channel / white_cd_m2);
+        let ground = sky.daylight().scaled(GROUND_ALBEDO / PI);
         Some(Self {
             altitude_deg: view.altitude_deg,
             star_diameter_deg: disc.diameter_deg,
-            ground_srgb: exposed(sky.daylight().scaled(GROUND_ALBEDO / PI)),
+            ground_srgb: exposed(ground),
+            linear: SkyLight { sky: linear(dome), ground: linear(ground), disc: linear(surface) },
             sky: seen(sky.dome),
             disc: seen(sky.disc),
             daylight: seen(sky.daylight()),
@@ -207,12 +224,17 @@ fn marks(top_deg: f64) -> Vec<f64> {
 
 /// The encoded colour of a luminance when `white_cd_m2` is drawn as white; what is brighter is as bright as the screen.
 fn exposed(luminance: Tristimulus, sky: &Sky, viewing: Viewing, white_cd_m2: f64) -> [u8; 3] {
-    let viewed = match (viewing, sky.star_above_air.chromaticity()) {
-        (Viewing::AdaptedEye, Some(white)) => adapted(luminance, white, 1.0),
-        _ => luminance,
-    };
+    let viewed = as_viewed(luminance, sky, viewing);
     let largest = RgbSpace::Rec709.linear(viewed).into_iter().fold(0.0, f64::max);
     screen_colour(viewed).map_or([0; 3], |colour| colour.dimmed(largest / white_cd_m2))
+}
+
+/// A light as a camera takes it, or as an eye sees it that is used to the star.
+fn as_viewed(light: Tristimulus, sky: &Sky, viewing: Viewing) -> Tristimulus {
+    match (viewing, sky.star_above_air.chromaticity()) {
+        (Viewing::AdaptedEye, Some(white)) => adapted(light, white, 1.0),
+        _ => light,
+    }
 }
 
 fn vision(ground_cd_m2: f64) -> Vision {

@@ -8,6 +8,7 @@ mod demos;
 mod events;
 mod figures;
 mod files;
+mod frames;
 mod help;
 mod light;
 mod moments;

@@ -72,7 +72,7 @@ pub use planck::{
 };
 pub use range::OutOfRange;
 pub use rayleigh::{Atmosphere, Gas, rayleigh_cross_section_m2};
-pub use rgb::{RgbSpace, encode_srgb, largest_channel_one};
+pub use rgb::{RgbSpace, decode_srgb, encode_srgb, encode_srgb_16, largest_channel_one};
 pub use screen::{ScreenColour, WideColour, hex, screen_colour, wide_colour};
 pub use sky::{Sky, SkyScene, light_through_air, sky};
 pub use spectral_colour::{SpectralColour, monochromatic, spectral_colour};

@@ -92,6 +92,29 @@ pub fn encode_srgb(linear: [f64; 3]) -> [u8; 3] {
     })
 }
 
+/// Encodes linear Rec. 709 as 16-bit sRGB; channels outside 0 to 1 are clipped.
+///
+/// # Source
+/// As [`encode_srgb`], rounded to the nearest of 65 536 steps.
+#[must_use]
+pub fn encode_srgb_16(linear: [f64; 3]) -> [u16; 3] {
+    let single = linear.map(to_f32);
+    Srgb::clip(Srgb::from_linear_srgb(single)).map(|encoded| {
+        #[expect(clippy::cast_possible_truncation, clippy::cast_sign_loss, reason = "0.5 to 65535.5 after clipping")]
+        let step = (65_535.0 * f64::from(encoded) + 0.5) as u16;
+        step
+    })
+}
+
+/// Decodes 8-bit sRGB to linear Rec. 709.
+///
+/// # Source
+/// As [`encode_srgb`].
+#[must_use]
+pub fn decode_srgb(encoded: [u8; 3]) -> [f64; 3] {
+    Srgb::to_linear_srgb(encoded.map(|step| f32::from(step) / 255.0)).map(f64::from)
+}
+
 /// The crate `color` computes in `f32`: one part in ten million, a hundred times finer than an 8-bit step needs.
 #[expect(clippy::cast_possible_truncation, reason = "rounding to the nearest f32 is meant")]
 pub(crate) fn to_f32(value: f64) -> f32 {

@@ -68,9 +68,15 @@ impl ScreenColour {
     /// The encoded sRGB of the same colour at a share of its brightness, 0 to 1; what is no number counts as 0.
     #[must_use]
     pub fn dimmed(&self, share: f64) -> [u8; 3] {
+        encode_srgb(self.shown_linear(share))
+    }
+
+    /// The same before it is encoded: linear Rec. 709 within what the screen can show.
+    #[must_use]
+    pub fn shown_linear(&self, share: f64) -> [f64; 3] {
         let share = if share.is_nan() { 0.0 } else { share.clamp(0.0, 1.0) };
         let (shown, _) = shown(self.linear_rec709, into_srgb_gamut);
-        encode_srgb(shown.map(|channel| channel * share))
+        shown.map(|channel| channel * share)
     }
 }
 
