@@ -110,9 +110,9 @@ impl FrameJob<'_> {
         let (raster, is_seen) = self.sequence.frame(frame.time_yr)?;
         let bytes = encode(&raster, self.format, &fingerprint)?;
         if is_there {
-            write_atomically(&path, &bytes)?
+            write_atomically(&path, &bytes)?;
         } else {
-            create_atomically(&path, &bytes)?
+            create_atomically(&path, &bytes)?;
         }
         Ok(Done::Drawn { is_seen })
     }

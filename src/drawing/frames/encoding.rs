@@ -67,7 +67,7 @@ pub enum FrameProblem {
 pub fn encode(raster: &Raster, format: FrameFormat, fingerprint: &str) -> Result<Vec<u8>, FrameProblem> {
     let result = match format {
         FrameFormat::Png8 => {
-            let bytes = each(raster, |linear| encode_srgb(linear));
+            let bytes = each(raster, encode_srgb);
             png_bytes(raster, png::BitDepth::Eight, bytes.as_flattened(), fingerprint)
                 .map_err(|error| error.to_string())
         }
@@ -206,9 +206,9 @@ mod tests {
         let (eight, sixteen) = (eight.into_rgb8(), sixteen.into_rgb16());
         for (index, pixel) in raster.pixels.iter().enumerate() {
             let place = (index as u32 % 64, index as u32 / 64);
-            for channel in 0..3 {
+            for (channel, light) in pixel.iter().enumerate() {
                 // The sRGB curve of IEC 61966-2-1.
-                let linear = f64::from(pixel[channel]).clamp(0.0, 1.0);
+                let linear = f64::from(*light).clamp(0.0, 1.0);
                 let encoded =
                     if linear <= 0.003_130_8 { 12.92 * linear } else { 1.055 * linear.powf(1.0 / 2.4) - 0.055 };
                 let (low, high) = (eight[place].0[channel], sixteen[place].0[channel]);
@@ -223,7 +223,7 @@ mod tests {
             .rgb_channels(
                 |size, _| vec![[0.0_f32; 3]; size.area()],
                 |pixels, place, (red, green, blue): (f32, f32, f32)| {
-                    pixels[place.y() * 64 + place.x()] = [red, green, blue]
+                    pixels[place.y() * 64 + place.x()] = [red, green, blue];
                 },
             )
             .first_valid_layer()
