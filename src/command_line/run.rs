@@ -259,7 +259,7 @@ pub(super) fn computed(scenario: Scenario, streams: &mut Streams<'_>) -> Result<
 fn history_of(system: System, streams: &mut Streams<'_>) -> Result<History, Trouble> {
     let begun = Instant::now();
     let mut shown = None;
-    let computed = LifeStore::of_user().history(system, &mut |share| {
+    let computed = LifeStore::of_user().history(None, system, &mut |share| {
         let percent = (0..=100).take_while(|percent| f64::from(*percent) <= 100.0 * share).last();
         if percent != shown && begun.elapsed() > WORTH_SHOWING {
             shown = percent;

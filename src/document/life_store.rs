@@ -10,6 +10,7 @@ use crate::system::{History, HistoryError, System};
 use std::fs;
 use std::ops::ControlFlow;
 use std::path::PathBuf;
+use std::sync::Arc;
 use std::time::SystemTime;
 
 /// Most lives that are kept; the oldest make room.
@@ -35,18 +36,23 @@ impl LifeStore {
         Self { folder: Some(folder) }
     }
 
-    /// Computes the exact history of a system, or takes the star's life from the store.
+    /// Computes the exact history of a system, or takes the star's life from the store; `earlier` as in
+    /// [`History::compute_after`].
     ///
     /// # Errors
     /// As [`History::compute_with`].
     pub fn history(
         &self,
+        earlier: Option<&History>,
         system: System,
         progress: &mut dyn FnMut(f64) -> ControlFlow<()>,
     ) -> Result<History, HistoryError> {
         let (input, options) = (star_input(&system), life_options(&system));
         if !WholeLife::needs_structure(input.mass_msun) || !system.problems().is_empty() {
-            return History::compute_with(system, progress);
+            return History::compute_after(earlier, system, progress);
+        }
+        if let Some(life) = earlier.and_then(|earlier| earlier.life_of(&system)) {
+            return History::of_life(earlier, system, life, progress);
         }
         let life = if let Some(life) = self.find(input, options) {
             life
@@ -55,7 +61,8 @@ impl LifeStore {
             self.keep(input, options, &life);
             life
         };
-        History::of_life(system, WholeLife::of_structure(input, options, &life)?, progress)
+        let life = Arc::new(WholeLife::of_structure(input, options, &life)?);
+        History::of_life(earlier, system, life, progress)
     }
 
     /// The life kept for a star.
@@ -118,8 +125,9 @@ mod tests {
             steps += 1;
             ControlFlow::Continue(())
         };
-        let first = store.history(red_dwarf(), &mut count).expect("a history");
-        let second = store.history(red_dwarf(), &mut |_| ControlFlow::Break(())).expect("nothing left to compute");
+        let first = store.history(None, red_dwarf(), &mut count).expect("a history");
+        let second =
+            store.history(None, red_dwarf(), &mut |_| ControlFlow::Break(())).expect("nothing left to compute");
         assert!(steps > 100, "{steps}");
         assert_eq!(first.events(), second.events());
         assert_eq!(first.star_at(3.9e12), second.star_at(3.9e12));
@@ -129,7 +137,7 @@ mod tests {
         bytes.truncate(bytes.len() / 2);
         fs::write(&path, bytes).expect("written");
         assert!(store.find(star_input(&red_dwarf()), LifeOptions::default()).is_none());
-        let stopped = store.history(red_dwarf(), &mut |_| ControlFlow::Break(()));
+        let stopped = store.history(None, red_dwarf(), &mut |_| ControlFlow::Break(()));
         assert!(matches!(stopped, Err(HistoryError::Cancelled)));
     }
 

@@ -168,7 +168,7 @@ fn planet_temperatures(samples: &Samples) -> Chart {
 }
 
 /// The climate of a planet that has one, as stretches of one state each.
-fn lane(samples: &Samples, index: usize) -> Option<Lane> {
+pub(super) fn lane(samples: &Samples, index: usize) -> Option<Lane> {
     let mut spans: Vec<(f64, f64, PlanetState)> = Vec::new();
     let mut last: Option<f64> = None;
     for sample in &samples.all {

@@ -77,17 +77,28 @@ impl LightHistory {
     /// The band of an event's date; `None` for kinds whose rule is no threshold of the starlight.
     pub(super) fn band(&self, time_yr: f64, kind: PlanetEventKind) -> Option<DateBand> {
         let Known { down_to, up_to, is_rising } = known(kind)?;
-        let after = self.nodes.partition_point(|(age_yr, _)| *age_yr < time_yr).clamp(1, self.nodes.len().max(2) - 1);
-        let (before, next) = (self.nodes.get(after - 1)?, self.nodes.get(after)?);
-        let is_rising = is_rising.unwrap_or(next.1 > before.1);
-        let here = (time_yr, between(*before, *next, time_yr));
-        let (low, high) = (here.1 + down_to.ln(), here.1 + up_to.ln());
-        let earlier = leaves(here, self.nodes[..after].iter().rev().copied(), low, high);
-        let later = leaves(here, self.nodes[after..].iter().copied(), low, high);
-        // Forward, light that turns back before it has reached the far threshold may never fire the event.
-        let latest_yr = later.filter(|(_, is_above)| *is_above == is_rising).map(|(age_yr, _)| age_yr);
-        Some(DateBand { earliest_yr: earlier.map(|(age_yr, _)| age_yr), latest_yr })
+        crossing(&self.nodes, time_yr, [down_to, up_to], is_rising)
     }
+}
+
+/// The dates between which a threshold is passed that is known within factors; `nodes` hold the age and the logarithm of
+/// what passes it, which rises there, falls, or does as the nodes do.
+pub(super) fn crossing(
+    nodes: &[(f64, f64)],
+    time_yr: f64,
+    [down_to, up_to]: [f64; 2],
+    is_rising: Option<bool>,
+) -> Option<DateBand> {
+    let after = nodes.partition_point(|(age_yr, _)| *age_yr < time_yr).clamp(1, nodes.len().max(2) - 1);
+    let (before, next) = (nodes.get(after - 1)?, nodes.get(after)?);
+    let is_rising = is_rising.unwrap_or(next.1 > before.1);
+    let here = (time_yr, between(*before, *next, time_yr));
+    let (low, high) = (here.1 + down_to.ln(), here.1 + up_to.ln());
+    let earlier = leaves(here, nodes[..after].iter().rev().copied(), low, high);
+    let later = leaves(here, nodes[after..].iter().copied(), low, high);
+    // Forward, what turns back before it has reached the far threshold may never fire the event.
+    let latest_yr = later.filter(|(_, is_above)| *is_above == is_rising).map(|(age_yr, _)| age_yr);
+    Some(DateBand { earliest_yr: earlier.map(|(age_yr, _)| age_yr), latest_yr })
 }
 
 fn between(before: (f64, f64), next: (f64, f64), time_yr: f64) -> f64 {

@@ -4,9 +4,10 @@ use super::date_band::DateBand;
 use super::history::History;
 use super::planet_events;
 use super::specification::Body;
-use super::star_colours;
+use super::{star_bands, star_colours};
 use crate::physics::planet::{Caution, PlanetEventKind};
 use crate::physics::star::StarEventKind;
+use crate::units::number_text::number;
 use crate::units::time_words::{SpanStyle, span};
 use std::borrow::Cow;
 
@@ -45,8 +46,18 @@ pub enum EventKind {
     RisesAboveBoiling,
     /// The mean surface temperature under a held greenhouse falls below the boiling point of water at 1 bar.
     FallsBelowBoiling,
-    /// The mean surface temperature under a held greenhouse is the highest of the planet's life.
+    /// The mean surface temperature is the highest of the planet's life.
     HottestSurface,
+    /// The mean surface temperature is above the one that the user marked for the first time.
+    FirstAbove {
+        /// The marked temperature, K.
+        marked_k: f64,
+    },
+    /// The mean surface temperature is above the one that the user marked for the last time.
+    LastAbove {
+        /// The marked temperature, K.
+        marked_k: f64,
+    },
     /// The surface of the giant star comes nearest to the planet without reaching it.
     GiantNearest,
 }
@@ -149,6 +160,8 @@ impl EventKind {
             Self::RisesAboveBoiling => "rises_above_boiling",
             Self::FallsBelowBoiling => "falls_below_boiling",
             Self::HottestSurface => "surface_hottest",
+            Self::FirstAbove { .. } => "first_above_marked",
+            Self::LastAbove { .. } => "last_above_marked",
             Self::GiantNearest => "giant_nearest",
         }
     }
@@ -166,6 +179,10 @@ impl EventKind {
             Self::RisesAboveBoiling => "surface rises above boiling",
             Self::FallsBelowBoiling => "surface falls below boiling",
             Self::HottestSurface => "surface at its hottest",
+            Self::FirstAbove { marked_k } => {
+                return Cow::Owned(format!("surface first above {} K", number(marked_k, 5)));
+            }
+            Self::LastAbove { marked_k } => return Cow::Owned(format!("surface last above {} K", number(marked_k, 5))),
             Self::GiantNearest => "the giant's surface comes nearest",
         })
     }
@@ -194,6 +211,8 @@ impl EventKind {
             | Self::FallsBelowFreezing
             | Self::RisesAboveBoiling
             | Self::FallsBelowBoiling
+            | Self::FirstAbove { .. }
+            | Self::LastAbove { .. }
             | Self::HottestSurface => EventGroup::Climate,
             Self::GiantNearest => EventGroup::Orbit,
         }
@@ -223,6 +242,8 @@ impl EventKind {
             | Self::FallsBelowFreezing
             | Self::RisesAboveBoiling
             | Self::FallsBelowBoiling
+            | Self::FirstAbove { .. }
+            | Self::LastAbove { .. }
             | Self::HottestSurface => "surface_temperature",
             Self::GiantNearest => "orbit",
         }
@@ -261,7 +282,7 @@ pub(super) fn of(history: &History) -> Vec<Event> {
             body: Body::Star,
             kind: EventKind::Star(event.kind),
             caution: None,
-            band: None,
+            band: star_bands::of_life(history, event.age_yr),
         })
         .collect();
     events.extend(star_colours::changes(history));

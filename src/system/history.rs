@@ -5,12 +5,14 @@ use super::moment::{Moment, PlanetMoment, StarMoment};
 use super::neighbour_notes;
 use super::notes::{self, Note};
 use super::planet_past::PlanetPast;
-use super::specification::{Body, System, SystemProblem};
+use super::specification::{Body, PlanetSpecification, System, SystemProblem};
 use crate::physics::light::DRAPER_POINT_K;
+use crate::physics::planet::climate::ClimateTables;
 use crate::physics::planet::{OutOfRange, StarPoint};
 use crate::physics::star::convective::SurfaceOpacity;
 use crate::physics::star::{END_YR, LifeOptions, PhaseSpan, StarCaution, StarError, StarInput, StarState, WholeLife};
 use std::ops::ControlFlow;
+use std::sync::Arc;
 use thiserror::Error;
 
 /// Why a system has no history.
@@ -62,8 +64,9 @@ const STAR_SHARE: f64 = 0.98;
 #[derive(Debug)]
 pub struct History {
     system: System,
-    life: WholeLife,
-    planets: Vec<PlanetPast>,
+    life: Arc<WholeLife>,
+    planets: Vec<Arc<PlanetPast>>,
+    climates: ClimateTables,
     events: Vec<Event>,
     shown_until_yr: f64,
 }
@@ -85,10 +88,37 @@ impl History {
         system: System,
         progress: &mut dyn FnMut(f64) -> ControlFlow<()>,
     ) -> Result<Self, HistoryError> {
+        Self::compute_after(None, system, progress)
+    }
+
+    /// Like [`History::compute_with`], taking over what an earlier history of nearly the same system has in common with
+    /// it: the life of an unchanged star, unchanged planets beside it, thresholds of unchanged air. The result is the
+    /// same with and without it.
+    ///
+    /// # Errors
+    /// As [`History::compute_with`].
+    pub fn compute_after(
+        earlier: Option<&Self>,
+        system: System,
+        progress: &mut dyn FnMut(f64) -> ControlFlow<()>,
+    ) -> Result<Self, HistoryError> {
         let input = checked_input(&system)?;
-        let mut star_progress = |share: f64| progress(STAR_SHARE * share);
-        let life = WholeLife::compute(input, life_options(&system), &mut star_progress)?;
-        Self::of_life(system, life, progress)
+        let life = match earlier.and_then(|earlier| earlier.life_of(&system)) {
+            Some(life) => life,
+            None => {
+                let mut star_progress = |share: f64| progress(STAR_SHARE * share);
+                Arc::new(WholeLife::compute(input, life_options(&system), &mut star_progress)?)
+            }
+        };
+        Self::of_life(earlier, system, life, progress)
+    }
+
+    /// The exact life of the star, if a system has the same one.
+    #[must_use]
+    pub fn life_of(&self, system: &System) -> Option<Arc<WholeLife>> {
+        let is_same =
+            star_input(&self.system) == star_input(system) && life_options(&self.system) == life_options(system);
+        (is_same && !self.life.is_quick_look()).then(|| Arc::clone(&self.life))
     }
 
     /// A first look within milliseconds at a system whose exact history takes seconds, from lives computed in advance.
@@ -97,34 +127,55 @@ impl History {
     #[must_use]
     pub fn quick_look(system: System) -> Option<Self> {
         let life = WholeLife::quick_look(checked_input(&system).ok()?, life_options(&system))?;
-        Self::of_life(system, life, &mut |_| ControlFlow::Continue(())).ok()
+        Self::of_life(None, system, Arc::new(life), &mut |_| ControlFlow::Continue(())).ok()
     }
 
-    /// Carries the planets along a life of the star that is known already.
+    /// Carries the planets along a life of the star that is known already; `earlier` as in [`History::compute_after`].
     ///
     /// # Errors
     /// As [`History::compute_with`].
     pub fn of_life(
+        earlier: Option<&Self>,
         system: System,
-        life: WholeLife,
+        life: Arc<WholeLife>,
         progress: &mut dyn FnMut(f64) -> ControlFlow<()>,
     ) -> Result<Self, HistoryError> {
         checked_input(&system)?;
         let points = star_points(&life);
         let count = system.planets.len();
-        let mut planets: Vec<PlanetPast> = Vec::with_capacity(count);
+        let mut planets: Vec<Arc<PlanetPast>> = Vec::with_capacity(count);
+        let mut climates = earlier.map_or_else(ClimateTables::default, |earlier| earlier.climates.to_reuse());
+        let beside_same_star = earlier.filter(|earlier| Arc::ptr_eq(&earlier.life, &life));
         for planet in &system.planets {
-            let walked = PlanetPast::walk(planet.clone(), &points);
-            planets.push(walked.map_err(|refusal| HistoryError::Planet { name: planet.name.clone(), refusal })?);
+            let known = beside_same_star.and_then(|earlier| earlier.past_of(planet));
+            let past = if let Some(past) = known {
+                past.history().keep_tables(&mut climates);
+                past
+            } else {
+                let walked = PlanetPast::walk(planet.clone(), &points, &mut climates);
+                Arc::new(walked.map_err(|refusal| HistoryError::Planet { name: planet.name.clone(), refusal })?)
+            };
+            planets.push(past);
             let share = planets.len() as f64 / count as f64;
             if progress(STAR_SHARE + (1.0 - STAR_SHARE) * share).is_break() {
                 return Err(HistoryError::Cancelled);
             }
         }
+        climates.drop_unused();
         let shown_until_yr = shown_until_yr(&life);
-        let mut history = Self { system, life, planets, events: Vec::new(), shown_until_yr };
+        let mut history = Self { system, life, planets, climates, events: Vec::new(), shown_until_yr };
         history.events = events::of(&history);
         Ok(history)
+    }
+
+    fn past_of(&self, planet: &PlanetSpecification) -> Option<Arc<PlanetPast>> {
+        self.planets.iter().find(|past| past.specification() == planet).map(Arc::clone)
+    }
+
+    /// Works out ahead every threshold of the planets' climates that has not been needed yet, so that none has to be
+    /// waited for when it is shown.
+    pub fn prepare_climates(&self) {
+        self.climates.prepare_all();
     }
 
     /// The inputs this history was computed from.
@@ -141,7 +192,7 @@ impl History {
 
     /// The planets, in the order of the system.
     #[must_use]
-    pub fn planets(&self) -> &[PlanetPast] {
+    pub fn planets(&self) -> &[Arc<PlanetPast>] {
         &self.planets
     }
 
@@ -308,4 +359,54 @@ fn shown_until_yr(life: &WholeLife) -> f64 {
         if glows(middle.exp()) { early = middle } else { late = middle }
     }
     (1.15 * late.exp()).min(END_YR)
+}
+
+#[cfg(test)]
+mod tests {
+    use super::*;
+    use crate::system::{StarSpecification, Water};
+
+    fn system() -> System {
+        let planet = |name: &str, semi_major_axis_au| PlanetSpecification {
+            name: name.to_owned(),
+            semi_major_axis_au,
+            water: Some(Water::default()),
+            ..PlanetSpecification::default()
+        };
+        System { star: StarSpecification::default(), planets: vec![planet("Near", 1.0), planet("Far", 4.0)] }
+    }
+
+    fn after(earlier: &History, system: &System) -> History {
+        History::compute_after(Some(earlier), system.clone(), &mut |_| ControlFlow::Continue(())).expect("computed")
+    }
+
+    #[test]
+    fn what_did_not_change_is_taken_over_and_nothing_else() {
+        let first = History::compute(system()).expect("computed");
+        let mut edited = system();
+        edited.planets[1].mass_mearth = 2.0;
+        let second = after(&first, &edited);
+        assert!(Arc::ptr_eq(&first.life, &second.life));
+        assert!(Arc::ptr_eq(&first.planets[0], &second.planets[0]), "untouched");
+        assert_eq!(second.planets[1].specification().mass_mearth, 2.0);
+        edited.star.mass_msun = 1.1;
+        let third = after(&second, &edited);
+        assert!(!Arc::ptr_eq(&second.life, &third.life));
+        assert!(!Arc::ptr_eq(&second.planets[0], &third.planets[0]), "its star is another one");
+    }
+
+    #[test]
+    fn a_history_does_not_depend_on_the_one_before() {
+        let first = History::compute(system()).expect("computed");
+        first.prepare_climates();
+        let mut edited = system();
+        edited.planets[0].semi_major_axis_au = 1.05;
+        edited.planets.swap(0, 1);
+        let (reused, alone) = (after(&first, &edited), History::compute(edited).expect("computed"));
+        assert_eq!(reused.events(), alone.events());
+        for age_yr in [0.0, 1e9, 4.57e9, 1.05e10, 1.1e10, 1.23e10, 1e12] {
+            assert_eq!(reused.moment(age_yr), alone.moment(age_yr), "{age_yr}");
+            assert_eq!(reused.climate_at(0, age_yr), alone.climate_at(0, age_yr), "{age_yr}");
+        }
+    }
 }

@@ -228,9 +228,27 @@ pub const OCEAN_AFTER: Limit = Limit {
     entry: EntryKind::SpanYr,
     meaning: "Age of the star when the planet has its ocean; climate and loss of water begin then.",
 };
+/// Length of a planet's first day.
+pub const INITIAL_DAY: Limit = Limit {
+    key: "initial_day_h",
+    name: "First day",
+    lowest: 1.0,
+    highest: 1e5,
+    entry: EntryKind::DayH,
+    meaning: "Length of the day when the star reaches the main sequence, from which tides slow the turning.",
+};
+/// A surface temperature whose first and last moment are dated.
+pub const MARKED_TEMPERATURE: Limit = Limit {
+    key: "marked_temperature_k",
+    name: "Marked temp.",
+    lowest: 3.0,
+    highest: 10_000.0,
+    entry: EntryKind::TemperatureK,
+    meaning: "Mean surface temperature whose first and last moment the chronicle dates.",
+};
 
 /// Every limit, for tables in documents and tests.
-pub const ALL: [&Limit; 18] = [
+pub const ALL: [&Limit; 20] = [
     &STAR_MASS,
     &METALLICITY,
     &PRESENT_AGE,
@@ -249,6 +267,8 @@ pub const ALL: [&Limit; 18] = [
     &OBLIQUITY,
     &HEAT_TRANSPORT,
     &OCEAN_AFTER,
+    &INITIAL_DAY,
+    &MARKED_TEMPERATURE,
 ];
 
 /// Most planets a system may hold.

@@ -209,6 +209,16 @@ pub struct PlanetMoment {
     pub equator_pole_k: Option<(f64, f64)>,
     /// Partial pressure of carbon dioxide, bar.
     pub carbon_dioxide_bar: Option<f64>,
+    /// Share of the starlight that a planet with a climate reflects.
+    pub planetary_albedo: Option<f64>,
+    /// Gravity at the surface, m s⁻².
+    pub surface_gravity_m_s2: Option<f64>,
+    /// Speed needed to leave the surface for good, km s⁻¹.
+    pub escape_speed_km_s: Option<f64>,
+    /// How firmly gravity holds hydrogen atoms against the heat of the upper air.
+    pub jeans_hydrogen_ratio: Option<f64>,
+    /// How firmly gravity holds nitrogen molecules against the heat of the upper air.
+    pub jeans_nitrogen_ratio: Option<f64>,
     /// Water left, oceans of the Earth.
     pub water_oceans: Option<f64>,
     /// High-energy light received, W m⁻².
@@ -244,6 +254,11 @@ impl PlanetMoment {
             ice_line_deg: None,
             equator_pole_k: None,
             carbon_dioxide_bar: None,
+            planetary_albedo: None,
+            surface_gravity_m_s2: None,
+            escape_speed_km_s: None,
+            jeans_hydrogen_ratio: None,
+            jeans_nitrogen_ratio: None,
             water_oceans: None,
             high_energy_w_m2: None,
             shoreline_ratio: None,

@@ -5,9 +5,10 @@ use super::notes::{Note, NoteKind};
 use super::planet_past::PlanetPast;
 use super::specification::Body;
 use crate::physics::planet::orbit::{MANY_PLANET_STABILITY, Neighbour, TWO_PLANET_STABILITY, hill_separation};
+use std::sync::Arc;
 
 /// Remarks about neighbours whose orbits cross or stand so close that they seldom last.
-pub(super) fn of_neighbours(pasts: &[PlanetPast], planets: &[PlanetMoment], star_mass_msun: f64) -> Vec<Note> {
+pub(super) fn of_neighbours(pasts: &[Arc<PlanetPast>], planets: &[PlanetMoment], star_mass_msun: f64) -> Vec<Note> {
     let mut orbits: Vec<(usize, Neighbour)> = planets
         .iter()
         .zip(pasts)

@@ -5,7 +5,7 @@ use super::events::{Event, EventKind};
 use super::history::History;
 use super::planet_past::{BOILING_K, FREEZING_K, PlanetPast};
 use super::specification::Body;
-use crate::physics::planet::{Caution, OrbitEnd};
+use crate::physics::planet::{Caution, ClimateState, OrbitEnd};
 use crate::units::constants::SOLAR_RADIUS_AU;
 
 /// Periastron over the giant's radius beyond which its nearness is not worth a date.
@@ -28,6 +28,75 @@ pub(super) fn push(history: &History, index: usize, events: &mut Vec<Event>) {
     let ages: Vec<f64> = history.life().node_ages_yr().iter().copied().filter(|age_yr| *age_yr < until_yr).collect();
     push_lines(history, past, body, &ages, events);
     push_nearest_giant(history, past, body, &ages, events);
+    push_hottest_climate(history, past, body, &ages, events);
+    push_marked(history, past, body, &ages, events);
+}
+
+/// The hottest moment of a planet whose climate answers to the star: within one state of the climate more light is
+/// warmer, so the brightest moment of each state is read. What is only known to be hotter counts with its bound.
+fn push_hottest_climate(history: &History, past: &PlanetPast, body: Body, ages: &[f64], events: &mut Vec<Event>) {
+    if past.specification().water.is_none() {
+        return;
+    }
+    let orbit = past.history().orbit();
+    let light = |age_yr: f64| {
+        let place = orbit.at(age_yr)?;
+        let star = history.star_at(age_yr);
+        (!star.phase.is_dark()).then(|| star.luminosity_lsun / place.semi_major_axis_au.powi(2))
+    };
+    let mut brightest: Vec<(ClimateState, f64, f64)> = Vec::new();
+    for &age_yr in ages {
+        let Some((state, light)) = past.history().climate_state_at(age_yr).zip(light(age_yr)) else { continue };
+        match brightest.last_mut().filter(|last| last.0 == state) {
+            Some(last) if light > last.2 => *last = (state, age_yr, light),
+            Some(_) => {}
+            None => brightest.push((state, age_yr, light)),
+        }
+    }
+    let read = |(_, age_yr, light): &(ClimateState, f64, f64)| {
+        let now = past.moment(*age_yr, &history.star_at(*age_yr));
+        let surface_k = now.surface_temperature_k.or(now.surface_hotter_than_k)?;
+        Some((*age_yr, surface_k, *light))
+    };
+    let hottest = brightest
+        .iter()
+        .filter_map(read)
+        .max_by(|first, second| first.1.total_cmp(&second.1).then(first.2.total_cmp(&second.2)));
+    if let Some((time_yr, ..)) = hottest {
+        events.push(Event { time_yr, body, kind: EventKind::HottestSurface, caution: None, band: None });
+    }
+}
+
+/// The first and the last moment above the temperature that the user marked; none where it is never reached, and no
+/// last one where it is never left. Steam counts as above what it is surely hotter than.
+fn push_marked(history: &History, past: &PlanetPast, body: Body, ages: &[f64], events: &mut Vec<Event>) {
+    let Some(marked_k) = past.specification().marked_temperature_k else { return };
+    let now = |age_yr: f64| past.moment(age_yr, &history.star_at(age_yr));
+    let is_above = |age_yr: f64| {
+        let now = now(age_yr);
+        now.surface_temperature_k.or(now.surface_hotter_than_k).is_some_and(|surface_k| surface_k > marked_k)
+    };
+    // A change of the climate may lift the surface above and drop it again between two nodes.
+    let changes = past.history().climate_states().iter().map(|(age_yr, _)| *age_yr);
+    let end_yr = past.end().map_or(f64::INFINITY, |(end_yr, _)| end_yr).min(history.shown_until_yr());
+    let mut ages: Vec<f64> = ages.iter().copied().chain(changes).filter(|age_yr| *age_yr < end_yr).collect();
+    ages.push(end_yr.next_down());
+    ages.sort_by(f64::total_cmp);
+    let above: Vec<bool> = ages.iter().map(|age_yr| is_above(*age_yr)).collect();
+    let mut push = |time_yr: f64, kind: EventKind| {
+        let caution = now(time_yr).surface_caution;
+        events.push(Event { time_yr, body, kind, caution, band: None });
+    };
+    let (Some(first), Some(last)) = (above.iter().position(|now| *now), above.iter().rposition(|now| *now)) else {
+        return;
+    };
+    let rises_yr = first.checked_sub(1).map_or(ages[0], |before| halve(ages[before], ages[first], |at| !is_above(at)));
+    push(rises_yr, EventKind::FirstAbove { marked_k });
+    if let Some(after_yr) = ages.get(last + 1) {
+        push(halve(ages[last], *after_yr, is_above), EventKind::LastAbove { marked_k });
+    } else if past.end().is_some_and(|(end_yr, _)| end_yr <= history.shown_until_yr()) {
+        push(ages[last], EventKind::LastAbove { marked_k });
+    }
 }
 
 /// Crossings of freezing and boiling, and the hottest moment, under a greenhouse that the user holds.
@@ -92,4 +161,90 @@ pub(super) fn halve(mut start_yr: f64, mut end_yr: f64, holds: impl Fn(f64) -> b
         if holds(middle_yr) { start_yr = middle_yr } else { end_yr = middle_yr }
     }
     end_yr
+}
+
+#[cfg(test)]
+mod tests {
+    use super::*;
+    use crate::physics::planet::PlanetEventKind;
+    use crate::system::{PlanetSpecification, StarSpecification, System, Water};
+
+    fn events(planet: PlanetSpecification) -> (History, Vec<Event>) {
+        let history =
+            History::compute(System { star: StarSpecification::default(), planets: vec![planet] }).expect("computed");
+        let events = history.events().iter().filter(|event| event.body == Body::Planet(0)).copied().collect();
+        (history, events)
+    }
+
+    fn surface_k(history: &History, age_yr: f64) -> f64 {
+        let now = history.planet_at(0, age_yr).expect("a planet");
+        now.surface_temperature_k.or(now.surface_hotter_than_k).unwrap_or(0.0)
+    }
+
+    #[test]
+    fn the_first_and_the_last_moment_above_a_marked_temperature_are_just_that() {
+        for (water, semi_major_axis_au, marked_k) in [
+            (None, 3.0, 250.0),
+            (None, 1.5, 230.0),
+            (Some(Water::default()), 4.0, 250.0),
+            (Some(Water::default()), 1.4, 289.0),
+        ] {
+            let (history, events) = events(PlanetSpecification {
+                semi_major_axis_au,
+                water,
+                marked_temperature_k: Some(marked_k),
+                ..PlanetSpecification::default()
+            });
+            let dated = |kind| events.iter().find(|event| event.kind == kind).expect("dated").time_yr;
+            let (first_yr, last_yr) =
+                (dated(EventKind::FirstAbove { marked_k }), dated(EventKind::LastAbove { marked_k }));
+            assert!(first_yr < last_yr, "{first_yr} {last_yr}");
+            assert!(surface_k(&history, first_yr * (1.0 + 1e-9)) > marked_k);
+            assert!(surface_k(&history, last_yr * (1.0 - 1e-9)) > marked_k);
+            for share in 0..400 {
+                let share = f64::from(share) / 400.0;
+                assert!(surface_k(&history, share * 0.999_999 * first_yr) <= marked_k + 1e-6, "{first_yr} {share}");
+                let after_yr = last_yr * 1.000_001 * (history.shown_until_yr() / last_yr).powf(share);
+                assert!(surface_k(&history, after_yr) <= marked_k + 1e-6, "{last_yr} {share}");
+            }
+        }
+    }
+
+    #[test]
+    fn a_temperature_that_is_never_reached_or_not_marked_is_not_dated() {
+        let is_dated = |planet| {
+            let (_, events) = events(planet);
+            events.iter().any(|event| matches!(event.kind, EventKind::FirstAbove { .. } | EventKind::LastAbove { .. }))
+        };
+        assert!(!is_dated(PlanetSpecification::default()));
+        let cold = PlanetSpecification { semi_major_axis_au: 300.0, ..PlanetSpecification::default() };
+        assert!(!is_dated(PlanetSpecification { marked_temperature_k: Some(5000.0), ..cold }));
+    }
+
+    #[test]
+    fn the_hottest_moment_is_hotter_than_any_other() {
+        for (semi_major_axis_au, water) in [(4.0, Some(Water::default())), (20.0, Some(Water::default())), (4.0, None)]
+        {
+            let (history, events) =
+                events(PlanetSpecification { semi_major_axis_au, water, ..PlanetSpecification::default() });
+            let hottest = events.iter().filter(|event| event.kind == EventKind::HottestSurface).collect::<Vec<_>>();
+            assert_eq!(hottest.len(), 1);
+            let most_k = surface_k(&history, hottest[0].time_yr);
+            for &age_yr in history.life().node_ages_yr().iter().step_by(7) {
+                assert!(surface_k(&history, age_yr) < most_k + 2.0, "{semi_major_axis_au}: {age_yr} {most_k}");
+            }
+        }
+    }
+
+    #[test]
+    fn a_planet_that_turns_fast_at_first_locks_later() {
+        let locked_yr = |initial_day_h| {
+            let near = PlanetSpecification { semi_major_axis_au: 0.3, initial_day_h, ..PlanetSpecification::default() };
+            let (_, events) = events(near);
+            let locked = |event: &&Event| event.kind == EventKind::Planet(PlanetEventKind::Locked);
+            events.iter().find(locked).expect("locks").time_yr
+        };
+        assert!(locked_yr(Some(5.0)) > locked_yr(None) && locked_yr(None) > locked_yr(Some(200.0)));
+        assert_eq!(locked_yr(None), locked_yr(Some(24.0)));
+    }
 }

@@ -3,6 +3,8 @@
 use super::history::star_point;
 use super::moment::{PlanetMoment, PlanetState};
 use super::specification::PlanetSpecification;
+use crate::physics::planet::bulk::{escape_speed_km_s, gravity_m_s2, jeans_parameter};
+use crate::physics::planet::climate::ClimateTables;
 use crate::physics::planet::deep_time::InnerHeat;
 use crate::physics::planet::history::SurfaceTemperature;
 use crate::physics::planet::tides::Spin;
@@ -18,6 +20,12 @@ pub const FREEZING_K: f64 = 273.15;
 /// Boiling point of water at 1 bar, K. Common practice.
 pub const BOILING_K: f64 = 373.15;
 
+/// Temperature of the upper air for the Jeans parameters, K: that of the Earth's exosphere under a middling Sun. Recalled.
+const UPPER_AIR_K: f64 = 1000.0;
+/// Masses of a hydrogen atom and of a nitrogen molecule over the proton's. IUPAC 2021 standard atomic weights.
+const HYDROGEN_ATOM: f64 = 1.0007;
+const NITROGEN_MOLECULE: f64 = 27.81;
+
 /// A planet with its whole history: orbit, climate, water, rotation, air.
 #[derive(Debug)]
 pub struct PlanetPast {
@@ -26,12 +34,16 @@ pub struct PlanetPast {
 }
 
 impl PlanetPast {
-    /// Carries a planet along the star's nodes.
+    /// Carries a planet along the star's nodes; thresholds of its climate are taken from `tables` and kept there.
     ///
     /// # Errors
     /// [`OutOfRange`] for a planet outside what can be walked, which the limits of a checked system exclude.
-    pub fn walk(specification: PlanetSpecification, points: &[StarPoint]) -> Result<Self, OutOfRange> {
-        let history = PlanetHistory::walk(&input(&specification), points)?;
+    pub fn walk(
+        specification: PlanetSpecification,
+        points: &[StarPoint],
+        tables: &mut ClimateTables,
+    ) -> Result<Self, OutOfRange> {
+        let history = PlanetHistory::walk_with(&input(&specification), points, tables)?;
         Ok(Self { specification, history })
     }
 
@@ -97,6 +109,9 @@ impl PlanetPast {
     #[must_use]
     pub fn moment(&self, time_yr: f64, star: &StarState) -> PlanetMoment {
         let mut moment = PlanetMoment::nothing(self.specification.name.clone());
+        if !matches!(self.end(), Some((end_yr, end)) if end != OrbitEnd::Unbound && time_yr >= end_yr) {
+            self.fill_body(&mut moment);
+        }
         // The walk has accepted every node, so a star between two of them is accepted too.
         match (self.history.at(&star_point(star, false)).ok().flatten(), self.end()) {
             (Some(reading), _) => self.fill(&mut moment, &reading, star),
@@ -111,6 +126,16 @@ impl PlanetPast {
             (None, None) => {}
         }
         moment
+    }
+
+    /// What mass and radius alone decide.
+    fn fill_body(&self, moment: &mut PlanetMoment) {
+        let (mass_mearth, radius_rearth) = (self.specification.mass_mearth, self.specification.radius_rearth);
+        let jeans = |molecular_mass| jeans_parameter(mass_mearth, radius_rearth, molecular_mass, UPPER_AIR_K).ok();
+        moment.surface_gravity_m_s2 = gravity_m_s2(mass_mearth, radius_rearth).ok();
+        moment.escape_speed_km_s = escape_speed_km_s(mass_mearth, radius_rearth).ok();
+        moment.jeans_hydrogen_ratio = jeans(HYDROGEN_ATOM);
+        moment.jeans_nitrogen_ratio = jeans(NITROGEN_MOLECULE);
     }
 
     fn fill(&self, moment: &mut PlanetMoment, reading: &Reading, star: &StarState) {
@@ -140,6 +165,7 @@ impl PlanetPast {
             moment.ice_line_deg = climate.ice_line_deg;
             moment.equator_pole_k = climate.equator_pole_k;
             moment.carbon_dioxide_bar = climate.carbon_dioxide_bar;
+            moment.planetary_albedo = climate.planetary_albedo;
         }
         moment.state = match (reading.climate.as_ref().map(|climate| climate.state), reading.surface.value_k()) {
             (Some(ClimateState::Frozen), _) => PlanetState::Frozen,
@@ -156,6 +182,7 @@ impl PlanetPast {
 
 /// The planet as physics takes it: what nobody is asked about has its usual value.
 fn input(planet: &PlanetSpecification) -> PlanetInput {
+    let spin = Spin::usual(planet.mass_mearth);
     PlanetInput {
         orbit: OrbitInput {
             semi_major_axis_au: planet.semi_major_axis_au,
@@ -169,7 +196,7 @@ fn input(planet: &PlanetSpecification) -> PlanetInput {
         greenhouse: planet.greenhouse,
         inner_heat: InnerHeat::default(),
         water: planet.water.map(|water| water.world()),
-        spin: Spin::usual(planet.mass_mearth),
+        spin: Spin { initial_day_h: planet.initial_day_h.unwrap_or(spin.initial_day_h), ..spin },
         tides: planet.tides.tides(planet.mass_mearth),
         escape_efficiency: escape::USUAL_EFFICIENCY,
     }

@@ -280,6 +280,14 @@ pub const PLANET: &[PlanetQuantity] = &[
         value: |planet| planet.carbon_dioxide_bar,
     },
     PlanetQuantity {
+        key: "planetary_albedo",
+        name: "Climate albedo",
+        symbol: "",
+        digits: 3,
+        method: "climate",
+        value: |planet| planet.planetary_albedo,
+    },
+    PlanetQuantity {
         key: "water_oceans",
         name: "Water, oceans",
         symbol: "",
@@ -350,6 +358,38 @@ pub const PLANET: &[PlanetQuantity] = &[
         digits: 2,
         method: "shoreline",
         value: |planet| planet.shoreline_ratio,
+    },
+    PlanetQuantity {
+        key: "surface_gravity_m_s2",
+        name: "Gravity",
+        symbol: "m/s²",
+        digits: 3,
+        method: "gravity",
+        value: |planet| planet.surface_gravity_m_s2,
+    },
+    PlanetQuantity {
+        key: "escape_speed_km_s",
+        name: "Escape speed",
+        symbol: "km/s",
+        digits: 3,
+        method: "escape_speed",
+        value: |planet| planet.escape_speed_km_s,
+    },
+    PlanetQuantity {
+        key: "jeans_hydrogen_ratio",
+        name: "Hold on H",
+        symbol: "",
+        digits: 3,
+        method: "jeans",
+        value: |planet| planet.jeans_hydrogen_ratio,
+    },
+    PlanetQuantity {
+        key: "jeans_nitrogen_ratio",
+        name: "Hold on N₂",
+        symbol: "",
+        digits: 3,
+        method: "jeans",
+        value: |planet| planet.jeans_nitrogen_ratio,
     },
 ];
 

@@ -70,6 +70,10 @@ pub struct PlanetSpecification {
     pub water: Option<Water>,
     /// Whether tides change the orbit.
     pub tides: TidesChoice,
+    /// Length of the first day, h; the usual one for the planet's mass where nothing is said.
+    pub initial_day_h: Option<f64>,
+    /// A mean surface temperature whose first and last moment are dated, K.
+    pub marked_temperature_k: Option<f64>,
 }
 
 /// Where in a system a problem sits.
@@ -219,6 +223,8 @@ impl PlanetSpecification {
         }
         inputs.extend(self.air.surface_pressure_bar().map(|pressure_bar| (&limits::SURFACE_PRESSURE, pressure_bar)));
         inputs.extend(self.water.iter().flat_map(Water::inputs));
+        inputs.extend(self.initial_day_h.map(|day_h| (&limits::INITIAL_DAY, day_h)));
+        inputs.extend(self.marked_temperature_k.map(|marked_k| (&limits::MARKED_TEMPERATURE, marked_k)));
         inputs
     }
 }
@@ -238,6 +244,8 @@ impl Default for PlanetSpecification {
             air: Air::default(),
             water: None,
             tides: TidesChoice::On,
+            initial_day_h: None,
+            marked_temperature_k: None,
         }
     }
 }

@@ -28,6 +28,8 @@ pub enum EntryKind {
     TemperatureK,
     /// A span of time, kept in years.
     SpanYr,
+    /// The length of a day, kept in hours.
+    DayH,
     /// A pressure, kept in bar.
     PressureBar,
     /// An angle, kept in degrees.
@@ -79,6 +81,7 @@ impl EntryKind {
             Self::RadiusRearth => "R⊕",
             Self::TemperatureDifferenceK | Self::TemperatureK => "K",
             Self::SpanYr => "yr",
+            Self::DayH => "h",
             Self::PressureBar => "bar",
             Self::AngleDeg => "°",
             Self::AbundanceDex => "dex",
@@ -170,6 +173,7 @@ impl EntryKind {
             Self::TemperatureDifferenceK => &[("°C", 1.0), ("K", 1.0), ("C", 1.0)],
             Self::TemperatureK => &[("K", 1.0)],
             Self::SpanYr => &[],
+            Self::DayH => &[("hours", 1.0), ("days", 24.0), ("h", 1.0), ("d", 24.0)],
             Self::PressureBar => PRESSURE_BAR,
             Self::AngleDeg => &[("degrees", 1.0), ("deg", 1.0), ("°", 1.0)],
             Self::AbundanceDex => &[("dex", 1.0)],
@@ -304,6 +308,8 @@ mod tests {
         close("15 °C", EntryKind::TemperatureK, 288.15);
         close("-20C", EntryKind::TemperatureK, 253.15);
         close("288 K", EntryKind::TemperatureK, 288.0);
+        close("3 days", EntryKind::DayH, 72.0);
+        close("10 h", EntryKind::DayH, 10.0);
     }
 
     #[test]

@@ -42,7 +42,7 @@ impl Longember {
         let mut workspace = Workspace::new(session, settings, Arc::new(history));
         workspace.job = HistoryJob::new(if keeper.is_real() { LifeStore::of_user() } else { LifeStore::default() });
         if workspace.history.life().is_quick_look() {
-            workspace.job.start(system, context);
+            workspace.start_job(system, context);
         }
         theme::apply(context, workspace.theme());
         // Larger and smaller text are commands of ours, within a range that is kept.
@@ -176,8 +176,9 @@ impl Longember {
     fn receive(&mut self, context: &Context) {
         let workspace = &mut self.workspace;
         match workspace.job.poll() {
-            Some(Ok(history)) => {
-                workspace.history = history;
+            Some(Ok(fresh)) => {
+                workspace.history = fresh.history;
+                workspace.derived = *fresh.derived;
                 workspace.trouble = None;
                 workspace.refresh();
                 self.keep_moment_in_view();

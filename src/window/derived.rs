@@ -2,6 +2,7 @@
 
 use super::view::{View, WHOLE};
 use crate::figure::curves::Curve;
+use crate::figure::light_and_thresholds;
 use crate::figure::ribbon::LightRange;
 use crate::figure::{Chart, HrDiagram, Owner, Ribbon, Samples, Series};
 use crate::system::{History, TimeAxis, TimeScale};
@@ -33,6 +34,8 @@ pub(super) struct Derived {
     hr_diagram: OnceCell<HrDiagram>,
     pinned: Option<Arc<History>>,
     pinned_path: OnceCell<Vec<Vec<[f64; 2]>>>,
+    /// The chart of the planet whose climate is looked at.
+    climate: Option<(usize, Chart)>,
 }
 
 impl Derived {
@@ -51,6 +54,7 @@ impl Derived {
             curves: curves.to_vec(),
             light,
             hr_diagram: OnceCell::new(),
+            climate: None,
             references: Vec::new(),
             pinned: None,
             pinned_path: OnceCell::new(),
@@ -66,6 +70,13 @@ impl Derived {
     pub(super) fn pinned_path(&self) -> &[Vec<[f64; 2]>] {
         self.pinned_path
             .get_or_init(|| self.pinned.as_deref().map_or_else(Vec::new, |pinned| self.hr_diagram().path(pinned)))
+    }
+
+    /// The starlight of a planet against the thresholds of its climate, made when it is first looked at.
+    pub(super) fn climate_chart(&mut self, index: usize) -> &Chart {
+        let known = self.climate.take().filter(|(of, _)| *of == index);
+        let chart = known.unwrap_or_else(|| (index, light_and_thresholds::chart(&self.history, &self.samples, index)));
+        &self.climate.insert(chart).1
     }
 
     /// Makes anew only what changed.
@@ -114,6 +125,7 @@ impl Derived {
             self.samples = Samples::new(history, &self.axis, view.from, view.to, SAMPLES);
             self.ribbon = Ribbon::new(&self.samples, self.light);
             self.view = view;
+            self.climate = None;
         }
         if view_changed || *curves != self.curves[..] {
             self.charts = curves.iter().map(|curve| curve.chart(&self.samples)).collect();

@@ -1,8 +1,11 @@
 //! Work off the drawing thread: one history at a time, the newest request wins; and what is handed over.
 
+use super::derived::Derived;
 use super::exports::{Exported, Work};
+use super::view::View;
 use crate::document::LifeStore;
-use crate::system::{History, HistoryError, System};
+use crate::figure::curves::Curve;
+use crate::system::{History, HistoryError, System, TimeScale};
 use std::ops::ControlFlow;
 use std::sync::Arc;
 use std::sync::atomic::{AtomicBool, AtomicU32, Ordering};
@@ -10,8 +13,33 @@ use std::sync::mpsc::{Receiver, RecvTimeoutError, TryRecvError, channel};
 use std::thread;
 use std::time::Duration;
 
-/// A computed history, or why there is none.
-pub(crate) type Computed = Result<Arc<History>, HistoryError>;
+/// A computed history with what is drawn of it, or why there is none.
+pub(crate) type Computed = Result<Fresh, HistoryError>;
+
+/// A history with what is drawn of it, both made away from the drawing thread.
+#[derive(Debug)]
+pub(crate) struct Fresh {
+    pub(crate) history: Arc<History>,
+    pub(crate) derived: Box<Derived>,
+}
+
+/// What is to be computed, and how it is looked at.
+#[derive(Debug)]
+pub(crate) struct Request {
+    pub(crate) system: System,
+    /// The history on show, which has most in common with the one that is wanted.
+    pub(crate) earlier: Arc<History>,
+    pub(crate) scale: TimeScale,
+    pub(crate) view: View,
+    pub(crate) curves: Vec<Curve>,
+}
+
+impl Request {
+    fn fresh(&self, history: History) -> Fresh {
+        let history = Arc::new(history);
+        Fresh { derived: Box::new(Derived::new(&history, self.scale, self.view, &self.curves)), history }
+    }
+}
 
 /// Most of a frame that the drawing thread waits, so that a quick result shows without a flicker.
 const SHORT_WAIT: Duration = Duration::from_millis(6);
@@ -47,20 +75,27 @@ impl HistoryJob {
     /// Starts computing. What was being computed is stopped: its thread ends at its next step.
     ///
     /// Where the exact history takes seconds, a quick look comes first.
-    pub(crate) fn start(&mut self, system: System, context: &egui::Context) {
+    pub(crate) fn start(&mut self, request: Request, context: &egui::Context) {
         self.cancel();
         let (sender, results) = channel();
         let shared = Arc::new(Shared::default());
         let (context, its, store) = (context.clone(), Arc::clone(&shared), self.store.clone());
         let spawned = thread::Builder::new().name("history".to_owned()).spawn(move || {
-            if let Some(look) = History::quick_look(system.clone()) {
-                let _ = sender.send(Ok(Arc::new(look)));
+            let is_known = request.earlier.life_of(&request.system).is_some();
+            if let Some(look) = History::quick_look(request.system.clone()).filter(|_| !is_known) {
+                let _ = sender.send(Ok(request.fresh(look)));
                 context.request_repaint();
             }
-            let computed = store.history(system, &mut |share| its.tell(share));
+            let tell = &mut |share| its.tell(share);
+            let computed = store.history(Some(&request.earlier), request.system.clone(), tell);
+            let computed = computed.map(|history| request.fresh(history));
+            let ready = computed.as_ref().ok().map(|fresh| Arc::clone(&fresh.history));
             // The window may have asked for something newer and stopped listening: nothing is lost then.
-            let _ = sender.send(computed.map(Arc::new));
+            let is_wanted = sender.send(computed).is_ok();
             context.request_repaint();
+            if let Some(history) = ready.filter(|_| is_wanted) {
+                history.prepare_climates();
+            }
         });
         self.running = spawned.ok().map(|_| Running { results, shared });
     }
@@ -89,7 +124,7 @@ impl HistoryJob {
         let found = self.running.as_ref()?.results.recv_timeout(SHORT_WAIT);
         match found {
             Ok(computed) => {
-                if !computed.as_ref().is_ok_and(|history| history.life().is_quick_look()) {
+                if !computed.as_ref().is_ok_and(|fresh| fresh.history.life().is_quick_look()) {
                     self.running = None;
                 }
                 Some(computed)
@@ -166,19 +201,26 @@ impl ExportJobs {
 mod tests {
     use super::*;
     use crate::system::StarSpecification;
+    use crate::window::view::WHOLE;
     use std::time::Instant;
 
-    fn red_dwarf(mass_msun: f64) -> System {
+    fn system(mass_msun: f64) -> System {
         System { star: StarSpecification { mass_msun, ..StarSpecification::default() }, planets: Vec::new() }
+    }
+
+    fn request(system: System, earlier: &Arc<History>) -> Request {
+        let earlier = Arc::clone(earlier);
+        Request { system, earlier, scale: TimeScale::Paced, view: WHOLE, curves: vec![Curve::Luminosity] }
     }
 
     #[test]
     fn a_newer_request_stops_the_older_one() {
         let mut job = HistoryJob::default();
         let context = egui::Context::default();
+        let shown = Arc::new(History::compute(system(1.0)).expect("computed"));
         let mut threads = Vec::new();
         for step in 0..20 {
-            job.start(red_dwarf(0.10 + 0.001 * f64::from(step)), &context);
+            job.start(request(system(0.10 + 0.001 * f64::from(step)), &shown), &context);
             threads.push(job.running.as_ref().map(|running| Arc::downgrade(&running.shared)));
         }
         job.cancel();

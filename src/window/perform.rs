@@ -384,6 +384,6 @@ impl Longember {
         {
             workspace.selected = Body::Star;
         }
-        workspace.job.start(system, context);
+        workspace.start_job(system, context);
     }
 }

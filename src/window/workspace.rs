@@ -3,7 +3,7 @@
 use super::checked::Checked;
 use super::derived::Derived;
 use super::dialogs::Dialog;
-use super::jobs::{ExportJobs, HistoryJob};
+use super::jobs::{ExportJobs, HistoryJob, Request};
 use super::pages::Page;
 use super::pinned::Pinned;
 use super::playback::Playback;
@@ -16,7 +16,7 @@ use crate::figure::interior::LayerScale;
 use crate::figure::orbit_plan::PlanScale;
 use crate::figure::{SkyView, SpectrumView};
 use crate::physics::light::steady_colour_words;
-use crate::system::{Body, EventGroup, History, Moment, TimeScale};
+use crate::system::{Body, EventGroup, History, Moment, System, TimeScale};
 use crate::units::number_text::USUAL_DIGITS;
 use crate::units::time_words::span;
 use std::sync::Arc;
@@ -188,6 +188,18 @@ impl Workspace {
     #[must_use]
     pub fn time_text(&self, time_yr: f64) -> String {
         span(time_yr, USUAL_DIGITS, self.settings.span_style)
+    }
+
+    /// Starts computing a history in the background, with what is drawn of it as it is looked at now.
+    pub(super) fn start_job(&mut self, system: System, context: &egui::Context) {
+        let request = Request {
+            system,
+            earlier: Arc::clone(&self.history),
+            scale: self.scale,
+            view: self.view,
+            curves: self.curves.clone(),
+        };
+        self.job.start(request, context);
     }
 
     /// Builds axis, samples and charts anew after a change of history, scale, view or charts.

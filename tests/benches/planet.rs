@@ -4,7 +4,7 @@
 mod planet_track;
 
 use criterion::{Criterion, criterion_group, criterion_main};
-use longember::physics::planet::climate::{ClimateCurve, IceLineModel, WaterWorldAir};
+use longember::physics::planet::climate::{ClimateCurve, ClimateTables, IceLineModel, WaterWorldAir};
 use longember::physics::planet::{CarbonCycle, OrbitInput, PlanetHistory, PlanetInput, WaterWorld};
 use std::hint::black_box;
 
@@ -22,6 +22,22 @@ fn lives(criterion: &mut Criterion) {
                 bencher.iter(|| PlanetHistory::walk(black_box(&input), black_box(&track)));
             });
         }
+    }
+}
+
+/// A planet's whole history with its thresholds worked out first, and with thresholds known from an earlier one.
+fn with_thresholds(criterion: &mut Criterion) {
+    let track = planet_track::sun_like(2000);
+    for carbon in [CarbonCycle::default(), CarbonCycle::Held] {
+        let input = planet(1.0, carbon);
+        criterion.bench_function(&format!("climate history, cold, {}", carbon.key()), |bencher| {
+            bencher.iter(|| PlanetHistory::walk(black_box(&input), black_box(&track)));
+        });
+        let mut tables = ClimateTables::default();
+        let Ok(_) = PlanetHistory::walk_with(&input, &track, &mut tables) else { return };
+        criterion.bench_function(&format!("climate history, thresholds known, {}", carbon.key()), |bencher| {
+            bencher.iter(|| PlanetHistory::walk_with(black_box(&input), black_box(&track), &mut tables));
+        });
     }
 }
 
@@ -46,10 +62,13 @@ fn moments(criterion: &mut Criterion) {
         });
     }
     let Ok(model) = IceLineModel::new(&WaterWorldAir::default(), 5772.0) else { return };
+    criterion.bench_function("one equilibrium", |bencher| {
+        bencher.iter(|| model.from_warm(black_box(1.0)));
+    });
     criterion.bench_function("climate_curve", |bencher| {
         bencher.iter(|| ClimateCurve::follow(black_box(&model), 1.2));
     });
 }
 
-criterion_group!(planets, lives, other_stars, moments);
+criterion_group!(planets, lives, with_thresholds, other_stars, moments);
 criterion_main!(planets);

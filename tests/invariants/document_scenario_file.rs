@@ -330,9 +330,12 @@ fn planet() -> impl Strategy<Value = PlanetSpecification> {
         value(&limits::BOND_ALBEDO),
         value(&limits::EMISSIVITY),
     );
-    let choices = (0..4_usize, greenhouse(), air(), water(), 0..2_usize);
+    let optional =
+        (prop::option::of(value(&limits::INITIAL_DAY)), prop::option::of(value(&limits::MARKED_TEMPERATURE)));
+    let choices = (0..4_usize, greenhouse(), air(), water(), 0..2_usize, optional);
     (name(), numbers, choices).prop_map(|(name, numbers, choices)| {
-        let (redistribution, greenhouse, air, water, tides) = choices;
+        let (redistribution, greenhouse, air, water, tides, optional) = choices;
+        let (initial_day_h, marked_temperature_k) = optional;
         let (semi_major_axis_au, eccentricity, mass_mearth, radius_rearth, bond_albedo, emissivity) = numbers;
         PlanetSpecification {
             name,
@@ -347,6 +350,8 @@ fn planet() -> impl Strategy<Value = PlanetSpecification> {
             air,
             water,
             tides: TidesChoice::ALL[tides],
+            initial_day_h,
+            marked_temperature_k,
         }
     })
 }

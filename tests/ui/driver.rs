@@ -1,6 +1,7 @@
 //! Drives the window as a person would: finds things by name, clicks, drags, types, waits for what is computed.
 
 use egui::accesskit::Role;
+use egui::epaint::ColorMode;
 use egui::{Color32, Event, Key, Modifiers, MouseWheelUnit, Pos2, Rect, Shape, Vec2, pos2, vec2};
 use egui_kittest::kittest::{AccessKitNode, NodeT};
 use egui_kittest::{Harness, Node};
@@ -288,6 +289,23 @@ impl Driver {
             });
         }
         colours
+    }
+
+    /// How many curves are drawn that nothing shows through.
+    pub(crate) fn opaque_lines(&self) -> usize {
+        let mut count = 0;
+        for clipped in &self.harness.output().shapes {
+            each_shape(&clipped.shape, &mut |shape| {
+                if let Shape::Path(path) = shape
+                    && let ColorMode::Solid(colour) = path.stroke.color
+                    && path.points.len() > 100
+                    && colour.is_opaque()
+                {
+                    count += 1;
+                }
+            });
+        }
+        count
     }
 
     /// Every text that is drawn, with its place and the frame beyond which it is cut.

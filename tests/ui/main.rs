@@ -3,6 +3,7 @@
 #![expect(clippy::expect_used, reason = "a test that cannot go on has failed")]
 
 mod commands;
+mod climate;
 mod curves;
 mod dialogs;
 mod driver;
@@ -14,6 +15,7 @@ mod interior;
 mod layout;
 mod light_pages;
 mod looks;
+mod many_planets;
 mod opening;
 mod pages;
 mod pictures;

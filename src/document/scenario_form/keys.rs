@@ -25,6 +25,8 @@ pub(super) const PLANET_KEYS: &[&str] = &[
     "air",
     "climate",
     "tides",
+    "initial_day_h",
+    "marked_temperature_k",
 ];
 pub(super) const GREENHOUSES: &[&str] = &["None", "FixedIncrement", "Grey"];
 pub(super) const FIXED_INCREMENT_KEYS: &[&str] = &["increment_k"];

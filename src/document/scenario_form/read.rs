@@ -190,6 +190,8 @@ fn read_planet(
         air: body.air().unwrap_or(usual.air),
         water: body.climate(),
         tides: body.tides().unwrap_or(usual.tides),
+        initial_day_h: body.optional_number(&limits::INITIAL_DAY),
+        marked_temperature_k: body.optional_number(&limits::MARKED_TEMPERATURE),
     })
 }
 

@@ -107,6 +107,8 @@ fn write_planet(writer: &mut Writer, planet: &PlanetSpecification) {
         Some(water) => write_water(writer, water),
     }
     writer.field("tides", tides_text(planet.tides));
+    writer.field("initial_day_h", &given_text(planet.initial_day_h));
+    writer.field("marked_temperature_k", &given_text(planet.marked_temperature_k));
     writer.close(')');
 }
 
@@ -135,6 +137,11 @@ fn carbon_text(carbon: Carbon) -> String {
             format!("{}(carbon_dioxide_bar: {})", CARBONS[1], number_text(carbon_dioxide_bar))
         }
     }
+}
+
+/// A number that may be left out.
+fn given_text(number: Option<f64>) -> String {
+    number.map_or_else(|| "None".to_owned(), number_text)
 }
 
 fn tides_text(tides: TidesChoice) -> &'static str {

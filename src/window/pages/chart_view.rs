@@ -222,7 +222,7 @@ fn lanes(painter: &Painter, place: &Places<'_>, palette: &Palette) {
 }
 
 /// How strongly a state is shaded: open water most.
-fn lane_shade(state: PlanetState) -> f32 {
+pub(super) fn lane_shade(state: PlanetState) -> f32 {
     match state {
         PlanetState::Temperate => 0.55,
         PlanetState::Moist => 0.4,

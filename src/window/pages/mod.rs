@@ -2,12 +2,15 @@
 
 mod chart_view;
 mod chronicle;
+mod climate;
 mod curves;
 mod hr_diagram;
 mod interior;
 mod interior_plot;
 mod introduction;
+mod latitude_plot;
 mod light_columns;
+mod light_gauge_view;
 mod orbits;
 mod sky;
 mod sky_altitude;
@@ -41,6 +44,8 @@ pub enum Page {
     Sky,
     /// The system from above.
     Orbits,
+    /// One planet's climate by latitude and against its thresholds.
+    Climate,
     /// Every dated event.
     Chronicle,
     /// Claims and what the model says to them.
@@ -53,12 +58,13 @@ pub enum Page {
 
 impl Page {
     /// Every page, in order.
-    pub const ALL: [Self; 10] = [
+    pub const ALL: [Self; 11] = [
         Self::Curves,
         Self::HrDiagram,
         Self::Spectrum,
         Self::Interior,
         Self::Orbits,
+        Self::Climate,
         Self::Sky,
         Self::Chronicle,
         Self::Statements,
@@ -83,6 +89,7 @@ impl Page {
             Self::Interior => "Interior",
             Self::Sky => "Sky",
             Self::Orbits => "Orbits",
+            Self::Climate => "Climate",
             Self::Chronicle => "Chronicle",
             Self::Statements => "Statements",
             Self::Introduction => "What to look for",
@@ -112,6 +119,7 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
         Page::Interior => interior::show(ui, workspace),
         Page::Sky => sky::show(ui, workspace),
         Page::Orbits => orbits::show(ui, workspace),
+        Page::Climate => climate::show(ui, workspace),
         Page::Chronicle => chronicle::show(ui, workspace),
         Page::Statements => statements::show(ui, workspace),
         Page::Introduction => introduction::show(ui, workspace),

@@ -1,12 +1,14 @@
 //! The inputs of the chosen planet: what it is, its climate, tides and air; seldom needed ones folded away.
 
 use super::edit;
+use crate::physics::planet::tides::Spin;
 use crate::physics::planet::{Greenhouse, Redistribution};
 use crate::system::limits::{
-    BOND_ALBEDO, CARBON_DIOXIDE, ECCENTRICITY, EMISSIVITY, GREENHOUSE_INCREMENT, HEAT_TRANSPORT, LONGEST_NAME, Limit,
-    OBLIQUITY, OCEAN_AFTER, OPTICAL_DEPTH, PLANET_MASS, PLANET_RADIUS, REGULATED_MEAN, SEMI_MAJOR_AXIS,
-    SURFACE_PRESSURE, WATER,
+    BOND_ALBEDO, CARBON_DIOXIDE, ECCENTRICITY, EMISSIVITY, GREENHOUSE_INCREMENT, HEAT_TRANSPORT, INITIAL_DAY,
+    LONGEST_NAME, Limit, MARKED_TEMPERATURE, OBLIQUITY, OCEAN_AFTER, OPTICAL_DEPTH, PLANET_MASS, PLANET_RADIUS,
+    REGULATED_MEAN, SEMI_MAJOR_AXIS, SURFACE_PRESSURE, WATER,
 };
+use crate::system::planet_past::FREEZING_K;
 use crate::system::{Air, Carbon, PlanetSpecification, TidesChoice, Water};
 use crate::window::command::Command;
 use crate::window::theme::{GRID, small, usual};
@@ -60,8 +62,10 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace, index: usize) -> Option<C
     }
     section(ui, palette, "Climate");
     changed = climate(ui, workspace, planet).or(changed);
+    changed = marked(ui, workspace, planet).or(changed);
     section(ui, palette, "Tides and air");
     changed = tides_row(ui, workspace, planet.tides).or(changed);
+    changed = first_day(ui, workspace, planet).or(changed);
     changed = air(ui, workspace, planet).or(changed);
     renamed.or_else(|| {
         changed.map(|(what, change)| {
@@ -204,6 +208,48 @@ fn tides_row(ui: &mut Ui, workspace: &Workspace, current: TidesChoice) -> Option
     let hint = "Tides on planet and star, and the drag of a giant's envelope, with usual strength for the mass.";
     choice(ui, workspace, "Tides", hint, &words, current)
         .map(|chosen| said("tides", move |planet| planet.tides = TidesChoice::ALL[chosen]))
+}
+
+/// The first day is usual for the mass until one is chosen.
+fn first_day(ui: &mut Ui, workspace: &Workspace, planet: &PlanetSpecification) -> Option<Change> {
+    let usual_h = Spin::usual(planet.mass_mearth).initial_day_h;
+    let words = [format!("usual, {usual_h} h"), "chosen".to_owned()];
+    let hint = "How fast the planet turns at first, which decides when its day becomes its year.";
+    let row = Optional { name: "Turning", hint, words: [&words[0], &words[1]], limit: &INITIAL_DAY, usual: usual_h };
+    let day_h = row.show(ui, workspace, &planet.name, planet.initial_day_h)?;
+    Some(said("first day", move |planet| planet.initial_day_h = day_h))
+}
+
+/// A temperature whose first and last moment the chronicle dates.
+fn marked(ui: &mut Ui, workspace: &Workspace, planet: &PlanetSpecification) -> Option<Change> {
+    let row = Optional {
+        name: "Chronicle dates",
+        hint: "The first and the last moment above a mean surface temperature of your choice.",
+        words: ["no temperature", "a temperature"],
+        limit: &MARKED_TEMPERATURE,
+        usual: FREEZING_K,
+    };
+    let marked_k = row.show(ui, workspace, &planet.name, planet.marked_temperature_k)?;
+    Some(said("marked temperature", move |planet| planet.marked_temperature_k = marked_k))
+}
+
+/// A number that may be left out: a choice, and a field where it is made.
+struct Optional<'a> {
+    name: &'a str,
+    hint: &'a str,
+    /// Without and with a number.
+    words: [&'a str; 2],
+    limit: &'static Limit,
+    /// The number that stands there first.
+    usual: f64,
+}
+
+impl Optional<'_> {
+    fn show(&self, ui: &mut Ui, workspace: &Workspace, planet: &str, current: Option<f64>) -> Option<Option<f64>> {
+        let chosen = choice(ui, workspace, self.name, self.hint, &self.words, usize::from(current.is_some()));
+        let entered = current.and_then(|value| value_entry(ui, workspace.palette(), planet, self.limit, value));
+        entered.map(Some).or(chosen.map(|chosen| (chosen == 1).then_some(self.usual)))
+    }
 }
 
 /// The pressure is kept when only the gas changes.

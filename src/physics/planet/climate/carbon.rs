@@ -2,9 +2,11 @@
 
 use super::super::habitable_zone::runaway_insolation_earth;
 use super::super::range::OutOfRange;
-use super::ice_line_model::WaterWorldAir;
+use super::ice_line_model::{Latitude, WaterWorldAir};
 use super::regulated::{AiredClimate, RegulatedClimate, checked_mean};
 use super::table::{ClimateLimits, ClimateTable, SURELY_THAWED};
+use super::tables::ClimateTables;
+use std::sync::Arc;
 
 /// What sets the carbon dioxide in a planet's air.
 #[derive(Clone, Copy, Debug, PartialEq)]
@@ -58,7 +60,7 @@ impl CarbonCycle {
 /// The climates of one planet, whichever way its carbon dioxide is set.
 #[derive(Clone, Debug)]
 pub(crate) enum WorldClimate {
-    Held { table: Box<ClimateTable>, carbon_dioxide_bar: f64 },
+    Held { table: Arc<ClimateTable>, carbon_dioxide_bar: f64 },
     Regulated(Box<RegulatedClimate>),
 }
 
@@ -66,17 +68,25 @@ pub(crate) enum WorldClimate {
 const SURELY_THAWED_UNDER_THICK_AIR: f64 = 0.6;
 
 impl WorldClimate {
-    pub(crate) fn new(air: &WaterWorldAir, cycle: CarbonCycle) -> Result<Self, OutOfRange> {
+    pub(crate) fn new(air: &WaterWorldAir, cycle: CarbonCycle, tables: &mut ClimateTables) -> Result<Self, OutOfRange> {
         Ok(match cycle {
-            CarbonCycle::Held => {
-                Self::Held { table: Box::new(ClimateTable::new(air)?), carbon_dioxide_bar: air.carbon_dioxide_bar }
+            CarbonCycle::Held => Self::Held { table: tables.of(air)?, carbon_dioxide_bar: air.carbon_dioxide_bar },
+            CarbonCycle::Regulated { mean_k } => {
+                Self::Regulated(Box::new(RegulatedClimate::of_tables(air, mean_k, tables)?))
             }
-            CarbonCycle::Regulated { mean_k } => Self::Regulated(Box::new(RegulatedClimate::new(air, mean_k)?)),
         })
     }
 
+    /// Marks the tables as in use.
+    pub(crate) fn keep_tables(&self, tables: &mut ClimateTables) {
+        match self {
+            Self::Held { table, .. } => tables.keep(table),
+            Self::Regulated(regulated) => regulated.keep_tables(tables),
+        }
+    }
+
     /// Works out the curves that this starlight needs.
-    pub(crate) fn prepare(&mut self, insolation_earth: f64, teff_k: f64) {
+    pub(crate) fn prepare(&self, insolation_earth: f64, teff_k: f64) {
         match self {
             Self::Held { table, .. } => table.prepare(teff_k),
             Self::Regulated(regulated) => regulated.prepare(insolation_earth, teff_k),
@@ -91,14 +101,32 @@ impl WorldClimate {
         }
     }
 
-    /// Where the climate turns, with the curves kept.
-    pub(crate) fn prepared_limits(&mut self, teff_k: f64) -> Result<ClimateLimits, OutOfRange> {
+    /// Where the climate turns.
+    pub(crate) fn limits(&self, teff_k: f64) -> Result<ClimateLimits, OutOfRange> {
         match self {
-            Self::Held { table, .. } => {
-                table.prepare(teff_k);
-                table.limits(teff_k)
-            }
-            Self::Regulated(regulated) => regulated.prepared_limits(teff_k),
+            Self::Held { table, .. } => table.limits(teff_k),
+            Self::Regulated(regulated) => regulated.limits(teff_k),
+        }
+    }
+
+    /// The latitudes of [`WorldClimate::open_climate`].
+    pub(crate) fn open_latitudes(&self, insolation_earth: f64, teff_k: f64) -> Result<Vec<Latitude>, OutOfRange> {
+        match self {
+            Self::Held { table, .. } => table.open_latitudes(insolation_earth, teff_k),
+            Self::Regulated(regulated) => regulated.open_latitudes(insolation_earth, teff_k),
+        }
+    }
+
+    /// The latitudes of [`WorldClimate::frozen_climate`].
+    pub(crate) fn frozen_latitudes(
+        &self,
+        insolation_earth: f64,
+        teff_k: f64,
+        other_heat_w_m2: f64,
+    ) -> Result<Vec<Latitude>, OutOfRange> {
+        match self {
+            Self::Held { table, .. } => table.frozen_latitudes(insolation_earth, teff_k, other_heat_w_m2),
+            Self::Regulated(regulated) => regulated.frozen_latitudes(insolation_earth, teff_k, other_heat_w_m2),
         }
     }
 

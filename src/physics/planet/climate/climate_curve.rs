@@ -1,7 +1,7 @@
 //! Every lasting climate a planet can have under one colour of starlight.
 
 use super::continuation::{Point, at_starlight_of, of_mean, trace, turning_point};
-use super::ice_line_model::{Climate, IceLineModel};
+use super::ice_line_model::{Climate, IceLineModel, Profile};
 
 /// Warmest latitude of a frozen planet and of one with open water, K: the ice changes between them.
 const FROZEN_BELOW_K: f64 = 265.15;
@@ -39,6 +39,8 @@ pub struct ClimateCurve {
     pub hot_insolation_earth: Option<f64>,
     /// Climates with open water, from least to most starlight.
     pub(crate) open: Vec<Climate>,
+    /// Temperature of every cell, K, of each of them.
+    open_profiles_k: Vec<Profile>,
 }
 
 impl ClimateCurve {
@@ -53,38 +55,56 @@ impl ClimateCurve {
         let freeze_insolation_earth =
             turning_point(model, &points, &climates, |climate| climate.warmest_k - OPEN_ABOVE_K, -1.0);
         let mut open: Vec<Climate> = Vec::with_capacity(climates.len());
+        let mut open_profiles_k: Vec<Profile> = Vec::with_capacity(climates.len());
         // From the warm end down, keep what needs ever less starlight: the uppermost climate at each insolation.
-        for climate in climates {
+        for (climate, point) in climates.into_iter().zip(&points) {
             if open.last().is_none_or(|last| climate.insolation_earth < last.insolation_earth)
                 && climate.warmest_k >= OPEN_ABOVE_K
             {
                 open.push(climate);
+                open_profiles_k.push(point.t);
             }
         }
         open.reverse();
+        open_profiles_k.reverse();
         let hot =
             open.windows(2).find(|pair| pair[0].mean_k < HOT_MEAN_K && pair[1].mean_k >= HOT_MEAN_K).map(|pair| {
                 let share = (HOT_MEAN_K - pair[0].mean_k) / (pair[1].mean_k - pair[0].mean_k);
                 pair[0].insolation_earth + share * (pair[1].insolation_earth - pair[0].insolation_earth)
             });
-        Self { freeze_insolation_earth, thaw_insolation_earth, hot_insolation_earth: hot, open }
+        Self { freeze_insolation_earth, thaw_insolation_earth, hot_insolation_earth: hot, open, open_profiles_k }
     }
 
     /// The climate with open water at an insolation, held at its end values outside the curve.
     #[must_use]
     pub fn open_climate(&self, insolation_earth: f64) -> Option<Climate> {
-        let (first, last) = (self.open.first()?, self.open.last()?);
-        let after = self.open.partition_point(|climate| climate.insolation_earth <= insolation_earth);
-        if after == 0 {
-            return Some(Climate { insolation_earth, ..*first });
-        }
-        if after == self.open.len() {
-            return Some(Climate { insolation_earth, is_end_of_curve: true, ..*last });
-        }
-        let (low, high) = (&self.open[after - 1], &self.open[after]);
-        let share = (insolation_earth - low.insolation_earth) / (high.insolation_earth - low.insolation_earth);
-        Some(low.mixed(high, share))
+        let (low, high, share) = self.place(insolation_earth)?;
+        let is_end_of_curve = self.open.last().is_some_and(|last| last.insolation_earth <= insolation_earth);
+        Some(Climate { insolation_earth, is_end_of_curve, ..self.open[low].mixed(&self.open[high], share) })
     }
+
+    /// The temperatures of [`ClimateCurve::open_climate`], K.
+    pub(crate) fn open_profile_k(&self, insolation_earth: f64) -> Option<Profile> {
+        let (low, high, share) = self.place(insolation_earth)?;
+        Some(mixed_profiles(&self.open_profiles_k[low], &self.open_profiles_k[high], share))
+    }
+
+    /// The open climates on both sides of an insolation and the share of the second; the same one twice beyond the ends.
+    fn place(&self, insolation_earth: f64) -> Option<(usize, usize, f64)> {
+        let last = self.open.len().checked_sub(1)?;
+        let after = self.open.partition_point(|climate| climate.insolation_earth <= insolation_earth);
+        if after == 0 || after > last {
+            let end = after.min(last);
+            return Some((end, end, 0.0));
+        }
+        let (low, high) = (self.open[after - 1].insolation_earth, self.open[after].insolation_earth);
+        Some((after - 1, after, (insolation_earth - low) / (high - low)))
+    }
+}
+
+/// Temperatures part of the way from one profile to another.
+pub(crate) fn mixed_profiles(from: &Profile, to: &Profile, share: f64) -> Profile {
+    std::array::from_fn(|i| from[i] + share * (to[i] - from[i]))
 }
 
 impl Climate {

@@ -71,6 +71,19 @@ pub struct Climate {
     pub is_end_of_curve: bool,
 }
 
+/// One belt of latitude, the same on both hemispheres.
+#[derive(Clone, Copy, Debug, PartialEq)]
+pub struct Latitude {
+    /// Latitude of its middle, degrees.
+    pub latitude_deg: f64,
+    /// Surface temperature, K.
+    pub temperature_k: f64,
+    /// Share of its surface that is ice, dimensionless.
+    pub ice_fraction: f64,
+    /// Share of the starlight it reflects, dimensionless.
+    pub albedo: f64,
+}
+
 /// The energy balance of one planet under one colour of starlight.
 ///
 /// `0 = d/dx [D (1 − x²) dT/dx] + S q(x) (1 − α) − I(T, p)`, x the sine of the latitude.
@@ -233,7 +246,7 @@ impl IceLineModel {
     /// # Errors
     /// [`OutOfRange`] for an insolation outside 0.01 to 10.
     pub fn from_warm(&self, insolation_earth: f64) -> Result<Climate, OutOfRange> {
-        self.relax(insolation_earth, &self.warm_start())
+        self.relax(insolation_earth, &mut self.warm_start())
     }
 
     /// Lets a climate relax to its balance from everywhere at 190 K.
@@ -241,18 +254,17 @@ impl IceLineModel {
     /// # Errors
     /// [`OutOfRange`] for an insolation outside 0.01 to 10.
     pub fn from_frozen(&self, insolation_earth: f64) -> Result<Climate, OutOfRange> {
-        self.relax(insolation_earth, &[190.0; CELLS])
+        self.relax(insolation_earth, &mut [190.0; CELLS])
     }
 
     /// Steps a real heat capacity through years, infrared and exchange taken ahead, reflection as it was. Unlike
     /// Newton's method this cannot jump to another branch.
-    fn relax(&self, insolation_earth: f64, start: &Profile) -> Result<Climate, OutOfRange> {
+    pub(crate) fn relax(&self, insolation_earth: f64, t: &mut Profile) -> Result<Climate, OutOfRange> {
         let s = within("insolation_earth", insolation_earth, 0.01, 10.0, "0.01 to 10")?;
         // A mixed ocean layer of 50 m over one year, W m⁻² K⁻¹.
         let inertia = 2.1e8 / 3.15576e7;
-        let mut t = *start;
         for _ in 0..20_000 {
-            let balance = self.balance(&t, s);
+            let balance = self.balance(t, s);
             let diagonal: Profile =
                 std::array::from_fn(|i| -(inertia + self.infrared.flux_and_slope(t[i]).1.max(0.05)));
             let mut step: Profile = std::array::from_fn(|i| -balance.excess[i]);
@@ -267,7 +279,52 @@ impl IceLineModel {
                 break;
             }
         }
-        Ok(self.describe(&t, s))
+        Ok(self.describe(t, s))
+    }
+
+    /// The temperatures of a planet that is ice from pole to pole, K, with heat from inside and from the sky.
+    ///
+    /// With nothing to melt the balance is nearly linear, so Newton's method settles in a few steps.
+    pub(crate) fn all_ice(&self, insolation_earth: f64, other_heat_w_m2: f64, mean_k: f64) -> Profile {
+        let mut t = [mean_k.max(1.0); CELLS];
+        for _ in 0..60 {
+            let mut slope = [0.0; CELLS];
+            let mut change = [0.0; CELLS];
+            for i in 0..CELLS {
+                let (infrared, infrared_slope) = self.infrared.flux_and_slope(t[i]);
+                let exchanged = self.lower[i] * (t[i.saturating_sub(1)] - t[i])
+                    + self.upper[i] * (t[(i + 1).min(CELLS - 1)] - t[i]);
+                let absorbed = insolation_earth * SOLAR_CONSTANT_W_M2 * self.sunlight[i] * (1.0 - self.ice_albedo[i]);
+                change[i] = absorbed + exchanged + other_heat_w_m2 - infrared;
+                slope[i] = -infrared_slope.max(1e-6);
+            }
+            self.solve(&slope, &mut change, &mut [0.0; CELLS]);
+            let mut largest = 0.0_f64;
+            for i in 0..CELLS {
+                let step = change[i].clamp(-20.0, 20.0);
+                t[i] = (t[i] - step).max(1.0);
+                largest = largest.max(step.abs());
+            }
+            if largest < 1e-4 {
+                break;
+            }
+        }
+        t
+    }
+
+    /// Latitudes, ice and reflection of a profile, from the equator to a pole.
+    pub(crate) fn by_latitude(&self, t: &Profile, is_all_ice: bool) -> Vec<Latitude> {
+        (0..CELLS)
+            .map(|i| {
+                let ice_fraction = if is_all_ice { 1.0 } else { ice_share(t[i]).0 };
+                Latitude {
+                    latitude_deg: (i as f64 + 0.5) * 90.0 / CELLS as f64,
+                    temperature_k: t[i],
+                    ice_fraction,
+                    albedo: self.open_albedo[i] + ice_fraction * (self.ice_albedo[i] - self.open_albedo[i]),
+                }
+            })
+            .collect()
     }
 
     /// The figures of a profile that is in balance.
@@ -318,6 +375,31 @@ mod tests {
         let radiated: Profile = std::array::from_fn(|i| model.infrared.flux_w_m2(t[i]));
         let net = model.mean(&balance.absorbed) - model.mean(&radiated);
         assert!((model.mean(&balance.excess) - net).abs() < 1e-9);
+    }
+
+    /// The annual energy balance of North's kind with his linear infrared, in the configuration of a public climate
+    /// library: 210 + 2 T W/m2 (T in °C), D 0.555, open albedo 0.3 + 0.078 P2, ice 0.62 from −10 °C, sunlight
+    /// 1 − 0.48 P2. What it should give was run with that library, whose ice begins at a step and not within 2 K.
+    #[test]
+    fn another_published_configuration_gives_its_published_climates() {
+        let of_public_library = |solar_constant_w_m2: f64| {
+            let air = WaterWorldAir { heat_transport_w_m2_k: 0.555, ..WaterWorldAir::default() };
+            let mut model = IceLineModel::new(&air, 5772.0).expect("in range");
+            let p2: Profile = std::array::from_fn(|i| 0.5 * (3.0 * model.sine[i] * model.sine[i] - 1.0));
+            model.infrared = OutgoingInfrared::linear(210.0 - 2.0 * 273.15, 2.0);
+            model.open_albedo = std::array::from_fn(|i| 0.3 + 0.078 * p2[i]);
+            model.ice_albedo = [0.62; CELLS];
+            model.sunlight = std::array::from_fn(|i| 0.25 * (1.0 - 0.48 * p2[i]));
+            model.from_warm(solar_constant_w_m2 / SOLAR_CONSTANT_W_M2).expect("in range")
+        };
+        let earth = of_public_library(1365.2);
+        assert!((earth.mean_k - 273.15 - 14.288).abs() < 0.5, "{earth:?}");
+        assert!((earth.ice_line_deg.expect("small tilt") - 70.0).abs() < 1.5, "{earth:?}");
+        let snowball = of_public_library(1200.0);
+        assert!((snowball.mean_k - 273.15 - (1200.0 * 0.25 * 0.38 - 210.0) / 2.0).abs() < 0.1, "{snowball:?}");
+        // It collapses between 1240 and 1245 W/m2 there; the softer edge of ice here may shift that a little.
+        assert!(of_public_library(1270.0).ice_line_deg.is_some_and(|line_deg| line_deg > 30.0));
+        assert!(of_public_library(1225.0).ice_line_deg.is_some_and(|line_deg| line_deg < 1.0));
     }
 
     #[test]

@@ -65,6 +65,16 @@ impl OutgoingInfrared {
         Ok(curve)
     }
 
+    /// A straight line in temperature, as of simpler models, for holding this one against theirs.
+    #[cfg(test)]
+    pub(crate) fn linear(at_zero_w_m2: f64, slope_w_m2_k: f64) -> Self {
+        let mut curve =
+            Self { cubic: [at_zero_w_m2, slope_w_m2_k, 0.0, 0.0], at_coldest_w_m2: 0.0, at_hottest_w_m2: 0.0 };
+        curve.at_coldest_w_m2 = curve.polynomial(COLDEST_K).0;
+        curve.at_hottest_w_m2 = curve.polynomial(HOTTEST_K).0;
+        curve
+    }
+
     fn polynomial(&self, t: f64) -> (f64, f64) {
         let [c0, c1, c2, c3] = self.cubic;
         (c0 + t * (c1 + t * (c2 + t * c3)), c1 + t * (2.0 * c2 + t * 3.0 * c3))

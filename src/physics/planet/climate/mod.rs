@@ -10,11 +10,13 @@ pub mod regulated;
 pub mod state;
 mod sunlight_by_latitude;
 pub mod table;
+pub mod tables;
 
 pub use carbon::CarbonCycle;
 pub use climate_curve::ClimateCurve;
-pub use ice_line_model::{Climate, IceLineModel, WaterWorldAir};
+pub use ice_line_model::{Climate, IceLineModel, Latitude, WaterWorldAir};
 pub use infrared::OutgoingInfrared;
 pub use regulated::RegulatedClimate;
 pub use state::ClimateState;
-pub use table::ClimateTable;
+pub use table::{ClimateLimits, ClimateTable};
+pub use tables::ClimateTables;

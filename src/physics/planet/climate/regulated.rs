@@ -2,9 +2,11 @@
 
 use super::super::habitable_zone::runaway_insolation_earth;
 use super::super::range::{OutOfRange, non_negative, positive, within};
-use super::ice_line_model::{CELLS, Climate, IceLineModel, Latitudes, Profile, WaterWorldAir};
+use super::ice_line_model::{CELLS, Climate, IceLineModel, Latitude, Latitudes, Profile, WaterWorldAir};
 use super::infrared::{LEAST_CARBON_DIOXIDE_BAR, MOST_CARBON_DIOXIDE_BAR, OutgoingInfrared};
 use super::table::{ClimateLimits, ClimateTable};
+use super::tables::ClimateTables;
+use std::sync::Arc;
 
 /// Starlight over the runaway limit from which the thinnest air may be too warm, and up to which the thickest may be
 /// too cold or freeze: there moments read the curves of the thinnest and the thickest air.
@@ -39,8 +41,8 @@ pub struct AiredClimate {
 pub struct RegulatedClimate {
     latitudes: Latitudes,
     mean_k: f64,
-    thin: ClimateTable,
-    thick: ClimateTable,
+    thin: Arc<ClimateTable>,
+    thick: Arc<ClimateTable>,
 }
 
 impl RegulatedClimate {
@@ -50,15 +52,26 @@ impl RegulatedClimate {
     /// # Errors
     /// [`OutOfRange`] for a field of `air` or a mean temperature out of its range (275 to 310 K).
     pub fn new(air: &WaterWorldAir, mean_k: f64) -> Result<Self, OutOfRange> {
+        Self::of_tables(air, mean_k, &mut ClimateTables::default())
+    }
+
+    /// [`RegulatedClimate::new`] with tables that other planets may share.
+    pub(crate) fn of_tables(air: &WaterWorldAir, mean_k: f64, tables: &mut ClimateTables) -> Result<Self, OutOfRange> {
         let mean_k = checked_mean(mean_k)?;
         let with = |carbon_dioxide_bar| WaterWorldAir { carbon_dioxide_bar, ..*air };
-        let thin = ClimateTable::new(&with(LEAST_CARBON_DIOXIDE_BAR))?;
-        let thick = ClimateTable::sharing(&thin, MOST_CARBON_DIOXIDE_BAR)?;
+        let thin = tables.of(&with(LEAST_CARBON_DIOXIDE_BAR))?;
+        let thick = tables.of(&with(MOST_CARBON_DIOXIDE_BAR))?;
         Ok(Self { latitudes: thin.latitudes().clone(), mean_k, thin, thick })
     }
 
+    /// Marks both tables as in use.
+    pub(crate) fn keep_tables(&self, tables: &mut ClimateTables) {
+        tables.keep(&self.thin);
+        tables.keep(&self.thick);
+    }
+
     /// Works out and keeps the curves that a moment with this starlight needs.
-    pub(crate) fn prepare(&mut self, insolation_earth: f64, teff_k: f64) {
+    pub(crate) fn prepare(&self, insolation_earth: f64, teff_k: f64) {
         let runaway = runaway_insolation_earth(teff_k, 1.0);
         if insolation_earth >= THIN_AIR_FROM * runaway {
             self.thin.prepare(teff_k);
@@ -77,12 +90,6 @@ impl RegulatedClimate {
         Ok(ClimateLimits { hot_insolation_earth: None, ..thick })
     }
 
-    /// [`RegulatedClimate::limits`], with the curves kept.
-    pub(crate) fn prepared_limits(&mut self, teff_k: f64) -> Result<ClimateLimits, OutOfRange> {
-        self.thick.prepare(teff_k);
-        self.limits(teff_k)
-    }
-
     /// The climate with open water at an insolation, and its carbon dioxide.
     ///
     /// # Accuracy
@@ -97,13 +104,36 @@ impl RegulatedClimate {
         let s = non_negative("insolation_earth", insolation_earth)?;
         let teff_k = positive("effective_temperature_k", effective_temperature_k)?;
         let (thin, thick) = (LEAST_CARBON_DIOXIDE_BAR, MOST_CARBON_DIOXIDE_BAR);
-        match self.hold(s, teff_k)? {
+        match self.hold(s, teff_k, &mut [0.0; CELLS])? {
             Held::At(aired) => Ok(aired),
             Held::TooWarm => Ok(AiredClimate { climate: self.thin.open_climate(s, teff_k)?, carbon_dioxide_bar: thin }),
             Held::TooCold => {
                 Ok(AiredClimate { climate: self.thick.open_climate(s, teff_k)?, carbon_dioxide_bar: thick })
             }
         }
+    }
+
+    /// The latitudes of [`RegulatedClimate::open_climate`].
+    pub(crate) fn open_latitudes(&self, insolation_earth: f64, teff_k: f64) -> Result<Vec<Latitude>, OutOfRange> {
+        let mut t = [0.0; CELLS];
+        match self.hold(insolation_earth, teff_k, &mut t)? {
+            Held::At(_) => Ok(self.latitudes.under(teff_k).by_latitude(&t, false)),
+            Held::TooWarm => self.thin.open_latitudes(insolation_earth, teff_k),
+            Held::TooCold => self.thick.open_latitudes(insolation_earth, teff_k),
+        }
+    }
+
+    /// The latitudes of [`RegulatedClimate::frozen_climate`].
+    pub(crate) fn frozen_latitudes(
+        &self,
+        insolation_earth: f64,
+        teff_k: f64,
+        other_heat_w_m2: f64,
+    ) -> Result<Vec<Latitude>, OutOfRange> {
+        let (_, carbon_dioxide_bar) = self.frozen_climate(insolation_earth, teff_k, other_heat_w_m2)?;
+        let is_thick = carbon_dioxide_bar >= MOST_CARBON_DIOXIDE_BAR;
+        let table = if is_thick { &self.thick } else { &self.thin };
+        table.frozen_latitudes(insolation_earth, teff_k, other_heat_w_m2)
     }
 
     /// The mean temperature under ice, K. Carbon dioxide gathers to 3 bar unless it is cold enough to freeze out.
@@ -125,12 +155,12 @@ impl RegulatedClimate {
     }
 
     /// Solves for the carbon dioxide that holds the mean temperature: Newton's method in all latitudes and ln p at
-    /// once, then, should it fail, a search with climates relaxing from warm.
-    fn hold(&self, s: f64, teff_k: f64) -> Result<Held, OutOfRange> {
+    /// once, then, should it fail, a search with climates relaxing from warm. `t` receives the temperatures.
+    fn hold(&self, s: f64, teff_k: f64, t: &mut Profile) -> Result<Held, OutOfRange> {
         let mut model = self.latitudes.under(teff_k);
-        let mut t = model.warm_start();
-        let offset_k = self.mean_k - model.mean(&t);
-        for local_k in &mut t {
+        *t = model.warm_start();
+        let offset_k = self.mean_k - model.mean(t);
+        for local_k in t.iter_mut() {
             *local_k += offset_k;
         }
         let (low, high) = (LEAST_CARBON_DIOXIDE_BAR.ln(), MOST_CARBON_DIOXIDE_BAR.ln());
@@ -139,7 +169,7 @@ impl RegulatedClimate {
         for _ in 0..40 {
             model.infrared =
                 OutgoingInfrared::new(log_p.exp().clamp(LEAST_CARBON_DIOXIDE_BAR, MOST_CARBON_DIOXIDE_BAR))?;
-            let Some((largest_k, step)) = newton_step(&model, &mut t, s, log_p, self.mean_k) else { break };
+            let Some((largest_k, step)) = newton_step(&model, t, s, log_p, self.mean_k) else { break };
             let wanted = log_p + step;
             times_beyond = if (low..=high).contains(&wanted) { 0 } else { times_beyond + 1 };
             if times_beyond > TIMES_BEYOND {
@@ -148,18 +178,25 @@ impl RegulatedClimate {
             log_p = wanted.clamp(low, high);
             if times_beyond == 0 && largest_k < CLOSE_ENOUGH_K && step.abs() < 1e-4 {
                 let carbon_dioxide_bar = log_p.exp();
-                return Ok(Held::At(AiredClimate { climate: model.describe(&t, s), carbon_dioxide_bar }));
+                return Ok(Held::At(AiredClimate { climate: model.describe(t, s), carbon_dioxide_bar }));
             }
         }
-        self.search(s, teff_k, (low, high))
+        self.search(s, teff_k, (low, high), t)
     }
 
-    fn search(&self, s: f64, teff_k: f64, (mut low, mut high): (f64, f64)) -> Result<Held, OutOfRange> {
+    fn search(
+        &self,
+        s: f64,
+        teff_k: f64,
+        (mut low, mut high): (f64, f64),
+        t: &mut Profile,
+    ) -> Result<Held, OutOfRange> {
         let mut model: IceLineModel = self.latitudes.under(teff_k);
         let mut climate_at = |log_p: f64| {
             model.infrared =
                 OutgoingInfrared::new(log_p.exp().clamp(LEAST_CARBON_DIOXIDE_BAR, MOST_CARBON_DIOXIDE_BAR))?;
-            model.from_warm(s.max(0.01))
+            *t = model.warm_start();
+            model.relax(s.max(0.01), t)
         };
         if climate_at(low)?.mean_k >= self.mean_k {
             return Ok(Held::TooWarm);
@@ -256,7 +293,7 @@ mod tests {
             let regulated = regulated();
             let runaway = runaway_insolation_earth(teff_k, 1.0);
             for share in [THICK_AIR_UP_TO, 0.65, THIN_AIR_FROM] {
-                let held = regulated.hold(share * runaway, teff_k).expect("in range");
+                let held = regulated.hold(share * runaway, teff_k, &mut [0.0; CELLS]).expect("in range");
                 assert!(matches!(held, Held::At(_)), "{teff_k} {share}");
             }
             let limits = regulated.limits(teff_k).expect("in range");

@@ -2,12 +2,12 @@
 
 use super::super::habitable_zone::runaway_insolation_earth;
 use super::super::range::{OutOfRange, non_negative, positive};
-use super::climate_curve::ClimateCurve;
-use super::ice_line_model::{Climate, Latitudes, WaterWorldAir};
+use super::climate_curve::{ClimateCurve, mixed_profiles};
+use super::ice_line_model::{Climate, Latitude, Latitudes, Profile, WaterWorldAir};
 use super::infrared::OutgoingInfrared;
 use super::reflection::Reflection;
 use crate::units::constants::SOLAR_CONSTANT_W_M2;
-use std::borrow::Cow;
+use std::sync::OnceLock;
 
 /// Effective temperatures for which the curve is followed, K; between them it is interpolated.
 const TEFF_NODES_K: [f64; 7] = [2600.0, 3200.0, 3900.0, 4500.0, 5100.0, 5800.0, 7200.0];
@@ -31,12 +31,14 @@ pub struct ClimateLimits {
     pub hot_insolation_earth: Option<f64>,
 }
 
-/// Curves of one planet's climates, kept by the star's temperature.
+/// Curves of the climates under one air, tilt and heat transport, by the star's temperature.
+///
+/// Each curve is worked out when it is first read and kept: what is read never depends on what was asked before.
 #[derive(Clone, Debug)]
 pub struct ClimateTable {
     latitudes: Latitudes,
     infrared: OutgoingInfrared,
-    curves: [Option<ClimateCurve>; TEFF_NODES_K.len()],
+    curves: [OnceLock<ClimateCurve>; TEFF_NODES_K.len()],
 }
 
 impl ClimateTable {
@@ -48,7 +50,7 @@ impl ClimateTable {
         Ok(Self {
             latitudes: Latitudes::new(air)?,
             infrared: OutgoingInfrared::new(air.carbon_dioxide_bar)?,
-            curves: [const { None }; TEFF_NODES_K.len()],
+            curves: [const { OnceLock::new() }; TEFF_NODES_K.len()],
         })
     }
 
@@ -56,36 +58,35 @@ impl ClimateTable {
     pub(crate) fn sharing(other: &Self, carbon_dioxide_bar: f64) -> Result<Self, OutOfRange> {
         let infrared = OutgoingInfrared::new(carbon_dioxide_bar)?;
         let latitudes = other.latitudes.breathing(infrared);
-        Ok(Self { latitudes, infrared, curves: [const { None }; TEFF_NODES_K.len()] })
+        Ok(Self { latitudes, infrared, curves: [const { OnceLock::new() }; TEFF_NODES_K.len()] })
     }
 
     pub(crate) fn latitudes(&self) -> &Latitudes {
         &self.latitudes
     }
 
-    /// Works out and keeps the curves around a temperature.
-    pub(crate) fn prepare(&mut self, teff_k: f64) {
-        let (low, share) = bracket(teff_k);
-        for index in [low, low + 1] {
-            if self.curves[index].is_none() && (index == low || share > 0.0) {
-                self.curves[index] = Some(self.follow(index));
-            }
+    /// Works out the curves around a temperature ahead of their being read.
+    pub(crate) fn prepare(&self, teff_k: f64) {
+        self.around(teff_k);
+    }
+
+    /// Works out every curve ahead of its being read.
+    pub fn prepare_all(&self) {
+        for index in 0..TEFF_NODES_K.len() {
+            self.curve(index);
         }
     }
 
-    fn follow(&self, index: usize) -> ClimateCurve {
-        let teff_k = TEFF_NODES_K[index];
-        let up_to = BEYOND_RUNAWAY * runaway_insolation_earth(teff_k, 5.0);
-        ClimateCurve::follow(&self.latitudes.under(teff_k), up_to)
+    fn curve(&self, index: usize) -> &ClimateCurve {
+        self.curves[index].get_or_init(|| {
+            let teff_k = TEFF_NODES_K[index];
+            let up_to = BEYOND_RUNAWAY * runaway_insolation_earth(teff_k, 5.0);
+            ClimateCurve::follow(&self.latitudes.under(teff_k), up_to)
+        })
     }
 
-    /// A curve that was kept, or the same one worked out anew: what is read never depends on what was asked before.
-    fn curve(&self, index: usize) -> Cow<'_, ClimateCurve> {
-        self.curves[index].as_ref().map_or_else(|| Cow::Owned(self.follow(index)), Cow::Borrowed)
-    }
-
-    /// The curves on both sides of a temperature, each with its runaway limit, and the share of the upper one.
-    fn around(&self, teff_k: f64) -> (Cow<'_, ClimateCurve>, Option<Cow<'_, ClimateCurve>>, f64, usize) {
+    /// The curves on both sides of a temperature, and the share of the upper one.
+    fn around(&self, teff_k: f64) -> (&ClimateCurve, Option<&ClimateCurve>, f64, usize) {
         let (low, share) = bracket(teff_k);
         (self.curve(low), (share > 0.0).then(|| self.curve(low + 1)), share, low)
     }
@@ -108,9 +109,9 @@ impl ClimateTable {
                 curve.hot_insolation_earth.map(|hot| hot / runaway),
             )
         };
-        let (freeze, thaw, hot) = relative(&low, index);
+        let (freeze, thaw, hot) = relative(low, index);
         let (freeze, thaw, hot) = high.map_or((freeze, thaw, hot), |high| {
-            let (next_freeze, next_thaw, next_hot) = relative(&high, index + 1);
+            let (next_freeze, next_thaw, next_hot) = relative(high, index + 1);
             let mix = |from: f64, to: f64| from + share * (to - from);
             // Where only one side gets hot before it runs away, the nearer side decides.
             let nearer = if share < 0.5 { hot } else { next_hot };
@@ -133,19 +134,50 @@ impl ClimateTable {
     /// # Errors
     /// [`OutOfRange`] for a negative insolation or a temperature that is not positive.
     pub fn open_climate(&self, insolation_earth: f64, effective_temperature_k: f64) -> Result<Climate, OutOfRange> {
+        let read = |curve: &ClimateCurve, s: f64| curve.open_climate(s);
+        let climate = self.open(insolation_earth, effective_temperature_k, read, Climate::mixed)?;
+        Ok(Climate { insolation_earth, ..climate })
+    }
+
+    /// The latitudes of [`ClimateTable::open_climate`].
+    pub(crate) fn open_latitudes(&self, insolation_earth: f64, teff_k: f64) -> Result<Vec<Latitude>, OutOfRange> {
+        let read = |curve: &ClimateCurve, s: f64| curve.open_profile_k(s);
+        let profile_k: Profile = self.open(insolation_earth, teff_k, read, mixed_profiles)?;
+        Ok(self.latitudes.under(teff_k).by_latitude(&profile_k, false))
+    }
+
+    /// Reads the curves on both sides of a temperature and mixes what they say.
+    fn open<T>(
+        &self,
+        insolation_earth: f64,
+        teff_k: f64,
+        read: impl Fn(&ClimateCurve, f64) -> Option<T>,
+        mix: impl Fn(&T, &T, f64) -> T,
+    ) -> Result<T, OutOfRange> {
         let s = non_negative("insolation_earth", insolation_earth)?;
-        let limits = self.limits(effective_temperature_k)?;
-        let (low, high, share, _) = self.around(effective_temperature_k);
+        let limits = self.limits(teff_k)?;
+        let (low, high, share, _) = self.around(teff_k);
         // Climates correspond at the same multiple of the starlight that just keeps water open.
         let multiple = s / limits.freeze_insolation_earth;
         let missing = OutOfRange { what: "insolation_earth", value: s, allowed: "light that keeps water open" };
-        let of = |curve: &ClimateCurve| curve.open_climate(multiple * curve.freeze_insolation_earth).ok_or(missing);
-        let first = of(&low)?;
-        let climate = match high {
-            Some(high) => first.mixed(&of(&high)?, share),
+        let of = |curve: &ClimateCurve| read(curve, multiple * curve.freeze_insolation_earth).ok_or(missing);
+        let first = of(low)?;
+        Ok(match high {
+            Some(high) => mix(&first, &of(high)?, share),
             None => first,
-        };
-        Ok(Climate { insolation_earth: s, ..climate })
+        })
+    }
+
+    /// The latitudes of [`ClimateTable::frozen_mean_k`].
+    pub(crate) fn frozen_latitudes(
+        &self,
+        insolation_earth: f64,
+        teff_k: f64,
+        other_heat_w_m2: f64,
+    ) -> Result<Vec<Latitude>, OutOfRange> {
+        let mean_k = self.frozen_mean_k(insolation_earth, teff_k, other_heat_w_m2)?;
+        let model = self.latitudes.under(teff_k);
+        Ok(model.by_latitude(&model.all_ice(insolation_earth, other_heat_w_m2, mean_k), true))
     }
 
     /// The mean temperature of a planet that is ice all over, K: its infrared balances the absorbed starlight and
@@ -199,7 +231,7 @@ mod tests {
     #[test]
     fn what_is_kept_and_what_is_worked_out_anew_agree() {
         let fresh = ClimateTable::new(&WaterWorldAir::default()).expect("in range");
-        let mut kept = fresh.clone();
+        let kept = fresh.clone();
         kept.prepare(5772.0);
         assert_eq!(fresh.limits(5772.0), kept.limits(5772.0));
     }

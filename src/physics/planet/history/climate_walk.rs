@@ -98,12 +98,12 @@ impl<'a> ClimateWalk<'a> {
 
     /// Where the starlight stands to the thresholds at one of the nodes.
     pub(super) fn standing(
-        &mut self,
+        &self,
         met: &[Surroundings],
         at: usize,
         locked_yr: Option<f64>,
     ) -> Result<Standing, OutOfRange> {
-        standing(met, at, &mut self.history.world, locked_yr)
+        standing(met, at, &self.history.world, self.input.orbit.mass_mearth, locked_yr)
     }
 
     /// Runs from one node to the next.

@@ -2,6 +2,7 @@
 
 use super::super::caution::Caution;
 use super::super::climate::ClimateState;
+use super::super::climate::reflection::ice_albedo;
 use super::super::deep_time::background_temperature_k;
 use super::super::habitable_zone::{ZonePlace, is_extrapolated, zone_place};
 use super::super::irradiation::{
@@ -53,6 +54,8 @@ pub struct ClimateMoment {
     pub equator_pole_k: Option<(f64, f64)>,
     /// Partial pressure of carbon dioxide, bar; `None` under steam and without water.
     pub carbon_dioxide_bar: Option<f64>,
+    /// Share of the starlight that the planet reflects, dimensionless; `None` under steam and without water.
+    pub planetary_albedo: Option<f64>,
 }
 
 /// One planet at one moment.
@@ -146,6 +149,13 @@ impl PlanetHistory {
         }))
     }
 
+    /// Temperature of the sky, K, and heat from it and from inside, W m⁻².
+    pub(super) fn other_heat(&self, age_yr: f64) -> (f64, f64) {
+        let heat = &self.input.inner_heat;
+        let sky_k = background_temperature_k(heat.birth_cosmic_age_yr + age_yr.max(0.0));
+        (sky_k, heat.heat_flow_at_w_m2(age_yr) + STEFAN_BOLTZMANN_W_M2_K4 * sky_k.powi(4))
+    }
+
     fn surface(
         &self,
         age_yr: f64,
@@ -170,6 +180,7 @@ impl PlanetHistory {
             ice_line_deg: None,
             equator_pole_k: None,
             carbon_dioxide_bar: None,
+            planetary_albedo: None,
         };
         let (surface, caution) = match state {
             ClimateState::Dry => (SurfaceTemperature::Known(held), held_caution),
@@ -177,12 +188,11 @@ impl PlanetHistory {
             ClimateState::Frozen => {
                 moment.ice_fraction = Some(1.0);
                 moment.ice_line_deg = Some(0.0);
-                let heat = &self.input.inner_heat;
-                let sky_k = background_temperature_k(heat.birth_cosmic_age_yr + age_yr.max(0.0));
-                let other_w_m2 = heat.heat_flow_at_w_m2(age_yr) + STEFAN_BOLTZMANN_W_M2_K4 * sky_k.powi(4);
+                let (sky_k, other_w_m2) = self.other_heat(age_yr);
                 let (mean_k, carbon_dioxide_bar) =
                     climate.world.frozen_climate(insolation_earth, teff_k, other_w_m2)?;
                 moment.carbon_dioxide_bar = Some(carbon_dioxide_bar);
+                moment.planetary_albedo = Some(ice_albedo(teff_k)?);
                 (SurfaceTemperature::Known(mean_k.max(sky_k)), None)
             }
             ClimateState::Temperate | ClimateState::Moist => {
@@ -190,6 +200,7 @@ impl PlanetHistory {
                 let open = aired.climate;
                 moment.carbon_dioxide_bar = Some(aired.carbon_dioxide_bar);
                 moment.ice_fraction = Some(open.ice_fraction);
+                moment.planetary_albedo = Some(open.planetary_albedo);
                 moment.ice_line_deg = open.ice_line_deg;
                 moment.equator_pole_k = Some((open.equator_k, open.pole_k));
                 if open.is_end_of_curve {

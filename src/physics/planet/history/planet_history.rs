@@ -1,8 +1,8 @@
 //! The whole history of one planet.
 
 use super::super::caution::Caution;
-use super::super::climate::ClimateState;
 use super::super::climate::carbon::WorldClimate;
+use super::super::climate::{ClimateState, ClimateTables};
 use super::super::orbit_history::OrbitHistory;
 use super::super::range::OutOfRange;
 use super::super::star_point::{StarPoint, check_track};
@@ -50,6 +50,14 @@ impl PlanetHistory {
     /// # Errors
     /// [`OutOfRange`] for a planet or track that cannot be used.
     pub fn walk(input: &PlanetInput, track: &[StarPoint]) -> Result<Self, OutOfRange> {
+        Self::walk_with(input, track, &mut ClimateTables::default())
+    }
+
+    /// [`PlanetHistory::walk`] with thresholds of the climate that are known already, or will be wanted again.
+    ///
+    /// # Errors
+    /// As [`PlanetHistory::walk`].
+    pub fn walk_with(input: &PlanetInput, track: &[StarPoint], tables: &mut ClimateTables) -> Result<Self, OutOfRange> {
         input.check()?;
         check_track(track)?;
         let orbit = OrbitHistory::walk_with_tides(&input.orbit, track, &input.tides)?;
@@ -70,9 +78,16 @@ impl PlanetHistory {
             events: Vec::new(),
         };
         history.pass_marks(&met)?;
-        history.walk_climate(&met)?;
+        history.walk_climate(&met, tables)?;
         history.close_events();
         Ok(history)
+    }
+
+    /// Keeps the thresholds of this history's climate for a later one.
+    pub fn keep_tables(&self, tables: &mut ClimateTables) {
+        if let Some(climate) = &self.climate {
+            climate.world.keep_tables(tables);
+        }
     }
 
     fn pass_marks(&mut self, met: &[Surroundings]) -> Result<(), OutOfRange> {
@@ -88,14 +103,14 @@ impl PlanetHistory {
         Ok(())
     }
 
-    fn walk_climate(&mut self, met: &[Surroundings]) -> Result<(), OutOfRange> {
+    fn walk_climate(&mut self, met: &[Surroundings], tables: &mut ClimateTables) -> Result<(), OutOfRange> {
         let (Some(water), Some(birth)) = (self.input.water, met.first()) else { return Ok(()) };
         // The birth of a star whose track starts on the main sequence is taken at age zero.
         let ocean_yr = birth.age_yr.min(0.0) + water.ocean_after_yr;
         let met = &met[met.partition_point(|node| node.age_yr < ocean_yr)..];
         let Some(first) = met.first() else { return Ok(()) };
-        let mut world = WorldClimate::new(&water.air, water.carbon)?;
-        let mut before = standing(met, 0, &mut world, self.locked_yr)?;
+        let world = WorldClimate::new(&water.air, water.carbon, tables)?;
+        let mut before = standing(met, 0, &world, self.input.orbit.mass_mearth, self.locked_yr)?;
         let mut walk = ClimateWalk::start(&self.input, &water, &before, first.age_yr, world);
         for at in 1..met.len() {
             if walk.is_over() {

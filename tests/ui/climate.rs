@@ -1,0 +1,53 @@
+//! The page of one planet's climate.
+
+use crate::driver::Driver;
+use egui::vec2;
+use longember::system::Body;
+use longember::window::Page;
+
+const BY_LATITUDE: &str = "Surface temperature of Talune by latitude: ";
+
+#[test]
+fn a_climate_is_shown_by_latitude_and_between_its_thresholds() {
+    let mut driver = Driver::demo();
+    driver.click("Talune, temperate");
+    driver.click(Page::Climate.name());
+    let climate = driver.workspace().history.climate_at(2, driver.workspace().moment_yr).expect("a planet");
+    assert!(climate.latitudes.is_ok() && climate.thresholds.is_some());
+    let at_first = driver.name_of(BY_LATITUDE);
+    assert!(at_first.contains("K at the equator") && at_first.contains("ice"), "{at_first}");
+    let thresholds = driver.name_of("Starlight on Talune: ");
+    assert!(thresholds.contains("freezes below") && thresholds.ends_with("now it is temperate"), "{thresholds}");
+    driver.the("Moment on the starlight, years");
+    assert!(driver.shows("Talune: temperate, mean "));
+}
+
+#[test]
+fn another_planet_is_chosen_on_the_page_and_says_why_it_has_no_latitudes() {
+    let mut driver = Driver::demo();
+    driver.click(Page::Climate.name());
+    assert!(driver.has("Climate of Talune"));
+    driver.name_of(BY_LATITUDE);
+    driver.click("Climate of Cindrel");
+    assert_eq!(driver.workspace().selected, Body::Planet(0));
+    assert!(driver.shows("No climate by latitude. Its greenhouse is held"));
+    for name in ["Talune", "Ostavar"] {
+        driver.click(&format!("Climate of {name}"));
+        assert!(driver.shows(&format!("{name}: ")));
+    }
+}
+
+#[test]
+fn the_page_follows_the_moment_and_fits_small_and_large_windows() {
+    for size in [vec2(960.0, 600.0), vec2(1280.0, 800.0), vec2(1600.0, 1000.0)] {
+        let scenario = longember::document::built_in::demo().scenario().expect("sound");
+        let mut driver = Driver::sized(scenario, size, 1.0);
+        driver.click(Page::Climate.name());
+        let now = driver.name_of(BY_LATITUDE);
+        let place = driver.the("Moment on the starlight, years").rect();
+        driver.click_at(place.left_center() + vec2(90.0, 0.0));
+        let then_yr = driver.assert_one_instant();
+        assert!(then_yr < 4.5e9, "{then_yr}");
+        assert_ne!(driver.name_of(BY_LATITUDE), now, "another moment, another climate");
+    }
+}
