@@ -12,6 +12,9 @@ const ICE_LINE_K: f64 = 263.15;
 /// A level is shown while the profile comes this near to it, K.
 const NEAR_K: f64 = 45.0;
 
+/// Half of the least span of the axis, K.
+const LEAST_SPAN_K: f64 = 12.0;
+
 /// Temperature against latitude; the hemispheres mirror each other, as annual means do.
 #[derive(Clone, Debug, PartialEq)]
 pub struct LatitudeFigure {
@@ -45,7 +48,10 @@ impl LatitudeFigure {
             .filter(|(_, value)| (coldest_k - NEAR_K..warmest_k + NEAR_K).contains(value))
             .map(|(name, value)| Level { name: name.to_owned(), value })
             .collect();
-        let shown = profile.iter().map(|point| point[1]).chain(levels.iter().map(|level| level.value));
+        // A nearly even temperature shall look even.
+        let middle_k = 0.5 * (coldest_k + warmest_k);
+        let least = [middle_k - LEAST_SPAN_K, middle_k + LEAST_SPAN_K];
+        let shown = profile.iter().map(|point| point[1]).chain(levels.iter().map(|level| level.value)).chain(least);
         let ice_deg = ice_stretches(belts);
         let ice_edges_deg = ice_deg.iter().flatten().copied().filter(|edge_deg| edge_deg.abs() < 90.0).collect();
         Self {

@@ -8,6 +8,8 @@ use crate::units::number_text::number;
 
 /// Room left below the lowest threshold and above the highest, as a factor.
 const ROOM: f64 = 1.35;
+/// How far beyond the thresholds the axis goes to reach the light, as a factor.
+const FARTHEST: f64 = 30.0;
 
 /// Two rows over one axis of starlight: what the planet is when it comes from ice, and when it comes from open water.
 #[derive(Clone, Debug, PartialEq)]
@@ -48,8 +50,8 @@ impl LightGauge {
         } = thresholds;
         let moist = moist.min(runaway);
         // The light of a giant would press all thresholds into a corner, so the axis goes only so far for it.
-        let lowest = (freeze / ROOM).min(light_earth.max(freeze / 4.0) / 1.1);
-        let highest = (thaw.max(runaway) * ROOM).max(light_earth.min(4.0 * runaway) * 1.1);
+        let lowest = (freeze / ROOM).min(light_earth.max(freeze / FARTHEST) / 1.1);
+        let highest = (thaw.max(runaway) * ROOM).max(light_earth.min(FARTHEST * runaway) * 1.1);
         let axis = ValueAxis { is_log: true, lowest, highest };
         let row = |name, melts: f64, marks: Vec<(&str, f64)>| {
             let edges = [lowest, melts, moist.max(melts), runaway.max(melts), highest];
@@ -123,7 +125,7 @@ mod tests {
         let gauge = LightGauge::new("Ember", &climate(PlanetState::Runaway, 5000.0, 1.16)).expect("a climate");
         let states: Vec<PlanetState> = gauge.rows[0].spans.iter().map(|span| span.2).collect();
         assert_eq!(states, [PlanetState::Frozen, PlanetState::Runaway]);
-        assert!(gauge.axis.highest < 10.0, "a giant's light does not press the thresholds together");
+        assert!(gauge.axis.highest < 50.0, "a giant's light does not press the thresholds together");
         assert_eq!(gauge.row_in_force, 1);
         assert_eq!(
             LightGauge::new("Ember", &PlanetClimate { thresholds: None, ..climate(PlanetState::Dry, 1.0, 1.1) }),

@@ -5,6 +5,7 @@ use super::cell::Cell;
 use super::comma_separated::push_record;
 use super::lines::{push_columns, push_wrapped};
 use crate::physics::planet::Caution;
+use crate::system::date_band::RULE;
 use crate::system::{DateBand, Event, EventFilter, History};
 use crate::units::time_words::{SpanStyle, span, spans_apart};
 use serde_json::{Map, Value};
@@ -31,6 +32,7 @@ pub fn events_text(history: &History, title: &str, filter: &EventFilter) -> Stri
     push_columns(&mut page, 0, &rows);
     page.push('\n');
     push_wrapped(&mut page, "", "Times are counted from the star's arrival on the main sequence.");
+    push_wrapped(&mut page, "", RULE);
     if let Some(remark) = history.dates_remark() {
         push_wrapped(&mut page, "", remark);
     }

@@ -1,11 +1,12 @@
 //! Dated events of one planet: its own history, and what can be read off it.
 
-use super::date_band::LightHistory;
+use super::date_band::{DateBand, LightHistory};
 use super::events::{Event, EventKind};
 use super::history::History;
 use super::planet_past::{BOILING_K, FREEZING_K, PlanetPast};
 use super::specification::Body;
-use crate::physics::planet::{Caution, ClimateState, OrbitEnd};
+use crate::physics::planet::escape::{SHORELINE_KEPT_BELOW, SHORELINE_LOST_ABOVE};
+use crate::physics::planet::{Caution, ClimateState, OrbitEnd, PlanetEvent, PlanetEventKind};
 use crate::units::constants::SOLAR_RADIUS_AU;
 
 /// Periastron over the giant's radius beyond which its nearness is not worth a date.
@@ -22,7 +23,7 @@ pub(super) fn push(history: &History, index: usize, events: &mut Vec<Event>) {
         body,
         kind: EventKind::Planet(event.kind),
         caution: event.caution,
-        band: light.band(event.age_yr, event.kind),
+        band: light.band(event.age_yr, event.kind).or_else(|| shoreline_band(history, past, event)),
     }));
     let until_yr = past.end().map_or(history.shown_until_yr(), |(time_yr, _)| time_yr);
     let ages: Vec<f64> = history.life().node_ages_yr().iter().copied().filter(|age_yr| *age_yr < until_yr).collect();
@@ -99,6 +100,18 @@ fn push_marked(history: &History, past: &PlanetPast, body: Body, ages: &[f64], e
     }
 }
 
+/// The loss of air falls between the dates at which bodies may have lost theirs and surely have.
+fn shoreline_band(history: &History, past: &PlanetPast, event: &PlanetEvent) -> Option<DateBand> {
+    let until_yr = past.end().map_or(history.shown_until_yr(), |(end_yr, _)| end_yr.next_down());
+    let is_below = |age_yr: f64, line: f64| past.history().shoreline_ratio_at(age_yr).is_some_and(|ratio| ratio < line);
+    (event.kind == PlanetEventKind::AtmosphereLost).then(|| DateBand {
+        earliest_yr: is_below(0.0, SHORELINE_KEPT_BELOW)
+            .then(|| halve(0.0, event.age_yr, |age_yr| is_below(age_yr, SHORELINE_KEPT_BELOW))),
+        latest_yr: (!is_below(until_yr, SHORELINE_LOST_ABOVE))
+            .then(|| halve(event.age_yr, until_yr, |age_yr| is_below(age_yr, SHORELINE_LOST_ABOVE))),
+    })
+}
+
 /// Crossings of freezing and boiling, and the hottest moment, under a greenhouse that the user holds.
 fn push_lines(history: &History, past: &PlanetPast, body: Body, ages: &[f64], events: &mut Vec<Event>) {
     let held_k = |age_yr: f64| {
@@ -166,7 +179,6 @@ pub(super) fn halve(mut start_yr: f64, mut end_yr: f64, holds: impl Fn(f64) -> b
 #[cfg(test)]
 mod tests {
     use super::*;
-    use crate::physics::planet::PlanetEventKind;
     use crate::system::{PlanetSpecification, StarSpecification, System, Water};
 
     fn events(planet: PlanetSpecification) -> (History, Vec<Event>) {
@@ -234,6 +246,27 @@ mod tests {
                 assert!(surface_k(&history, age_yr) < most_k + 2.0, "{semi_major_axis_au}: {age_yr} {most_k}");
             }
         }
+    }
+
+    #[test]
+    fn air_is_lost_between_the_lines_of_bodies_that_kept_and_lost_it() {
+        let small = PlanetSpecification {
+            mass_mearth: 0.1,
+            radius_rearth: 0.53,
+            semi_major_axis_au: 1.4,
+            ..PlanetSpecification::default()
+        };
+        let (history, events) = events(small);
+        let lost =
+            events.iter().find(|event| event.kind == EventKind::Planet(PlanetEventKind::AtmosphereLost)).expect("lost");
+        let band = lost.band.expect("a band");
+        let ratio = |age_yr| history.planets()[0].history().shoreline_ratio_at(age_yr).expect("on its orbit");
+        for (date_yr, line) in [(band.earliest_yr, 5.0), (band.latest_yr, 20.0)] {
+            if let Some(date_yr) = date_yr {
+                assert!((ratio(date_yr) / line - 1.0).abs() < 1e-3, "{line}: {}", ratio(date_yr));
+            }
+        }
+        assert!(band.earliest_yr.is_some() || band.latest_yr.is_some(), "{band:?}");
     }
 
     #[test]

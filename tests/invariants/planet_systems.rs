@@ -21,8 +21,13 @@ fn planet() -> impl Strategy<Value = PlanetSpecification> {
             ..Water::default()
         },
     );
-    (orbit, prop::option::of(water), any::<bool>()).prop_map(|((log_a, eccentricity, log_m, log_r), water, tides)| {
+    let marked = prop::option::of(3.0_f64..5000.0);
+    let day = prop::option::of(1.0_f64..1e5);
+    (orbit, prop::option::of(water), any::<bool>(), marked, day).prop_map(|(orbit, water, tides, marked, day)| {
+        let (log_a, eccentricity, log_m, log_r) = orbit;
         PlanetSpecification {
+            marked_temperature_k: marked,
+            initial_day_h: day,
             semi_major_axis_au: 10.0_f64.powf(log_a),
             eccentricity,
             mass_mearth: 10.0_f64.powf(log_m),

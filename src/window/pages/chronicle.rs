@@ -1,6 +1,7 @@
 //! Every dated event of star and planets, how well its date is known, and a way there; windows of mild climate.
 
 use crate::handover::doubt;
+use crate::system::date_band::RULE;
 use crate::system::mild_spans::mild_spans;
 use crate::system::{Body, Event, EventGroup};
 use crate::units::time_words::{span, spans_apart};
@@ -32,6 +33,7 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
             commands.push(Command::Copy(lines.join("\n")));
         }
     });
+    ui.label(RichText::new(RULE).font(small()).color(palette.dim));
     if let Some(remark) = workspace.history.dates_remark() {
         ui.label(RichText::new(remark).font(small()).color(palette.dim));
     }

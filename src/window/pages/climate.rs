@@ -18,6 +18,8 @@ const WIDE: f32 = 760.0;
 /// Least heights, points.
 const LEAST_PROFILE: f32 = 170.0;
 const LEAST_CHART: f32 = 130.0;
+/// Height beyond which the curve of latitudes would only look steep, points.
+const MOST_PROFILE: f32 = 460.0;
 /// Room beside the time chart for its labels, and under it for ages, points.
 const LABELS: f32 = 52.0;
 const RIGHT: f32 = 10.0;
@@ -59,7 +61,7 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
                 let half = 0.5 * width - 2.0 * GRID;
                 ui.vertical(|ui| {
                     ui.set_width(half);
-                    profile(ui, workspace, index, &name, &climate, (height - GRID).max(LEAST_PROFILE));
+                    profile(ui, workspace, index, &name, &climate, (height - GRID).clamp(LEAST_PROFILE, MOST_PROFILE));
                 });
                 ui.add_space(2.0 * GRID);
                 ui.vertical(|ui| {

@@ -31,7 +31,7 @@ pub(super) fn show(ui: &mut Ui, palette: &Palette, figure: &LatitudeFigure, plan
             painter.text(pos2(stretch.center().x, rect.top() + 2.0), Align2::CENTER_TOP, "ice", small(), palette.dim);
         }
     }
-    for tick in figure.axis.ticks((rect.height() / 24.0).max(2.0) as usize) {
+    for tick in figure.axis.ticks((rect.height() / 40.0).max(2.0) as usize) {
         let y = rect.bottom() - tick.height as f32 * rect.height();
         painter.hline(rect.x_range(), y, Stroke::new(1.0, palette.hairline.gamma_multiply(0.75)));
         painter.text(pos2(rect.left() - 6.0, y), Align2::RIGHT_CENTER, tick.label, small(), palette.dim);
