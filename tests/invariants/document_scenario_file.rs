@@ -90,6 +90,8 @@ mod oracle {
         pub(super) air: Air,
         pub(super) climate: Climate,
         pub(super) tides: Tides,
+        pub(super) initial_day_h: Option<f64>,
+        pub(super) marked_temperature_k: Option<f64>,
     }
 
     impl Default for Planet {
@@ -107,6 +109,8 @@ mod oracle {
                 air: Air::EarthLike { surface_pressure_bar: 1.0 },
                 climate: Climate::None,
                 tides: Tides::On,
+                initial_day_h: None,
+                marked_temperature_k: None,
             }
         }
     }
@@ -246,6 +250,8 @@ fn read_by_oracle(text: &str, ours: &Scenario) -> Result<Scenario, String> {
             oracle::Tides::On => TidesChoice::On,
             oracle::Tides::Off => TidesChoice::Off,
         },
+        initial_day_h: planet.initial_day_h,
+        marked_temperature_k: planet.marked_temperature_k,
     });
     let star = StarSpecification {
         name: read.star.name,

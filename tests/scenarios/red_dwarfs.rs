@@ -11,7 +11,7 @@ const SWALLOWED: EventKind = EventKind::Planet(PlanetEventKind::Engulfed);
 
 fn history(name: &str) -> History {
     let scenario = built_in::find(name).expect(name).scenario().expect("sound");
-    let history = LifeStore::default().history(scenario.system, &mut |_| ControlFlow::Continue(()));
+    let history = LifeStore::default().history(None, scenario.system, &mut |_| ControlFlow::Continue(()));
     history.expect("a life")
 }
 

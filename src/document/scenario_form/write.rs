@@ -139,9 +139,9 @@ fn carbon_text(carbon: Carbon) -> String {
     }
 }
 
-/// A number that may be left out.
+/// A number that may be left out, in the form that other readers of RON take as well.
 fn given_text(number: Option<f64>) -> String {
-    number.map_or_else(|| "None".to_owned(), number_text)
+    number.map_or_else(|| "None".to_owned(), |number| format!("Some({})", number_text(number)))
 }
 
 fn tides_text(tides: TidesChoice) -> &'static str {

@@ -15,7 +15,7 @@ const HOTTEST_STAR_K: f64 = 7200.0;
 
 /// Temperature where half the surface is ice, K, and the width of the change, K.
 const HALF_ICE_K: f64 = 263.15;
-const ICE_WIDTH_K: f64 = 2.0;
+pub(crate) const ICE_WIDTH_K: f64 = 2.0;
 /// Distance from the change, in half widths, beyond which less than 10⁻¹¹ of the surface is in doubt.
 const SURE_ICE: f64 = 26.0;
 /// Albedo of an open surface under the Sun: mean, and change towards the poles with (3 sin²φ − 1)/2.
@@ -114,16 +114,16 @@ impl Reflection {
     }
 }
 
-/// The share of a surface that is ice at a temperature, and its slope, K⁻¹.
+/// The share of a surface that is ice at a temperature, and its slope, K⁻¹, for a width of the change, K.
 #[inline]
-pub(crate) fn ice_share(t: f64) -> (f64, f64) {
+pub(crate) fn ice_share(t: f64, width_k: f64) -> (f64, f64) {
     // (1 − tanh y)/2 = 1/(1 + e^(2y)); the logistic form needs one exponential.
-    let y = 2.0 * (t - HALF_ICE_K) / ICE_WIDTH_K;
+    let y = 2.0 * (t - HALF_ICE_K) / width_k;
     if y.abs() > SURE_ICE {
         return (if y > 0.0 { 0.0 } else { 1.0 }, 0.0);
     }
     let share = 1.0 / (1.0 + y.exp());
-    (share, -2.0 / ICE_WIDTH_K * share * (1.0 - share))
+    (share, -2.0 / width_k * share * (1.0 - share))
 }
 
 #[cfg(test)]
@@ -150,8 +150,8 @@ mod tests {
 
     #[test]
     fn half_the_surface_is_ice_at_minus_ten_degrees() {
-        assert!((ice_share(263.15).0 - 0.5).abs() < 1e-15);
-        let slope = (ice_share(264.0).0 - ice_share(263.9).0) / 0.1;
-        assert!((slope - ice_share(263.95).1).abs() < 1e-3);
+        assert!((ice_share(263.15, ICE_WIDTH_K).0 - 0.5).abs() < 1e-15);
+        let slope = (ice_share(264.0, ICE_WIDTH_K).0 - ice_share(263.9, ICE_WIDTH_K).0) / 0.1;
+        assert!((slope - ice_share(263.95, ICE_WIDTH_K).1).abs() < 1e-3);
     }
 }
