@@ -103,12 +103,11 @@ impl History {
         progress: &mut dyn FnMut(f64) -> ControlFlow<()>,
     ) -> Result<Self, HistoryError> {
         let input = checked_input(&system)?;
-        let life = match earlier.and_then(|earlier| earlier.life_of(&system)) {
-            Some(life) => life,
-            None => {
-                let mut star_progress = |share: f64| progress(STAR_SHARE * share);
-                Arc::new(WholeLife::compute(input, life_options(&system), &mut star_progress)?)
-            }
+        let life = if let Some(life) = earlier.and_then(|earlier| earlier.life_of(&system)) {
+            life
+        } else {
+            let mut star_progress = |share: f64| progress(STAR_SHARE * share);
+            Arc::new(WholeLife::compute(input, life_options(&system), &mut star_progress)?)
         };
         Self::of_life(earlier, system, life, progress)
     }

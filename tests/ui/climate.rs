@@ -56,8 +56,9 @@ fn the_page_follows_the_moment_and_fits_small_and_large_windows() {
         let mut driver = Driver::sized(scenario, size, 1.0);
         driver.click(Page::Climate.name());
         let now = picture(&driver, BY_LATITUDE);
+        driver.reach("Moment on the starlight, years");
         let place = driver.the("Moment on the starlight, years").rect();
-        driver.click_at(place.left_center() + vec2(90.0, 0.0));
+        driver.click_at(place.left_center() + vec2(70.0, 0.0));
         let then_yr = driver.assert_one_instant();
         assert!(then_yr < 4.5e9, "{then_yr}");
         assert_ne!(picture(&driver, BY_LATITUDE), now, "another moment, another climate");

@@ -216,8 +216,7 @@ fn first_day(ui: &mut Ui, workspace: &Workspace, planet: &PlanetSpecification) -
     let words = [format!("usual, {usual_h} h"), "chosen".to_owned()];
     let hint = "How fast the planet turns at first, which decides when its day becomes its year.";
     let row = Optional { name: "Turning", hint, words: [&words[0], &words[1]], limit: &INITIAL_DAY, usual: usual_h };
-    let day_h = row.show(ui, workspace, &planet.name, planet.initial_day_h)?;
-    Some(said("first day", move |planet| planet.initial_day_h = day_h))
+    row.show(ui, workspace, &planet.name, planet.initial_day_h, |planet, day_h| planet.initial_day_h = day_h)
 }
 
 /// A temperature whose first and last moment the chronicle dates.
@@ -229,8 +228,9 @@ fn marked(ui: &mut Ui, workspace: &Workspace, planet: &PlanetSpecification) -> O
         limit: &MARKED_TEMPERATURE,
         usual: FREEZING_K,
     };
-    let marked_k = row.show(ui, workspace, &planet.name, planet.marked_temperature_k)?;
-    Some(said("marked temperature", move |planet| planet.marked_temperature_k = marked_k))
+    row.show(ui, workspace, &planet.name, planet.marked_temperature_k, |planet, marked_k| {
+        planet.marked_temperature_k = marked_k;
+    })
 }
 
 /// A number that may be left out: a choice, and a field where it is made.
@@ -245,10 +245,23 @@ struct Optional<'a> {
 }
 
 impl Optional<'_> {
-    fn show(&self, ui: &mut Ui, workspace: &Workspace, planet: &str, current: Option<f64>) -> Option<Option<f64>> {
+    fn show(
+        &self,
+        ui: &mut Ui,
+        workspace: &Workspace,
+        planet: &str,
+        current: Option<f64>,
+        write: fn(&mut PlanetSpecification, Option<f64>),
+    ) -> Option<Change> {
         let chosen = choice(ui, workspace, self.name, self.hint, &self.words, usize::from(current.is_some()));
         let entered = current.and_then(|value| value_entry(ui, workspace.palette(), planet, self.limit, value));
-        entered.map(Some).or(chosen.map(|chosen| (chosen == 1).then_some(self.usual)))
+        let value = match (entered, chosen) {
+            (Some(value), _) => Some(value),
+            (None, Some(1)) => Some(self.usual),
+            (None, Some(_)) => None,
+            (None, None) => return None,
+        };
+        Some(said(self.limit.name, move |planet| write(planet, value)))
     }
 }
 

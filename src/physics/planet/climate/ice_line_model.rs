@@ -394,17 +394,18 @@ mod tests {
             model.ice_albedo = [0.62; CELLS];
             model.ice_width_k = 0.05;
             model.sunlight = std::array::from_fn(|i| 0.25 * (1.0 - 0.48 * p2[i]));
-            model.from_warm(solar_constant_w_m2 / SOLAR_CONSTANT_W_M2).expect("in range")
+            // That library starts from 12 °C − 40 P2.
+            let mut t: Profile = std::array::from_fn(|i| 285.15 - 40.0 * p2[i]);
+            model.relax(solar_constant_w_m2 / SOLAR_CONSTANT_W_M2, &mut t).expect("in range")
         };
+        // Where ice begins at a step, its edge can come to rest in more than one cell of 2°, each worth 0.3 K.
         let earth = of_public_library(1365.2);
-        assert!((earth.mean_k - 273.15 - 14.288).abs() < 0.05, "{earth:?}");
-        assert!((earth.ice_line_deg.expect("small tilt") - 70.0).abs() < 1.5, "{earth:?}");
-        // There it has collapsed at 1240 W/m2 and stands at 1245 W/m2; the edge of the last open belts is that of a cell.
-        let snowball = of_public_library(1235.0);
-        assert!((snowball.mean_k - 273.15 - (1235.0 * 0.25 * 0.38 - 210.0) / 2.0).abs() < 0.1, "{snowball:?}");
+        assert!((earth.mean_k - 273.15 - 14.288).abs() < 0.35, "{earth:?}");
+        assert!((earth.ice_line_deg.expect("small tilt") - 70.0).abs() < 3.0, "{earth:?}");
         let open = of_public_library(1260.0);
-        assert!((open.mean_k - 273.15 + 4.2).abs() < 1.0, "{open:?}");
-        assert!((of_public_library(1240.0).mean_k - 273.15 + 46.1).abs() < 0.5);
+        assert!((open.mean_k - 273.15 + 4.2).abs() < 0.1, "{open:?}");
+        let snowball = of_public_library(1240.0);
+        assert!((snowball.mean_k - 273.15 + 46.1).abs() < 0.05, "{snowball:?}");
     }
 
     #[test]
