@@ -59,7 +59,7 @@ fn the_page_follows_the_moment_and_fits_small_and_large_windows() {
         driver.reach("Moment on the starlight, years");
         let place = driver.the("Moment on the starlight, years").rect();
         driver.click_at(place.left_center() + vec2(70.0, 0.0));
-        let then_yr = driver.assert_one_instant();
+        let then_yr = driver.panel_time_yr();
         assert!(then_yr < 4.5e9, "{then_yr}");
         assert_ne!(picture(&driver, BY_LATITUDE), now, "another moment, another climate");
     }
