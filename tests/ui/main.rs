@@ -2,8 +2,8 @@
 
 #![expect(clippy::expect_used, reason = "a test that cannot go on has failed")]
 
-mod commands;
 mod climate;
+mod commands;
 mod curves;
 mod dialogs;
 mod driver;
