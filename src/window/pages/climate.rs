@@ -123,7 +123,7 @@ fn through_time(ui: &mut Ui, workspace: &mut Workspace, index: usize, height: f3
     let hover = response.hover_pos().filter(|position| plot.x_range().contains(position.x));
     let frame =
         Frame { rect: plot, title_y: area.top() + 9.0, left: area.left(), hover_x: hover.map(|position| position.x) };
-    chart_view::draw(ui, &frame, &chart, workspace);
+    chart_view::draw(ui, &frame, &chart, &[], workspace);
     let palette = workspace.palette();
     let count = (plot.width() / 110.0).max(2.0) as usize;
     for tick in ticks(&workspace.derived.axis, workspace.view.from, workspace.view.to, count) {
