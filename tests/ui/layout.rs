@@ -99,12 +99,31 @@ fn the_script_for_the_real_window_knows_its_places() {
         pos2(x.parse().expect("a number"), y.parse().expect("a number"))
     };
     let driver = demo(USUAL, 1.0);
-    assert_eq!(place("WINDOW").to_vec2(), USUAL);
+    let window = include_str!("../real_window/window.sh").lines().find_map(|line| line.strip_prefix("WINDOW="));
+    assert_eq!(window, Some(format!("\"{} {}\"", USUAL.x, USUAL.y).as_str()));
     assert!(driver.the("Mass of Veldane").rect().shrink(4.0).contains(place("MASS_FIELD")));
     let strip = driver.the(STRIP).rect();
     assert!(strip.contains(place("STRIP_FROM")) && strip.contains(place("STRIP_TO")));
     for name in driver.names().into_iter().filter(|name| name.contains(" · ")) {
         assert!(!driver.the(&name).rect().contains(place("STRIP_FROM")), "{name}");
+    }
+}
+
+#[test]
+fn the_story_for_the_real_window_knows_its_places() {
+    let story = include_str!("../real_window/story.sh");
+    let place = |name: &str| {
+        let line = story.lines().find_map(|line| line.strip_prefix(&format!("{name}=\""))).expect("a place");
+        let (x, y) = line.trim_end_matches('"').split_once(' ').expect("two numbers");
+        pos2(x.parse().expect("a number"), y.parse().expect("a number"))
+    };
+    let mut driver = demo(USUAL, 1.0);
+    for (row, planet) in [("FIRST_PLANET", "Cindrel"), ("LAST_PLANET", "Frimholt")] {
+        let name = driver.name_of(&format!("{planet}, "));
+        assert!(driver.the(&name).rect().shrink(4.0).contains(place(row)));
+        driver.click(&name);
+        let field = driver.the(&format!("Semi-major axis of {planet}")).rect();
+        assert!(field.shrink(4.0).contains(place("DISTANCE_FIELD")), "{field:?}");
     }
 }
 
