@@ -3,6 +3,8 @@
 //! Red dwarfs are looked at through the quick look, whose lives the structure calculation made; one of them is held to the
 //! exact life.
 
+use longember::physics::star::convective::{ConvectiveInput, Options, Resolution, SurfaceOpacity, compute_with};
+use longember::physics::star::quick_look::{GridLife, deviation_from_grid};
 use longember::physics::star::{
     END_YR, LifeOptions, Phase, StarCaution, StarError, StarEventKind, StarInput, StarState, WholeLife,
 };
@@ -85,6 +87,32 @@ fn the_quick_look_is_close_to_the_exact_life() {
         for (a, b) in points(&quick).iter().zip(points(&exact)) {
             assert!((a.luminosity_lsun / b.luminosity_lsun - 1.0).abs() < light, "{mass}: {a:?} {b:?}");
             assert!((a.radius_rsun / b.radius_rsun - 1.0).abs() < 0.03, "{mass}: {a:?} {b:?}");
+        }
+    }
+}
+
+#[test]
+fn the_shipped_grid_is_what_the_structure_calculation_makes() {
+    for (mass_msun, metallicity_dex, surface) in
+        [(0.10, 0.0, SurfaceOpacity::Modern), (0.13, -1.0, SurfaceOpacity::Modern), (0.12, 0.2, SurfaceOpacity::Of1997)]
+    {
+        let input = ConvectiveInput { mass_msun, metallicity_dex };
+        let options = Options { resolution: Resolution::Standard, surface };
+        let life = compute_with(input, options, &mut |_| ControlFlow::Continue(())).expect("in range");
+        let deviation = deviation_from_grid(&GridLife { input, surface, life }).expect("a record");
+        assert!(deviation < 1e-3, "{mass_msun} {metallicity_dex} {surface:?}: {deviation}");
+    }
+}
+
+#[test]
+fn a_quick_look_is_there_for_every_red_dwarf_and_surface() {
+    for surface in [SurfaceOpacity::Modern, SurfaceOpacity::Of1997] {
+        for metallicity_dex in [-2.0, -1.2, -0.5, 0.0, 0.2] {
+            for step in 0..=40 {
+                let input = StarInput { mass_msun: 0.09 + 0.01 * f64::from(step), metallicity_dex };
+                let look = WholeLife::quick_look(input, LifeOptions { surface });
+                assert!(look.is_some(), "{input:?} {surface:?}");
+            }
         }
     }
 }

@@ -6,7 +6,7 @@ use crate::physics::star::convective::{Caution, ConvectiveInput, Ending, Life, N
 use std::sync::LazyLock;
 
 /// The grid that is part of the program.
-static GRID: LazyLock<Vec<Entry>> =
+pub(super) static GRID: LazyLock<Vec<Entry>> =
     LazyLock::new(|| read(include_bytes!("../../../../../assets/tables/red_dwarf_grid.bin")).unwrap_or_default());
 
 /// Light over that at the end of mixing with which a blue dwarf begins, as in the structure calculation.

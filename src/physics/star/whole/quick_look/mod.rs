@@ -9,8 +9,10 @@
 //! to 0.22 solar masses) only the outline holds.
 
 mod between;
+mod reproduction;
 mod sample;
 mod table;
 
 pub use between::quick_look;
+pub use reproduction::deviation_from_grid;
 pub use table::{GRID_MASSES_MSUN, GRID_METALLICITIES_DEX, GridLife, table_bytes};
