@@ -192,7 +192,7 @@ pub const STAR: &[StarQuantity] = &[
     },
     StarQuantity {
         key: "contraction_yr",
-        name: "Contracted for",
+        name: "Contraction",
         symbol: "yr",
         digits: 2,
         method: "contraction",

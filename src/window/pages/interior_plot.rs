@@ -73,7 +73,7 @@ fn mixed_zones(painter: &Painter, rect: Rect, picture: &InteriorPicture, palette
         x = rect.left() + ((x - rect.left()) / HATCH).floor() * HATCH;
         while x < zone.right() {
             let line = [pos2(x, zone.bottom()), pos2(x + zone.height(), zone.top())];
-            hatching.line_segment(line, Stroke::new(1.0, palette.hairline.gamma_multiply(0.8)));
+            hatching.line_segment(line, Stroke::new(1.0, palette.hairline));
             x += HATCH;
         }
         for edge in [zone.left(), zone.right()] {
@@ -118,7 +118,7 @@ fn places(painter: &Painter, rect: Rect, picture: &InteriorPicture, palette: &Pa
 fn level(painter: &Painter, place: &Places<'_>, value: f64, words: &str, palette: &Palette) {
     let (from, to) = (place.point([0.0, value]), place.point([1.0, value]));
     painter.extend(Shape::dashed_line(&[from, to], Stroke::new(1.0, palette.dim), 1.5, 4.0));
-    painter.text(to - vec2(4.0, 2.0), Align2::RIGHT_BOTTOM, words, small(), palette.dim);
+    painter.text(to + vec2(-4.0, 2.0), Align2::RIGHT_TOP, words, small(), palette.dim);
 }
 
 /// Lines of one panel differ in ink and in pattern.
