@@ -104,6 +104,9 @@ pub(super) enum Command {
     /// A show as a numbered sequence of pictures, flat or for a dome
     #[command(after_help = FRAMES_HELP)]
     Frames(FramesArguments),
+    /// A show as a table, one line for every frame, with warnings of flashes and jumps
+    #[command(after_help = "Example:\n  longember cues demo:sunlike_five_worlds --fps 25 --planet Talune")]
+    Cues(CuesArguments),
     /// List the built-in scenarios, or write one as a file to start from
     #[command(after_help = "Example:\n  longember demo sunlike_five_worlds")]
     Demo(DemoArguments),
@@ -472,6 +475,23 @@ pub(super) struct CheckArguments {
     /// Form of the result
     #[arg(long, value_enum, default_value_t)]
     pub(super) format: PageFormat,
+}
+
+/// `cues`.
+#[derive(Args, Debug)]
+pub(super) struct CuesArguments {
+    /// A file, demo:NAME, or - for standard input
+    #[arg(value_name = "SCENARIO", value_parser = source_parser())]
+    pub(super) scenario: ScenarioSource,
+    /// Frames per second: a whole number, 23.976, 29.97, 59.94, or a ratio
+    #[arg(long, value_name = "RATE", default_value = "30")]
+    pub(super) fps: String,
+    /// A planet whose figures are wanted; may be given several times; all if left out
+    #[arg(long, value_name = "NAME")]
+    pub(super) planet: Vec<String>,
+    /// Where the result goes.
+    #[command(flatten)]
+    pub(super) destination: Destination,
 }
 
 /// `demo`.

@@ -5,6 +5,7 @@
 
 mod arguments;
 mod check;
+mod cues;
 mod destination;
 mod figure_run;
 mod frame_crew;

@@ -5,6 +5,7 @@ use super::arguments::{
     StateArguments, TableArguments, TableFormat,
 };
 use super::check::check;
+use super::cues;
 use super::figure_run;
 use super::frame_run;
 use super::outcome::{DONE, Outcome, WRONG_USAGE};
@@ -103,6 +104,7 @@ fn carry_out(command: Command, streams: &mut Streams<'_>) -> Result<u8, Trouble>
         Command::Figure(arguments) => figure_run::figure(&arguments, streams),
         Command::Sheet(arguments) => figure_run::sheet(&arguments, streams),
         Command::Frames(arguments) => frame_run::frames(&arguments, streams),
+        Command::Cues(arguments) => cues::cues(&arguments, streams),
         Command::Demo(arguments) => demo(&arguments, streams),
         Command::Sources(arguments) => sources(&arguments, streams),
     };

@@ -8,6 +8,7 @@ mod bodies;
 mod cell;
 mod checked_statements;
 mod comma_separated;
+mod cue_table;
 mod dated_events;
 mod enhanced_table;
 mod fact_sheet;
@@ -25,6 +26,7 @@ mod table_ages;
 mod table_columns;
 
 pub use checked_statements::{JudgedStatement, checked_json, checked_text, model_text};
+pub use cue_table::cue_table_csv;
 pub use dated_events::{doubt, events_csv, events_json, events_text};
 pub use fact_sheet::{FactSheet, fact_sheet, sheet_html, sheet_markdown, sheet_text};
 pub use figure_sentence::FigureSentence;

@@ -7,4 +7,5 @@ pub mod constants;
 pub mod entry;
 pub mod likeness;
 pub mod number_text;
+pub mod show_time;
 pub mod time_words;

@@ -192,10 +192,24 @@ impl Longember {
 
     fn play(&mut self, context: &Context) {
         let workspace = &mut self.workspace;
+        let elapsed_s = f64::from(context.input(|input| input.stable_dt.min(0.1)));
+        if workspace.show.is_running {
+            let history = Arc::clone(&workspace.history);
+            workspace.show.update(&history, &workspace.session.scenario().cues);
+        }
+        // A show keeps to the clock on the wall, however long a frame took.
+        let passed_s = f64::from(context.input(|input| input.unstable_dt.min(1.0)));
+        if workspace.show.is_running
+            && let Some(time_yr) = workspace.show.advance(passed_s)
+        {
+            workspace.moment_yr = time_yr;
+            self.keep_moment_in_view();
+            context.request_repaint_after(PLAY_FRAME);
+            return;
+        }
         if !workspace.playback.is_running {
             return;
         }
-        let elapsed_s = f64::from(context.input(|input| input.stable_dt.min(0.1)));
         workspace.moment_yr = workspace.playback.advance(&workspace.derived.axis, workspace.moment_yr, elapsed_s);
         self.keep_moment_in_view();
         context.request_repaint_after(PLAY_FRAME);

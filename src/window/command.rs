@@ -99,6 +99,10 @@ pub enum Command {
     ShowKeys,
     /// Say what this program is.
     ShowAbout,
+    /// Start or stop the show.
+    ToggleShow,
+    /// Set the clock of the show, s, and go to its moment.
+    SetShowTime(f64),
     /// Stop a computation that takes long.
     CancelComputation,
 }

@@ -6,9 +6,11 @@ use super::workspace::Workspace;
 use crate::document::write_atomically;
 use crate::drawing::{Look, Plot, Subject, figure_svg, pdf, png};
 use crate::handover::{
-    TableRequest, fact_sheet, sheet_html, sheet_markdown, sheet_text, table_ages, table_csv, table_ecsv, table_json,
+    TableRequest, cue_table_csv, fact_sheet, sheet_html, sheet_markdown, sheet_text, table_ages, table_csv, table_ecsv,
+    table_json,
 };
 use crate::system::Body;
+use crate::system::cues::{FrameRate, Schedule};
 use std::path::{Path, PathBuf};
 use std::sync::Arc;
 
@@ -26,6 +28,8 @@ pub enum Export {
     Sheet,
     /// The whole history as a table.
     Table,
+    /// The show as a table, one line for every frame at thirty frames per second.
+    Cues,
 }
 
 /// What came of work off the drawing thread.
@@ -49,6 +53,7 @@ impl Export {
             Self::Figure => &["svg", "pdf", "png"],
             Self::Sheet => &["html", "md", "txt"],
             Self::Table => &["csv", "ecsv", "json"],
+            Self::Cues => &["csv"],
         }
     }
 
@@ -58,6 +63,7 @@ impl Export {
             Self::Figure => "figure",
             Self::Sheet => "fact sheet",
             Self::Table => "table",
+            Self::Cues => "show table",
         }
     }
 
@@ -94,6 +100,7 @@ impl Export {
             Self::Figure => figure(workspace, extension),
             Self::Sheet => sheet(workspace, extension),
             Self::Table => table(workspace, extension),
+            Self::Cues => cue_table(workspace),
         };
         Box::new(move || match make() {
             Ok(bytes) => match write_atomically(&path, &bytes) {
@@ -167,6 +174,16 @@ fn sheet(workspace: &Workspace, extension: String) -> Make {
             _ => sheet_html(&sheet),
         };
         Ok(page.into_bytes())
+    })
+}
+
+fn cue_table(workspace: &Workspace) -> Make {
+    let history = Arc::clone(&workspace.history);
+    let cues = workspace.scenario().cues.clone();
+    Box::new(move || {
+        let schedule = Schedule::new(&cues, &history).map_err(|problem| problem.to_string())?;
+        let planets: Vec<usize> = (0..history.planets().len()).collect();
+        Ok(cue_table_csv(&history, &schedule, FrameRate::THIRTY, &planets).into_bytes())
     })
 }
 

@@ -18,6 +18,7 @@ mod pages;
 mod perform;
 mod pinned;
 mod playback;
+mod show_clock;
 pub mod software;
 mod start;
 mod system_panel;

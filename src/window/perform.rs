@@ -166,6 +166,16 @@ impl Longember {
                 workspace.wanted_source = Some(method);
             }
             Command::ShowCommands => workspace.dialog = Some(Dialog::Commands(Search::default())),
+            Command::ToggleShow => {
+                workspace.show.toggle();
+                workspace.playback.is_running = false;
+            }
+            Command::SetShowTime(show_time_s) => {
+                workspace.show.clock_s = show_time_s;
+                if let Some(time_yr) = workspace.show.advance(0.0) {
+                    self.go(TimeCommand::To(time_yr));
+                }
+            }
             Command::ShowKeys => workspace.dialog = Some(Dialog::Keys),
             Command::ShowAbout => workspace.dialog = Some(Dialog::About),
             _ => {}
@@ -192,6 +202,7 @@ impl Longember {
             TimeCommand::TogglePlay => {
                 let starts = !workspace.playback.is_running;
                 workspace.playback.is_running = starts;
+                workspace.show.is_running = false;
                 // Playing from the end would stop at once; begin anew instead.
                 (starts && now_yr >= workspace.derived.axis.to_yr()).then_some(0.0)
             }

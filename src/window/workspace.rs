@@ -7,6 +7,7 @@ use super::jobs::{ExportJobs, HistoryJob, Request};
 use super::pages::Page;
 use super::pinned::Pinned;
 use super::playback::Playback;
+use super::show_clock::Show;
 use super::start::Graphics;
 use super::theme::{self, Palette};
 use super::view::{View, WHOLE};
@@ -68,6 +69,8 @@ pub struct Workspace {
     pub playback: Playback,
     /// Axis, samples, charts and ribbon for the history and view.
     pub(super) derived: Derived,
+    /// The show of the scenario and its clock.
+    pub(super) show: Show,
     /// Statements judged so far.
     pub(super) checked: Checked,
     /// Who draws the window.
@@ -123,6 +126,7 @@ impl Workspace {
             pinned: None,
             playback: Playback::default(),
             derived,
+            show: Show::default(),
             checked: Checked::default(),
             graphics: Graphics::default(),
             dialog: None,

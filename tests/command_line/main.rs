@@ -4,6 +4,7 @@
 
 mod bad_input;
 mod check;
+mod cues;
 mod demos;
 mod events;
 mod figures;

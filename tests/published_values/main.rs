@@ -2,6 +2,7 @@
 
 #![expect(clippy::expect_used, clippy::unwrap_used, reason = "a test that cannot go on has failed")]
 
+mod cues;
 mod light_blackbody;
 mod light_blackbody_rows;
 mod light_colour;

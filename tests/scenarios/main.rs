@@ -4,6 +4,7 @@
 
 mod fates;
 mod red_dwarfs;
+mod shows;
 mod statements;
 
 use longember::document::{built_in, parse_scenario_text, scenario_text, sound_text};

@@ -4,6 +4,7 @@
 
 mod climate;
 mod commands;
+mod cues;
 mod curves;
 mod dialogs;
 mod driver;

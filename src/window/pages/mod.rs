@@ -3,6 +3,8 @@
 mod chart_view;
 mod chronicle;
 mod climate;
+mod cue_rows;
+mod cues;
 mod curves;
 mod hr_diagram;
 mod interior;
@@ -50,6 +52,8 @@ pub enum Page {
     Chronicle,
     /// Claims and what the model says to them.
     Statements,
+    /// Show time against cosmic time.
+    Cues,
     /// What the scenario is about.
     Introduction,
     /// Methods, papers, ranges.
@@ -58,7 +62,7 @@ pub enum Page {
 
 impl Page {
     /// Every page, in order.
-    pub const ALL: [Self; 11] = [
+    pub const ALL: [Self; 12] = [
         Self::Curves,
         Self::HrDiagram,
         Self::Spectrum,
@@ -68,6 +72,7 @@ impl Page {
         Self::Sky,
         Self::Chronicle,
         Self::Statements,
+        Self::Cues,
         Self::Introduction,
         Self::Sources,
     ];
@@ -92,6 +97,7 @@ impl Page {
             Self::Climate => "Climate",
             Self::Chronicle => "Chronicle",
             Self::Statements => "Statements",
+            Self::Cues => "Cues",
             Self::Introduction => "What to look for",
             Self::Sources => "Sources",
         }
@@ -122,6 +128,7 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
         Page::Climate => climate::show(ui, workspace),
         Page::Chronicle => chronicle::show(ui, workspace),
         Page::Statements => statements::show(ui, workspace),
+        Page::Cues => cues::show(ui, workspace),
         Page::Introduction => introduction::show(ui, workspace),
         Page::Sources => sources::show(ui, workspace),
     });
