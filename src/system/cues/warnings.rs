@@ -75,7 +75,7 @@ impl ShowWarning {
                 format!("{}: a cut; the star is {} times {more} at once", at(*show_time_s), number(*factor, 2))
             }
             Self::Jump { from_s, to_s, factor } => format!(
-                "{} to {}: the light changes {} times from frame to frame; give this part more show time or fade over it",
+                "{} to {}: from one frame to the next the light changes by a factor of {}; give this part more show time or fade over it",
                 at(*from_s),
                 at(*to_s),
                 number(*factor, 2)

@@ -15,6 +15,9 @@ use egui::{Button, ComboBox, Id, Key, RichText, Stroke, StrokeKind, TextEdit, Ui
 /// Longest text of a moment, characters.
 const LONGEST_MOMENT: usize = 120;
 
+/// Width of the field for it: room for an event of a planet.
+const MOMENT_WIDTH: f32 = 300.0;
+
 /// Draws a cue and returns what it was told.
 pub(super) fn row(ui: &mut Ui, workspace: &Workspace, index: usize) -> Vec<Command> {
     let palette = workspace.palette();
@@ -45,7 +48,7 @@ pub(super) fn row(ui: &mut Ui, workspace: &Workspace, index: usize) -> Vec<Comma
             moment.time_yr(&workspace.history, Some(present_yr)).map_err(|problem| problem.to_string())?;
             Ok(moment)
         };
-        match checked_entry(ui, palette, &name, &cue.moment.text(), 190.0, moment) {
+        match checked_entry(ui, palette, &name, &cue.moment.text(), MOMENT_WIDTH, moment) {
             Entry::Taken(moment) => commands.push(change(workspace, index, "moment", move |cue| cue.moment = moment)),
             Entry::Refused(reason) => refusal = refusal.take().or(Some(reason)),
             Entry::Nothing => {}

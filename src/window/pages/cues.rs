@@ -3,7 +3,7 @@
 use super::cue_rows;
 use crate::system::MomentRequest;
 use crate::system::cues::{Cue, LONGEST_SHOW_S, MOST_CUES, Schedule, Transition};
-use crate::units::show_time::{parse_show_time, show_time_text};
+use crate::units::show_time::show_time_text;
 use crate::window::command::Command;
 use crate::window::exports::Export;
 use crate::window::system_panel::edit;
@@ -78,14 +78,13 @@ fn clock(ui: &mut Ui, workspace: &mut Workspace, commands: &mut Vec<Command>) {
         }
         let mut show_time_s = workspace.show.clock_s.min(length_s);
         ui.spacing_mut().slider_width = (ui.available_width() - 190.0).max(120.0);
-        let slider = Slider::new(&mut show_time_s, 0.0..=length_s)
-            .custom_formatter(|seconds, _| show_time_text(seconds))
-            .custom_parser(|text| parse_show_time(text).ok());
+        let shown = format!("{} of {}", show_time_text(show_time_s), show_time_text(length_s));
+        let slider = Slider::new(&mut show_time_s, 0.0..=length_s).show_value(false);
         let response = ui.add(slider).accessible_name("Show time, seconds");
         if response.changed() {
             commands.push(Command::SetShowTime(show_time_s));
         }
-        ui.label(RichText::new(format!("of {}", show_time_text(length_s))).color(palette.dim));
+        ui.label(RichText::new(shown).color(palette.dim));
     });
 }
 
