@@ -484,8 +484,8 @@ pub(super) struct CuesArguments {
     #[arg(value_name = "SCENARIO", value_parser = source_parser())]
     pub(super) scenario: ScenarioSource,
     /// Frames per second: a whole number, 23.976, 29.97, 59.94, or a ratio
-    #[arg(long, value_name = "RATE", default_value = "30")]
-    pub(super) fps: String,
+    #[arg(long, value_name = "RATE", default_value = "30", value_parser = FrameRate::parse)]
+    pub(super) fps: FrameRate,
     /// A planet whose figures are wanted; may be given several times; all if left out
     #[arg(long, value_name = "NAME")]
     pub(super) planet: Vec<String>,

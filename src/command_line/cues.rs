@@ -5,12 +5,12 @@ use super::run::computed;
 use super::streams::Streams;
 use super::trouble::Trouble;
 use crate::handover::cue_table_csv;
-use crate::system::cues::{FrameRate, Schedule, warnings};
+use crate::system::cues::{Schedule, warnings};
 
 /// Writes the show, and says what to know about it before an audience sees it.
 pub(super) fn cues(arguments: &CuesArguments, streams: &mut Streams<'_>) -> Result<(), Trouble> {
     arguments.destination.check()?;
-    let rate = FrameRate::parse(&arguments.fps)?;
+    let rate = arguments.fps;
     let mut scenario = arguments.scenario.load(streams)?;
     let sheet = std::mem::take(&mut scenario.cues);
     let names: Vec<String> = scenario.system.planets.iter().map(|planet| planet.name.clone()).collect();

@@ -5,7 +5,7 @@ use crate::document::{LoadError, Problem, WriteError, built_in};
 use crate::drawing::PictureProblem;
 use crate::drawing::frames::FrameProblem;
 use crate::handover::{ColumnsProblem, TableAgesProblem};
-use crate::system::cues::{CueProblem, NoFrameRate};
+use crate::system::cues::CueProblem;
 use crate::system::statements::LineProblem;
 use crate::system::{HistoryError, MomentProblem};
 use std::io;
@@ -64,9 +64,6 @@ pub(super) enum Trouble {
         /// What is wrong with it.
         problem: MomentProblem,
     },
-    /// No rate of frames.
-    #[error(transparent)]
-    FrameRate(#[from] NoFrameRate),
     /// A line that is no statement.
     #[error("the statement \"{line}\": {problem}")]
     Statement {
@@ -196,7 +193,6 @@ impl Trouble {
             | Self::History(_)
             | Self::Moment(_)
             | Self::TableEnd { .. }
-            | Self::FrameRate(_)
             | Self::Statement { .. }
             | Self::NothingStated
             | Self::TableAges(_)
