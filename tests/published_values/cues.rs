@@ -35,7 +35,7 @@ fn turns(first: [f64; 3], second: [f64; 3], pairs_per_second: f64) -> Vec<Light>
     (0..120)
         .map(|frame| {
             let show_time_s = f64::from(frame) / 60.0;
-            let is_first = (show_time_s * pairs_per_second * 2.0 + 1e-9).floor() as u64 % 2 == 0;
+            let is_first = ((show_time_s * pairs_per_second * 2.0 + 1e-9).floor() as u64).is_multiple_of(2);
             Light { show_time_s, rgb: if is_first { first } else { second } }
         })
         .collect()
