@@ -47,7 +47,7 @@ fn the_example_of_each_sub_command_works_as_it_stands() {
 
 #[test]
 fn there_are_no_sub_commands_but_those() {
-    for word in ["cues", "movie"] {
+    for word in ["movie", "export"] {
         assert_eq!(run([word, "demo:sunlike_five_worlds"]).code, 2, "{word}");
         let message = refusal([word], 4);
         assert!(message.contains(word) && message.contains("sub-command"), "{message}");
