@@ -14,6 +14,8 @@ pub struct History<T> {
     future: Vec<Step<T>>,
     /// The field whose changes go into the last step until the interaction ends.
     interaction: Option<EditedField>,
+    /// The last step takes further changes with its label.
+    is_joined: bool,
 }
 
 #[derive(Clone, Debug)]
@@ -26,7 +28,7 @@ impl<T: PartialEq> History<T> {
     /// A history without steps.
     #[must_use]
     pub fn new() -> Self {
-        Self { past: Vec::new(), future: Vec::new(), interaction: None }
+        Self { past: Vec::new(), future: Vec::new(), interaction: None, is_joined: false }
     }
 
     /// Notes a step of its own from `before` to the present value.
@@ -44,6 +46,15 @@ impl<T: PartialEq> History<T> {
         self.interaction = Some(field);
     }
 
+    /// Notes a change that belongs to the step before it when that has the same label: one key held down.
+    pub fn record_joined(&mut self, label: String, before: T) {
+        let continues = self.is_joined && self.future.is_empty() && self.undo_label() == Some(label.as_str());
+        if !continues {
+            self.record(label, before);
+        }
+        self.is_joined = true;
+    }
+
     /// Ends a drag or a stretch of typing: the next change is a new step.
     ///
     /// A drag that came back to where it began leaves no step.
@@ -57,6 +68,7 @@ impl<T: PartialEq> History<T> {
     pub fn undo(&mut self, present: &mut T) -> Option<String> {
         self.end_interaction(present);
         let Step { label, mut value } = self.past.pop()?;
+        self.is_joined = false;
         std::mem::swap(present, &mut value);
         self.future.push(Step { label: label.clone(), value });
         Some(label)
@@ -84,6 +96,7 @@ impl<T: PartialEq> History<T> {
     }
 
     fn push(&mut self, label: String, before: T) {
+        self.is_joined = false;
         self.future.clear();
         if self.past.len() == MOST_STEPS {
             self.past.remove(0);

@@ -158,6 +158,15 @@ impl Session {
         }
     }
 
+    /// Changes the scenario as part of the step before, when that was such a change with the same label: a key held
+    /// down or a drag makes one step.
+    pub fn edit_joined(&mut self, label: impl Into<String>, change: impl FnOnce(&mut Scenario)) {
+        self.end_interaction();
+        if let Some(before) = self.change(change) {
+            self.history.record_joined(label.into(), before);
+        }
+    }
+
     /// Changes one field as part of a drag or of typing: all changes of it make one step
     /// until [`Session::end_interaction`] or an edit of something else.
     pub fn edit_field(&mut self, field: EditedField, change: impl FnOnce(&mut Scenario)) {
@@ -269,6 +278,27 @@ mod tests {
         assert_eq!(session.undo(), None);
         assert_eq!(session.redo().as_deref(), Some("Change Bond albedo of Planet"));
         assert!((session.scenario().system.planets[0].bond_albedo - 0.6).abs() < 1e-15);
+    }
+
+    #[test]
+    fn joined_edits_are_one_step_until_something_else_happens() {
+        let mut session = Session::new_untitled();
+        let nudge = |session: &mut Session, mass_msun: f64| {
+            session.edit_joined("Change mass", |scenario| scenario.system.star.mass_msun = mass_msun);
+        };
+        for mass_msun in [1.01, 1.02, 1.03] {
+            nudge(&mut session, mass_msun);
+        }
+        session.undo();
+        assert!(!session.is_dirty());
+        session.redo();
+        session.edit("Change mass", |scenario| scenario.system.star.mass_msun = 2.0);
+        nudge(&mut session, 2.02);
+        session.undo();
+        assert_eq!(session.scenario().system.star.mass_msun, 2.0, "an edit of its own is not joined");
+        nudge(&mut session, 2.01);
+        session.undo();
+        assert_eq!(session.scenario().system.star.mass_msun, 2.0);
     }
 
     #[test]

@@ -46,6 +46,22 @@ impl Limit {
         Err(OutOfLimit { key: self.key, value, allowed: self.allowed() })
     }
 
+    /// A value some steps of an arrow key further, within the range and with at most four digits.
+    ///
+    /// A step is a hundredth of the value; where the range holds zero, a five-hundredth of the range.
+    #[must_use]
+    pub fn nudged(&self, value: f64, steps: f64) -> f64 {
+        let moved = if self.lowest > 0.0 {
+            value * STEP_RATIO.powf(steps)
+        } else {
+            value + steps * (self.highest - self.lowest) / STEPS_OF_RANGE
+        };
+        // Ten digits below the largest the last one is noise of the arithmetic.
+        let scale = moved.abs().max(1e-9 * (self.highest - self.lowest));
+        let unit = 10_f64.powf(scale.log10().floor() - 3.0);
+        ((moved / unit).round() * unit).clamp(self.lowest, self.highest)
+    }
+
     /// The permitted range in words, with its unit: `0.35 to 100 M☉`.
     #[must_use]
     pub fn allowed(&self) -> String {
@@ -54,6 +70,11 @@ impl Limit {
         format!("{} to {}{gap}{unit}", bound(self.lowest), bound(self.highest))
     }
 }
+
+/// One step of a value that is never zero.
+const STEP_RATIO: f64 = 1.01;
+/// Steps from end to end of a range that holds zero.
+const STEPS_OF_RANGE: f64 = 500.0;
 
 /// A bound as a person would write it: no trailing zeros.
 fn bound(value: f64) -> String {
@@ -296,5 +317,24 @@ mod tests {
             assert!(limit.lowest < limit.highest);
             assert_eq!(limit.check(limit.lowest), Ok(limit.lowest));
         }
+    }
+
+    #[test]
+    fn steps_stay_in_the_range_and_come_back() {
+        for limit in ALL {
+            for start in [limit.lowest, 0.5 * (limit.lowest + limit.highest), limit.highest] {
+                for steps in [-1.0, -0.1, 0.1, 1.0, 25.0] {
+                    let moved = limit.nudged(start, steps);
+                    assert!(limit.check(moved).is_ok(), "{}: {start} by {steps} gives {moved}", limit.key);
+                    assert!(
+                        (moved - start) * steps >= 0.0 || (moved - start).abs() < 1e-3 * start.abs(),
+                        "{}",
+                        limit.key
+                    );
+                }
+            }
+        }
+        assert_eq!(STAR_MASS.nudged(1.0, 1.0), 1.01);
+        assert!((STAR_MASS.nudged(1.01, -1.0) - 1.0).abs() < 1e-12);
     }
 }

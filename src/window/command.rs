@@ -44,6 +44,8 @@ pub enum Command {
     Unpin,
     /// Change the scenario; the label says what changes.
     Edit(Edit),
+    /// Change the scenario as part of the step before: a key held down, a drag.
+    JoinedEdit(Edit),
     /// Go to a moment.
     Time(TimeCommand),
     /// Choose the scale of time.

@@ -80,6 +80,10 @@ impl Longember {
                 workspace.session.edit(edit.label, |scenario| *scenario = *edit.scenario);
                 self.recompute_unless(context, &before);
             }
+            Command::JoinedEdit(edit) => {
+                workspace.session.edit_joined(edit.label, |scenario| *scenario = *edit.scenario);
+                self.recompute(context);
+            }
             Command::CancelComputation => {
                 workspace.job.cancel();
                 workspace.say("Stopped. The curves still show the system as it was computed last.");

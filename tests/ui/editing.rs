@@ -1,6 +1,6 @@
 //! Editing star and planets: what is typed, what is refused, what follows.
 
-use crate::driver::Driver;
+use crate::driver::{CTRL, Driver};
 use egui::{Key, Modifiers};
 use longember::physics::planet::{Greenhouse, Redistribution};
 use longember::system::Body;
@@ -132,4 +132,36 @@ fn greenhouse_and_redistribution_are_chosen_from_lists() {
     driver.click(Redistribution::SubStellar.name());
     assert_eq!(planet(&driver).redistribution, Redistribution::SubStellar);
     assert_eq!(*driver.workspace().history.system(), driver.workspace().scenario().system);
+}
+
+#[test]
+fn arrows_in_a_field_change_its_value_in_one_step_of_undo() {
+    let mut driver = Driver::demo();
+    driver.the("Mass of Veldane").click();
+    driver.harness.run_steps(3);
+    for _ in 0..3 {
+        driver.harness.key_press(Key::ArrowUp);
+        driver.harness.run_steps(2);
+    }
+    driver.settle();
+    let mass_msun = driver.workspace().scenario().system.star.mass_msun;
+    assert!((mass_msun - 1.03).abs() < 1e-9, "{mass_msun}");
+    assert_eq!(driver.text_in("Mass of Veldane"), "1.03");
+    driver.harness.key_press_modifiers(Modifiers::SHIFT, Key::ArrowDown);
+    driver.settle();
+    assert!(driver.workspace().scenario().system.star.mass_msun < mass_msun);
+    driver.press(Modifiers::NONE, Key::Enter);
+    driver.press(CTRL, Key::Z);
+    assert_eq!(driver.workspace().scenario().system.star.mass_msun, 1.0);
+}
+
+#[test]
+fn a_drag_on_the_name_of_a_field_is_one_step_of_undo() {
+    let mut driver = Driver::demo();
+    let field = driver.the("Mass of Veldane").rect();
+    let name = egui::pos2(30.0, field.center().y);
+    driver.drag(name, &[name + egui::vec2(20.0, 0.0), name + egui::vec2(40.0, 0.0), name + egui::vec2(80.0, 0.0)]);
+    assert!(driver.workspace().scenario().system.star.mass_msun > 1.1);
+    driver.press(CTRL, Key::Z);
+    assert_eq!(driver.workspace().scenario().system.star.mass_msun, 1.0);
 }

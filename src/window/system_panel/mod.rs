@@ -8,6 +8,7 @@ use super::command::{Command, Edit};
 use super::theme::GRID;
 use super::widgets::heading::section;
 use super::widgets::text_entry::text_entry;
+use super::widgets::value_entry;
 use super::workspace::Workspace;
 use crate::document::{LONGEST_TITLE, Scenario};
 use crate::system::Body;
@@ -36,6 +37,10 @@ pub(super) fn show(ui: &mut Ui, workspace: &Workspace) -> Vec<Command> {
         }
         ui.add_space(4.0 * GRID);
     });
+    if value_entry::take_nudge(ui.ctx()) {
+        let joined = |command| if let Command::Edit(edit) = command { Command::JoinedEdit(edit) } else { command };
+        commands = commands.into_iter().map(joined).collect();
+    }
     commands
 }
 
