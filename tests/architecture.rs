@@ -52,7 +52,7 @@ const PURE_ENDS: &str = "fraction share factor ratio efficiency albedo eccentric
 /// Whole names without a unit.
 const PURE_NAMES: &str = "x y z duv degree value difference lowest highest height ultraviolet visible infrared air_mass air_masses \
     molecular_mass optical_depth optical_depth_550 heavy_elements envelope_measure relative_brightness most_decades text_scale \
-    quality_high quality_low love_number place visibility";
+    quality_high quality_low love_number place visibility steps";
 /// Where names of numbers are free: formulas in the letters of their paper, and places on a picture.
 const FREE_NAMES: [&str; 4] = ["physics/star/analytic/", "figure/sky_picture.rs", "drawing/", "window/"];
 /// Folders of the window whose `mod.rs` draws the frame around its parts.
