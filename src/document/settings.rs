@@ -352,7 +352,7 @@ mod tests {
         let lines: Vec<_> = warning.lines().collect();
         assert_eq!(lines.len(), 4, "{warning}");
         assert_eq!(lines[0], "theme is Purple, allowed Dark, Light, Dome (settings.ron:1:26)");
-        assert_eq!(lines[1], "text_scale is 99, allowed 0.75 to 2.5 (settings.ron:1:46)");
+        assert_eq!(lines[1], "text_scale is 99, allowed 0.75 to 3 (settings.ron:1:46)");
     }
 
     #[test]

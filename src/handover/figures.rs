@@ -86,7 +86,7 @@ pub(super) fn planet_cells(planet: &PlanetMoment, light: Option<&PlanetLight>) -
 /// IVOA Recommendation "Units in the VO" 1.0 (2014), from memory.
 pub(super) fn unit_of(key: &str) -> &'static str {
     // Longer suffixes first: "_msun_yr" also ends in "_yr".
-    const UNITS: [(&str, &str); 18] = [
+    const UNITS: [(&str, &str); 20] = [
         ("_msun_yr", "solMass/yr"),
         ("_msun", "solMass"),
         ("_lsun", "solLum"),
@@ -100,6 +100,8 @@ pub(super) fn unit_of(key: &str) -> &'static str {
         ("_cd_m2", "cd/m2"),
         ("_g_cm3", "g/cm3"),
         ("_lm_w", "lm/W"),
+        ("_km_s", "km/s"),
+        ("_m_s2", "m/s2"),
         ("_w_m2", "W/m2"),
         ("_lm", "lm"),
         ("_lx", "lx"),

@@ -62,6 +62,10 @@ pub enum EntryKind {
     LuminousFluxLm,
     /// A luminous efficacy, kept in lumens per watt.
     EfficacyLmW,
+    /// An acceleration, kept in metres per second squared.
+    AccelerationMS2,
+    /// A speed, kept in kilometres per second.
+    SpeedKmS,
     /// A magnitude.
     Magnitude,
     /// Water, kept in oceans of the Earth.
@@ -98,6 +102,8 @@ impl EntryKind {
             Self::LuminanceCdM2 => "cd/m²",
             Self::LuminousFluxLm => "lm",
             Self::EfficacyLmW => "lm/W",
+            Self::AccelerationMS2 => "m/s²",
+            Self::SpeedKmS => "km/s",
             Self::Magnitude => "mag",
             Self::WaterOceans => "oceans",
             Self::Plain => "",
@@ -190,6 +196,8 @@ impl EntryKind {
             Self::LuminanceCdM2 => &[("cd/m2", 1.0), ("cd/m²", 1.0)],
             Self::LuminousFluxLm => &[("lm", 1.0), ("lumens", 1.0)],
             Self::EfficacyLmW => &[("lm/W", 1.0)],
+            Self::AccelerationMS2 => &[("m/s²", 1.0), ("m/s2", 1.0), ("cm/s2", 0.01)],
+            Self::SpeedKmS => &[("km/s", 1.0), ("m/s", 1e-3)],
             Self::Magnitude => &[("mag", 1.0), ("magnitudes", 1.0)],
             Self::WaterOceans => &[("oceans", 1.0), ("ocean", 1.0)],
             Self::Plain => &[("%", 0.01)],

@@ -16,6 +16,8 @@ pub const RED_SHARE: f64 = 0.8;
 pub const RED_DISTANCE: f64 = 0.2;
 /// The stretch that flashes are counted in, s.
 const WINDOW_S: f64 = 1.0;
+/// What the times of frames may be off by, s.
+const ROUNDING_S: f64 = 1e-6;
 
 /// A picture at one show time: a single colour that fills it.
 #[derive(Clone, Copy, Debug, PartialEq)]
@@ -157,7 +159,8 @@ fn stretches(kind: FlashKind, times: &[f64]) -> Vec<Flashing> {
     let mut found: Vec<Flashing> = Vec::new();
     let mut first = 0;
     for (last, to_s) in times.iter().enumerate() {
-        while to_s - times[first] > WINDOW_S {
+        // Changes a whole second apart are not within one: three flashes a second for ever are three in any second.
+        while to_s - times[first] > WINDOW_S - ROUNDING_S {
             first += 1;
         }
         let changes = last + 1 - first;

@@ -203,12 +203,14 @@ pub(super) fn other_words(key: &str) -> &'static [&'static str] {
 
 /// What a figure is typed and kept as, by the unit at the end of its key.
 fn entry_of(key: &str) -> EntryKind {
-    const KINDS: [(&str, EntryKind); 19] = [
+    const KINDS: [(&str, EntryKind); 21] = [
         ("_umol_m2_s", EntryKind::PhotonFluxUmolM2S),
         ("_msun_yr", EntryKind::MassLossMsunYr),
         ("_cd_m2", EntryKind::LuminanceCdM2),
         ("_g_cm3", EntryKind::DensityGCm3),
         ("_lm_w", EntryKind::EfficacyLmW),
+        ("_km_s", EntryKind::SpeedKmS),
+        ("_m_s2", EntryKind::AccelerationMS2),
         ("_w_m2", EntryKind::IrradianceWM2),
         ("_lsun", EntryKind::LuminosityLsun),
         ("_rsun", EntryKind::RadiusRsun),
