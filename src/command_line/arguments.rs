@@ -208,7 +208,7 @@ pub(super) struct FigureArguments {
     /// The moment: 4.57Gyr, "3 trillion years", now, event:"largest radius"
     #[arg(long, value_name = "TIME", default_value = "now", allow_hyphen_values = true)]
     pub(super) at: String,
-    /// Whose sky to draw; the first with air if left out
+    /// Whose sky or climate to draw; the first with air, or with water, if left out
     #[arg(long, value_name = "NAME")]
     pub(super) planet: Option<String>,
     /// Scale of the time axis
@@ -264,7 +264,7 @@ pub(super) struct FramesArguments {
     /// How one sweep runs through time
     #[arg(long, value_enum, default_value_t = PaceArgument(Transition::Paced))]
     pub(super) pace: PaceArgument,
-    /// Whose sky is shown; the first with air if left out
+    /// Whose sky or climate is shown; the first with air, or with water, if left out
     #[arg(long, value_name = "NAME")]
     pub(super) planet: Option<String>,
     /// Altitude of the star in that sky, degrees
@@ -325,7 +325,7 @@ impl ValueEnum for SubjectArgument {
             ];
             all.extend(Plot::all().into_iter().filter(|(_, plot)| *plot != Plot::Sky).map(|(key, plot)| {
                 let key = if plot == Plot::LifeStrip { "strip" } else { key };
-                SubjectArgument { key, subject: FrameSubject::Figure(plot) }
+                SubjectArgument { key, subject: FrameSubject::Figure { plot, planet: None } }
             }));
             all
         });

@@ -6,7 +6,7 @@ use super::streams::Streams;
 use super::trouble::Trouble;
 use crate::drawing::{Size, Subject, figure_svg, pdf, png};
 use crate::handover;
-use crate::system::{Air, History, MomentRequest};
+use crate::system::{History, MomentRequest};
 
 /// Draws the figure asked for.
 pub(super) fn figure(arguments: &FigureArguments, streams: &mut Streams<'_>) -> Result<(), Trouble> {
@@ -83,13 +83,11 @@ pub(super) fn sheet(arguments: &SheetArguments, streams: &mut Streams<'_>) -> Re
     arguments.destination.deliver(&page, streams)
 }
 
-/// Index of the planet named, or of the first with air, or of the first.
-pub(super) fn planet_of(history: &History, name: Option<&str>) -> Result<usize, Trouble> {
+/// Index of the planet named, if one is.
+pub(super) fn planet_of(history: &History, name: Option<&str>) -> Result<Option<usize>, Trouble> {
     let planets = &history.system().planets;
-    let Some(name) = name else {
-        return Ok(planets.iter().position(|planet| planet.air != Air::None).unwrap_or(0));
-    };
-    planets.iter().position(|planet| planet.name == name).ok_or_else(|| Trouble::NoSuchBody {
+    let Some(name) = name else { return Ok(None) };
+    planets.iter().position(|planet| planet.name == name).map(Some).ok_or_else(|| Trouble::NoSuchBody {
         name: name.to_owned(),
         allowed: planets.iter().map(|planet| planet.name.as_str()).collect::<Vec<_>>().join(", "),
     })

@@ -6,6 +6,7 @@ use super::frame_crew::FrameJob;
 use super::run::computed;
 use super::streams::Streams;
 use super::trouble::Trouble;
+use crate::drawing::Plot;
 use crate::drawing::frames::{FRAME_SIZE_RANGE_PX, FrameFormat, FrameSequence, FrameSubject, SequenceChoices};
 use crate::figure::SkyView;
 use crate::system::cues::{Cue, Schedule, ShowFrame, Transition};
@@ -122,14 +123,17 @@ fn one_sweep(
 }
 
 fn subject(arguments: &FramesArguments, history: &History) -> Result<FrameSubject, Trouble> {
+    let named = planet_of(history, arguments.planet.as_deref())?;
     Ok(match &arguments.subject.subject {
         FrameSubject::Sky { .. } => {
             if history.system().planets.is_empty() {
                 return Err(Trouble::NoPlanet);
             }
             let view = SkyView { altitude_deg: arguments.altitude, ..SkyView::default() };
-            FrameSubject::Sky { planet: planet_of(history, arguments.planet.as_deref())?, view }
+            let planet = named.unwrap_or_else(|| Plot::Sky.usual_planet(&history.system().planets));
+            FrameSubject::Sky { planet, view }
         }
+        FrameSubject::Figure { plot, .. } => FrameSubject::Figure { plot: plot.clone(), planet: named },
         other => other.clone(),
     })
 }

@@ -5,11 +5,11 @@ use super::plot::{Plot, Subject};
 use super::spectrum::wavelength_text;
 use crate::figure::curves::Curve;
 use crate::figure::orbit_plan::PlanScale;
-use crate::figure::{Chart, Owner, SkyPicture, Spectrum};
+use crate::figure::{Chart, InteriorPicture, Owner, SkyPicture, Spectrum};
 use crate::physics::light::Viewing;
 use crate::physics::star::WholeLife;
 use crate::system::provenance::method;
-use crate::system::{Air, TimeScale};
+use crate::system::{Air, PlanetClimate, TimeScale};
 use crate::units::number_text::number;
 use crate::units::time_words::short_span;
 
@@ -130,6 +130,26 @@ impl Subject<'_> {
             number(picture.star_diameter_deg, 3)
         );
         self.words(plot, title, caption)
+    }
+
+    /// A climate of the planet with a name.
+    pub(super) fn words_of_climate(&self, plot: &Plot, climate: Option<(&str, &PlanetClimate)>) -> Words {
+        let Some((name, climate)) = climate else {
+            return self.words(plot, format!("Climates about {}", self.star_name()), String::new());
+        };
+        let caption =
+            format!("At {}, {}. {}", short_span(self.moment_yr), climate.in_words(name), scale_words(self.scale));
+        self.words(plot, format!("The climate of {name}"), caption)
+    }
+
+    /// The inside of the star, where it is known layer by layer.
+    pub(super) fn words_of_interior(&self, plot: &Plot, picture: Option<&InteriorPicture>) -> Words {
+        let star = self.history.star_at(self.moment_yr);
+        let mut caption = format!("At {}: {}.", short_span(self.moment_yr), star.phase.name());
+        if let Some(picture) = picture {
+            caption = format!("{caption} {}.", picture.mixing_words());
+        }
+        self.words(plot, format!("The inside of {}", self.star_name()), caption)
     }
 
     /// Program, version, scenario and the names of the methods behind a plot.

@@ -1,9 +1,14 @@
 //! Figures are held to their promises here: sound XML, text as text, pictures of the same SVG, nothing from outside.
 
+use super::canvas::{Area, Canvas};
+use super::interior;
 use super::picture::{Size, pdf, pixels, png};
 use super::plot::{Plot, Subject, figure_svg};
 use super::{Look, PictureProblem};
-use crate::system::{History, PlanetSpecification, StarSpecification, System};
+use crate::figure::InteriorPicture;
+use crate::figure::interior::{LayerFigure, LayerScale};
+use crate::physics::star::convective::{Layer, Profile};
+use crate::system::{History, PlanetSpecification, StarSpecification, System, Water};
 use resvg::usvg::roxmltree::Document;
 
 const HOSTILE: &str = "\"/><script>alert(1)</script>&amp;]]>\u{202e}<!--";
@@ -13,6 +18,7 @@ fn history(star_name: &str, planet_name: &str) -> History {
     let planet = |name: String, semi_major_axis_au| PlanetSpecification {
         name,
         semi_major_axis_au,
+        water: (semi_major_axis_au > 0.7).then(Water::default),
         ..PlanetSpecification::default()
     };
     let planets = vec![planet(planet_name.to_owned(), 0.4), planet(format!("{planet_name} 2"), 1.0)];
@@ -72,6 +78,67 @@ fn labels_stay_on_the_page() {
             assert!((8.0..=600.0).contains(&number("y")), "{key}: {words}");
         }
     }
+}
+
+/// A star with a mixed envelope about a core at rest.
+fn layers() -> Profile {
+    let layer = |place: f64| Layer {
+        mass_above_fraction: 1.0 - place,
+        radius_fraction: place.cbrt(),
+        temperature_k: 4e6 * (1.001 - place),
+        density_g_cm3: 400.0 * (1.001 - place),
+        pressure_bar: 1e11 * (1.001 - place),
+        luminosity_fraction: place,
+        hydrogen_fraction: 0.7,
+        helium3_fraction: 0.01,
+        helium4_fraction: 0.27,
+        degeneracy_ratio: 3.0 * (1.001 - place),
+        is_convective: place > 0.4,
+    };
+    Profile { age_yr: 1e9, layers: (0..=60).map(|step| layer(f64::from(step) / 60.0)).collect() }
+}
+
+#[test]
+fn the_inside_of_a_star_has_six_panels_and_says_what_is_mixed_in_every_shape() {
+    for scale in LayerScale::ALL {
+        let picture = InteriorPicture::new(&layers(), scale, &LayerFigure::ALL);
+        for sides in [[560.0, 430.0], [960.0, 700.0], [3000.0, 430.0]] {
+            let mut canvas = Canvas::new("figure");
+            let area = Area { left: 24.0, top: 60.0, right: sides[0] - 24.0, bottom: sides[1] - 80.0 };
+            interior::draw(&mut canvas, area, &picture, Look::Light.palette());
+            let svg = canvas.document(sides, [960, 600], "Inside", "A test");
+            let found = texts(&svg);
+            assert!(!svg.contains("NaN"), "{scale:?} {sides:?}");
+            assert!(found.iter().any(|text| text.contains(scale.title())), "{found:?}");
+            let panels = LayerFigure::ALL.iter().filter(|figure| found.iter().any(|text| text == figure.title()));
+            assert!(panels.count() == 6 || sides[0] < 700.0, "{found:?}");
+            let drawn = pixels(&svg, Size::new(960, 600).expect("allowed")).expect("drawn");
+            assert!(drawn.chunks_exact(3).any(|pixel| pixel.iter().all(|part| *part < 60)), "ink");
+        }
+        let words: Vec<String> = interior::entries(&picture).into_iter().map(|entry| entry.words).collect();
+        assert_eq!(words, ["mixed: gas rises and sinks", "Composition: hydrogen", "helium", "helium-3, ten times"]);
+    }
+}
+
+#[test]
+fn a_climate_has_its_parts_and_words_stand_where_there_is_none() {
+    let history = history("Ember", "Kell");
+    let drawn = |planet| {
+        let subject = Subject { planet: Some(planet), ..Subject::new(&history, "A test", 4.57e9) };
+        texts(&figure_svg(&subject, &Plot::Climate, Plot::Climate.usual_size(), Look::Dark, "figure"))
+    };
+    let wet = drawn(1);
+    for part in
+        ["The climate of Kell 2", "Surface temperature by latitude, K", "equator", "from ice", "open water lasts"]
+    {
+        assert!(wet.iter().any(|text| text == part), "{part}: {wet:?}");
+    }
+    let dry = drawn(0);
+    assert!(dry.iter().any(|text| text.starts_with("No climate by latitude.")), "{dry:?}");
+    assert!(!dry.iter().any(|text| text == "from ice"), "{dry:?}");
+    let usual =
+        figure_svg(&Subject::new(&history, "A test", 4.57e9), &Plot::Climate, Size::default(), Look::Light, "f");
+    assert!(usual.contains("The climate of Kell 2"), "the first with water");
 }
 
 #[test]

@@ -3,7 +3,8 @@
 use super::canvas::{Anchor, Area, Canvas, Stroke, lettering, stroke};
 use super::fonts::{fitted, width};
 use super::ink::{Palette, dashes};
-use super::state_mark;
+use super::{interior, state_mark};
+use crate::figure::chart::BandMeaning;
 use crate::system::PlanetState;
 
 /// One entry.
@@ -30,6 +31,10 @@ pub(super) enum Sample {
     Band(&'static str),
     /// A letter that stands for the words.
     Letter(char),
+    /// A hatched area.
+    Hatched,
+    /// A line of several within one panel of the star's inside.
+    Layers(usize),
     /// The moment.
     Moment,
 }
@@ -102,6 +107,12 @@ fn sample(canvas: &mut Canvas, [x, y]: [f64; 2], sample: &Sample, palette: &Pale
         Sample::Band(ink) => {
             canvas.rect(Area { left: x, top: y - 5.0, right: x + SAMPLE, bottom: y + 5.0 }, ink);
         }
+        Sample::Hatched => {
+            let area = Area { left: x, top: y - 5.0, right: x + SAMPLE, bottom: y + 5.0 };
+            canvas.veil(area, palette.band(BandMeaning::Spread), 0.5);
+            interior::hatch(canvas, area, x, palette);
+        }
+        Sample::Layers(index) => line(interior::line_stroke(*index, palette)),
         Sample::Letter(letter) => {
             let place = [x + SAMPLE, y + 4.2];
             canvas.text(place, &letter.to_string(), lettering(palette.dim, SIZE, Anchor::End));

@@ -7,11 +7,15 @@ mod canvas;
 mod caption;
 #[cfg(test)]
 mod checks;
+mod climate;
 pub mod fonts;
 pub mod frames;
 mod ink;
+mod interior;
+mod latitudes;
 mod legend;
 mod life_strip;
+mod light_gauge;
 mod orbits;
 mod page;
 mod picture;

@@ -1,6 +1,6 @@
 //! The frame of every figure: title, legend, caption and credits about the room for the plot.
 
-use super::canvas::{Anchor, Area, Canvas, lettering};
+use super::canvas::{Anchor, Area, Canvas, lettering, stroke};
 use super::fonts::{fitted, wrapped};
 use super::ink::Palette;
 use super::legend::{self, Entry};
@@ -60,4 +60,17 @@ pub(super) fn frame(
         y -= CAPTION_LINE;
     }
     Area { left: AIR, top, right: width - AIR, bottom: y - 2.0 }
+}
+
+/// Says in the place of a plot why there is none.
+pub(super) fn say_instead(canvas: &mut Canvas, area: Area, reason: &str, palette: &Palette) {
+    canvas.closed_line(
+        &[[area.left, area.top], [area.right, area.top], [area.right, area.bottom], [area.left, area.bottom]],
+        stroke(palette.hairline, 1.0),
+    );
+    let [x, mut y] = area.centre();
+    for line in wrapped(reason, area.width() - 40.0, TEXT_SIZE, 3) {
+        canvas.text([x, y], &line, lettering(palette.dim, TEXT_SIZE, Anchor::Middle));
+        y += 16.0;
+    }
 }

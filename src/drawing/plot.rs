@@ -4,14 +4,21 @@ use super::canvas::Canvas;
 use super::ink::Look;
 use super::page::{self, Words};
 use super::time_chart::{self, TimeView};
-use super::{legend, life_strip, orbits, picture::Size, sky, spectrum};
+use super::{climate::ClimateFigure, interior, legend, life_strip, orbits, picture::Size, sky, spectrum};
 use crate::figure::curves::Curve;
+use crate::figure::interior::{LayerFigure, LayerScale};
+use crate::figure::light_and_thresholds;
 use crate::figure::orbit_plan::PlanScale;
 use crate::figure::ribbon::LightRange;
-use crate::figure::{Chart, OrbitPlan, Ribbon, Samples, SkyPicture, SkyView, Spectrum, SpectrumView};
+use crate::figure::{
+    Chart, InteriorPicture, LatitudeFigure, LightGauge, OrbitPlan, Ribbon, Samples, SkyPicture, SkyView, Spectrum,
+    SpectrumView,
+};
 use crate::physics::light::VisibleSpectrum;
 use crate::system::planet_light::clear_air;
-use crate::system::{History, Moment, PlanetLight, PlanetState, Starlight, TimeAxis, TimeScale};
+use crate::system::{
+    Air, History, Moment, PlanetLight, PlanetSpecification, PlanetState, Starlight, TimeAxis, TimeScale,
+};
 
 /// Places at which a part of a history is read for a chart.
 const SAMPLES: usize = 900;
@@ -35,6 +42,10 @@ pub enum Plot {
     Orbits(PlanScale),
     /// The sky of a planet.
     Sky,
+    /// The climate of a planet: by latitude, and its starlight against its thresholds.
+    Climate,
+    /// The inside of the star, layer by layer.
+    Interior(LayerScale),
 }
 
 impl Plot {
@@ -50,6 +61,10 @@ impl Plot {
             ("orbits", Self::Orbits(PlanScale::Linear)),
             ("orbits_log", Self::Orbits(PlanScale::Log)),
             ("sky", Self::Sky),
+            ("climate", Self::Climate),
+            ("interior", Self::Interior(LayerScale::Mass)),
+            ("interior_radius", Self::Interior(LayerScale::Radius)),
+            ("interior_radius_log", Self::Interior(LayerScale::RadiusLog)),
         ]);
         plots
     }
@@ -66,8 +81,20 @@ impl Plot {
         match self {
             Self::Curves(curves) if curves.len() > 2 => Size::usual([960, 840]),
             Self::Orbits(_) => Size::usual([800, 840]),
+            Self::Climate | Self::Interior(_) => Size::usual([960, 840]),
             _ => Size::default(),
         }
+    }
+
+    /// Index of the planet it shows where none is chosen: for a climate the first with water, else the first with air;
+    /// failing that, the first.
+    #[must_use]
+    pub fn usual_planet(&self, planets: &[PlanetSpecification]) -> usize {
+        let fits = |planet: &PlanetSpecification| match self {
+            Self::Climate => planet.water.is_some(),
+            _ => planet.air != Air::None,
+        };
+        planets.iter().position(fits).unwrap_or(0)
     }
 
     /// Keys of the methods behind it; `star_life` stands for however the life of this star was computed.
@@ -78,6 +105,10 @@ impl Plot {
             Self::Spectrum => vec!["star_life", "effective_temperature", "spectrum"],
             Self::Orbits(_) => vec!["star_life", "orbit", "habitable_zone"],
             Self::Sky => vec!["star_life", "orbit", "clear_sky"],
+            Self::Climate => {
+                vec!["star_life", "orbit", "insolation", "climate", "carbon_dioxide", "moist_greenhouse", "steam"]
+            }
+            Self::Interior(_) => vec!["star_life", "degeneracy"],
         }
     }
 }
@@ -101,8 +132,8 @@ pub struct Subject<'a> {
     pub title: &'a str,
     /// The moment, yr.
     pub moment_yr: f64,
-    /// Index of the planet whose sky is drawn.
-    pub planet: usize,
+    /// Index of the planet whose sky or climate is drawn; the usual one of the plot if none is chosen.
+    pub planet: Option<usize>,
     /// The scale of time.
     pub scale: TimeScale,
     /// The part of the time axis that is shown, as fractions of it.
@@ -121,12 +152,17 @@ impl<'a> Subject<'a> {
             history,
             title,
             moment_yr,
-            planet: 0,
+            planet: None,
             scale: TimeScale::Paced,
             shown_fractions: [0.0, 1.0],
             spectrum_view: SpectrumView::default(),
             sky_view: SkyView::default(),
         }
+    }
+
+    /// Index of the planet that a plot shows.
+    pub(super) fn planet_of(&self, plot: &Plot) -> usize {
+        self.planet.unwrap_or_else(|| plot.usual_planet(&self.history.system().planets))
     }
 
     pub(super) fn axis(&self) -> TimeAxis {
@@ -157,6 +193,8 @@ pub fn figure_svg(subject: &Subject<'_>, plot: &Plot, size: Size, look: Look, na
         Plot::Spectrum => sheet.spectrum(subject, plot),
         Plot::Orbits(scale) => sheet.orbits(subject, plot, *scale),
         Plot::Sky => sheet.sky(subject, plot),
+        Plot::Climate => sheet.climate(subject, plot),
+        Plot::Interior(scale) => sheet.interior(subject, plot, *scale),
     };
     let description = format!("{}. {}", words.subtitle, words.caption);
     sheet.canvas.document(sheet.units, size_px, &words.title, &description)
@@ -224,17 +262,67 @@ impl Sheet {
     }
 
     fn sky(&mut self, subject: &Subject<'_>, plot: &Plot) -> Words {
+        let planet = subject.planet_of(plot);
         let moment = subject.history.moment(subject.moment_yr);
-        let light = light_on(subject.history, &moment, subject.planet, subject.sky_view);
+        let light = light_on(subject.history, &moment, planet, subject.sky_view);
         let picture = light.as_ref().and_then(|light| SkyPicture::new(light, subject.sky_view));
-        let words = subject.words_of_sky(plot, subject.planet, picture.as_ref());
+        let words = subject.words_of_sky(plot, planet, picture.as_ref());
         let area = self.frame(&words, &[]);
         if let Some(picture) = &picture {
             sky::draw(&mut self.canvas, area, picture, self.look.palette());
         } else {
-            let reason = why_no_sky(&moment, subject.planet);
-            sky::draw_nothing(&mut self.canvas, area, &reason, self.look.palette());
+            let reason = why_no_sky(&moment, planet);
+            page::say_instead(&mut self.canvas, area, &reason, self.look.palette());
         }
+        words
+    }
+
+    fn interior(&mut self, subject: &Subject<'_>, plot: &Plot, scale: LayerScale) -> Words {
+        let palette = self.look.palette();
+        match subject.history.life().profile_at(subject.moment_yr) {
+            Ok(profile) => {
+                let picture = InteriorPicture::new(&profile, scale, &LayerFigure::ALL);
+                let words = subject.words_of_interior(plot, Some(&picture));
+                let area = self.frame(&words, &interior::entries(&picture));
+                interior::draw(&mut self.canvas, area, &picture, palette);
+                words
+            }
+            Err(why) => {
+                let words = subject.words_of_interior(plot, None);
+                let area = self.frame(&words, &[]);
+                page::say_instead(&mut self.canvas, area, &format!("No layers to show: {why}."), palette);
+                words
+            }
+        }
+    }
+
+    fn climate(&mut self, subject: &Subject<'_>, plot: &Plot) -> Words {
+        let palette = self.look.palette();
+        let planet = subject.planet_of(plot);
+        let planets = &subject.history.system().planets;
+        let known = planets.get(planet).zip(subject.history.climate_at(planet, subject.moment_yr));
+        let Some((named, climate)) = known else {
+            let words = subject.words_of_climate(plot, None);
+            let area = self.frame(&words, &[]);
+            page::say_instead(&mut self.canvas, area, "There is no planet with a climate.", palette);
+            return words;
+        };
+        let axis = subject.axis();
+        let [from_fraction, to_fraction] = subject.shown_fractions;
+        let samples = Samples::new(subject.history, &axis, from_fraction, to_fraction, SAMPLES);
+        let figure = ClimateFigure {
+            planet,
+            latitudes: match &climate.latitudes {
+                Ok(belts) => Ok(LatitudeFigure::new(&named.name, &climate, belts)),
+                Err(reason) => Err(format!("No climate by latitude. {}", reason.text())),
+            },
+            gauge: LightGauge::new(&named.name, &climate),
+            chart: light_and_thresholds::chart(subject.history, &samples, planet),
+        };
+        let words = subject.words_of_climate(plot, Some((&named.name, &climate)));
+        let area = self.frame(&words, &figure.entries(palette));
+        let time = TimeView { axis: &axis, from_fraction, to_fraction, moment_yr: subject.moment_yr };
+        figure.draw(&mut self.canvas, area, &time, palette);
         words
     }
 }

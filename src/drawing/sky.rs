@@ -1,9 +1,9 @@
 //! The sky over a planet's horizon to scale: star, half-degree ring, air and ground in their colours.
 
 use super::canvas::{Anchor, Area, Canvas, Stroke, lettering, stroke};
-use super::fonts::{width, wrapped};
+use super::fonts::width;
 use super::ink::{Palette, hex};
-use super::page::{SMALL_SIZE, TEXT_SIZE};
+use super::page::SMALL_SIZE;
 use crate::figure::SkyPicture;
 use crate::figure::sky_picture::{Circle, Magnified, SkyLayout};
 use crate::units::number_text::number;
@@ -30,19 +30,6 @@ pub(super) fn draw(canvas: &mut Canvas, area: Area, picture: &SkyPicture, palett
         &[[area.left, area.top], [area.right, area.top], [area.right, area.bottom], [area.left, area.bottom]],
         stroke(palette.dim, 1.0),
     );
-}
-
-/// Says in the place of the picture why there is none.
-pub(super) fn draw_nothing(canvas: &mut Canvas, area: Area, reason: &str, palette: &Palette) {
-    canvas.closed_line(
-        &[[area.left, area.top], [area.right, area.top], [area.right, area.bottom], [area.left, area.bottom]],
-        stroke(palette.hairline, 1.0),
-    );
-    let [x, mut y] = area.centre();
-    for line in wrapped(reason, area.width() - 40.0, TEXT_SIZE, 3) {
-        canvas.text([x, y], &line, lettering(palette.dim, TEXT_SIZE, Anchor::Middle));
-        y += 16.0;
-    }
 }
 
 fn moved(area: Area, circle: Circle) -> Circle {

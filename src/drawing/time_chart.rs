@@ -312,7 +312,7 @@ impl Places<'_> {
 }
 
 /// How strongly a state is shaded: open water most.
-fn lane_shade(state: PlanetState) -> f64 {
+pub(super) fn lane_shade(state: PlanetState) -> f64 {
     match state {
         PlanetState::Temperate => 0.55,
         PlanetState::Moist => 0.4,

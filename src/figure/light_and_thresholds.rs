@@ -41,7 +41,7 @@ pub fn chart(history: &History, samples: &Samples, index: usize) -> Chart {
     }
     Chart {
         key: "light_and_thresholds",
-        title: "Starlight over the Earth's; shaded: open water lasts; line: ice thaws".to_owned(),
+        title: "Starlight over the Earth's: open water lasts where shaded, ice thaws at the line".to_owned(),
         symbol: "S⊕",
         axis,
         series: vec![planet_series(samples, index, light)],

@@ -4,6 +4,7 @@ use super::history::{History, held, star_point};
 use super::moment::PlanetState;
 use crate::physics::planet::climate::Latitude;
 use crate::physics::planet::history::{LightThresholds, NoLatitudes};
+use crate::units::number_text::number;
 
 /// What there is to say about a planet's climate at a moment.
 #[derive(Clone, Debug, PartialEq)]
@@ -24,6 +25,21 @@ pub struct PlanetClimate {
     pub latitudes: Result<Vec<Latitude>, NoLatitudes>,
     /// The starlight at which the climate turns.
     pub thresholds: Option<LightThresholds>,
+}
+
+impl PlanetClimate {
+    /// State and figures in one line, under a planet's name.
+    #[must_use]
+    pub fn in_words(&self, name: &str) -> String {
+        let mut words = vec![format!("{name}: {}", self.state.name())];
+        words.extend(self.mean_k.map(|mean_k| format!("mean {} K", number(mean_k, 4))));
+        if let Some(line_deg) = self.ice_line_deg.filter(|line_deg| (0.5..89.5).contains(line_deg)) {
+            words.push(format!("ice edge {}°", number(line_deg, 3)));
+        }
+        words.extend(self.ice_fraction.map(|share| format!("ice cover {} %", number(100.0 * share, 2))));
+        words.extend(self.planetary_albedo.map(|share| format!("reflects {} %", number(100.0 * share, 3))));
+        words.join(", ")
+    }
 }
 
 impl History {

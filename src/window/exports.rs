@@ -130,6 +130,8 @@ fn plot_of(workspace: &Workspace) -> Plot {
         Page::Spectrum => Plot::Spectrum,
         Page::Sky => Plot::Sky,
         Page::Orbits => Plot::Orbits(workspace.plan_scale),
+        Page::Climate => Plot::Climate,
+        Page::Interior => Plot::Interior(workspace.layer_scale),
         _ => Plot::LifeStrip,
     }
 }
@@ -140,8 +142,9 @@ fn figure(workspace: &Workspace, extension: String) -> Make {
     let (moment_yr, scale, view) = (workspace.moment_yr, workspace.scale, workspace.view);
     let (spectrum_view, sky_view) = (workspace.spectrum_view, workspace.sky_view);
     let planet = match workspace.selected {
-        Body::Planet(index) => index,
-        Body::Star => 0,
+        Body::Planet(index) => Some(index),
+        // The sky's page shows the first where none is chosen.
+        Body::Star => (plot == Plot::Sky).then_some(0),
     };
     Box::new(move || {
         let subject = Subject {

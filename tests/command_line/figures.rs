@@ -43,13 +43,31 @@ fn the_end_of_a_file_s_name_decides_its_form_and_existing_files_stay() {
 fn what_can_t_be_drawn_is_refused_with_what_can() {
     let finished = crate::program::run(["figure", DEMO, "--plot", "pie"]);
     assert_eq!(finished.code, 2);
-    for name in ["curves", "distance", "spectrum", "life_strip", "orbits_log", "sky"] {
+    for name in ["curves", "distance", "spectrum", "life_strip", "orbits_log", "sky", "climate", "interior"] {
         assert!(finished.messages.contains(name), "{}", finished.messages);
     }
     let words = ["figure", DEMO, "--plot", "sky"];
     assert!(refusal([&words[..], &["--planet", "Nobody"]].concat(), 3).contains("Talune"));
     assert!(refusal([&words[..], &["--size", "60000x60000"]].concat(), 3).contains("16384"));
     assert!(refusal([&words[..], &["--at", "-1Gyr"]].concat(), 3).contains("allowed 0 to"));
+}
+
+#[test]
+fn a_climate_is_that_of_the_planet_named() {
+    let words = ["figure", DEMO, "--plot", "climate", "--at", "4.57Gyr"];
+    let usual = result(words);
+    for part in ["The climate of ", "Surface temperature by latitude, K", "from open water", "ice thaws"] {
+        assert!(usual.contains(part), "{part}");
+    }
+    let named = result([&words[..], &["--planet", "Talune"]].concat());
+    assert!(named.contains("The climate of Talune"));
+    assert!(refusal([&words[..], &["--planet", "Nobody"]].concat(), 3).contains("Talune"));
+}
+
+#[test]
+fn a_star_without_layers_says_why() {
+    let svg = result(["figure", DEMO, "--plot", "interior"]);
+    assert!(svg.contains("No layers to show: this star follows published fits"), "{svg}");
 }
 
 #[test]
@@ -61,7 +79,7 @@ fn every_plot_of_every_built_in_scenario_is_drawn() {
         names.filter(|name| !name.contains("dwarf") && !name.contains("tenth") && !name.contains("late")).collect();
     assert!(names.len() >= 8, "{names:?}");
     for name in names {
-        for plot in ["curves", "mass", "life_strip", "spectrum", "orbits", "sky"] {
+        for plot in ["curves", "mass", "life_strip", "spectrum", "orbits", "sky", "climate", "interior"] {
             let svg = result(["figure", &format!("demo:{name}"), "--plot", plot, "--at", "event:\"largest radius\""]);
             assert!(svg.ends_with("</svg>\n") && svg.len() > 1000, "{name} {plot}");
         }

@@ -32,7 +32,13 @@ fn the_figure_is_the_one_of_the_page_shown() {
     let folder = tempfile::tempdir().expect("a folder");
     let mut driver = Driver::demo();
     driver.enter("Moment", "7 Gyr");
-    for (page, title) in [("Curves", "The life of Veldane"), ("Spectrum", "Spectrum of"), ("Orbits", "Orbits about")] {
+    for (page, title) in [
+        ("Curves", "The life of Veldane"),
+        ("Spectrum", "Spectrum of"),
+        ("Orbits", "Orbits about"),
+        ("Interior", "The inside of"),
+        ("Climate", "The climate of"),
+    ] {
         driver.click(page);
         let path = folder.path().join(format!("{page}.svg"));
         export(&mut driver, "Export figure", &path);

@@ -30,7 +30,12 @@ pub enum FrameSubject {
         view: SkyView,
     },
     /// A plot.
-    Figure(Plot),
+    Figure {
+        /// The plot.
+        plot: Plot,
+        /// Index of the planet that it shows; the usual one of the plot if none is chosen.
+        planet: Option<usize>,
+    },
 }
 
 /// Draws the star: `field_rsun` is the width of the frame, in a dome that of half the sky.

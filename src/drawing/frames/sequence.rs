@@ -87,8 +87,8 @@ impl<'a> FrameSequence<'a> {
                 let moment = self.history.moment(time_yr);
                 Ok(scene::sky(self.history, &moment, *planet, *view, (*shape, *width_px), *is_for_light))
             }
-            FrameSubject::Figure(plot) => {
-                let subject = Subject::new(self.history, self.title, time_yr);
+            FrameSubject::Figure { plot, planet } => {
+                let subject = Subject { planet: *planet, ..Subject::new(self.history, self.title, time_yr) };
                 scene::figure(&subject, plot, *shape, *width_px).map(|raster| (raster, true))
             }
         }
@@ -160,8 +160,14 @@ mod tests {
     #[test]
     fn a_figure_stands_in_front_in_a_dome() {
         let history = history();
-        let sequence =
-            |shape| FrameSequence::new(&history, "A test", choices(FrameSubject::Figure(Plot::LifeStrip), shape), &[]);
+        let sequence = |shape| {
+            FrameSequence::new(
+                &history,
+                "A test",
+                choices(FrameSubject::Figure { plot: Plot::LifeStrip, planet: None }, shape),
+                &[],
+            )
+        };
         let (dome, _) = sequence(Shape::Dome).frame(4.57e9).expect("drawn");
         let lit = |rows: std::ops::Range<usize>| {
             dome.pixels[320 * rows.start..320 * rows.end].iter().filter(|pixel| pixel[0] > 0.05).count()

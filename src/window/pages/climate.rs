@@ -5,7 +5,6 @@ use super::{latitude_plot, light_gauge_view};
 use crate::figure::{LatitudeFigure, LightGauge};
 use crate::system::ticks::ticks;
 use crate::system::{Body, PlanetClimate};
-use crate::units::number_text::number;
 use crate::window::command::Command;
 use crate::window::theme::{GRID, small};
 use crate::window::time_gesture;
@@ -52,7 +51,7 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
     };
     let name = planets[index].name.clone();
     let Some(climate) = workspace.history.climate_at(index, workspace.moment_yr) else { return commands };
-    ui.label(RichText::new(headline(&name, &climate)).color(palette.text));
+    ui.label(RichText::new(climate.in_words(&name)).color(palette.text));
     ScrollArea::vertical().auto_shrink(false).show(ui, |ui| {
         let (width, height) = (ui.available_width(), ui.available_height());
         let gauge = LightGauge::new(&name, &climate);
@@ -80,18 +79,6 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
         }
     });
     commands
-}
-
-/// State and figures in one line.
-fn headline(name: &str, climate: &PlanetClimate) -> String {
-    let mut words = vec![format!("{name}: {}", climate.state.name())];
-    words.extend(climate.mean_k.map(|mean_k| format!("mean {} K", number(mean_k, 4))));
-    if let Some(line_deg) = climate.ice_line_deg.filter(|line_deg| (0.5..89.5).contains(line_deg)) {
-        words.push(format!("ice edge {}°", number(line_deg, 3)));
-    }
-    words.extend(climate.ice_fraction.map(|share| format!("ice cover {} %", number(100.0 * share, 2))));
-    words.extend(climate.planetary_albedo.map(|share| format!("reflects {} %", number(100.0 * share, 3))));
-    words.join(", ")
 }
 
 /// Temperature by latitude, or why there is none.
