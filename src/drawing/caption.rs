@@ -152,6 +152,19 @@ impl Subject<'_> {
         self.words(plot, format!("The inside of {}", self.star_name()), caption)
     }
 
+    /// Keys of the methods behind a plot of this subject.
+    fn methods(&self, plot: &Plot) -> Vec<&'static str> {
+        let has_water = || {
+            let planet = self.history.system().planets.get(self.planet_of(plot));
+            planet.is_some_and(|planet| planet.water.is_some())
+        };
+        match plot {
+            Plot::Climate if !has_water() => vec!["star_life", "orbit", "insolation", "surface_temperature"],
+            Plot::Interior(_) if self.history.life().profile_at(self.moment_yr).is_err() => vec!["star_life"],
+            _ => plot.methods(),
+        }
+    }
+
     /// Program, version, scenario and the names of the methods behind a plot.
     fn credits(&self, plot: &Plot) -> String {
         let mut keys: Vec<&str> = Vec::new();
@@ -163,7 +176,7 @@ impl Subject<'_> {
         let star = &self.history.system().star;
         let life = if WholeLife::needs_structure(star.mass_msun) { "red_dwarf" } else { "star_life" };
         let ends_as_white_dwarf = self.history.spans().iter().any(|span| span.phase.is_white_dwarf());
-        for part in plot.methods() {
+        for part in self.methods(plot) {
             if part == "star_life" {
                 add(life);
                 if ends_as_white_dwarf && life == "star_life" {

@@ -116,7 +116,16 @@ fn the_inside_of_a_star_has_six_panels_and_says_what_is_mixed_in_every_shape() {
             assert!(drawn.chunks_exact(3).any(|pixel| pixel.iter().all(|part| *part < 60)), "ink");
         }
         let words: Vec<String> = interior::entries(&picture).into_iter().map(|entry| entry.words).collect();
-        assert_eq!(words, ["mixed: gas rises and sinks", "Composition: hydrogen", "helium", "helium-3, ten times"]);
+        assert_eq!(
+            words,
+            [
+                "mixed: gas rises and sinks",
+                "Composition: hydrogen",
+                "helium",
+                "helium-3, ten times",
+                "degenerate above"
+            ]
+        );
     }
 }
 

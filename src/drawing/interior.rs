@@ -40,7 +40,11 @@ pub(super) fn entries(picture: &InteriorPicture) -> Vec<Entry> {
             Entry { sample: Sample::Layers(index), words }
         })
     });
-    mixed.into_iter().chain(lines).collect()
+    let levels = picture.panels.iter().filter_map(|panel| {
+        let (_, words) = panel.level?;
+        Some(Entry { sample: Sample::Level, words: words.to_owned() })
+    });
+    mixed.into_iter().chain(lines).chain(levels).collect()
 }
 
 /// The pattern of one of several lines in a panel.
@@ -50,6 +54,11 @@ pub(super) fn line_stroke(index: usize, palette: &Palette) -> Stroke<'_> {
         1 => Stroke { ink: palette.planet(1), width: 1.9, dashes: "7 4" },
         _ => Stroke { ink: palette.planet(0), width: 1.9, dashes: "2 2.5" },
     }
+}
+
+/// The line of a value that divides two regimes.
+pub(super) fn level_stroke(palette: &Palette) -> Stroke<'_> {
+    Stroke { ink: palette.text, width: 1.2, dashes: "1.5 4" }
 }
 
 /// Draws all panels into an area, as many side by side as there is room for.
@@ -77,14 +86,17 @@ pub(super) fn draw(canvas: &mut Canvas, area: Area, picture: &InteriorPicture, p
     canvas.text(at, &name, lettering(palette.text, TEXT_SIZE, Anchor::Middle));
 }
 
-/// The number of columns whose plots come nearest to one and a half times as wide as high.
+/// The number of columns that leaves no gap and whose plots come nearest to a pleasant shape.
 fn columns(area: Area, count: usize) -> usize {
     let most = ((area.width() / LEAST_WIDTH) as usize).clamp(1, count);
     let badness = |columns: usize| {
         let high = (area.height() - AXIS) / count.div_ceil(columns) as f64 - NAME - FOOT;
         ((area.width() / columns as f64 - LEFT - RIGHT) / (1.6 * high.max(1.0))).ln().abs()
     };
-    (1..=most).min_by(|first, second| badness(*first).total_cmp(&badness(*second))).unwrap_or(1)
+    (1..=most)
+        .filter(|columns| count.is_multiple_of(*columns))
+        .min_by(|first, second| badness(*first).total_cmp(&badness(*second)))
+        .unwrap_or(1)
 }
 
 /// Places of one panel.
@@ -109,8 +121,11 @@ impl Places<'_> {
         }
         self.heights(canvas, palette);
         self.places(canvas, palette);
-        if let Some((value, words)) = self.panel.level {
-            self.level(canvas, value, words, palette);
+        if let Some((value, _)) = self.panel.level {
+            let [from, to] = [0.0, 1.0].map(|place| self.point([place, value]));
+            if (plot.top..=plot.bottom).contains(&from[1]) {
+                canvas.line(from, to, level_stroke(palette));
+            }
         }
         canvas.clipped(Area { top: plot.top - 1.0, bottom: plot.bottom + 1.0, ..plot }, |canvas| {
             for (index, line) in self.panel.lines.iter().enumerate() {
@@ -156,24 +171,6 @@ impl Places<'_> {
                 let at = [x, plot.bottom + 16.0];
                 canvas.text(at, &tick.label, lettering(palette.dim, SMALL_SIZE, Anchor::Middle));
             }
-        }
-    }
-
-    /// A value that divides two regimes, named where there is room under its line.
-    fn level(&self, canvas: &mut Canvas, value: f64, words: &str, palette: &Palette) {
-        let [right, y] = self.point([1.0, value]);
-        if !(self.plot.top..=self.plot.bottom).contains(&y) {
-            return;
-        }
-        canvas.line([self.plot.left, y], [right, y], Stroke { ink: palette.dim, width: 1.0, dashes: "1.5 4" });
-        let wide = width(words, SMALL_SIZE, false);
-        if wide + 16.0 < self.plot.width() {
-            let baseline = if y + 16.0 < self.plot.bottom { y + 12.0 } else { y - 4.0 };
-            let left = self.plot.left + 6.0;
-            let plate =
-                Area { left: left - 2.0, top: baseline - 10.0, right: left + wide + 2.0, bottom: baseline + 3.0 };
-            canvas.veil(plate, palette.ground, 0.8);
-            canvas.text([left, baseline], words, lettering(palette.dim, SMALL_SIZE, Anchor::Start));
         }
     }
 }

@@ -35,6 +35,8 @@ pub(super) enum Sample {
     Hatched,
     /// A line of several within one panel of the star's inside.
     Layers(usize),
+    /// A value that divides two regimes.
+    Level,
     /// The moment.
     Moment,
 }
@@ -113,6 +115,7 @@ fn sample(canvas: &mut Canvas, [x, y]: [f64; 2], sample: &Sample, palette: &Pale
             interior::hatch(canvas, area, x, palette);
         }
         Sample::Layers(index) => line(interior::line_stroke(*index, palette)),
+        Sample::Level => line(interior::level_stroke(palette)),
         Sample::Letter(letter) => {
             let place = [x + SAMPLE, y + 4.2];
             canvas.text(place, &letter.to_string(), lettering(palette.dim, SIZE, Anchor::End));
