@@ -134,6 +134,6 @@ fn subject(arguments: &FramesArguments, history: &History) -> Result<FrameSubjec
             FrameSubject::Sky { planet, view }
         }
         FrameSubject::Figure { plot, .. } => FrameSubject::Figure { plot: plot.clone(), planet: named },
-        other => other.clone(),
+        FrameSubject::Star => FrameSubject::Star,
     })
 }
