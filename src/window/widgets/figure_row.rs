@@ -40,8 +40,12 @@ pub(crate) fn figure_row(ui: &mut Ui, palette: &Palette, row: &FigureRow<'_>) ->
     // Three columns: value right-aligned on its unit, unit, spread.
     let value_right = rect.right() - row.unit_room;
     let painter = ui.painter();
-    painter.text(pos2(rect.left(), y), Align2::LEFT_CENTER, row.name, usual(), palette.dim);
-    painter.text(pos2(value_right, y), Align2::RIGHT_CENTER, &row.text, usual(), palette.text);
+    let value = painter.text(pos2(value_right, y), Align2::RIGHT_CENTER, &row.text, usual(), palette.text);
+    let name = painter.layout_no_wrap(row.name.to_owned(), usual(), palette.dim);
+    // A long value next to a long name: the name gives way a little.
+    let is_tight = rect.left() + name.size().x > value.left() - 4.0;
+    let font = if is_tight { small() } else { usual() };
+    painter.text(pos2(rect.left(), y), Align2::LEFT_CENTER, row.name, font, palette.dim);
     painter.text(pos2(value_right + 6.0, y), Align2::LEFT_CENTER, row.symbol, small(), palette.dim);
     if let Some(spread) = &row.spread {
         painter.text(pos2(rect.right(), y), Align2::RIGHT_CENTER, spread, small(), palette.dim);
