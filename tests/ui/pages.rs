@@ -94,7 +94,7 @@ fn the_chronicle_lists_every_event_and_goes_there() {
 #[test]
 fn the_introduction_can_be_read_and_written_over() {
     let mut driver = Driver::demo();
-    driver.click("What to look for");
+    driver.click("Introduction");
     let field = "What to look for in this scenario";
     assert_eq!(driver.text_in(field), driver.workspace().scenario().about);
     driver.the(field).click();

@@ -89,7 +89,7 @@ fn quit_closes_at_once_when_everything_is_saved() {
 #[test]
 fn a_demo_from_the_menu_asks_too() {
     let mut driver = edited();
-    driver.click("What to look for");
+    driver.click("Introduction");
     let scenario = longember::document::built_in::find("eccentric_orbit").expect("built in").scenario().expect("sound");
     driver.the(&scenario.title).scroll_to_me();
     driver.settle();

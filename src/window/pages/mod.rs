@@ -98,7 +98,7 @@ impl Page {
             Self::Chronicle => "Chronicle",
             Self::Statements => "Statements",
             Self::Cues => "Cues",
-            Self::Introduction => "What to look for",
+            Self::Introduction => "Introduction",
             Self::Sources => "Sources",
         }
     }
@@ -109,7 +109,7 @@ pub(super) fn show(ui: &mut Ui, workspace: &mut Workspace) -> Vec<Command> {
     let palette = workspace.palette();
     let mut commands = Vec::new();
     ui.horizontal_wrapped(|ui| {
-        ui.spacing_mut().item_spacing.x = 4.0 * GRID;
+        ui.spacing_mut().item_spacing.x = 2.0 * GRID;
         for page in Page::ALL {
             if word(ui, palette, page.name(), workspace.page == page).clicked() {
                 commands.push(Command::ShowPage(page));
