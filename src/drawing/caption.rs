@@ -9,7 +9,7 @@ use crate::figure::{Chart, InteriorPicture, Owner, SkyPicture, Spectrum};
 use crate::physics::light::Viewing;
 use crate::physics::star::WholeLife;
 use crate::system::provenance::method;
-use crate::system::{Air, PlanetClimate, TimeScale};
+use crate::system::{Air, Moment, PlanetClimate, TimeScale};
 use crate::units::number_text::number;
 use crate::units::time_words::short_span;
 
@@ -78,6 +78,23 @@ impl Subject<'_> {
             scale_words(self.scale)
         );
         self.words(plot, format!("The life of {}", self.star_name()), caption)
+    }
+
+    /// The Hertzsprung-Russell diagram.
+    pub(super) fn words_of_diagram(&self, plot: &Plot, moment: &Moment) -> Words {
+        let star = &moment.star;
+        let at_moment = match (star.effective_temperature_k, star.luminosity_lsun) {
+            (Some(temperature_k), Some(luminosity_lsun)) => {
+                format!("{} K, {} L☉", number(temperature_k, 4), number(luminosity_lsun, 3))
+            }
+            _ => "no light is modelled".to_owned(),
+        };
+        let caption = format!(
+            "The star's whole life as luminosity over effective temperature, hot on the left, in the true colours of a blackbody; rings mark where phases begin. At {}: {}, {at_moment}.",
+            short_span(self.moment_yr),
+            star.phase.name()
+        );
+        self.words(plot, format!("{} on the Hertzsprung-Russell diagram", self.star_name()), caption)
     }
 
     /// The spectrum.

@@ -27,6 +27,10 @@ pub(super) enum Sample {
     Planet(usize),
     /// A planet with its state.
     State(usize, PlanetState),
+    /// A thin neutral line.
+    Thin,
+    /// A dotted neutral line.
+    Dotted,
     /// A band of this colour.
     Band(&'static str),
     /// A letter that stands for the words.
@@ -100,6 +104,8 @@ fn sample(canvas: &mut Canvas, [x, y]: [f64; 2], sample: &Sample, palette: &Pale
     match sample {
         Sample::Star => line(stroke(palette.text, 1.8)),
         Sample::Reference => line(Stroke { ink: palette.dim, width: 1.4, dashes: "5 4" }),
+        Sample::Thin => line(stroke(palette.dim, 1.2)),
+        Sample::Dotted => line(Stroke { ink: palette.dim, width: 1.0, dashes: "2 4" }),
         Sample::TrueColour(colour) => {
             line(stroke(palette.casing, 5.0));
             line(stroke(&super::ink::hex(*colour), 3.0));

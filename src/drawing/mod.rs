@@ -10,6 +10,7 @@ mod checks;
 mod climate;
 pub mod fonts;
 pub mod frames;
+mod hr_diagram;
 mod ink;
 mod interior;
 mod latitudes;

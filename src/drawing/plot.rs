@@ -4,15 +4,15 @@ use super::canvas::Canvas;
 use super::ink::Look;
 use super::page::{self, Words};
 use super::time_chart::{self, TimeView};
-use super::{climate::ClimateFigure, interior, legend, life_strip, orbits, picture::Size, sky, spectrum};
+use super::{climate::ClimateFigure, hr_diagram, interior, legend, life_strip, orbits, picture::Size, sky, spectrum};
 use crate::figure::curves::Curve;
 use crate::figure::interior::{LayerFigure, LayerScale};
 use crate::figure::light_and_thresholds;
 use crate::figure::orbit_plan::PlanScale;
 use crate::figure::ribbon::LightRange;
 use crate::figure::{
-    Chart, InteriorPicture, LatitudeFigure, LightGauge, OrbitPlan, Ribbon, Samples, SkyPicture, SkyView, Spectrum,
-    SpectrumView,
+    Chart, HrDiagram, InteriorPicture, LatitudeFigure, LightGauge, OrbitPlan, Ribbon, Samples, SkyPicture, SkyView,
+    Spectrum, SpectrumView,
 };
 use crate::physics::light::VisibleSpectrum;
 use crate::system::planet_light::clear_air;
@@ -36,6 +36,8 @@ pub enum Plot {
     Curves(Vec<Curve>),
     /// The ribbon of the whole life.
     LifeStrip,
+    /// The Hertzsprung-Russell diagram.
+    HrDiagram,
     /// The star's spectrum.
     Spectrum,
     /// The system from above.
@@ -57,6 +59,7 @@ impl Plot {
         plots.extend(Curve::ALL.into_iter().map(|curve| (curve.key(), Self::Curves(vec![curve]))));
         plots.extend([
             ("life_strip", Self::LifeStrip),
+            ("hr_diagram", Self::HrDiagram),
             ("spectrum", Self::Spectrum),
             ("orbits", Self::Orbits(PlanScale::Linear)),
             ("orbits_log", Self::Orbits(PlanScale::Log)),
@@ -82,6 +85,7 @@ impl Plot {
             Self::Curves(curves) if curves.len() > 2 => Size::usual([960, 840]),
             Self::Orbits(_) => Size::usual([800, 840]),
             Self::Climate | Self::Interior(_) => Size::usual([960, 840]),
+            Self::HrDiagram => Size::usual([960, 800]),
             _ => Size::default(),
         }
     }
@@ -102,6 +106,7 @@ impl Plot {
         match self {
             Self::Curves(curves) => curves.iter().flat_map(|curve| methods_of(*curve)).copied().collect(),
             Self::LifeStrip => vec!["star_life", "blackbody"],
+            Self::HrDiagram => vec!["star_life", "effective_temperature", "blackbody"],
             Self::Spectrum => vec!["star_life", "effective_temperature", "spectrum"],
             Self::Orbits(_) => vec!["star_life", "orbit", "habitable_zone"],
             Self::Sky => vec!["star_life", "orbit", "clear_sky"],
@@ -190,6 +195,7 @@ pub fn figure_svg(subject: &Subject<'_>, plot: &Plot, size: Size, look: Look, na
     let words = match plot {
         Plot::Curves(curves) => sheet.charts(subject, plot, curves),
         Plot::LifeStrip => sheet.life(subject, plot),
+        Plot::HrDiagram => sheet.hr_diagram(subject, plot),
         Plot::Spectrum => sheet.spectrum(subject, plot),
         Plot::Orbits(scale) => sheet.orbits(subject, plot, *scale),
         Plot::Sky => sheet.sky(subject, plot),
@@ -230,6 +236,15 @@ impl Sheet {
         let area = self.frame(&words, &entries);
         let ink = (self.look, self.look.palette());
         life_strip::draw(&mut self.canvas, area, (&ribbon, &entries), subject.history, &time, ink);
+        words
+    }
+
+    fn hr_diagram(&mut self, subject: &Subject<'_>, plot: &Plot) -> Words {
+        let moment = subject.history.moment(subject.moment_yr);
+        let diagram = HrDiagram::new(subject.history);
+        let words = subject.words_of_diagram(plot, &moment);
+        let area = self.frame(&words, &hr_diagram::entries(&diagram));
+        hr_diagram::draw(&mut self.canvas, area, &diagram, &moment, self.look.palette());
         words
     }
 

@@ -127,6 +127,7 @@ type Make = Box<dyn FnOnce() -> Result<Vec<u8>, String> + Send>;
 fn plot_of(workspace: &Workspace) -> Plot {
     match workspace.page {
         Page::Curves if !workspace.curves.is_empty() => Plot::Curves(workspace.curves.clone()),
+        Page::HrDiagram => Plot::HrDiagram,
         Page::Spectrum => Plot::Spectrum,
         Page::Sky => Plot::Sky,
         Page::Orbits => Plot::Orbits(workspace.plan_scale),
