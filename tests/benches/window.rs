@@ -7,6 +7,7 @@ use longember::document::built_in;
 use longember::figure::curves::Curve;
 use longember::figure::{Samples, ribbon::LightRange, ribbon::Ribbon};
 use longember::system::{History, PlanetSpecification, TimeAxis, TimeScale, Water};
+use longember::window::software::Canvas;
 use longember::window::{Command, Edit, Longember};
 use std::hint::black_box;
 use std::ops::ControlFlow;
@@ -88,6 +89,31 @@ fn one_frame(criterion: &mut Criterion) {
     });
 }
 
+/// A whole frame as it reaches the screen without OpenGL, up to the pixels, while the moment is dragged along the strip.
+fn one_painted_frame(criterion: &mut Criterion) {
+    const SIZE: [usize; 2] = [1280, 800];
+    let context = egui::Context::default();
+    let scenario = built_in::demo().scenario().expect("the demo is sound");
+    let mut program = Longember::for_tests(&context, scenario).expect("the demo can be computed");
+    let input = || egui::RawInput {
+        screen_rect: Some(egui::Rect::from_min_size(egui::Pos2::ZERO, egui::vec2(SIZE[0] as f32, SIZE[1] as f32))),
+        ..egui::RawInput::default()
+    };
+    let end_yr = program.workspace.history.shown_until_yr();
+    let mut canvas = Canvas::default();
+    let mut step = 0_u32;
+    let mut frame = || {
+        step = (step + 1) % 1000;
+        program.workspace.moment_yr = end_yr * f64::from(step) / 1000.0;
+        let mut output = context.run_ui(input(), |ui| program.root_ui(ui));
+        let primitives = context.tessellate(output.shapes, output.pixels_per_point);
+        let ground = program.workspace.palette().ground;
+        canvas.paint(SIZE, output.pixels_per_point, ground, &primitives, &mut output.textures_delta);
+        canvas.pixels()[SIZE[0] * SIZE[1] / 2]
+    };
+    criterion.bench_function("one whole frame on the processor, 1280 x 800", |bencher| bencher.iter(&mut frame));
+}
+
 /// One frame right after an edit of one of twenty planets with seas: the edit, and a frame while it is computed elsewhere.
 fn frame_of_an_edit(criterion: &mut Criterion) {
     let context = egui::Context::default();
@@ -119,5 +145,5 @@ fn frame_of_an_edit(criterion: &mut Criterion) {
     });
 }
 
-criterion_group!(benches, edit_to_curves, one_frame, frame_of_an_edit);
+criterion_group!(benches, edit_to_curves, one_frame, one_painted_frame, frame_of_an_edit);
 criterion_main!(benches);

@@ -34,10 +34,12 @@ mod life;
 mod matter;
 mod numbers;
 mod opacity;
+mod star_matter;
 mod structure;
 
 pub use evolution::Resolution;
 pub use life::{
     Caution, ConvectiveError, ConvectiveInput, Ending, Layer, Life, Node, Options, Profile, Stage, SurfaceOpacity,
-    compute, compute_with, profile_at,
+    YoungStar, compute, compute_with, profile_at,
 };
+pub use star_matter::{GasState, StarMatter};

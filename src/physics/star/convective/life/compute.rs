@@ -1,9 +1,7 @@
 //! From the inputs to the whole life.
 
-use super::super::cgs::SOLAR_MASS;
-use super::super::evolution::{LateCooling, Stepper, contracting_star};
-use super::super::matter::Microphysics;
-use super::super::opacity::{Opacity, RadiativeOpacity};
+use super::super::evolution::LateCooling;
+use super::super::opacity::RadiativeOpacity;
 use super::super::structure::{Mesh, Model};
 use super::error::ConvectiveError;
 use super::follow::{follow, stuck};
@@ -12,6 +10,7 @@ use super::node::{Caution, Ending, Life, Node};
 use super::profiles::profile;
 use super::stage::assign;
 use super::track::count_from_arrival;
+use super::young_star::YoungStar;
 use std::ops::ControlFlow;
 
 /// Share of the mass below which a wind is worth a caution.
@@ -55,15 +54,8 @@ pub fn compute_with(
     options: Options,
     progress: &mut dyn FnMut(f64) -> ControlFlow<()>,
 ) -> Result<Life, ConvectiveError> {
-    input.check()?;
-    let composition = input.composition();
-    let tables = RadiativeOpacity::new(composition.metals).ok_or(ConvectiveError::DamagedTable)?;
-    let opacity = Opacity::new(tables, options.surface.molecules());
-    let laws = Microphysics { opacity, cn_ceiling_k: None };
-    let mesh = Mesh::new(input.mass_msun * SOLAR_MASS, options.resolution.spacing());
+    let YoungStar { stepper, model } = YoungStar::new(input, options)?;
     let mass_msun = input.mass_msun;
-    let model = contracting_star(&laws, &mesh, composition).ok_or(ConvectiveError::NoStart { mass_msun })?;
-    let stepper = Stepper { laws, mesh, stride: options.resolution.stride() };
     let followed = follow(stepper, model, mass_msun, progress)?;
 
     let mut cautions = cautions(input, options);

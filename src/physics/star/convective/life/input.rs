@@ -46,7 +46,7 @@ pub struct Options {
 }
 
 impl SurfaceOpacity {
-    pub(super) fn molecules(self) -> MolecularOpacity {
+    pub(in super::super) fn molecules(self) -> MolecularOpacity {
         match self {
             Self::Modern => MODERN_SURFACE,
             Self::Of1997 => SURFACE_1997,
@@ -61,7 +61,7 @@ impl ConvectiveInput {
     pub const METALLICITY_RANGE_DEX: [f64; 2] = [-2.0, 0.29];
 
     /// Checks both inputs.
-    pub(super) fn check(&self) -> Result<(), ConvectiveError> {
+    pub(in super::super) fn check(&self) -> Result<(), ConvectiveError> {
         let inputs = [
             ("mass_msun", self.mass_msun, Self::MASS_RANGE_MSUN),
             ("metallicity_dex", self.metallicity_dex, Self::METALLICITY_RANGE_DEX),
@@ -75,7 +75,7 @@ impl ConvectiveInput {
     }
 
     /// Composition at birth.
-    pub(super) fn composition(&self) -> Composition {
+    pub(in super::super) fn composition(&self) -> Composition {
         let metals = SOLAR_METALS * 10_f64.powf(self.metallicity_dex);
         let helium = PRIMORDIAL_HELIUM + HELIUM_PER_METALS * metals;
         Composition { hydrogen: 1.0 - helium - metals, helium3: HELIUM3_AT_BIRTH, metals }

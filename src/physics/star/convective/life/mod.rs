@@ -9,6 +9,7 @@ mod profile;
 mod profiles;
 mod stage;
 mod track;
+mod young_star;
 
 pub use compute::{compute, compute_with};
 pub use error::ConvectiveError;
@@ -17,3 +18,4 @@ pub use node::{Caution, Ending, Life, Node};
 pub use profile::{Layer, Profile};
 pub use profiles::profile_at;
 pub use stage::Stage;
+pub use young_star::YoungStar;
