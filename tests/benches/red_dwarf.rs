@@ -99,7 +99,7 @@ fn pieces(criterion: &mut Criterion) {
     group.throughput(Throughput::Elements(1));
     let corrections = star.step_corrections().unwrap_or(0);
     let label =
-        format!("one step, two structures of {} shells, {corrections} corrections in the second", star.shells());
+        format!("one step, two structures of {} shells, corrected {corrections} times in the second", star.shells());
     group.bench_function(label, |bencher| bencher.iter(|| black_box(&star).step_corrections()));
     group.finish();
 }
