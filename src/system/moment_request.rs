@@ -79,12 +79,19 @@ fn list(names: &[String]) -> String {
     names.join(", ")
 }
 
+/// A typed text with spaces for line breaks and other control characters, so that no sentence about it is torn.
+#[must_use]
+pub(super) fn on_one_line(text: &str) -> String {
+    text.chars().map(|sign| if sign.is_control() { ' ' } else { sign }).collect()
+}
+
 impl MomentRequest {
     /// Reads the text of a moment: `4.57 Gyr`, `now`, `event:"largest radius"`, `event 'largest radius'`.
     ///
     /// # Errors
     /// [`MomentProblem`] when it is neither a time in the computed range nor the name of something.
     pub fn parse(text: &str) -> Result<Self, MomentProblem> {
+        let text = on_one_line(text);
         let trimmed = text.trim();
         if trimmed.eq_ignore_ascii_case("now") {
             return Ok(Self::Now);

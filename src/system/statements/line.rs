@@ -5,7 +5,7 @@ use super::lookup;
 use super::phrases::{is_quoted, starts_with_words, unquoted};
 use super::quantity::Quantity;
 use super::statement::{During, Relation, Statement, Subject, Tolerance, When};
-use crate::system::moment_request::MomentRequest;
+use crate::system::moment_request::{MomentRequest, on_one_line};
 use crate::system::specification::System;
 use crate::units::entry::{EntryKind, parse_entry};
 use crate::units::number_text::parse_number;
@@ -36,6 +36,7 @@ pub fn parse_saved_statement(line: &str, system: &System) -> Result<Statement, L
 }
 
 fn read(line: &str, system: &System, takes_unknown: bool) -> Result<Statement, LineProblem> {
+    let line = &on_one_line(line);
     let mut cursor = Cursor { line, at: 0 };
     cursor.skip_space();
     if cursor.rest().is_empty() {

@@ -205,3 +205,10 @@ proptest! {
         }
     }
 }
+
+#[test]
+fn a_line_that_is_torn_is_one_line_again() {
+    assert_eq!(canonical("star luminosity\nat 5 Gyr\tis about 1 Lsun"), "star luminosity at 5 Gyr is about 1 Lsun");
+    let torn = parse_statement("star luminosity at ,\n 0 yr is about 1 Lsun", &system()).expect_err("no time");
+    assert!(!torn.to_string().chars().any(char::is_control), "{torn}");
+}

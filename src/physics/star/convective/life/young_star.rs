@@ -13,7 +13,7 @@ const SAFE_STEP: f64 = 0.01;
 
 /// A contracting star whose structure is solved, ready to be followed.
 ///
-/// [`compute`](super::compute) begins with one; by itself it shows what one step costs.
+/// [`compute`](super::compute()) begins with one; by itself it shows what one step costs.
 pub struct YoungStar {
     pub(super) stepper: Stepper,
     pub(super) model: Model,
