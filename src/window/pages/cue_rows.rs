@@ -18,6 +18,9 @@ const LONGEST_MOMENT: usize = 120;
 /// Width of the field for it: room for an event of a planet.
 const MOMENT_WIDTH: f32 = 300.0;
 
+/// Room for the button beside the note, with its air.
+const REMOVE_WIDTH: f32 = 84.0;
+
 /// Draws a cue and returns what it was told.
 pub(super) fn row(ui: &mut Ui, workspace: &Workspace, index: usize) -> Vec<Command> {
     let palette = workspace.palette();
@@ -65,20 +68,22 @@ pub(super) fn row(ui: &mut Ui, workspace: &Workspace, index: usize) -> Vec<Comma
             let moment = MomentRequest::Time(workspace.moment_yr);
             commands.push(change(workspace, index, "moment", move |cue| cue.moment = moment));
         }
+    });
+    if let Some(refusal) = refusal {
+        ui.label(RichText::new(refusal).font(small()).color(palette.error));
+    }
+    ui.horizontal(|ui| {
+        let name = format!("Note of cue {number}");
+        let width = (ui.available_width() - REMOVE_WIDTH).max(80.0);
+        if let Some(note) = text_entry(ui, palette, &name, &cue.note, LONGEST_NOTE, width) {
+            commands.push(change(workspace, index, "note", move |cue| cue.note = note));
+        }
         if button(ui, "Remove", format!("Remove cue {number}"), true) {
             commands.push(edit(format!("Remove cue {number}"), workspace.scenario(), |scenario| {
                 scenario.cues.remove(index);
             }));
         }
     });
-    if let Some(refusal) = refusal {
-        ui.label(RichText::new(refusal).font(small()).color(palette.error));
-    }
-    let name = format!("Note of cue {number}");
-    let width = (ui.available_width() - 12.0).max(80.0);
-    if let Some(note) = text_entry(ui, palette, &name, &cue.note, LONGEST_NOTE, width) {
-        commands.push(change(workspace, index, "note", move |cue| cue.note = note));
-    }
     ui.separator();
     commands
 }
