@@ -7,7 +7,8 @@ use crate::physics::planet::habitable_zone::{ZoneLimit, limit_flux};
 
 /// How the dates and their bands are meant, for people.
 pub const RULE: &str = "Bands of the star's own dates: how well the length of its life is known. Bands of planets: how well \
-                        the starlight that turns them is known, under the star's life as it is computed.";
+                        the starlight that turns them is known, under the star's life as it is computed; of a planet's end \
+                        and its nearest giant, the star's own.";
 
 /// The dates between which an event falls.
 #[derive(Clone, Copy, Debug, PartialEq)]

@@ -5,6 +5,7 @@ use super::events::{Event, EventKind};
 use super::history::History;
 use super::planet_past::{BOILING_K, FREEZING_K, PlanetPast};
 use super::specification::Body;
+use super::star_bands;
 use crate::physics::planet::escape::{SHORELINE_KEPT_BELOW, SHORELINE_LOST_ABOVE};
 use crate::physics::planet::{Caution, ClimateState, OrbitEnd, PlanetEvent, PlanetEventKind};
 use crate::units::constants::SOLAR_RADIUS_AU;
@@ -18,12 +19,17 @@ pub(super) fn push(history: &History, index: usize, events: &mut Vec<Event>) {
     let body = Body::Planet(index);
     let light = LightHistory::of(history, past);
     let shown = past.history().events().iter().filter(|event| event.age_yr <= history.shown_until_yr());
-    events.extend(shown.map(|event| Event {
-        time_yr: event.age_yr,
-        body,
-        kind: EventKind::Planet(event.kind),
-        caution: event.caution,
-        band: light.band(event.age_yr, event.kind).or_else(|| shoreline_band(history, past, event)),
+    events.extend(shown.map(|event| {
+        Event {
+            time_yr: event.age_yr,
+            body,
+            kind: EventKind::Planet(event.kind),
+            caution: event.caution,
+            band: light
+                .band(event.age_yr, event.kind)
+                .or_else(|| shoreline_band(history, past, event))
+                .or_else(|| clock_band(history, event)),
+        }
     }));
     let until_yr = past.end().map_or(history.shown_until_yr(), |(time_yr, _)| time_yr);
     let ages: Vec<f64> = history.life().node_ages_yr().iter().copied().filter(|age_yr| *age_yr < until_yr).collect();
@@ -31,6 +37,13 @@ pub(super) fn push(history: &History, index: usize, events: &mut Vec<Event>) {
     push_nearest_giant(history, past, body, &ages, events);
     push_hottest_climate(history, past, body, &ages, events);
     push_marked(history, past, body, &ages, events);
+}
+
+/// The band of an orbit's end that the star's own change decides: as wide as the length of its life is known. Where
+/// something else is doubtful, the caution says so instead.
+fn clock_band(history: &History, event: &PlanetEvent) -> Option<DateBand> {
+    let ends = matches!(event.kind, PlanetEventKind::Engulfed | PlanetEventKind::TornApart | PlanetEventKind::Unbound);
+    (ends && event.caution.is_none()).then(|| star_bands::of_life(history, event.age_yr)).flatten()
 }
 
 /// The hottest moment of a planet whose climate answers to the star: within one state of the climate more light is
@@ -64,7 +77,8 @@ fn push_hottest_climate(history: &History, past: &PlanetPast, body: Body, ages: 
         .filter_map(read)
         .max_by(|first, second| first.1.total_cmp(&second.1).then(first.2.total_cmp(&second.2)));
     if let Some((time_yr, ..)) = hottest {
-        events.push(Event { time_yr, body, kind: EventKind::HottestSurface, caution: None, band: None });
+        let band = star_bands::of_life(history, time_yr);
+        events.push(Event { time_yr, body, kind: EventKind::HottestSurface, caution: None, band });
     }
 }
 
@@ -163,7 +177,8 @@ fn push_nearest_giant(history: &History, past: &PlanetPast, body: Body, ages: &[
         .min_by(|first, second| first.1.total_cmp(&second.1));
     if let Some((time_yr, _)) = nearest.filter(|(_, ratio)| *ratio < NEAR_WITHIN) {
         let caution = past.history().orbit_caution();
-        events.push(Event { time_yr, body, kind: EventKind::GiantNearest, caution, band: None });
+        let band = if caution.is_none() { star_bands::of_life(history, time_yr) } else { None };
+        events.push(Event { time_yr, body, kind: EventKind::GiantNearest, caution, band });
     }
 }
 
@@ -279,5 +294,18 @@ mod tests {
         };
         assert!(locked_yr(Some(5.0)) > locked_yr(None) && locked_yr(None) > locked_yr(Some(200.0)));
         assert_eq!(locked_yr(None), locked_yr(Some(24.0)));
+    }
+
+    #[test]
+    fn a_planet_s_end_by_the_giant_is_dated_as_well_as_the_giant() {
+        let star = crate::system::StarSpecification::default();
+        let planet = PlanetSpecification { semi_major_axis_au: 0.25, ..PlanetSpecification::default() };
+        let history = History::compute(crate::system::System { star, planets: vec![planet] }).expect("computed");
+        let engulfed = EventKind::Planet(PlanetEventKind::Engulfed);
+        let event = history.events().iter().find(|event| event.kind == engulfed).expect("it is swallowed");
+        assert_eq!(event.band.is_some(), event.caution.is_none());
+        if let Some(DateBand { earliest_yr: Some(earliest_yr), latest_yr: Some(latest_yr) }) = event.band {
+            assert!(earliest_yr < event.time_yr && latest_yr > event.time_yr, "{event:?}");
+        }
     }
 }
